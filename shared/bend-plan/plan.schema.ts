@@ -1,0 +1,119 @@
+import { z } from 'zod'
+import { foldSchema } from '#shared/strip/strip.schema'
+
+/** The tests of one fold, in the order in which they are made. */
+export const PLAN_CHECKS = [
+  'direction',
+  'hemSide',
+  'policy',
+  'angle',
+  'flange',
+  'clamp',
+  'throat',
+  'gauge',
+] as const
+
+/** Reasons that hold for the whole piece on a brake, before any fold is looked at. */
+export const PIECE_CHECKS = ['length', 'thickness', 'metal'] as const
+
+export const planCheckSchema = z.enum(PLAN_CHECKS)
+export const reasonCodeSchema = z.enum([...PIECE_CHECKS, ...PLAN_CHECKS, 'noOrder', 'limit'])
+
+/** Compared in this order; integers. */
+export const planCostSchema = z.strictObject({
+  handling: z.int().nonnegative(),
+  wideFront: z.int().nonnegative(),
+  faceGauge: z.int().nonnegative(),
+})
+
+export const gaugeRestSchema = z.enum(['rawEdge', 'hem', 'formedFace'])
+
+/** What is done with the whole piece before a hit. */
+export const moveSchema = z.enum(['load', 'none', 'roll', 'endForEnd', 'both'])
+
+export const planStepSchema = z.strictObject({
+  bend: foldSchema,
+  leftUp: z.boolean(),
+  aBack: z.boolean(),
+  /** The move of the whole piece before this hit; `load` for the first. */
+  move: moveSchema,
+  direction: z.enum(['up', 'down']),
+  /** Degrees of bend of the finished fold; 180 for a hem. */
+  angle: z.number(),
+  /** Degrees the brake must swing, springback included; hemAngle for a hem's first hit. */
+  swing: z.number(),
+  /** 2 for a hem (fold, then flatten), otherwise 1. */
+  hits: z.int().positive(),
+  /** The model's gauge distance in inches; null on a brake without a gauge. */
+  gauge: z.number().nullable(),
+  /** What the gauge rests on; null on a brake without a gauge. */
+  restsOn: gaugeRestSchema.nullable(),
+})
+
+export const planReasonSchema = z.strictObject({
+  code: reasonCodeSchema,
+  /** The fold concerned; null where the whole piece is. */
+  bend: foldSchema.nullable(),
+  /** What was found and the limit it breaks, in the unit of the check (inches or degrees). */
+  found: z.number().nullable(),
+  limit: z.number().nullable(),
+})
+
+/** A change that was planned again and bends; offered, never applied by itself. */
+export const planCureSchema = z.strictObject({
+  code: z.enum([
+    'lengthenLeg',
+    'shortenLeg',
+    'openAngle',
+    'changeHem',
+    'dropHem',
+    'shortenPiece',
+    'anotherBrake',
+  ]),
+  bend: foldSchema.nullable(),
+  value: z.number().nullable(),
+})
+
+/** Centre-line legs to sharp corners and signed turns, as the planner sees the piece. */
+export const sectionSchema = z.strictObject({
+  legs: z.array(z.number().positive()).min(1),
+  turns: z.array(z.number()),
+  hemA: z
+    .strictObject({
+      lip: z.number().positive(),
+      gap: z.number().nonnegative(),
+      turn: z.union([z.literal(1), z.literal(-1)]),
+    })
+    .nullable(),
+  hemB: z
+    .strictObject({
+      lip: z.number().positive(),
+      gap: z.number().nonnegative(),
+      turn: z.union([z.literal(1), z.literal(-1)]),
+    })
+    .nullable(),
+})
+
+export const planSchema = z.strictObject({
+  feasible: z.boolean(),
+  /** True when no cheaper sequence (or, if infeasible, no sequence at all) exists under the checks made. */
+  proven: z.boolean(),
+  cost: planCostSchema.nullable(),
+  lowerBound: planCostSchema.nullable(),
+  steps: z.array(planStepSchema),
+  section: sectionSchema,
+  reasons: z.array(planReasonSchema),
+  cures: z.array(planCureSchema),
+  /** Which tests of a fold were made: the screen says so. */
+  checks: z.array(planCheckSchema),
+})
+
+export type PlanCheck = z.infer<typeof planCheckSchema>
+export type ReasonCode = z.infer<typeof reasonCodeSchema>
+export type PlanCost = z.infer<typeof planCostSchema>
+export type PlanStep = z.infer<typeof planStepSchema>
+export type PlanReason = z.infer<typeof planReasonSchema>
+export type PlanCure = z.infer<typeof planCureSchema>
+export type PieceMove = z.infer<typeof moveSchema>
+export type Section = z.infer<typeof sectionSchema>
+export type Plan = z.infer<typeof planSchema>

@@ -1,0 +1,75 @@
+/**
+ * A drawing as data: shapes with roles, in the pixels (or points) of a frame whose origin is its
+ * top left corner, y down. Konva, SVG and paper draw the same list; only the colors of the roles
+ * differ by theme.
+ */
+
+export interface Point {
+  readonly x: number
+  readonly y: number
+}
+
+/** What a shape means; a renderer maps it to a color of the theme. */
+export type Role =
+  | 'metal'
+  | 'bare'
+  | 'paint'
+  | 'dimension'
+  | 'dimensionText'
+  | 'angleText'
+  | 'edge'
+  | 'strip'
+  | 'crease'
+  | 'hemHatch'
+  | 'selected'
+  | 'problem'
+  | 'tool'
+  | 'ghost'
+
+/** The part of the piece that a shape stands for, so that a touch on one view lights the other. */
+export type Part =
+  | { readonly kind: 'leg'; readonly leg: number }
+  | { readonly kind: 'bend'; readonly bend: number }
+  | { readonly kind: 'hem'; readonly edge: 'A' | 'B' }
+  | { readonly kind: 'edge'; readonly edge: 'A' | 'B' }
+
+interface Shape {
+  readonly role: Role
+  readonly part?: Part
+}
+
+/** An open or closed chain of straight segments. `width` is the stroke, 0 for none. */
+export interface PathShape extends Shape {
+  readonly kind: 'path'
+  readonly points: readonly Point[]
+  readonly closed: boolean
+  readonly width: number
+  readonly filled: boolean
+  readonly dash?: readonly number[]
+}
+
+export interface CircleShape extends Shape {
+  readonly kind: 'circle'
+  readonly center: Point
+  readonly radius: number
+  readonly width: number
+  readonly filled: boolean
+}
+
+/** One line of text, centred on `at`, turned clockwise by `rotation` degrees. */
+export interface TextShape extends Shape {
+  readonly kind: 'text'
+  readonly at: Point
+  readonly text: string
+  readonly size: number
+  readonly rotation: number
+  readonly bold: boolean
+}
+
+export type DisplayItem = PathShape | CircleShape | TextShape
+
+export interface DisplayList {
+  readonly width: number
+  readonly height: number
+  readonly items: readonly DisplayItem[]
+}
