@@ -1,0 +1,88 @@
+import type { Hem, Profile } from '#shared/profile/profile.schema'
+import type { Sheet } from '#shared/stock/stock.schema'
+import type { BendShape } from '#shared/strip/bend-allowance'
+import { bendAllowance, outsideSetback } from '#shared/strip/bend-allowance'
+import type { Fold } from '#shared/strip/strip.schema'
+import type { Inches } from '#shared/units/brands'
+
+/** A flat run of the sheet between two bend zones, or between a zone and an edge. */
+export interface FlatRun {
+  /** Leg number from 1 at edge A, or a hem's lip. */
+  readonly of: number | 'lipA' | 'lipB'
+  /** The outside dimension it comes from. */
+  readonly outside: Inches
+  /** What is left of it between the bend zones; negative where the bends eat more than there is. */
+  readonly straight: Inches
+}
+
+export interface FlatFold extends BendShape {
+  readonly fold: Fold
+  readonly allowance: Inches
+  readonly setback: Inches
+}
+
+/** The strip from edge A to edge B: run, fold, run, fold … run. */
+export interface FlatParts {
+  readonly runs: readonly FlatRun[]
+  readonly folds: readonly FlatFold[]
+}
+
+/**
+ * The inside radius of a hem's fold in inches. A closed hem is folded on itself; an open one
+ * goes round its gap.
+ */
+export const hemRadius = (hem: Hem): Inches => (hem.style === 'closed' ? 0 : hem.gap / 2)
+
+const flatFold = (fold: Fold, bend: BendShape): FlatFold => ({
+  ...bend,
+  fold,
+  allowance: bendAllowance(bend),
+  setback: outsideSetback(bend),
+})
+
+/**
+ * A hem counts as a bend of 180 towards its lip. A closed one has K = 0.5, which gives the shop's
+ * old rule by itself: 2 T - π T / 2 = 0.43 T off the sum.
+ */
+const hemFold = (fold: 'hemA' | 'hemB', hem: Hem, sheet: Sheet): FlatFold =>
+  flatFold(fold, {
+    turn: 180 * hem.turn,
+    insideRadius: hemRadius(hem),
+    thickness: sheet.thickness,
+    kFactor: hem.style === 'closed' ? 0.5 : sheet.kFactor,
+  })
+
+/**
+ * Cuts a profile into its flat runs and bend zones, from edge A to edge B. Each outside dimension
+ * loses the setback of the fold at either end; a hem's lip has one fold, a leg with a hem has the
+ * hem's fold at that end. Sign conventions are the profile's: a positive turn goes left.
+ *
+ * Nothing is checked here: a profile that cannot be made gives runs with a negative `straight`,
+ * which `profileProblems` reports.
+ */
+export const flatParts = (profile: Profile, sheet: Sheet): FlatParts => {
+  const { hemA, hemB } = profile
+  const folds = [
+    ...(hemA ? [hemFold('hemA', hemA, sheet)] : []),
+    ...profile.bends.map((bend, index) =>
+      flatFold(index + 1, {
+        turn: bend.turn,
+        insideRadius: sheet.insideRadius,
+        thickness: sheet.thickness,
+        kFactor: sheet.kFactor,
+      }),
+    ),
+    ...(hemB ? [hemFold('hemB', hemB, sheet)] : []),
+  ]
+  const dimensions: { of: FlatRun['of']; outside: Inches }[] = [
+    ...(hemA ? [{ of: 'lipA' as const, outside: hemA.length }] : []),
+    ...profile.legs.map((outside, index) => ({ of: index + 1, outside })),
+    ...(hemB ? [{ of: 'lipB' as const, outside: hemB.length }] : []),
+  ]
+  const runs = dimensions.map(({ of, outside }, index) => {
+    const before = folds[index - 1]?.setback ?? 0
+    const after = folds[index]?.setback ?? 0
+    return { of, outside, straight: outside - before - after }
+  })
+  return { runs, folds }
+}
