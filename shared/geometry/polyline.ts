@@ -1,0 +1,45 @@
+import type { Segment } from './segment'
+import { distanceToPoint, segment } from './segment'
+import type { Vector } from './vector'
+import { add, cross, distance, scale, vector } from './vector'
+
+export const segmentsOf = (points: readonly Vector[], closed = false): Segment[] => {
+  const segments: Segment[] = []
+  points.forEach((point, index) => {
+    const next = points[index + 1] ?? (closed ? points[0] : undefined)
+    if (next !== undefined) segments.push(segment(point, next))
+  })
+  return segments
+}
+
+export const pathLength = (points: readonly Vector[]): number =>
+  segmentsOf(points).reduce((sum, s) => sum + distance(s.from, s.to), 0)
+
+/** Signed area of a closed chain: positive when it runs counter-clockwise. */
+export const areaOf = (polygon: readonly Vector[]): number =>
+  segmentsOf(polygon, true).reduce((sum, s) => sum + cross(s.from, s.to), 0) / 2
+
+/** Centroid of the area of a closed chain that does not cross itself. */
+export const centroidOf = (polygon: readonly Vector[]): Vector => {
+  const area = areaOf(polygon)
+  if (area === 0) throw new RangeError('A polygon without area has no centroid.')
+  const sum = segmentsOf(polygon, true).reduce(
+    (total, s) => add(total, scale(add(s.from, s.to), cross(s.from, s.to))),
+    vector(0, 0),
+  )
+  return scale(sum, 1 / (6 * area))
+}
+
+/** Infinity for a chain without segments. */
+export const distanceToPath = (points: readonly Vector[], point: Vector): number =>
+  Math.min(Infinity, ...segmentsOf(points).map((s) => distanceToPoint(s, point)))
+
+/** Without the points that repeat the one before them. */
+export const withoutRepeats = (points: readonly Vector[], tolerance = 1e-12): Vector[] => {
+  const kept: Vector[] = []
+  for (const point of points) {
+    const last = kept.at(-1)
+    if (last === undefined || distance(last, point) > tolerance) kept.push(point)
+  }
+  return kept
+}

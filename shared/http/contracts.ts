@@ -1,0 +1,36 @@
+import * as brakes from '#shared/brakes/brakes.contract'
+import * as bundles from '#shared/bundles/bundles.contract'
+import * as handOff from '#shared/hand-off/hand-off.contract'
+import type { Endpoint } from '#shared/http/endpoint'
+import * as jobs from '#shared/jobs/jobs.contract'
+import * as orders from '#shared/orders/orders.contract'
+import * as people from '#shared/people/people.contract'
+import * as lookup from '#shared/pieces/lookup.contract'
+import * as pieces from '#shared/pieces/pieces.contract'
+import * as plans from '#shared/plans/plans.contract'
+import * as runs from '#shared/runs/runs.contract'
+import * as shelf from '#shared/shelf/shelf.contract'
+import * as stock from '#shared/stock/stock.contract'
+
+const isEndpoint = (value: unknown): value is Endpoint =>
+  typeof value === 'object' &&
+  value !== null &&
+  'permission' in value &&
+  'answer' in value &&
+  'path' in value
+
+/** Every endpoint of the API: the API document and the permission test walk this list. */
+export const ENDPOINTS: readonly Endpoint[] = [
+  people,
+  jobs,
+  shelf,
+  stock,
+  brakes,
+  plans,
+  orders,
+  pieces,
+  lookup,
+  runs,
+  bundles,
+  handOff,
+].flatMap((contract) => Object.values<unknown>(contract).filter(isEndpoint))
