@@ -1,0 +1,60 @@
+import type { Knex } from 'knex'
+import type { BrakeInsert, BrakeRow, BrakeUpdate } from './brakes'
+import type { BundleInsert, BundleRow, BundleUpdate } from './bundles'
+import type { CompanyInsert, CompanyRow, CompanyUpdate } from './companies'
+import type { HandOffInsert, HandOffRow } from './hand-offs'
+import type {
+  IdempotencyKeyInsert,
+  IdempotencyKeyRow,
+  IdempotencyKeyUpdate,
+} from './idempotency-keys'
+import type { JobInsert, JobRow, JobUpdate } from './jobs'
+import type { LiveEventInsert, LiveEventRow } from './live-events'
+import type { OrderEventInsert, OrderEventRow } from './order-events'
+import type { OrderLineInsert, OrderLineRow, OrderLineUpdate } from './order-lines'
+import type { OrderStateRow } from './order-states'
+import type { OrderInsert, OrderRow, OrderUpdate } from './orders'
+import type { PersonInsert, PersonTableRow, PersonUpdate } from './people'
+import type {
+  PieceEventInsert,
+  PieceEventRow,
+  PieceInsert,
+  PieceMoveRow,
+  PieceRow,
+  PieceUpdate,
+} from './pieces'
+import type { RateLimitRow } from './rate-limits'
+import type { RunInsert, RunRow, RunUpdate } from './runs'
+import type { SessionRow } from './sessions'
+import type { ShelfProfileInsert, ShelfProfileRow, ShelfProfileUpdate } from './shelf-profiles'
+import type { StockInsert, StockRow, StockUpdate } from './stocks'
+
+/** Knex itself checks table and column names against these types. */
+declare module 'knex/types/tables' {
+  interface Tables {
+    companies: Knex.CompositeTableType<CompanyRow, CompanyInsert, CompanyUpdate>
+    people: Knex.CompositeTableType<PersonTableRow, PersonInsert, PersonUpdate>
+    sessions: SessionRow
+    rate_limits: RateLimitRow
+    idempotency_keys: Knex.CompositeTableType<
+      IdempotencyKeyRow,
+      IdempotencyKeyInsert,
+      IdempotencyKeyUpdate
+    >
+    live_events: Knex.CompositeTableType<LiveEventRow, LiveEventInsert>
+    stocks: Knex.CompositeTableType<StockRow, StockInsert, StockUpdate>
+    brakes: Knex.CompositeTableType<BrakeRow, BrakeInsert, BrakeUpdate>
+    jobs: Knex.CompositeTableType<JobRow, JobInsert, JobUpdate>
+    shelf_profiles: Knex.CompositeTableType<ShelfProfileRow, ShelfProfileInsert, ShelfProfileUpdate>
+    orders: Knex.CompositeTableType<OrderRow, OrderInsert, OrderUpdate>
+    order_lines: Knex.CompositeTableType<OrderLineRow, OrderLineInsert, OrderLineUpdate>
+    order_events: Knex.CompositeTableType<OrderEventRow, OrderEventInsert>
+    order_states: OrderStateRow
+    runs: Knex.CompositeTableType<RunRow, RunInsert, RunUpdate>
+    bundles: Knex.CompositeTableType<BundleRow, BundleInsert, BundleUpdate>
+    hand_offs: Knex.CompositeTableType<HandOffRow, HandOffInsert>
+    pieces: Knex.CompositeTableType<PieceRow, PieceInsert, PieceUpdate>
+    piece_events: Knex.CompositeTableType<PieceEventRow, PieceEventInsert>
+    piece_moves: PieceMoveRow
+  }
+}
