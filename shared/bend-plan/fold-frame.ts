@@ -45,7 +45,10 @@ const runsOf = (piece: Workpiece, bend: PieceBend, side: Side, made: number) => 
     else if (next.hem === null) turns.push({ turn: next.turn, run: leg })
     else if (next.hem.open) {
       const quarter = next.turn / 2
-      turns.push({ turn: quarter, run: next.hem.gap + piece.thickness }, { turn: quarter, run: leg })
+      turns.push(
+        { turn: quarter, run: next.hem.gap + piece.thickness },
+        { turn: quarter, run: leg },
+      )
     }
   }
   return { firstRun, developed, turns }
@@ -66,7 +69,7 @@ export const chainOf = (
   const { firstRun, developed, turns } = runsOf(piece, bend, side, made)
   const sign = Math.sign(bend.turn) * (place === 'front' ? 1 : -1)
   let angle = place === 'front' ? 0 : 180
-  let point = place === 'front' ? { x: firstRun, y: 0 } : { x: -firstRun, y: 0 }
+  let point = place === 'front' ? { x: firstRun, y: 0 } : { x: 0 - firstRun, y: 0 }
   const points: Vector[] = [ORIGIN, point]
   for (const { turn, run } of turns) {
     angle += turn * sign

@@ -1,0 +1,12 @@
+import { isLess } from '#shared/geometry/tolerance'
+import type { FoldTest } from './fold-test'
+
+/** Straight sheet behind the bend line for the clamp to hold, hems too. */
+export const clamp: FoldTest = {
+  check: 'clamp',
+  sees: 'rear',
+  find: ({ rear, brake }) =>
+    isLess(rear.firstRun, brake.minClamp)
+      ? { found: rear.firstRun, limit: brake.minClamp }
+      : undefined,
+}

@@ -1,0 +1,21 @@
+import type { PlanCheck } from '../plan.schema'
+import type { FoldSetup } from '../fold-setup'
+
+/** What was found and the limit it breaks, in the unit of the check; null where there is no figure. */
+export interface FoldFailure {
+  readonly found: number | null
+  readonly limit: number | null
+}
+
+export interface FoldTest {
+  readonly check: PlanCheck
+  /**
+   * What the answer depends on besides bend and orientation, so that it can be remembered: nothing,
+   * the bends made on one side, or all bends made.
+   */
+  readonly sees: 'bend' | 'front' | 'rear' | 'all'
+  /** Undefined when the fold may be made. */
+  readonly find: (setup: FoldSetup) => FoldFailure | undefined
+}
+
+export const NO_FIGURE: FoldFailure = { found: null, limit: null }

@@ -1,0 +1,12 @@
+import { isAtMost } from '#shared/geometry/tolerance'
+import type { FoldTest } from './fold-test'
+
+/** The depth of the rear chain must find room behind the clamp. */
+export const throat: FoldTest = {
+  check: 'throat',
+  sees: 'rear',
+  find: ({ rear, brake }) => {
+    const depth = -Math.min(...rear.points.map((point) => point.x))
+    return isAtMost(depth, brake.throat) ? undefined : { found: depth, limit: brake.throat }
+  },
+}

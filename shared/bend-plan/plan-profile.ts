@@ -1,0 +1,25 @@
+import type { Profile } from '#shared/profile/profile.schema'
+import type { Sheet } from '#shared/stock/stock.schema'
+import type { Inches } from '#shared/units/brands'
+import type { Brake } from './brake.schema'
+import type { Plan } from './plan.schema'
+import { planBends } from './planner'
+import { sectionOf } from './section'
+
+/**
+ * Plans a profile as the crew draws it. Throws RangeError where the profile has a leg shorter than its
+ * bends consume: ask for the profile's problems first.
+ */
+export const planProfile = (
+  profile: Profile,
+  sheet: Sheet,
+  brake: Brake,
+  pieceLength: Inches,
+): Plan =>
+  planBends({
+    section: sectionOf(profile, sheet),
+    sheet,
+    brake,
+    pieceLength,
+    paintedSide: profile.colorSide,
+  })

@@ -1,0 +1,17 @@
+import type { Sheet } from '#shared/stock/stock.schema'
+import type { ColorSide } from '#shared/profile/profile.schema'
+import type { Inches } from '#shared/units/brands'
+import type { Brake } from './brake.schema'
+import type { Section } from './plan.schema'
+
+export interface PlanRequest {
+  readonly section: Section
+  readonly sheet: Sheet
+  readonly brake: Brake
+  readonly pieceLength: Inches
+  readonly paintedSide: ColorSide
+  readonly limits?: {
+    /** Folds looked at by each search before it answers with the best so far. */
+    readonly nodes?: number
+  }
+}

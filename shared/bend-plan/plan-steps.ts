@@ -1,0 +1,35 @@
+import { foldSetup } from './fold-setup'
+import type { FoldGround } from './fold-setup'
+import { gaugeDistance, restsOn } from './gauge-stop'
+import { getOrientation, moveBetween, rearSide } from './orientation'
+import type { Orientation } from './orientation'
+import type { PlanStep } from './plan.schema'
+import type { Operation } from './search-ground'
+
+/** A sequence as the steps a bender reads. */
+export const planSteps = (ground: FoldGround, operations: readonly Operation[]): PlanStep[] => {
+  let made = 0
+  let before: Orientation | undefined
+  return operations.map((operation) => {
+    const bend = ground.piece.bends[operation.bend]
+    if (bend === undefined) throw new RangeError(`No bend ${operation.bend}.`)
+    const orientation = getOrientation(operation.orientation)
+    const setup = foldSetup(ground, made, bend, orientation)
+    const isGauged = ground.brake.gauge !== null
+    const step: PlanStep = {
+      bend: bend.fold,
+      leftUp: orientation.leftUp,
+      aBack: orientation.aBack,
+      move: before === undefined ? 'load' : moveBetween(before, orientation),
+      direction: setup.direction,
+      angle: Math.abs(bend.turn),
+      swing: setup.swing,
+      hits: bend.hem === null ? 1 : 2,
+      gauge: isGauged ? gaugeDistance(setup.rear) : null,
+      restsOn: isGauged ? restsOn(ground.piece, bend, rearSide(orientation), made) : null,
+    }
+    before = orientation
+    made |= 1 << bend.index
+    return step
+  })
+}

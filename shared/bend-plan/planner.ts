@@ -1,0 +1,94 @@
+import { createFeasibility } from './feasibility'
+import { firstOfEquals } from './first-of-equals'
+import type { FoldGround } from './fold-setup'
+import { FOLD_TESTS } from './fold-tests/fold-tests'
+import { createLowerBound } from './lower-bound'
+import { operationCost } from './operation-cost'
+import { orientOrder } from './orient-order'
+import { unpackCost } from './packed-cost'
+import type { Plan, PlanReason } from './plan.schema'
+import { deadEndReasons, flatSheetReasons, pieceReasons } from './plan-reasons'
+import type { PlanRequest } from './plan-request'
+import { planSteps } from './plan-steps'
+import type { SearchGround } from './search-ground'
+import { searchSequence } from './sequence-search'
+import { searchSets } from './set-search'
+import { workpieceOf } from './workpiece'
+
+export type { PlanRequest } from './plan-request'
+
+/** Enough for any panel of twenty bends; a search that reaches it answers with the best so far. */
+const DEFAULT_NODES = 2_000_000
+
+const searchGround = (request: PlanRequest): SearchGround => {
+  const { section, sheet, brake, pieceLength, limits } = request
+  const ground: FoldGround = { piece: workpieceOf(section, sheet.thickness), sheet, brake }
+  const cost = operationCost(ground, pieceLength)
+  return {
+    ...ground,
+    cost,
+    feasibility: createFeasibility(ground),
+    lowerBound: createLowerBound(ground, cost),
+    nodes: limits?.nodes ?? DEFAULT_NODES,
+  }
+}
+
+/**
+ * The cheapest order and orientation in which the section bends on the brake, or the reasons why
+ * there is none. Exact under the tests named in `checks`: `proven` says that no cheaper sequence (or,
+ * if infeasible, no sequence at all) exists. At the limit on nodes the best so far comes back with
+ * `proven: false` and the lower bound; with none found, `feasible: false` and the reason `limit`.
+ * The same request gives the same answer to the byte.
+ *
+ * Throws RangeError where turns and legs of the section do not match or there are too many bends.
+ */
+export const planBends = (request: PlanRequest): Plan => {
+  const { section } = request
+  const checks = FOLD_TESTS.map((test) => test.check)
+  const infeasible = (reasons: PlanReason[]): Plan => ({
+    feasible: false,
+    proven: true,
+    cost: null,
+    lowerBound: null,
+    steps: [],
+    section,
+    reasons,
+    cures: [],
+    checks,
+  })
+
+  const ground = searchGround(request)
+  const whole = pieceReasons(request)
+  if (whole.length > 0) return infeasible(whole)
+
+  const sets = searchSets(ground)
+  if (sets.outcome === 'none') {
+    const flat = flatSheetReasons(ground.piece, ground.feasibility)
+    return infeasible(
+      flat.length > 0 ? flat : deadEndReasons(ground.piece, ground.feasibility, sets.deadEnd),
+    )
+  }
+  if (sets.outcome === 'limit') {
+    const limit: PlanReason = { code: 'limit', bend: null, found: null, limit: ground.nodes }
+    return { ...infeasible([limit]), proven: false }
+  }
+
+  const known = orientOrder(ground, sets.order)
+  if (known === undefined) throw new Error('An order that was found bendable has no orientations.')
+  const search = searchSequence(ground, known)
+  const best = search.best ?? known
+  const chosen = search.proven
+    ? firstOfEquals(ground, best, search.findRest, request.paintedSide)
+    : best
+  return {
+    feasible: true,
+    proven: search.proven,
+    cost: unpackCost(chosen.cost),
+    lowerBound: unpackCost(search.lowerBound),
+    steps: planSteps(ground, chosen.operations),
+    section,
+    reasons: [],
+    cures: [],
+    checks,
+  }
+}

@@ -1,0 +1,91 @@
+import { bitCount } from './bit-count'
+import { createHeap } from './heap'
+import type { Sequence } from './orient-order'
+import { ORIENTATIONS, isOrientationOpen } from './orientation'
+import type { Operation, SearchGround } from './search-ground'
+import { allBends } from './workpiece'
+import type { PieceBend } from './workpiece'
+
+export interface SequenceSearch {
+  /** The cheapest sequence; undefined when nothing better than the given one was found. */
+  readonly best: Sequence | undefined
+  /** Packed; equals the best cost when the search ran to its end. */
+  readonly lowerBound: number
+  readonly proven: boolean
+  /** Cheapest way to finish from a made set whose next fold is made in an orientation, where known. */
+  readonly findRest: (made: number, orientation: number) => number | undefined
+}
+
+/** Room for the number of bends left beside the cost in one sort key: the deeper node goes first. */
+const DEPTH = 32
+
+/**
+ * Cheapest sequence by A* backwards from the finished piece. A state is (made set, orientation of the
+ * fold made next). A fold is tested when it is taken from the queue, not when it is put there. The
+ * bound is consistent, so the first way into a state whose fold passes is its cheapest.
+ *
+ * `known` is a sequence found before; only cheaper ones are looked for.
+ */
+export const searchSequence = (ground: SearchGround, known: Sequence): SequenceSearch => {
+  const { piece, brake, feasibility, cost, lowerBound, nodes } = ground
+  const full = allBends(piece)
+  const queue = createHeap()
+  const entries: { made: number; orientation: number; bend: PieceBend; g: number; next: number }[] =
+    []
+  const closed = new Map<number, { g: number; entry: number }>()
+  const stateOf = (made: number, orientation: number) => made * 4 + orientation
+  const open = piece.bends.map((bend) =>
+    ORIENTATIONS.flatMap((o, number) => (isOrientationOpen(bend, o, brake) ? [number] : [])),
+  )
+
+  const expand = (made: number, from: { orientation: number; g: number; entry: number } | null) => {
+    for (const bend of piece.bends) {
+      const bit = 1 << bend.index
+      if ((made & bit) === 0) continue
+      const rest = made & ~bit
+      for (const orientation of open[bend.index] ?? []) {
+        if (closed.has(stateOf(rest, orientation))) continue
+        const g =
+          (from === null ? 0 : from.g + cost.move(orientation, from.orientation)) +
+          cost.fixed(bend, orientation) +
+          cost.gauge(rest, bend, orientation)
+        const f = g + lowerBound(rest, orientation)
+        if (f >= known.cost) continue
+        const next = from === null ? -1 : from.entry
+        entries.push({ made: rest, orientation, bend, g, next })
+        queue.push(entries.length - 1, f * DEPTH + bitCount(rest))
+      }
+    }
+  }
+
+  const operationsFrom = (entry: number): Operation[] => {
+    const operations: Operation[] = []
+    for (let at = entries[entry]; at !== undefined; at = entries[at.next]) {
+      operations.push({ bend: at.bend.index, orientation: at.orientation })
+    }
+    return operations
+  }
+
+  const findRest = (made: number, orientation: number) => closed.get(stateOf(made, orientation))?.g
+  expand(full, null)
+  for (let looked = 0; ; looked++) {
+    const key = queue.leastKey()
+    const index = queue.pop()
+    const entry = index === undefined ? undefined : entries[index]
+    if (key === undefined || index === undefined || entry === undefined) {
+      return { best: undefined, lowerBound: known.cost, proven: true, findRest }
+    }
+    if (looked >= nodes) {
+      return { best: undefined, lowerBound: Math.floor(key / DEPTH), proven: false, findRest }
+    }
+    const { made, orientation, bend, g } = entry
+    const state = stateOf(made, orientation)
+    if (closed.has(state) || !feasibility.passes(made, bend, orientation)) continue
+    closed.set(state, { g, entry: index })
+    if (made === 0) {
+      const best = { cost: g, operations: operationsFrom(index) }
+      return { best, lowerBound: g, proven: true, findRest }
+    }
+    expand(made, { orientation, g, entry: index })
+  }
+}
