@@ -1,0 +1,53 @@
+import type { Bend, Follows, Profile } from '#shared/profile/profile.schema'
+import { pitchAngle, turnOfIncluded } from '#shared/units/angle'
+import type { Degrees } from '#shared/units/brands'
+
+/**
+ * The included angle that the roof gives a bend, in degrees, a being the slope and a2 the second
+ * one. Plane geometry of slopes, plumb faces and square cuts:
+ *
+ *     ridge            180 - a - a2   (a2 = a where no second slope is given)
+ *     high-side peak   90 - a
+ *     eave             90 + a with a plumb fascia, 90 square-cut
+ *     gable, sidewall  90
+ *     headwall         90 + a
+ *     transition       180 - |a - a2|
+ *
+ * Null where the slope is the job's and the job's is not known, or a transition lacks its second.
+ */
+export const includedFromRoof = (follows: Follows, jobSlope: Degrees | null): Degrees | null => {
+  const slope = follows.pitch === 'job' ? jobSlope : follows.pitch
+  switch (follows.rule) {
+    case 'eaveSquare':
+    case 'gable':
+    case 'sidewall':
+      return 90
+    case 'ridge':
+      return slope === null ? null : 180 - slope - (follows.second ?? slope)
+    case 'highSidePeak':
+      return slope === null ? null : 90 - slope
+    case 'eave':
+    case 'headwall':
+      return slope === null ? null : 90 + slope
+    case 'transition':
+      return slope === null || follows.second === undefined
+        ? null
+        : 180 - Math.abs(slope - follows.second)
+  }
+}
+
+const resolveBend = (bend: Bend, jobSlope: Degrees | null): Bend => {
+  if (!bend.follows) return bend
+  const included = includedFromRoof(bend.follows, jobSlope)
+  return included === null ? bend : { ...bend, turn: turnOfIncluded(included, bend.turn) }
+}
+
+/**
+ * Gives every bend that follows the roof its turn for a job of pitch `jobRise` in 12 (null where
+ * the pitch is not known yet: bends that need it stay as they are). A bend keeps the side it is
+ * drawn to. What comes out may be no bend at all (two equal slopes); `profileProblems` tells.
+ */
+export const resolveFollows = (profile: Profile, jobRise: number | null): Profile => {
+  const jobSlope = jobRise === null ? null : pitchAngle(jobRise)
+  return { ...profile, bends: profile.bends.map((bend) => resolveBend(bend, jobSlope)) }
+}
