@@ -6,14 +6,22 @@ import { defineConfig } from 'vite'
 const fromRoot = (path: string) => fileURLToPath(new URL(path, import.meta.url))
 
 /**
- * Two builds from one file. Without `--ssr` it builds the client into dist/client; with
- * `--ssr server/index.ts` it bundles the server into dist/server (packages stay external).
+ * Two builds from one file. Without `--ssr` it builds the client into dist/client; with `--ssr` it
+ * bundles the web server and the database command into dist/server (packages stay external).
  */
 export default defineConfig(({ isSsrBuild }) => ({
   plugins: isSsrBuild ? [] : [react(), tailwindcss()],
   resolve: { alias: { '@': fromRoot('./src') } },
   publicDir: isSsrBuild ? false : 'public',
   build: isSsrBuild
-    ? { outDir: 'dist/server', emptyOutDir: true, target: 'node20', sourcemap: true }
+    ? {
+        outDir: 'dist/server',
+        emptyOutDir: true,
+        target: 'node20',
+        sourcemap: true,
+        rolldownOptions: {
+          input: { index: fromRoot('./server/index.ts'), cli: fromRoot('./server/db/cli.ts') },
+        },
+      }
     : { outDir: 'dist/client', emptyOutDir: true, sourcemap: false },
 }))

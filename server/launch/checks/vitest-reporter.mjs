@@ -1,0 +1,52 @@
+import { writeFileSync } from 'node:fs'
+import { noCounts } from './counts.mjs'
+
+/**
+ * @param {import('vitest/node').TestModule} module
+ * @returns {import('./counts.mjs').Counts} its tests, and as one failure each the file or suite
+ *   that has errors of its own (it did not load, or a hook threw)
+ */
+const countModule = (module) => {
+  const counts = noCounts()
+  for (const test of module.children.allTests()) {
+    const { state } = test.result()
+    // A test that never finished did not pass.
+    counts[state === 'pending' ? 'failed' : state] += 1
+  }
+  for (const part of [module, ...module.children.allSuites()]) {
+    if (part.errors().length > 0) counts.failed += 1
+  }
+  return counts
+}
+
+/**
+ * Writes the counts by project as JSON to the file named by TEST_REPORT_FILE, and ends the run when
+ * the launcher that started it is gone.
+ */
+export default class CountReporter {
+  /** @param {import('vitest/node').Vitest} vitest */
+  onInit(vitest) {
+    process.once('disconnect', () => void vitest.exit(true))
+    // Listening holds the process open; the channel alone must not.
+    process.channel?.unref()
+  }
+
+  /**
+   * @param {ReadonlyArray<import('vitest/node').TestModule>} modules
+   * @param {ReadonlyArray<unknown>} unhandledErrors
+   */
+  onTestRunEnd(modules, unhandledErrors) {
+    /** @type {import('./counts.mjs').TestReport} */
+    const report = { projects: {}, unhandledErrors: unhandledErrors.length }
+    for (const module of modules) {
+      const counts = (report.projects[module.project.name] ??= noCounts())
+      const own = countModule(module)
+      counts.passed += own.passed
+      counts.failed += own.failed
+      counts.skipped += own.skipped
+    }
+    const file = process.env.TEST_REPORT_FILE
+    if (file === undefined) throw new Error('TEST_REPORT_FILE is not set')
+    writeFileSync(file, JSON.stringify(report))
+  }
+}
