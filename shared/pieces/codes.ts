@@ -4,8 +4,9 @@
  * used, so that O and I typed for 0 and 1 can be put right.
  *
  * The check character is that of ISO/IEC 7064, MOD 37,36 (hybrid system over 0-9 A-Z), computed
- * over the kind letter and the body. It finds every single wrong character and every swap of
- * neighbors.
+ * over the kind letter and the body. It finds every single wrong character. Of the swaps of two
+ * neighbors it lets a few through (characters next to each other in the set, in one state of the
+ * sum out of 36): bodies with such a pair are never used, so every swap is found as well.
  */
 
 const CHARACTERS = '0123456789ABCDEFGHIJKLMNOPQRSTUVWXYZ'
@@ -30,14 +31,26 @@ export function checkCharacter(text: string): string {
   return CHARACTERS.charAt((MODULUS + 1 - product) % MODULUS)
 }
 
+const hasRightCheck = (text: string): boolean =>
+  checkCharacter(text.slice(0, -1)) === text.slice(-1)
+
+/** The text with the characters at `index` and `index + 1` changed about. */
+const swapped = (text: string, index: number): string =>
+  text.slice(0, index) + text.charAt(index + 1) + text.charAt(index) + text.slice(index + 2)
+
+const hasHiddenSwap = (code: string): boolean =>
+  Array.from({ length: code.length - 1 }, (_, index) => swapped(code, index)).some(
+    (other) => other !== code && hasRightCheck(other),
+  )
+
 /**
  * Makes a code from a body, or null when its check character would be one of the four that the eye
- * confuses: the caller then draws another body.
+ * confuses, or when two neighbors could be swapped unnoticed: the caller then draws another body.
  */
 export function composeCode(kind: CodeKind, body: string): string | null {
   const stem = CODE_KINDS[kind] + body
-  const check = checkCharacter(stem)
-  return CODE_ALPHABET.includes(check) ? stem + check : null
+  const code = stem + checkCharacter(stem)
+  return CODE_ALPHABET.includes(code.slice(-1)) && !hasHiddenSwap(code) ? code : null
 }
 
 export type CodeFault = 'empty' | 'length' | 'characters' | 'check' | 'kind'
@@ -64,7 +77,6 @@ export function parseCode(typed: string): ParsedCode {
     text.startsWith(CODE_KINDS[name]),
   )
   if (kind === undefined) return { ok: false, fault: 'kind' }
-  const stem = text.slice(0, -1)
-  if (checkCharacter(stem) !== text.slice(-1)) return { ok: false, fault: 'check' }
+  if (!hasRightCheck(text)) return { ok: false, fault: 'check' }
   return { ok: true, code: text, kind }
 }
