@@ -14,6 +14,7 @@ export type Role =
   | 'metal'
   | 'bare'
   | 'paint'
+  | 'paintEdge'
   | 'dimension'
   | 'dimensionText'
   | 'angleText'
@@ -22,11 +23,18 @@ export type Role =
   | 'crease'
   | 'hemHatch'
   | 'selected'
+  | 'hovered'
   | 'problem'
   | 'tool'
+  | 'toolEdge'
   | 'ghost'
+  /** Never seen; a wide target for a finger. */
+  | 'target'
 
-/** The part of the piece that a shape stands for, so that a touch on one view lights the other. */
+/**
+ * The part of the piece that a shape stands for, so that a touch on one view lights the other.
+ * Legs and bends count from 1 at edge A.
+ */
 export type Part =
   | { readonly kind: 'leg'; readonly leg: number }
   | { readonly kind: 'bend'; readonly bend: number }
@@ -72,4 +80,10 @@ export interface DisplayList {
   readonly width: number
   readonly height: number
   readonly items: readonly DisplayItem[]
+}
+
+export const isSamePart = (a: Part, b: Part): boolean => {
+  if (a.kind === 'leg') return b.kind === 'leg' && a.leg === b.leg
+  if (a.kind === 'bend') return b.kind === 'bend' && a.bend === b.bend
+  return a.kind === b.kind && a.edge === b.edge
 }

@@ -1,0 +1,69 @@
+import type { Role } from './display-list'
+import type { ThemeName } from './palette'
+import { PALETTE } from './palette'
+
+/** CSS colors of a drawing: one for each role, and the ground that lettering is knocked out of. */
+export interface FigureColors {
+  readonly roles: Readonly<Record<Role, string>>
+  readonly ground: string
+}
+
+/** The face of all figures and letters in a drawing. */
+export const FIGURE_FONT = "'JetBrains Mono', monospace"
+
+/** `paintHex` is the real color of the sheet (CSS hex); null draws painted sides as plain metal. */
+export const figureColors = (theme: ThemeName, paintHex: string | null): FigureColors => {
+  const palette = PALETTE[theme]
+  return {
+    ground: palette.paper,
+    roles: {
+      metal: palette.ink,
+      bare: palette.bare,
+      paint: paintHex ?? palette.bare,
+      paintEdge: palette.scribe,
+      dimension: palette.scribe,
+      dimensionText: palette.ink,
+      angleText: palette.scribe,
+      edge: palette.ink,
+      strip: palette.sheet,
+      crease: palette.dye,
+      hemHatch: palette.edge,
+      selected: palette.dye,
+      hovered: palette.dye,
+      problem: palette.chalk,
+      tool: palette.tool,
+      toolEdge: palette.edge,
+      ghost: palette.edge,
+      target: 'transparent',
+    },
+  }
+}
+
+/** Ink on white paper: what a label printer or a fax can show. */
+export const inkColors = (): FigureColors => {
+  const black = '#000000'
+  const grey = '#6B6B6B'
+  return {
+    ground: '#FFFFFF',
+    roles: {
+      metal: black,
+      bare: '#FFFFFF',
+      paint: '#9A9A9A',
+      paintEdge: black,
+      dimension: grey,
+      dimensionText: black,
+      angleText: black,
+      edge: black,
+      strip: '#FFFFFF',
+      crease: black,
+      hemHatch: grey,
+      selected: black,
+      hovered: black,
+      problem: black,
+      tool: '#E4E4E4',
+      toolEdge: grey,
+      ghost: grey,
+      target: 'none',
+    },
+  }
+}

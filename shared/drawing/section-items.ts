@@ -1,0 +1,104 @@
+import type { Profile } from '#shared/profile/profile.schema'
+import type { DisplayItem, Part, PathShape, Point, Role } from './display-list'
+import { isSamePart } from './display-list'
+import type { PlacedLabel } from './label-space'
+import type { Pen } from './pen'
+import type { SectionLabel } from './section-labels'
+import type { PlacedSection } from './section-view'
+
+export interface Marks {
+  readonly selected: Part | null
+  readonly hovered: Part | null
+  readonly problems: readonly Part[]
+}
+
+const line = (role: Role, points: readonly Point[], width: number, part?: Part): PathShape => ({
+  kind: 'path',
+  role,
+  points,
+  width,
+  closed: false,
+  filled: false,
+  ...(part ? { part } : {}),
+})
+
+const TARGET_WIDTH = 26
+
+/** The bands on either side, then the metal over them, then what is marked. */
+export const drawMetal = (
+  profile: Profile,
+  section: PlacedSection,
+  pen: Pen,
+  marks: Marks,
+): DisplayItem[] => {
+  const items: DisplayItem[] = []
+  for (const [side, sign] of [
+    ['left', 1],
+    ['right', -1],
+  ] as const) {
+    const isPainted = profile.colorSide === side || profile.colorSide === 'both'
+    const band = isPainted ? pen.paint : pen.bare
+    // A little overlap, so that no light shows between band and metal.
+    const overlap = Math.min(0.5, pen.metal / 4)
+    const points = section.chain((sign * (pen.metal + band - overlap)) / 2)
+    if (isPainted) items.push(line('paintEdge', points, band + overlap + 1))
+    items.push(line(isPainted ? 'paint' : 'bare', points, band + overlap))
+  }
+  items.push(line('metal', section.chain(0), pen.metal))
+  for (const { part, points } of section.parts) {
+    const role = markOf(part, marks)
+    if (role !== undefined) items.push(line(role, points, pen.metal, part))
+  }
+  return items
+}
+
+const markOf = (part: Part, marks: Marks): Role | undefined => {
+  if (marks.selected && isSamePart(part, marks.selected)) return 'selected'
+  if (marks.problems.some((problem) => isSamePart(part, problem))) return 'problem'
+  if (marks.hovered && isSamePart(part, marks.hovered)) return 'hovered'
+  return undefined
+}
+
+/** Legs first, so that the bends and hems between them lie on top. */
+export const drawTargets = (section: PlacedSection): DisplayItem[] => {
+  const order = (part: Part) => (part.kind === 'leg' ? 0 : 1)
+  return section.parts
+    .toSorted((a, b) => order(a.part) - order(b.part))
+    .map(({ part, points }) => line('target', points, TARGET_WIDTH, part))
+}
+
+export const drawLabel = (
+  label: PlacedLabel,
+  meaning: SectionLabel,
+  pen: Pen,
+  marks: Marks,
+): DisplayItem[] => {
+  const mark = markOf(meaning.part, marks)
+  const { part } = meaning
+  const lineRole = mark ?? (part.kind === 'edge' ? 'edge' : 'dimension')
+  const items: DisplayItem[] = label.lines.map((s) =>
+    line(lineRole, [s.from, s.to], pen.hairline, part),
+  )
+  if (label.radius !== undefined) {
+    items.push({
+      kind: 'circle',
+      role: lineRole,
+      part,
+      center: label.at,
+      radius: label.radius,
+      width: pen.hairline,
+      filled: false,
+    })
+  }
+  items.push({
+    kind: 'text',
+    role: mark ?? meaning.role,
+    part,
+    at: label.at,
+    text: label.text,
+    size: label.size,
+    rotation: 0,
+    bold: mark !== undefined || part.kind === 'edge',
+  })
+  return items
+}

@@ -1,0 +1,188 @@
+import type { Bounds } from '#shared/geometry/bounds'
+import { boundsOf, middleOf } from '#shared/geometry/bounds'
+import type { Vector } from '#shared/geometry/vector'
+import { add, between, heading, radians, rotate, scale, subtract } from '#shared/geometry/vector'
+import type { Hem, Profile } from '#shared/profile/profile.schema'
+import type { RoundPart, StraightPart, WalkedPart } from '#shared/strip/section-walk'
+import type { Measured } from './dimension-labels'
+import { dimensionCandidates } from './dimension-labels'
+import type { Part, Role } from './display-list'
+import type { LabelSpace, PlacedLabel } from './label-space'
+import { letterCandidates, ringCandidates } from './label-space'
+import type { Label } from './placement'
+import type { FigureLabels } from './section-figure'
+import type { PlacedSection } from './section-view'
+
+/** A label of the section with its candidates and what it says. */
+export interface SectionLabel extends Label<PlacedLabel> {
+  readonly part: Part
+  readonly role: Role
+}
+
+const WEIGHT = { leg: 10, edge: 8, hem: 6, angle: 2 }
+
+/** In smaller frames a number stands beside its leg, without dimension lines. */
+const NARROWEST_WITH_LINES = 260
+
+export const sectionLabels = (
+  profile: Profile,
+  section: PlacedSection,
+  labels: FigureLabels,
+  shown: { readonly dimensions: boolean; readonly angles: boolean; readonly edges: boolean },
+  frame: Bounds,
+): SectionLabel[] => {
+  const space: LabelSpace = { metal: section.metal, frame, pen: section.pen }
+  return [
+    ...(shown.dimensions ? legLabels(profile, section, labels, space) : []),
+    ...(shown.edges ? edgeLabels(section, space) : []),
+    ...(shown.dimensions ? hemLabels(profile, section, labels, space) : []),
+    ...(shown.angles ? angleLabels(section, labels, space) : []),
+  ]
+}
+
+/** How far a leg's dimension runs beyond the straight part as drawn, in pixels. */
+const beyondStraight = (neighbor: WalkedPart | undefined, section: PlacedSection): number => {
+  if (neighbor?.kind !== 'round') return 0
+  const outside = neighbor.arc.radius * section.view.scale + section.pen.metal / 2
+  const turn = Math.abs(neighbor.turn)
+  return turn > 90 ? outside : outside * Math.tan(radians(turn) / 2)
+}
+
+/** A direction of the section in the frame. */
+const inFrame = (section: PlacedSection, direction: Vector): Vector => {
+  const turned = rotate(direction, section.view.rotation)
+  return { x: turned.x, y: -turned.y }
+}
+
+const measuredLeg = (
+  section: PlacedSection,
+  part: StraightPart,
+  index: number,
+  text: string,
+): Measured => {
+  const along = inFrame(section, heading(part.heading))
+  const before = beyondStraight(section.walked[index - 1], section)
+  const after = beyondStraight(section.walked[index + 1], section)
+  return {
+    text,
+    from: add(section.toFrame(part.from), scale(along, -before)),
+    to: add(section.toFrame(part.to), scale(along, after)),
+  }
+}
+
+const middleOfFigure = (section: PlacedSection): Vector =>
+  middleOf(boundsOf(section.parts.flatMap((part) => part.points)))
+
+const legLabels = (
+  profile: Profile,
+  section: PlacedSection,
+  labels: FigureLabels,
+  space: LabelSpace,
+): SectionLabel[] => {
+  const middle = middleOfFigure(section)
+  const withLines = space.frame.maxX >= NARROWEST_WITH_LINES
+  return section.walked.flatMap((part, index) => {
+    if (part.kind !== 'straight' || typeof part.of !== 'number') return []
+    const leg = part.of
+    const text = labels.length(profile.legs[leg - 1] ?? 0)
+    const measured = measuredLeg(section, part, index, text)
+    return {
+      part: { kind: 'leg' as const, leg },
+      role: 'dimensionText' as const,
+      weight: WEIGHT.leg,
+      candidates: dimensionCandidates(space, measured, middle, withLines),
+    }
+  })
+}
+
+const edgeLabels = (section: PlacedSection, space: LabelSpace): SectionLabel[] => {
+  const first = section.walked[0]
+  const last = section.walked.at(-1)
+  if (first?.kind !== 'straight' || last?.kind !== 'straight') return []
+  return (['A', 'B'] as const).map((edge) => {
+    const part = edge === 'A' ? first : last
+    const anchor = section.toFrame(edge === 'A' ? first.from : last.to)
+    const out = scale(inFrame(section, heading(part.heading)), edge === 'A' ? -1 : 1)
+    return {
+      part: { kind: 'edge' as const, edge },
+      role: 'edge' as const,
+      weight: WEIGHT.edge,
+      candidates: letterCandidates(space, edge, anchor, out),
+    }
+  })
+}
+
+const hemLabels = (
+  profile: Profile,
+  section: PlacedSection,
+  labels: FigureLabels,
+  space: LabelSpace,
+): SectionLabel[] => {
+  const label = (edge: 'A' | 'B', hem: Hem | null): SectionLabel[] => {
+    const lip = section.walked.find((part) => part.kind === 'straight' && part.of === `lip${edge}`)
+    if (hem === null || lip === undefined) return []
+    const anchor = section.toFrame(between(lip.from, lip.to, 0.5))
+    const leg = edge === 'A' ? profile.legs[0] : profile.legs.at(-1)
+    if (leg === undefined || lip.kind !== 'straight') return []
+    // The lip heads back along its leg; away from the leg is the side the hem does not turn to.
+    const away = inFrame(section, heading(lip.heading - 90 * hem.turn))
+    return [
+      {
+        part: { kind: 'hem', edge },
+        role: 'dimensionText',
+        weight: WEIGHT.hem,
+        candidates: ringCandidates(space, {
+          text: labels.length(hem.length),
+          size: space.pen.text,
+          anchor,
+          first: away,
+          step: 15,
+          gaps: [0.35, 0.8, 1.4, 2.2, 3.5, 5].map(
+            (rows) => space.metal.half + rows * space.pen.text,
+          ),
+          leaderFrom: space.metal.half + 0.7 * space.pen.text,
+          widest: 180,
+          cost: 0,
+          costPerTurn: 0.04,
+          costPerGap: 1.2,
+        }),
+      },
+    ]
+  }
+  return [...label('A', profile.hemA), ...label('B', profile.hemB)]
+}
+
+/** Which way the inside of a bend opens. */
+const insideOf = (section: PlacedSection, part: RoundPart): Vector =>
+  inFrame(section, subtract(part.arc.center, part.mid))
+
+const angleLabels = (
+  section: PlacedSection,
+  labels: FigureLabels,
+  space: LabelSpace,
+): SectionLabel[] =>
+  section.walked.flatMap((part) => {
+    if (part.kind !== 'round' || typeof part.fold !== 'number') return []
+    const included = 180 - Math.abs(part.turn)
+    const { half } = space.metal
+    const size = space.pen.text * 0.9
+    const gaps = [0, 1, 2, 3, 4, 5, 6, 7, 8].map((row) => half + 3 + row * size * 0.5)
+    return {
+      part: { kind: 'bend' as const, bend: part.fold },
+      role: 'angleText' as const,
+      weight: WEIGHT.angle,
+      candidates: ringCandidates(space, {
+        text: labels.angle(part.turn),
+        size,
+        anchor: section.toFrame(part.mid),
+        first: insideOf(section, part),
+        step: 10,
+        gaps,
+        leaderFrom: Infinity,
+        widest: Math.min(60, included / 2),
+        cost: 0,
+        costPerTurn: 0.02,
+        costPerGap: 1,
+      }),
+    }
+  })

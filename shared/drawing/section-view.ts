@@ -1,0 +1,153 @@
+import type { Bounds } from '#shared/geometry/bounds'
+import { boundsOf, heightOf, middleOf, widthOf } from '#shared/geometry/bounds'
+import { segmentsOf } from '#shared/geometry/polyline'
+import type { Vector } from '#shared/geometry/vector'
+import { rotate, vector } from '#shared/geometry/vector'
+import type { Profile } from '#shared/profile/profile.schema'
+import type { Sheet } from '#shared/stock/stock.schema'
+import type { WalkedPart } from '#shared/strip/section-walk'
+import { offsetChain } from '#shared/strip/section-walk'
+import type { Metal } from './clearance'
+import type { Part, Point } from './display-list'
+import { drawnSection } from './drawn-section'
+import type { Pen } from './pen'
+import { halfWeight, withWeight } from './pen'
+
+/** Where the section's origin lies in the frame (pixels), pixels an inch and the turn of the piece. */
+export interface FrameView {
+  readonly origin: Point
+  readonly scale: number
+  readonly rotation: number
+}
+
+/** A part of the piece with the middle line that is drawn for it, in pixels. */
+export interface DrawnPart {
+  readonly part: Part
+  readonly points: readonly Point[]
+}
+
+export interface PlacedSection {
+  readonly view: FrameView
+  readonly toFrame: (point: Vector) => Point
+  readonly toSection: (point: Point) => Vector
+  readonly walked: readonly WalkedPart[]
+  readonly pen: Pen
+  readonly parts: readonly DrawnPart[]
+  readonly metal: Metal
+  /** The line at an offset from the middle of the metal, pixels to the left of the walk. */
+  readonly chain: (left: number) => Point[]
+}
+
+export const frameTransform = ({ origin, scale, rotation }: FrameView) => ({
+  toFrame: (point: Vector): Point => {
+    const turned = rotate(point, rotation)
+    return { x: origin.x + turned.x * scale, y: origin.y - turned.y * scale }
+  },
+  toSection: (point: Point): Vector =>
+    rotate(vector((point.x - origin.x) / scale, (origin.y - point.y) / scale), -rotation),
+})
+
+interface FitOptions {
+  readonly width: number
+  readonly height: number
+  readonly rotation?: number
+  readonly view?: FrameView
+}
+
+/** Lightens the pen where it would swallow the shortest leg. */
+const penForScale = (pen: Pen, profile: Profile, sheet: Sheet, scale: number): Pen => {
+  const shortest = Math.min(...profile.legs.filter((leg) => leg > 0)) * scale
+  const heaviest = Math.max(1.2, shortest * 0.4)
+  const lighter = pen.metal > heaviest ? withWeight(pen, heaviest / pen.metal) : pen
+  const trueWeight = sheet.thickness * scale
+  return trueWeight > lighter.metal ? { ...lighter, metal: trueWeight } : lighter
+}
+
+const flatnessAt = (scale: number) => ({ maxStep: 12, tolerance: 0.08 / scale })
+
+const partOf = (walked: WalkedPart): Part => {
+  if (walked.kind === 'straight') {
+    if (walked.of === 'lipA') return { kind: 'hem', edge: 'A' }
+    if (walked.of === 'lipB') return { kind: 'hem', edge: 'B' }
+    return { kind: 'leg', leg: walked.of }
+  }
+  if (walked.fold === 'hemA') return { kind: 'hem', edge: 'A' }
+  if (walked.fold === 'hemB') return { kind: 'hem', edge: 'B' }
+  return { kind: 'bend', bend: walked.fold }
+}
+
+const turnedBounds = (walked: readonly WalkedPart[], rotation: number): Bounds =>
+  boundsOf(
+    offsetChain(walked, 0, { maxStep: 12, tolerance: 0.01 }).map((point) =>
+      rotate(point, rotation),
+    ),
+  )
+
+/**
+ * Fits the section into the frame with `room` pixels free on each side. The pen's weight depends
+ * on the scale and the drawn section on both, so the fit is made twice: once for the bare line,
+ * once with its bands and hems.
+ */
+export const placeSection = (
+  profile: Profile,
+  sheet: Sheet,
+  options: FitOptions,
+  framePen: Pen,
+  room: number,
+): PlacedSection => {
+  const rotation = options.view?.rotation ?? options.rotation ?? 0
+  let scale = options.view?.scale ?? 1
+  let pen = framePen
+  let walked = drawnSection(profile, sheet, 1000, withWeight(framePen, 0))
+  let bounds = turnedBounds(walked, rotation)
+  for (let pass = 0; pass < 3; pass += 1) {
+    if (options.view === undefined) scale = scaleToFit(bounds, options, room + halfWeight(pen))
+    pen = penForScale(framePen, profile, sheet, scale)
+    walked = drawnSection(profile, sheet, scale, pen)
+    bounds = turnedBounds(walked, rotation)
+  }
+  const middle = middleOf(bounds)
+  const origin = options.view?.origin ?? {
+    x: options.width / 2 - middle.x * scale,
+    y: options.height / 2 + middle.y * scale,
+  }
+  const view = { origin, scale, rotation }
+  const transform = frameTransform(view)
+  const chainOf = (parts: readonly WalkedPart[], left: number): Point[] =>
+    offsetChain(parts, left / scale, flatnessAt(scale)).map(transform.toFrame)
+  return {
+    view,
+    ...transform,
+    walked,
+    pen,
+    parts: drawnParts(walked, (parts) => chainOf(parts, 0)),
+    metal: { chords: segmentsOf(chainOf(walked, 0)), half: halfWeight(pen) },
+    chain: (left) => chainOf(walked, left),
+  }
+}
+
+const scaleToFit = (bounds: Bounds, frame: FitOptions, margin: number): number => {
+  const across = Math.max(frame.width - 2 * margin, frame.width * 0.2)
+  const down = Math.max(frame.height - 2 * margin, frame.height * 0.2)
+  return Math.min(across / Math.max(widthOf(bounds), 1e-6), down / Math.max(heightOf(bounds), 1e-6))
+}
+
+/** One entry a part: a hem's lip and fold together. */
+const drawnParts = (
+  walked: readonly WalkedPart[],
+  chain: (parts: readonly WalkedPart[]) => Point[],
+): DrawnPart[] => {
+  const groups: { part: Part; parts: WalkedPart[] }[] = []
+  for (const piece of walked) {
+    const part = partOf(piece)
+    const last = groups.at(-1)
+    if (last !== undefined && last.part.kind === 'hem' && part.kind === 'hem') {
+      if (last.part.edge === part.edge) {
+        last.parts.push(piece)
+        continue
+      }
+    }
+    groups.push({ part, parts: [piece] })
+  }
+  return groups.map(({ part, parts }) => ({ part, points: chain(parts) }))
+}

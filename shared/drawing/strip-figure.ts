@@ -1,0 +1,282 @@
+import type { Bounds } from '#shared/geometry/bounds'
+import { contains } from '#shared/geometry/bounds'
+import type { Profile } from '#shared/profile/profile.schema'
+import type { Crease, Strip } from '#shared/strip/strip.schema'
+import type { DisplayItem, DisplayList, Part, Point } from './display-list'
+import { isSamePart } from './display-list'
+import type { Pen } from './pen'
+import { penFor } from './pen'
+import type { FigureLabels } from './section-figure'
+import { runningDimensions } from './strip-dimensions'
+import { hatch, letter, path, text } from './strip-items'
+import { textWidth } from './text-box'
+
+export interface StripOptions {
+  readonly width: number
+  readonly height: number
+  readonly labels: FigureLabels
+  /** `layout` adds the running distances from edge A at which a shop marks its creases. */
+  readonly mode?: 'plain' | 'layout'
+  readonly selected?: Part | null
+  readonly hovered?: Part | null
+  readonly problems?: readonly Part[]
+  readonly textSize?: number
+  readonly targets?: boolean
+}
+
+export interface StripFigure {
+  readonly display: DisplayList
+  /** Pixels an inch. */
+  readonly scale: number
+  /** From a distance from edge A (inches) to the frame's x. */
+  readonly toX: (at: number) => number
+  readonly toAt: (x: number) => number
+  /** The sheet's border in the frame. */
+  readonly sheet: Bounds
+  /** The bend or hem whose crease is nearest, if within `reach` pixels. */
+  readonly findCrease: (point: Point, reach: number) => Part | undefined
+  /** The leg or lip under a point. */
+  readonly findFlat: (point: Point) => Part | undefined
+  /** Legs whose length found no room; they stand in the section's dimensions. */
+  readonly leftOut: readonly Part[]
+}
+
+/** A flat part between two creases, or between a crease and an edge. */
+interface Flat {
+  readonly part: Part
+  readonly from: number
+  readonly to: number
+  readonly length: number
+}
+
+export const partOfCrease = (crease: Crease): Part => {
+  if (crease.fold === 'hemA') return { kind: 'hem', edge: 'A' }
+  if (crease.fold === 'hemB') return { kind: 'hem', edge: 'B' }
+  return { kind: 'bend', bend: crease.fold }
+}
+
+const flatsOf = (profile: Profile, strip: Strip): Flat[] => {
+  const stops = [0, ...strip.creases.map((crease) => crease.at), strip.stripWidth]
+  const meanings: { part: Part; length: number }[] = [
+    ...(profile.hemA
+      ? [{ part: { kind: 'hem', edge: 'A' } as const, length: profile.hemA.length }]
+      : []),
+    ...profile.legs.map((length, index) => ({
+      part: { kind: 'leg', leg: index + 1 } as const,
+      length,
+    })),
+    ...(profile.hemB
+      ? [{ part: { kind: 'hem', edge: 'B' } as const, length: profile.hemB.length }]
+      : []),
+  ]
+  return meanings.map((meaning, index) => ({
+    ...meaning,
+    from: stops[index] ?? 0,
+    to: stops[index + 1] ?? strip.stripWidth,
+  }))
+}
+
+interface StripPlace {
+  readonly pen: Pen
+  readonly scale: number
+  readonly sheet: Bounds
+  readonly toX: (at: number) => number
+  readonly arrow: number
+}
+
+const placeStrip = (strip: Strip, options: StripOptions): StripPlace => {
+  const { width, height } = options
+  const text = options.textSize ?? Math.min(18, Math.max(9, Math.min(width / 28, height / 4)))
+  const pen = { ...penFor(width, height), text }
+  const arrow = Math.max(4, text * 0.42)
+  const side = text * 2
+  const scale = (width - 2 * side) / Math.max(strip.stripWidth, 1e-6)
+  const isLayout = options.mode === 'layout'
+  const above = arrow * 2 + 3
+  const tall = isLayout ? Math.min(text * 3, height * 0.3) : Math.min(height - 2 * above, text * 4)
+  const top = isLayout ? above : (height - tall) / 2
+  return {
+    pen,
+    scale,
+    arrow,
+    toX: (at) => side + at * scale,
+    sheet: { minX: side, maxX: width - side, minY: top, maxY: top + tall },
+  }
+}
+
+/**
+ * The flat strip to scale: edge A left, edge B right, left side up. Creases are dashes with a
+ * triangle for their turn, above the strip when the sheet folds up, below when it folds down. Hems
+ * are hatched. Lengths stand in their parts and are left out where they do not fit.
+ */
+export const stripFigure = (profile: Profile, strip: Strip, options: StripOptions): StripFigure => {
+  const place = placeStrip(strip, options)
+  const flats = flatsOf(profile, strip)
+  const isMarked = (part: Part) => options.selected != null && isSamePart(part, options.selected)
+  const numbers = flats.map((flat) => numberOf(flat, place, options, isMarked(flat.part)))
+  const { sheet, pen, toX, scale } = place
+  const middle = (sheet.minY + sheet.maxY) / 2
+  const corners = [
+    { x: sheet.minX, y: sheet.minY },
+    { x: sheet.maxX, y: sheet.minY },
+    { x: sheet.maxX, y: sheet.maxY },
+    { x: sheet.minX, y: sheet.maxY },
+  ]
+  const items: DisplayItem[] = [
+    { ...path('strip', corners, 0), closed: true, filled: true },
+    ...flats.flatMap((flat) => markFlat(flat, place, options)),
+    ...flats.flatMap((flat) =>
+      flat.part.kind === 'hem' ? hatch(boxOfFlat(flat, place), pen.text * 0.5, flat.part) : [],
+    ),
+    { ...path('metal', corners, 1.5), closed: true },
+    ...strip.creases.flatMap((crease) => drawCrease(crease, place, options)),
+    ...numbers.flatMap((number) => number ?? []),
+    ...letter('A', { x: sheet.minX - pen.text, y: middle }, pen.text * 0.85),
+    ...letter('B', { x: sheet.maxX + pen.text, y: middle }, pen.text * 0.85),
+    ...(options.mode === 'layout'
+      ? runningDimensions(strip, {
+          toX,
+          top: sheet.maxY + place.arrow + 4,
+          frame: { minX: 2, minY: 0, maxX: options.width - 2, maxY: options.height - 1 },
+          text: pen.text,
+          length: options.labels.length,
+        })
+      : []),
+    ...(options.targets
+      ? [...flats.map((flat) => flatTarget(flat, place)), ...creaseTargets(strip, place)]
+      : []),
+  ]
+  return {
+    display: { width: options.width, height: options.height, items },
+    scale,
+    toX,
+    toAt: (x) => (x - sheet.minX) / scale,
+    sheet,
+    findCrease: (point, reach) => {
+      const near = strip.creases
+        .map((crease) => ({ crease, distance: Math.abs(toX(crease.at) - point.x) }))
+        .filter(({ distance }) => distance <= reach)
+        .sort((a, b) => a.distance - b.distance)[0]
+      return near && partOfCrease(near.crease)
+    },
+    findFlat: (point) => flats.find((flat) => contains(boxOfFlat(flat, place), point))?.part,
+    leftOut: flats.flatMap((flat, index) => (numbers[index] === undefined ? [flat.part] : [])),
+  }
+}
+
+const boxOfFlat = (flat: Flat, { toX, sheet }: StripPlace): Bounds => ({
+  ...sheet,
+  minX: toX(flat.from),
+  maxX: toX(flat.to),
+})
+
+const markRole = (
+  part: Part,
+  options: StripOptions,
+): 'selected' | 'problem' | 'hovered' | undefined => {
+  if (options.selected != null && isSamePart(part, options.selected)) return 'selected'
+  if (options.problems?.some((problem) => isSamePart(part, problem))) return 'problem'
+  if (options.hovered != null && isSamePart(part, options.hovered)) return 'hovered'
+  return undefined
+}
+
+/** A marked part carries a bar along both its borders. */
+const markFlat = (flat: Flat, place: StripPlace, options: StripOptions): DisplayItem[] => {
+  const role = markRole(flat.part, options)
+  if (role === undefined) return []
+  const box = boxOfFlat(flat, place)
+  return [box.minY + 2.5, box.maxY - 2.5].map((y) =>
+    path(
+      role,
+      [
+        { x: box.minX, y },
+        { x: box.maxX, y },
+      ],
+      4,
+      flat.part,
+    ),
+  )
+}
+
+/** The length in its part, smaller if it must be; undefined where it does not fit. */
+const numberOf = (
+  flat: Flat,
+  place: StripPlace,
+  options: StripOptions,
+  isSelected: boolean,
+): DisplayItem | undefined => {
+  const label = options.labels.length(flat.length)
+  const { minX, maxX, minY, maxY } = boxOfFlat(flat, place)
+  const size = [1, 0.85, 0.7]
+    .map((step) => place.pen.text * step)
+    .find((candidate) => candidate >= 7 && textWidth(label, candidate) + 6 <= maxX - minX)
+  if (size === undefined || flat.part.kind === 'hem') return undefined
+  const at = { x: (minX + maxX) / 2, y: (minY + maxY) / 2 }
+  return text(isSelected ? 'selected' : 'dimensionText', label, at, size, flat.part, isSelected)
+}
+
+const drawCrease = (crease: Crease, place: StripPlace, options: StripOptions): DisplayItem[] => {
+  const part = partOfCrease(crease)
+  const role = markRole(part, options) ?? 'crease'
+  const x = place.toX(crease.at)
+  const { minY, maxY } = place.sheet
+  const { arrow } = place
+  const tip = crease.turn > 0 ? minY - arrow * 1.9 : maxY + arrow * 1.9
+  const base = crease.turn > 0 ? minY - 3 : maxY + 3
+  const isStrong = role !== 'crease'
+  return [
+    {
+      ...path(
+        role,
+        [
+          { x, y: minY },
+          { x, y: maxY },
+        ],
+        isStrong ? 3 : 1.5,
+        part,
+      ),
+      dash: [5, 4],
+    },
+    {
+      ...path(
+        role,
+        [
+          { x: x - arrow * 0.8, y: base },
+          { x: x + arrow * 0.8, y: base },
+          { x, y: tip },
+        ],
+        0,
+        part,
+      ),
+      closed: true,
+      filled: true,
+    },
+  ]
+}
+
+const flatTarget = (flat: Flat, place: StripPlace): DisplayItem => {
+  const box = boxOfFlat(flat, place)
+  const y = (box.minY + box.maxY) / 2
+  return path(
+    'target',
+    [
+      { x: box.minX, y },
+      { x: box.maxX, y },
+    ],
+    box.maxY - box.minY,
+    flat.part,
+  )
+}
+
+const creaseTargets = (strip: Strip, { toX, sheet, arrow }: StripPlace): DisplayItem[] =>
+  strip.creases.map((crease) =>
+    path(
+      'target',
+      [
+        { x: toX(crease.at), y: sheet.minY - arrow * 2 },
+        { x: toX(crease.at), y: sheet.maxY + arrow * 2 },
+      ],
+      16,
+      partOfCrease(crease),
+    ),
+  )

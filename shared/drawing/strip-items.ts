@@ -1,0 +1,64 @@
+import type { Bounds } from '#shared/geometry/bounds'
+import { clipToBox, segment } from '#shared/geometry/segment'
+import type { DisplayItem, Part, PathShape, Point, Role, TextShape } from './display-list'
+
+export const path = (
+  role: Role,
+  points: readonly Point[],
+  width: number,
+  part?: Part,
+): PathShape => ({
+  kind: 'path',
+  role,
+  points,
+  width,
+  closed: false,
+  filled: false,
+  ...(part ? { part } : {}),
+})
+
+export const text = (
+  role: Role,
+  content: string,
+  at: Point,
+  size: number,
+  part?: Part,
+  bold = false,
+): TextShape => ({
+  kind: 'text',
+  role,
+  at,
+  text: content,
+  size,
+  rotation: 0,
+  bold,
+  ...(part ? { part } : {}),
+})
+
+/** An edge's letter in its circle. */
+export const letter = (edge: 'A' | 'B', at: Point, size: number): DisplayItem[] => {
+  const part: Part = { kind: 'edge', edge }
+  return [
+    {
+      kind: 'circle',
+      role: 'edge',
+      part,
+      center: at,
+      radius: size * 0.68,
+      width: 1,
+      filled: false,
+    },
+    text('edge', edge, at, size, part, true),
+  ]
+}
+
+/** Slanting lines across a box. */
+export const hatch = (box: Bounds, step: number, part: Part): DisplayItem[] => {
+  const tall = box.maxY - box.minY
+  const items: DisplayItem[] = []
+  for (let x = box.minX - tall + step / 2; x < box.maxX; x += step) {
+    const line = clipToBox(segment({ x, y: box.maxY }, { x: x + tall, y: box.minY }), box)
+    if (line) items.push(path('hemHatch', [line.from, line.to], 1, part))
+  }
+  return items
+}

@@ -1,0 +1,2 @@
+export type { FigureColors } from '#shared/drawing/figure-colors'
+export { figureColors } from '#shared/drawing/figure-colors'
