@@ -1,0 +1,37 @@
+import { randomUUID } from 'node:crypto'
+import type { IncomingMessage } from 'node:http'
+import type { RequestHandler } from 'express'
+import type { Logger } from 'pino'
+import { pinoHttp } from 'pino-http'
+
+const pathOf = (url: string | undefined): string => (url ?? '').split('?', 1)[0] ?? ''
+
+/**
+ * One line for each request, under the id that a problem answer carries as `requestId`. No headers,
+ * bodies or query strings: they hold passwords, cookies and what people search for.
+ */
+export const logRequests = (logger: Logger): RequestHandler =>
+  pinoHttp({
+    logger,
+    genReqId: (_request, response) => {
+      const id = randomUUID()
+      response.setHeader('X-Request-Id', id)
+      return id
+    },
+    customLogLevel: (_request, response, error) => {
+      if (error ?? response.statusCode >= 500) return 'error'
+      return response.statusCode >= 400 ? 'warn' : 'info'
+    },
+    serializers: {
+      req: (request: {
+        id: unknown
+        method: string
+        raw: IncomingMessage & { originalUrl?: string }
+      }) => ({
+        id: request.id,
+        method: request.method,
+        path: pathOf(request.raw.originalUrl ?? request.raw.url),
+      }),
+      res: (response: { statusCode: number }) => ({ status: response.statusCode }),
+    },
+  })
