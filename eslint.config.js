@@ -27,6 +27,8 @@ export default tseslint.config(
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
       '@typescript-eslint/no-misused-promises': ['error', { checksVoidReturn: { attributes: false } }],
+      // A unit is a number with a name; this rule does not see through the name, the compiler does.
+      '@typescript-eslint/no-unsafe-unary-minus': 'off',
       eqeqeq: ['error', 'always'],
     },
   },
