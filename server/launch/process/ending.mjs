@@ -2,6 +2,11 @@ import { LaunchError } from '../base/launch-error.mjs'
 
 /** @typedef {() => void | Promise<void>} Cleanup */
 
+/**
+ * Milliseconds. Ctrl-C comes twice, from the terminal and from npm; only a later one means haste.
+ */
+const SAME_SIGNAL = 1000
+
 /** @type {Cleanup[]} */
 const cleanups = []
 /** @type {Promise<never> | undefined} */
@@ -68,13 +73,14 @@ const watchNpm = (onDeath) => {
 
 /**
  * Runs a command to its end: `main` gives the exit code; signals, npm's death and errors all run
- * the registered cleanups. A second signal ends at once.
+ * the registered cleanups. A signal while they run ends at once.
  * @param {() => Promise<number>} main
  * @param {{ isServer?: boolean, onFailure?: () => void }} [options] a server that is told to stop
  *   has done its work (exit 0); anything else was cut short (128 + signal). `onFailure` runs after
  *   an error was reported.
  */
 export const runToEnd = async (main, { isServer = false, onFailure } = {}) => {
+  let firstSignal = -Infinity
   const signals = /** @type {const} */ ([
     ['SIGHUP', 1],
     ['SIGINT', 2],
@@ -82,7 +88,11 @@ export const runToEnd = async (main, { isServer = false, onFailure } = {}) => {
   ])
   for (const [signal, number] of signals) {
     process.on(signal, () => {
-      if (isEnding()) process.exit(128 + number)
+      if (isEnding()) {
+        if (performance.now() - firstSignal > SAME_SIGNAL) process.exit(128 + number)
+        return
+      }
+      firstSignal = performance.now()
       process.stderr.write('\nStopping.\n')
       void end(isServer ? 0 : 128 + number)
     })
