@@ -3,6 +3,7 @@ import { isHttpError } from '#server/http/http-error'
 import { findDatabaseProblem } from '#server/db/constraint-errors'
 import { invalidCsrfTokenError } from '#server/http/csrf'
 import { notFound, ProblemError } from '#server/http/errors'
+import { REQUEST_ID_HEADER } from '#server/http/request-log'
 import type { Problem } from '#shared/http/problem'
 
 /** Unknown paths below /api. */
@@ -18,17 +19,17 @@ export const answerProblem: ErrorRequestHandler = (error: unknown, request, resp
     next(error)
     return
   }
-  sendProblem(response, problem, String(request.id))
+  sendProblem(response, problem)
 }
 
-export function sendProblem(response: Response, problem: ProblemError, requestId: string): void {
+export function sendProblem(response: Response, problem: ProblemError): void {
   const body: Problem = {
     type: `/problems/${problem.code}`,
     title: problem.title,
     status: problem.status,
     detail: problem.detail,
     code: problem.code,
-    requestId,
+    requestId: response.get(REQUEST_ID_HEADER),
     ...(problem.errors && { errors: [...problem.errors] }),
     ...(problem.current !== undefined && { current: problem.current }),
   }

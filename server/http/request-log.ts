@@ -4,6 +4,8 @@ import type { RequestHandler } from 'express'
 import type { Logger } from 'pino'
 import { pinoHttp } from 'pino-http'
 
+export const REQUEST_ID_HEADER = 'X-Request-Id'
+
 const pathOf = (url: string | undefined): string => (url ?? '').split('?', 1)[0] ?? ''
 
 /**
@@ -15,7 +17,7 @@ export const logRequests = (logger: Logger): RequestHandler =>
     logger,
     genReqId: (_request, response) => {
       const id = randomUUID()
-      response.setHeader('X-Request-Id', id)
+      response.setHeader(REQUEST_ID_HEADER, id)
       return id
     },
     customLogLevel: (_request, response, error) => {

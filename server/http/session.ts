@@ -1,9 +1,10 @@
 import connectPgSimple from 'connect-pg-simple'
-import type { RequestHandler } from 'express'
+import type { CookieOptions, Request, RequestHandler } from 'express'
 import session from 'express-session'
 import type pg from 'pg'
 import { SESSIONS } from '#server/db/tables/sessions'
 
+const COOKIE = 'foldyard.session'
 const DAY = 24 * 60 * 60 * 1000
 /** Counted anew from every request. */
 const SIGNED_IN_FOR = 14 * DAY
@@ -22,7 +23,8 @@ export interface SessionOptions {
 
 export interface Sessions {
   readonly middleware: RequestHandler
-  readonly close: () => Promise<void>
+  /** Stops the timer that removes expired sessions; the pool is the caller's. */
+  readonly close: () => void
 }
 
 /** Sessions in PostgreSQL behind a cookie that no script reads. */
@@ -33,21 +35,41 @@ export function createSessions(options: SessionOptions): Sessions {
     createTableIfMissing: false,
     errorLog: (message: string, error: unknown) => options.onError(message, error),
   })
-  const middleware = session({
-    name: 'foldyard.session',
-    secret: options.secret,
-    store,
-    resave: false,
-    saveUninitialized: false,
-    rolling: true,
-    cookie: {
-      httpOnly: true,
-      sameSite: 'lax',
-      secure: options.secureCookie,
-      maxAge: SIGNED_IN_FOR,
-    },
-  })
-  return { middleware, close: () => Promise.resolve(store.close()) }
+  const cookie: CookieOptions = {
+    httpOnly: true,
+    sameSite: 'lax',
+    secure: options.secureCookie,
+    maxAge: SIGNED_IN_FOR,
+  }
+  return {
+    middleware: session({
+      name: COOKIE,
+      secret: options.secret,
+      store,
+      resave: false,
+      saveUninitialized: false,
+      rolling: true,
+      cookie,
+    }),
+    close: () => store.close(),
+  }
 }
 
-export const anonymousCookieAge = ANONYMOUS_FOR
+/** Nobody signed in: the session is kept for the CSRF token only, and not for long. */
+export function keepShortly(request: Request): void {
+  request.session.cookie.maxAge = ANONYMOUS_FOR
+}
+
+/** Removes the session of this request from the database and its cookie from the browser. */
+export function endSession(request: Request): Promise<void> {
+  return new Promise((resolve, reject) => {
+    request.session.destroy((error: unknown) => {
+      if (error) {
+        reject(new Error('The session could not be removed.', { cause: error }))
+        return
+      }
+      request.res?.clearCookie(COOKIE)
+      resolve()
+    })
+  })
+}
