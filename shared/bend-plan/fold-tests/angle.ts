@@ -16,7 +16,7 @@ export const angle: FoldTest = {
     const { lip } = bend.hem
     if (isLess(lip, brake.hemMin)) return { found: lip, limit: brake.hemMin }
     if (isLess(brake.hemMax, lip)) return { found: lip, limit: brake.hemMax }
-    const height = lip * Math.sin(radians(brake.hemAngle))
-    return isAtMost(height, brake.opening) ? undefined : { found: height, limit: brake.opening }
+    const tallest = brake.opening / Math.sin(radians(brake.hemAngle))
+    return isAtMost(lip, tallest) ? undefined : { found: lip, limit: tallest }
   },
 }
