@@ -1,0 +1,55 @@
+import type { Db } from '#server/db/knex'
+import { profileSchema } from '#shared/profile/profile.schema'
+import type { ShelfProfile } from '#shared/shelf/shelf.contract'
+
+interface ShelfRow {
+  id: string
+  company_id: string | null
+  company_name: string | null
+  starter_key: string | null
+  name: string
+  profile: unknown
+  version: number
+  updated_at: Date
+}
+
+const toShelfProfile = (row: ShelfRow): ShelfProfile => ({
+  id: row.id,
+  company:
+    row.company_id === null || row.company_name === null
+      ? null
+      : { id: row.company_id, name: row.company_name },
+  starterKey: row.starter_key,
+  name: row.name,
+  profile: profileSchema.parse(row.profile),
+  version: row.version,
+  updatedAt: row.updated_at.toISOString(),
+})
+
+export const createShelfQueries = (db: Db) => {
+  /** Starters are everyone's. */
+  const shelf = (scope: string | null) => {
+    const query = db('shelf_profiles as s')
+      .leftJoin('companies as c', 'c.id', 's.company_id')
+      .select<ShelfRow[]>('s.*', 'c.name as company_name')
+    return scope === null
+      ? query
+      : query.where((own) => void own.whereNull('s.company_id').orWhere('s.company_id', scope))
+  }
+
+  return {
+    async listShelf(scope: string | null): Promise<ShelfProfile[]> {
+      const rows = await shelf(scope).orderByRaw(
+        's.company_id is not null, c.name, lower(s.name), s.id',
+      )
+      return rows.map(toShelfProfile)
+    },
+
+    async findShelfProfile(id: string, scope: string | null): Promise<ShelfProfile | undefined> {
+      const row = await shelf(scope).where('s.id', id).first()
+      return row && toShelfProfile(row)
+    },
+  }
+}
+
+export type ShelfQueries = ReturnType<typeof createShelfQueries>
