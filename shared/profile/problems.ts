@@ -4,8 +4,7 @@ import type { ProfileProblem } from '#shared/profile/problem'
 import { hasErrors, profileProblem } from '#shared/profile/problem'
 import type { Profile } from '#shared/profile/profile.schema'
 import { valueProblems } from '#shared/profile/value-problems'
-import type { Sheet } from '#shared/stock/stock.schema'
-import type { FlatParts, FlatRun } from '#shared/strip/flat-parts'
+import type { FlatParts, FlatRun, FoldingSheet } from '#shared/strip/flat-parts'
 import { flatParts } from '#shared/strip/flat-parts'
 import { flatStrip, girthOf } from '#shared/strip/flat-strip'
 import type { Inches } from '#shared/units/brands'
@@ -22,14 +21,7 @@ export interface ProfileLimits {
  * Stands in while no stock is chosen: thin and folded sharp, so that only what no sheet at all
  * could do is reported.
  */
-const THINNEST: Sheet = {
-  metal: 'steel',
-  thickness: 0.001,
-  insideRadius: 0,
-  kFactor: 0.5,
-  density: 0.284,
-  springbackPer90: 0,
-}
+const THINNEST: FoldingSheet = { thickness: 0.001, insideRadius: 0, kFactor: 0.5 }
 
 /** The number a run is spoken of by: a lip is part of the leg that it lies on. */
 const legNumber = (of: FlatRun['of'], profile: Profile): number =>
@@ -118,7 +110,7 @@ const widthProblems = (width: Inches, limits: ProfileLimits): ProfileProblem[] =
 }
 
 /** Shop guides for sheet: inside radius at least T/2, the gap of an open hem at least T. */
-const sheetWarnings = (profile: Profile, sheet: Sheet): ProfileProblem[] => {
+const sheetWarnings = (profile: Profile, sheet: FoldingSheet): ProfileProblem[] => {
   const { thickness, insideRadius } = sheet
   const gapWarning = (hem: 'A' | 'B') => {
     const lip = hem === 'A' ? profile.hemA : profile.hemB
@@ -163,7 +155,7 @@ const sheetWarnings = (profile: Profile, sheet: Sheet): ProfileProblem[] => {
  */
 export const profileProblems = (
   profile: Profile,
-  sheet: Sheet | null,
+  sheet: FoldingSheet | null,
   limits: ProfileLimits = {},
 ): ProfileProblem[] => {
   const values = valueProblems(profile)

@@ -5,6 +5,9 @@ import { bendAllowance, outsideSetback } from '#shared/strip/bend-allowance'
 import type { Fold } from '#shared/strip/strip.schema'
 import type { Inches } from '#shared/units/brands'
 
+/** What unfolding needs to know of a sheet. */
+export type FoldingSheet = Pick<Sheet, 'thickness' | 'insideRadius' | 'kFactor'>
+
 /** A flat run of the sheet between two bend zones, or between a zone and an edge. */
 export interface FlatRun {
   /** Leg number from 1 at edge A, or a hem's lip. */
@@ -44,7 +47,7 @@ const flatFold = (fold: Fold, bend: BendShape): FlatFold => ({
  * A hem counts as a bend of 180 towards its lip. A closed one has K = 0.5, which gives the shop's
  * old rule by itself: 2 T - π T / 2 = 0.43 T off the sum.
  */
-const hemFold = (fold: 'hemA' | 'hemB', hem: Hem, sheet: Sheet): FlatFold =>
+const hemFold = (fold: 'hemA' | 'hemB', hem: Hem, sheet: FoldingSheet): FlatFold =>
   flatFold(fold, {
     turn: 180 * hem.turn,
     insideRadius: hemRadius(hem),
@@ -60,7 +63,7 @@ const hemFold = (fold: 'hemA' | 'hemB', hem: Hem, sheet: Sheet): FlatFold =>
  * Nothing is checked here: a profile that cannot be made gives runs with a negative `straight`,
  * which `profileProblems` reports.
  */
-export const flatParts = (profile: Profile, sheet: Sheet): FlatParts => {
+export const flatParts = (profile: Profile, sheet: FoldingSheet): FlatParts => {
   const { hemA, hemB } = profile
   const folds = [
     ...(hemA ? [hemFold('hemA', hemA, sheet)] : []),

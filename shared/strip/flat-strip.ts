@@ -1,5 +1,5 @@
 import type { Profile } from '#shared/profile/profile.schema'
-import type { Sheet } from '#shared/stock/stock.schema'
+import type { FoldingSheet } from '#shared/strip/flat-parts'
 import { flatParts } from '#shared/strip/flat-parts'
 import type { Crease, Strip } from '#shared/strip/strip.schema'
 import type { Inches } from '#shared/units/brands'
@@ -22,7 +22,7 @@ export const girthOf = (profile: Profile): Inches =>
  * last bit. Values are exact; only what is shown is rounded. Nothing is checked here: ask
  * `profileProblems` whether the piece can exist.
  */
-export const flatStrip = (profile: Profile, sheet: Sheet): Strip => {
+export const flatStrip = (profile: Profile, sheet: FoldingSheet): Strip => {
   const { runs, folds } = flatParts(profile, sheet)
   const creases: Crease[] = []
   let reached = 0

@@ -1,0 +1,50 @@
+import { z } from 'zod'
+import { hasErrors } from '#shared/profile/problem'
+import { profileProblems } from '#shared/profile/problems'
+import { valueProblems } from '#shared/profile/value-problems'
+import { flatStrip, roundToShear } from '#shared/strip/flat-strip'
+import { paintedArea, pieceWeight } from '#shared/strip/weight'
+import { pieceLengthInput, profileInput, stockInput } from './kernel-input'
+import type { VerbAnswer } from './verb'
+import { defineVerb } from './verb'
+
+const stripInput = z.object({
+  profile: profileInput,
+  // Unfolding needs no density; it is used for the weight where it is given.
+  stock: stockInput.partial({ density: true, springbackPer90: true }).extend({
+    widestStrip: z.number().positive().optional(),
+  }),
+  pieceLength: pieceLengthInput.optional(),
+})
+
+const answerStrip = ({ profile, stock, pieceLength }: z.output<typeof stripInput>): VerbAnswer => {
+  const { widestStrip, density, thickness } = stock
+  const strip = flatStrip(profile, stock)
+  const problems = profileProblems(profile, stock, widestStrip === undefined ? {} : { widestStrip })
+  const ofThePiece =
+    pieceLength === undefined
+      ? {}
+      : {
+          ...(density === undefined
+            ? {}
+            : { weight: pieceWeight(strip, { thickness, density }, pieceLength) }),
+          paintedArea: paintedArea(strip, profile.colorSide, pieceLength),
+        }
+  return {
+    exit: hasErrors(problems) ? 3 : 0,
+    output: {
+      ...strip,
+      rounded: { stripWidth: roundToShear(strip.stripWidth) },
+      ...ofThePiece,
+      problems,
+    },
+  }
+}
+
+/**
+ * `strip`: girth, strip width and creases (inches, degrees), the width rounded for the shear, and
+ * with `pieceLength` the painted area (square inches) and, with a density too, the weight (pounds).
+ * A profile with problems of severity error exits with 3. Where its values mean something by
+ * themselves, the figures are given all the same: they show by how much it fails.
+ */
+export const stripVerb = defineVerb(stripInput, answerStrip)
