@@ -1,7 +1,6 @@
 import type { Bounds } from '#shared/geometry/bounds'
-import { grow, overlap } from '#shared/geometry/bounds'
 import type { Segment } from '#shared/geometry/segment'
-import { distanceBetween, distanceToBox, distanceToPoint } from '#shared/geometry/segment'
+import { boxOfSegment, distanceBetween, distanceToBox } from '#shared/geometry/segment'
 import type { Vector } from '#shared/geometry/vector'
 import { cross, dot, lengthOf, scale, subtract } from '#shared/geometry/vector'
 
@@ -11,33 +10,29 @@ export interface Metal {
   readonly half: number
 }
 
-const boxOf = ({ from, to }: Segment): Bounds => ({
-  minX: Math.min(from.x, to.x),
-  minY: Math.min(from.y, to.y),
-  maxX: Math.max(from.x, to.x),
-  maxY: Math.max(from.y, to.y),
-})
+/** True when the two boxes are at least `reach` apart along an axis. */
+const isApart = (a: Bounds, { from, to }: Segment, reach: number): boolean =>
+  Math.min(from.x, to.x) - reach >= a.maxX ||
+  Math.max(from.x, to.x) + reach <= a.minX ||
+  Math.min(from.y, to.y) - reach >= a.maxY ||
+  Math.max(from.y, to.y) + reach <= a.minY
 
 /** True when the box keeps `gap` away from the metal. */
 export const isBoxClear = (metal: Metal, box: Bounds, gap: number): boolean => {
   const reach = metal.half + gap
-  const near = grow(box, reach)
   return metal.chords.every(
-    (chord) => !overlap(near, grow(boxOf(chord), 1e-9)) || distanceToBox(chord, box) >= reach,
+    (chord) => isApart(box, chord, reach) || distanceToBox(chord, box) >= reach,
   )
 }
 
 /** True when the line keeps `gap` away from the metal. */
 export const isLineClear = (metal: Metal, line: Segment, gap: number): boolean => {
   const reach = metal.half + gap
-  const near = grow(boxOf(line), reach + 1e-9)
+  const box = boxOfSegment(line)
   return metal.chords.every(
-    (chord) => !overlap(near, grow(boxOf(chord), 1e-9)) || distanceBetween(chord, line) >= reach,
+    (chord) => isApart(box, chord, reach) || distanceBetween(chord, line) >= reach,
   )
 }
-
-export const isPointClear = (metal: Metal, point: Vector, gap: number): boolean =>
-  metal.chords.every((chord) => distanceToPoint(chord, point) >= metal.half + gap)
 
 /** Where a ray (unit direction) first comes within `reach` of a point. */
 const meetCircle = (from: Vector, along: Vector, center: Vector, reach: number): number => {

@@ -99,7 +99,7 @@ export const dimensionCandidates = (
   space: LabelSpace,
   leg: Measured,
   middle: Vector,
-  withLines: boolean,
+  ways: { readonly lines: boolean; readonly leaders: boolean },
 ): PlacedLabel[] => {
   const size = space.pen.text
   const along = unit(subtract(leg.to, leg.from))
@@ -115,14 +115,15 @@ export const dimensionCandidates = (
       ...[0, 1, 2, 3].map((row) => beside + row * size * 1.6),
       ...[0, 1, 2, 3].map((row) => beyond + row * size * 1.6),
     ])
-    if (withLines) {
+    if (ways.lines) {
       for (const offset of offsets) {
         const far = ((offset - beside) / size) * 0.5
         found.push(...dimensionOn(space, leg, normal, offset, far + enclosed + inward))
       }
     }
-    found.push(...bareNumbers(space, leg, normal, (withLines ? 8 : 0) + enclosed + inward))
+    found.push(...bareNumbers(space, leg, normal, (ways.lines ? 8 : 0) + enclosed + inward))
   }
+  if (!ways.leaders) return found
   const first = scale(unit(subtract(mid, middle)), distance(mid, middle) > 1 ? 1 : -1)
   for (const part of [0.5, 0.25, 0.75]) {
     found.push(

@@ -1,7 +1,7 @@
 import type { Bounds } from '#shared/geometry/bounds'
-import { grow, overlap } from '#shared/geometry/bounds'
+import { grow, heightOf, overlap, union } from '#shared/geometry/bounds'
 import type { Segment } from '#shared/geometry/segment'
-import { distanceToBox, findCrossing } from '#shared/geometry/segment'
+import { boxOfSegment, distanceToBox, findCrossing } from '#shared/geometry/segment'
 
 /** One way to set a label: its boxes of text, the lines that go with it, and how good it is. */
 export interface Candidate {
@@ -17,8 +17,14 @@ export interface Label<C extends Candidate> {
   readonly candidates: readonly C[]
 }
 
-/** Room kept around text. */
-const TEXT_GAP = 2
+/** Room between text and the lines of other labels. */
+const LINE_GAP = 2
+
+/**
+ * Room between texts side by side, in parts of a line's height: over a character, so that "2"
+ * and "1/2" never read as 2 1/2.
+ */
+const SIDE_GAP = 0.85
 
 /** What a line across another line costs. */
 const CROSSING = 4
@@ -27,18 +33,46 @@ const CLASH = 10_000
 
 const MOST_ROUNDS = 8
 
-const clashes = (a: Candidate, b: Candidate): boolean =>
-  a.boxes.some((box) => {
-    const kept = grow(box, TEXT_GAP)
-    return (
-      b.boxes.some((other) => overlap(kept, other)) ||
-      b.lines.some((line) => distanceToBox(line, kept) === 0)
-    )
-  }) ||
-  b.boxes.some((box) => {
-    const kept = grow(box, TEXT_GAP)
-    return a.lines.some((line) => distanceToBox(line, kept) === 0)
-  })
+/** Only the best candidates of a label are looked at. */
+const MOST_CANDIDATES = 90
+
+interface Prepared<C extends Candidate> {
+  readonly candidate: C
+  readonly cost: number
+  /** Text with the room that other text leaves to it. */
+  readonly textRoom: readonly Bounds[]
+  /** Text with the room that other labels' lines leave to it. */
+  readonly lineRoom: readonly Bounds[]
+  /** Around all of it. */
+  readonly around: Bounds
+}
+
+const prepare = <C extends Candidate>(candidate: C): Prepared<C> => {
+  const textRoom = candidate.boxes.map((box) => ({
+    minX: box.minX - SIDE_GAP * heightOf(box),
+    maxX: box.maxX + SIDE_GAP * heightOf(box),
+    minY: box.minY - LINE_GAP,
+    maxY: box.maxY + LINE_GAP,
+  }))
+  const everything = [...textRoom, ...candidate.lines.map(boxOfSegment)]
+  return {
+    candidate,
+    cost: candidate.cost,
+    textRoom,
+    lineRoom: candidate.boxes.map((box) => grow(box, LINE_GAP)),
+    around: grow(everything.reduce(union), LINE_GAP),
+  }
+}
+
+const linesEnter = (lines: readonly Segment[], rooms: readonly Bounds[]): boolean =>
+  rooms.some((room) =>
+    lines.some((line) => overlap(boxOfSegment(line), room) && distanceToBox(line, room) === 0),
+  )
+
+const clash = (a: Prepared<Candidate>, b: Prepared<Candidate>): boolean =>
+  a.textRoom.some((room) => b.candidate.boxes.some((box) => overlap(room, box))) ||
+  linesEnter(b.candidate.lines, a.lineRoom) ||
+  linesEnter(a.candidate.lines, b.lineRoom)
 
 const crossings = (a: Candidate, b: Candidate): number => {
   let count = 0
@@ -48,34 +82,39 @@ const crossings = (a: Candidate, b: Candidate): number => {
   return count
 }
 
-const costTogether = (a: Candidate, b: Candidate): number =>
-  clashes(a, b) ? CLASH : CROSSING * crossings(a, b)
+const costTogether = (a: Prepared<Candidate>, b: Prepared<Candidate>): number => {
+  if (!overlap(a.around, b.around)) return 0
+  return clash(a, b) ? CLASH : CROSSING * crossings(a.candidate, b.candidate)
+}
+
+type Choice<C extends Candidate> = (Prepared<C> | undefined)[]
 
 const costAmong = <C extends Candidate>(
-  candidate: C,
-  chosen: readonly (C | undefined)[],
+  option: Prepared<C>,
+  chosen: Choice<C>,
   self: number,
   limit: number,
 ): number => {
-  let cost = candidate.cost
+  let cost = option.cost
   for (let index = 0; index < chosen.length && cost < limit; index += 1) {
     const other = chosen[index]
-    if (index !== self && other !== undefined) cost += costTogether(candidate, other)
+    if (index !== self && other !== undefined) cost += costTogether(option, other)
   }
   return cost
 }
 
+/** The options are sorted by their own cost, so the search ends where that exceeds the best. */
 const bestAmong = <C extends Candidate>(
-  label: Label<C>,
-  chosen: readonly (C | undefined)[],
+  options: readonly Prepared<C>[],
+  chosen: Choice<C>,
   self: number,
-): { readonly candidate: C; readonly cost: number } | undefined => {
-  let best: { candidate: C; cost: number } | undefined
-  for (const candidate of label.candidates) {
+): { readonly option: Prepared<C>; readonly cost: number } | undefined => {
+  let best: { option: Prepared<C>; cost: number } | undefined
+  for (const option of options) {
     const limit = best?.cost ?? Infinity
-    if (candidate.cost >= limit) continue
-    const cost = costAmong(candidate, chosen, self, limit)
-    if (cost < limit) best = { candidate, cost }
+    if (option.cost >= limit) break
+    const cost = costAmong(option, chosen, self, limit)
+    if (cost < limit) best = { option, cost }
   }
   return best
 }
@@ -90,34 +129,35 @@ export const placeLabels = <C extends Candidate>(
   labels: readonly Label<C>[],
 ): (C | undefined)[] => {
   const order = labels
-    .map((label, index) => ({ label, index }))
-    .sort(
-      (a, b) =>
-        b.label.weight - a.label.weight ||
-        a.label.candidates.length - b.label.candidates.length ||
-        a.index - b.index,
-    )
-  const chosen: (C | undefined)[] = labels.map(() => undefined)
+    .map((label, index) => ({
+      index,
+      weight: label.weight,
+      options: label.candidates
+        .toSorted((a, b) => a.cost - b.cost)
+        .slice(0, MOST_CANDIDATES)
+        .map(prepare),
+    }))
+    .sort((a, b) => b.weight - a.weight || a.options.length - b.options.length || a.index - b.index)
+  const chosen: Choice<C> = labels.map(() => undefined)
   for (let round = 0; round < MOST_ROUNDS; round += 1) {
     let changed = false
-    for (const { label, index } of order) {
-      const best = bestAmong(label, chosen, index)?.candidate
+    for (const { options, index } of order) {
+      const best = bestAmong(options, chosen, index)?.option
       if (best !== chosen[index]) changed = true
       chosen[index] = best
     }
     if (!changed) break
   }
-  for (const { label, index } of order.toReversed()) {
-    const candidate = chosen[index]
-    if (candidate === undefined) continue
-    if (costAmong(candidate, chosen, index, CLASH) < CLASH) continue
-    const better = bestAmong(label, chosen, index)
-    chosen[index] = better !== undefined && better.cost < CLASH ? better.candidate : undefined
+  for (const { options, index } of order.toReversed()) {
+    const option = chosen[index]
+    if (option === undefined || costAmong(option, chosen, index, CLASH) < CLASH) continue
+    const better = bestAmong(options, chosen, index)
+    chosen[index] = better !== undefined && better.cost < CLASH ? better.option : undefined
   }
-  for (const { label, index } of order) {
+  for (const { options, index } of order) {
     if (chosen[index] !== undefined) continue
-    const best = bestAmong(label, chosen, index)
-    if (best !== undefined && best.cost < CLASH) chosen[index] = best.candidate
+    const best = bestAmong(options, chosen, index)
+    if (best !== undefined && best.cost < CLASH) chosen[index] = best.option
   }
-  return chosen
+  return chosen.map((option) => option?.candidate)
 }

@@ -20,6 +20,8 @@ export interface FigureLabels {
   readonly length: (inches: number) => string
   /** The signed turn of a bend as text: the included angle, or degrees of bend. */
   readonly angle: (turn: number) => string
+  /** A hem's length as text, where it should say that it is a hem; otherwise as any length. */
+  readonly hem?: (inches: number) => string
 }
 
 export interface SectionOptions {
@@ -70,10 +72,21 @@ export interface Figure {
 /** Smallest type, pixels. */
 const SMALLEST_TEXT = 9
 
-/** Margins tried, in parts of the type size, and what each costs. */
-const MARGINS = [2.4, 3.4, 4.8]
+/**
+ * Layouts tried one after another until one has room for everything: margins and type size in
+ * parts of the frame's type size, and whether numbers may stand off with a leader.
+ */
+const TRIALS = [
+  { margin: 2.4, text: 1, leaders: false },
+  { margin: 2.4, text: 1, leaders: true },
+  { margin: 3.6, text: 1, leaders: true },
+  { margin: 2.4, text: 0.8, leaders: true },
+  { margin: 4, text: 0.8, leaders: true },
+  { margin: 2.4, text: 0.65, leaders: true },
+]
 
-const TEXT_STEPS = [1, 0.85, 0.7]
+/** A layout whose worst label costs less than this is not improved on. */
+const GOOD_ENOUGH = 13
 
 interface Layout {
   readonly pen: Pen
@@ -123,19 +136,16 @@ export const sectionFigure = (profile: Profile, sheet: Sheet, options: SectionOp
 const bestLayout = (profile: Profile, sheet: Sheet, options: SectionOptions): Layout => {
   const pen = penFor(options.width, options.height, options.textSize)
   let best: Layout | undefined
-  for (const [shrink, step] of TEXT_STEPS.entries()) {
-    const text = Math.max(Math.min(pen.text, SMALLEST_TEXT), pen.text * step)
-    for (const [wider, margin] of MARGINS.entries()) {
-      const layout = layOut(profile, sheet, options, { ...pen, text }, margin)
-      const missing = layout.placed.filter((label) => label === undefined).length
-      const costliest = Math.max(0, ...layout.placed.map((label) => label?.cost ?? 0))
-      const cost = layout.cost + 6 * wider + 12 * shrink
-      if (best === undefined || cost < best.cost) best = { ...layout, cost }
-      if (missing === 0 && costliest < 13) return best
-      if (options.view !== undefined || layout.labels.length === 0) break
-    }
-    const complete = best?.placed.every((label) => label !== undefined) ?? false
-    if (complete && best) return best
+  for (const [tried, trial] of TRIALS.entries()) {
+    const text = Math.max(Math.min(pen.text, SMALLEST_TEXT), pen.text * trial.text)
+    const layout = layOut(profile, sheet, options, { ...pen, text }, trial)
+    const cost = layout.cost + 5 * tried
+    if (best === undefined || cost < best.cost) best = { ...layout, cost }
+    const worst = Math.max(0, ...layout.placed.map((label) => label?.cost ?? Infinity))
+    if (worst < GOOD_ENOUGH) return best
+    const next = TRIALS[tried + 1]
+    const isComplete = best.placed.every((label) => label !== undefined)
+    if (isComplete && next !== undefined && next.text < trial.text) return best
   }
   if (best === undefined) throw new Error('No layout was tried.')
   return best
@@ -146,7 +156,7 @@ const layOut = (
   sheet: Sheet,
   options: SectionOptions,
   pen: Pen,
-  margin: number,
+  trial: { readonly margin: number; readonly leaders: boolean },
 ): Layout => {
   const shown = {
     dimensions: options.show?.dimensions ?? true,
@@ -154,10 +164,10 @@ const layOut = (
     edges: options.show?.edges ?? true,
   }
   const isBare = !shown.dimensions && !shown.angles && !shown.edges
-  const room = isBare ? 1 : shown.dimensions ? margin * pen.text : 2 * pen.text
+  const room = isBare ? 1 : shown.dimensions ? trial.margin * pen.text : 2 * pen.text
   const section = placeSection(profile, sheet, options, pen, room)
   const frame = grow({ minX: 0, minY: 0, maxX: options.width, maxY: options.height }, -2)
-  const labels = sectionLabels(profile, section, options.labels, shown, frame)
+  const labels = sectionLabels(profile, section, options.labels, shown, frame, trial.leaders)
   const placed = placeLabels(labels)
   const cost = placed.reduce(
     (sum, label, index) => sum + (label?.cost ?? (labels[index]?.weight ?? 0) * 100),

@@ -30,10 +30,11 @@ export const sectionLabels = (
   labels: FigureLabels,
   shown: { readonly dimensions: boolean; readonly angles: boolean; readonly edges: boolean },
   frame: Bounds,
+  leaders: boolean,
 ): SectionLabel[] => {
   const space: LabelSpace = { metal: section.metal, frame, pen: section.pen }
   return [
-    ...(shown.dimensions ? legLabels(profile, section, labels, space) : []),
+    ...(shown.dimensions ? legLabels(profile, section, labels, space, leaders) : []),
     ...(shown.edges ? edgeLabels(section, space) : []),
     ...(shown.dimensions ? hemLabels(profile, section, labels, space) : []),
     ...(shown.angles ? angleLabels(section, labels, space) : []),
@@ -78,9 +79,10 @@ const legLabels = (
   section: PlacedSection,
   labels: FigureLabels,
   space: LabelSpace,
+  leaders: boolean,
 ): SectionLabel[] => {
   const middle = middleOfFigure(section)
-  const withLines = space.frame.maxX >= NARROWEST_WITH_LINES
+  const ways = { lines: space.frame.maxX >= NARROWEST_WITH_LINES, leaders }
   return section.walked.flatMap((part, index) => {
     if (part.kind !== 'straight' || typeof part.of !== 'number') return []
     const leg = part.of
@@ -90,24 +92,31 @@ const legLabels = (
       part: { kind: 'leg' as const, leg },
       role: 'dimensionText' as const,
       weight: WEIGHT.leg,
-      candidates: dimensionCandidates(space, measured, middle, withLines),
+      candidates: dimensionCandidates(space, measured, middle, ways),
     }
   })
 }
 
 const edgeLabels = (section: PlacedSection, space: LabelSpace): SectionLabel[] => {
-  const first = section.walked[0]
-  const last = section.walked.at(-1)
-  if (first?.kind !== 'straight' || last?.kind !== 'straight') return []
+  const legs = section.walked.filter(
+    (part): part is StraightPart => part.kind === 'straight' && typeof part.of === 'number',
+  )
+  const first = legs[0]
+  const last = legs.at(-1)
+  if (first === undefined || last === undefined) return []
   return (['A', 'B'] as const).map((edge) => {
     const part = edge === 'A' ? first : last
-    const anchor = section.toFrame(edge === 'A' ? first.from : last.to)
+    const hem = section.walked.find(
+      (other) => other.kind === 'round' && other.fold === `hem${edge}`,
+    )
     const out = scale(inFrame(section, heading(part.heading)), edge === 'A' ? -1 : 1)
+    // A hemmed edge is lettered beyond its fold, where the piece ends.
+    const end = hem?.kind === 'round' ? hem.mid : edge === 'A' ? part.from : part.to
     return {
       part: { kind: 'edge' as const, edge },
       role: 'edge' as const,
       weight: WEIGHT.edge,
-      candidates: letterCandidates(space, edge, anchor, out),
+      candidates: letterCandidates(space, edge, section.toFrame(end), out),
     }
   })
 }
@@ -125,14 +134,14 @@ const hemLabels = (
     const leg = edge === 'A' ? profile.legs[0] : profile.legs.at(-1)
     if (leg === undefined || lip.kind !== 'straight') return []
     // The lip heads back along its leg; away from the leg is the side the hem does not turn to.
-    const away = inFrame(section, heading(lip.heading - 90 * hem.turn))
+    const away = inFrame(section, heading(lip.heading + (hem.turn > 0 ? -90 : 90)))
     return [
       {
         part: { kind: 'hem', edge },
         role: 'dimensionText',
         weight: WEIGHT.hem,
         candidates: ringCandidates(space, {
-          text: labels.length(hem.length),
+          text: labels.hem?.(hem.length) ?? labels.length(hem.length),
           size: space.pen.text,
           anchor,
           first: away,

@@ -1,6 +1,7 @@
 import type { Bounds } from '#shared/geometry/bounds'
 import { boundsOf, heightOf, middleOf, widthOf } from '#shared/geometry/bounds'
 import { segmentsOf } from '#shared/geometry/polyline'
+import type { Segment } from '#shared/geometry/segment'
 import type { Vector } from '#shared/geometry/vector'
 import { rotate, vector } from '#shared/geometry/vector'
 import type { Profile } from '#shared/profile/profile.schema'
@@ -63,6 +64,14 @@ const penForScale = (pen: Pen, profile: Profile, sheet: Sheet, scale: number): P
   return trueWeight > lighter.metal ? { ...lighter, metal: trueWeight } : lighter
 }
 
+/** For clearances half a pixel is fine enough, and fewer chords are sooner looked through. */
+const chordsOf = (
+  walked: readonly WalkedPart[],
+  scale: number,
+  toFrame: (point: Vector) => Point,
+): Segment[] =>
+  segmentsOf(offsetChain(walked, 0, { maxStep: 60, tolerance: 0.4 / scale }).map(toFrame))
+
 const flatnessAt = (scale: number) => ({ maxStep: 12, tolerance: 0.08 / scale })
 
 const partOf = (walked: WalkedPart): Part => {
@@ -121,7 +130,7 @@ export const placeSection = (
     walked,
     pen,
     parts: drawnParts(walked, (parts) => chainOf(parts, 0)),
-    metal: { chords: segmentsOf(chainOf(walked, 0)), half: halfWeight(pen) },
+    metal: { chords: chordsOf(walked, scale, transform.toFrame), half: halfWeight(pen) },
     chain: (left) => chainOf(walked, left),
   }
 }

@@ -112,8 +112,9 @@ const placeStrip = (strip: Strip, options: StripOptions): StripPlace => {
 export const stripFigure = (profile: Profile, strip: Strip, options: StripOptions): StripFigure => {
   const place = placeStrip(strip, options)
   const flats = flatsOf(profile, strip)
-  const isMarked = (part: Part) => options.selected != null && isSamePart(part, options.selected)
-  const numbers = flats.map((flat) => numberOf(flat, place, options, isMarked(flat.part)))
+  const numbers = flats.map((flat) =>
+    numberOf(flat, place, options, isSelected(flat.part, options)),
+  )
   const { sheet, pen, toX, scale } = place
   const middle = (sheet.minY + sheet.maxY) / 2
   const corners = [
@@ -174,11 +175,14 @@ const markRole = (
   part: Part,
   options: StripOptions,
 ): 'selected' | 'problem' | 'hovered' | undefined => {
-  if (options.selected != null && isSamePart(part, options.selected)) return 'selected'
+  if (isSelected(part, options)) return 'selected'
   if (options.problems?.some((problem) => isSamePart(part, problem))) return 'problem'
-  if (options.hovered != null && isSamePart(part, options.hovered)) return 'hovered'
+  if (options.hovered && isSamePart(part, options.hovered)) return 'hovered'
   return undefined
 }
+
+const isSelected = (part: Part, options: StripOptions): boolean =>
+  options.selected ? isSamePart(part, options.selected) : false
 
 /** A marked part carries a bar along both its borders. */
 const markFlat = (flat: Flat, place: StripPlace, options: StripOptions): DisplayItem[] => {
@@ -203,7 +207,7 @@ const numberOf = (
   flat: Flat,
   place: StripPlace,
   options: StripOptions,
-  isSelected: boolean,
+  isChosen: boolean,
 ): DisplayItem | undefined => {
   const label = options.labels.length(flat.length)
   const { minX, maxX, minY, maxY } = boxOfFlat(flat, place)
@@ -212,7 +216,7 @@ const numberOf = (
     .find((candidate) => candidate >= 7 && textWidth(label, candidate) + 6 <= maxX - minX)
   if (size === undefined || flat.part.kind === 'hem') return undefined
   const at = { x: (minX + maxX) / 2, y: (minY + maxY) / 2 }
-  return text(isSelected ? 'selected' : 'dimensionText', label, at, size, flat.part, isSelected)
+  return text(isChosen ? 'selected' : 'dimensionText', label, at, size, flat.part, isChosen)
 }
 
 const drawCrease = (crease: Crease, place: StripPlace, options: StripOptions): DisplayItem[] => {

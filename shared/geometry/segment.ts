@@ -10,6 +10,13 @@ export interface Segment {
 
 export const segment = (from: Vector, to: Vector): Segment => ({ from, to })
 
+export const boxOfSegment = ({ from, to }: Segment): Bounds => ({
+  minX: Math.min(from.x, to.x),
+  minY: Math.min(from.y, to.y),
+  maxX: Math.max(from.x, to.x),
+  maxY: Math.max(from.y, to.y),
+})
+
 /** How far along the segment (0 to 1) the point nearest to `point` lies. */
 export const nearestAlong = (s: Segment, point: Vector): number => {
   const d = subtract(s.to, s.from)
@@ -81,9 +88,9 @@ export const clipToBox = (s: Segment, box: Bounds): Segment | undefined => {
   let start = 0
   let end = 1
   const limits: [number, number][] = [
-    [-d.x, s.from.x - box.minX],
+    [0 - d.x, s.from.x - box.minX],
     [d.x, box.maxX - s.from.x],
-    [-d.y, s.from.y - box.minY],
+    [0 - d.y, s.from.y - box.minY],
     [d.y, box.maxY - s.from.y],
   ]
   for (const [slope, room] of limits) {

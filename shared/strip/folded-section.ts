@@ -66,7 +66,7 @@ const refuseShortRuns = ({ runs }: FlatParts): void => {
   const short = runs.find((run) => isLess(run.straight, 0))
   if (short !== undefined) {
     throw new RangeError(
-      `Run ${short.of} of ${short.outside} in. is ${-short.straight} in. shorter than its bends use up.`,
+      `Run ${short.of} of ${short.outside} in. is ${Math.abs(short.straight)} in. shorter than its bends use up.`,
     )
   }
 }
@@ -94,7 +94,7 @@ const foldedLegs = (walked: readonly WalkedPart[], { runs, folds }: FlatParts): 
       from: part.from,
       to: part.to,
       heading: part.heading,
-      outsideFrom: add(part.from, scale(along, -(folds[index - 1]?.setback ?? 0))),
+      outsideFrom: add(part.from, scale(along, -1 * (folds[index - 1]?.setback ?? 0))),
       outsideTo: add(part.to, scale(along, folds[index]?.setback ?? 0)),
     }
   })
@@ -125,7 +125,7 @@ const foldedHem = (
     lipFrom: lip.from,
     lipTo: lip.to,
     leftFace: offsetChain(parts, thickness / 2, FLATNESS),
-    rightFace: offsetChain(parts, -thickness / 2, FLATNESS),
+    rightFace: offsetChain(parts, thickness / -2, FLATNESS),
   }
 }
 
@@ -145,7 +145,7 @@ export const foldedSection = (profile: Profile, sheet: Sheet): FoldedSection => 
   const { thickness } = sheet
   const walked = walkTrue(parts, thickness)
   const leftFace = offsetChain(walked, thickness / 2, FLATNESS)
-  const rightFace = offsetChain(walked, -thickness / 2, FLATNESS)
+  const rightFace = offsetChain(walked, thickness / -2, FLATNESS)
   const outline = [...leftFace, ...rightFace.toReversed()]
   const first = walked[0]
   const last = walked.at(-1)

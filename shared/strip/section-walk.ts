@@ -96,7 +96,7 @@ export const walkSection = (
 ): WalkedPart[] => {
   const parts: WalkedPart[] = []
   let at: Vector = { x: 0, y: 0 }
-  let turned: Degrees = runs[0]?.of === 'lipA' ? -(folds[0]?.turn ?? 0) : 0
+  let turned: Degrees = runs[0]?.of === 'lipA' ? 0 - (folds[0]?.turn ?? 0) : 0
   runs.forEach((run, index) => {
     const to = add(at, scale(heading(turned), run.straight))
     parts.push({ kind: 'straight', of: run.of, from: at, to, heading: turned })
