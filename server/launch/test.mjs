@@ -38,17 +38,13 @@ const test = async () => {
   const judged = judgeRun(code, report)
   groups.push(...judged.groups)
   const sum = sumCounts(groups.map(([, counts]) => counts))
-  const lines = [
-    ...groupLines(groups),
-    ...judged.remarks,
-    `time  ${seconds(performance.now() - begin)}`,
-    '',
-  ]
-  // Cleanups run last first; registered before every other one, this would be the very last line.
-  closing = [...lines, closingLine(sum)].join('\n')
+  const time = `time  ${seconds(performance.now() - begin)}`
+  closing = [...groupLines(groups), ...judged.remarks, time, '', closingLine(sum)].join('\n')
   return sum.failed === 0 && sum.passed > 0 ? 0 : 1
 }
 
+// A run that does not get as far as its summary has failed.
 let closing = closingLine({ passed: 0, failed: 1, skipped: 0 })
+// Cleanups run last first: registered before every other one, this prints the very last line.
 atEnd(() => print(closing))
 await runToEnd(test)

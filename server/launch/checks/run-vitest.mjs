@@ -1,9 +1,8 @@
 import { spawn } from 'node:child_process'
-import { existsSync, mkdtempSync, readFileSync, rmSync } from 'node:fs'
-import { tmpdir } from 'node:os'
-import { join } from 'node:path'
+import { once } from 'node:events'
+import { LaunchError } from '../base/launch-error.mjs'
 import { inRoot, ROOT } from '../base/repository.mjs'
-import { atEnd } from '../process/ending.mjs'
+import { atEnd, isEnding } from '../process/ending.mjs'
 
 const STOP_TIMEOUT = 10_000
 
@@ -14,36 +13,32 @@ const STOP_TIMEOUT = 10_000
  * @returns {Promise<{ code: number, report: import('./counts.mjs').TestReport | undefined }>}
  */
 export const runVitest = async (args, env) => {
-  const folder = mkdtempSync(join(tmpdir(), 'foldyard-test-'))
-  atEnd(() => rmSync(folder, { recursive: true, force: true }))
-  const file = join(folder, 'report.json')
+  if (isEnding()) throw new LaunchError('Stopping.')
+  const reporter = inRoot('server/launch/checks/vitest-reporter.mjs')
   const child = spawn(
     process.execPath,
     [
-      inRoot('node_modules/vitest/vitest.mjs'),
-      'run',
-      '--reporter=default',
-      `--reporter=${inRoot('server/launch/checks/vitest-reporter.mjs')}`,
-      ...args,
+      ...[inRoot('node_modules/vitest/vitest.mjs'), 'run'],
+      ...['--reporter=default', `--reporter=${reporter}`, ...args],
     ],
-    {
-      cwd: ROOT,
-      env: { ...env, TEST_REPORT_FILE: file },
-      stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
-    },
+    { cwd: ROOT, env, stdio: ['ignore', 'inherit', 'inherit', 'ipc'] },
   )
-  /** @type {Promise<number>} */
-  const ended = new Promise((resolve, reject) => {
-    child.once('error', reject)
-    child.once('exit', (code) => resolve(code ?? 128))
+  /** @type {import('./counts.mjs').TestReport | undefined} */
+  let report
+  child.on('message', (message) => {
+    report = /** @type {import('./counts.mjs').TestReport} */ (message)
   })
+  // The channel closes after its last message was read, which can be after the exit.
+  const closed = once(child, 'disconnect')
+  const ended = once(child, 'exit')
   const forget = atEnd(async () => {
     child.kill('SIGTERM')
     const timer = setTimeout(() => child.kill('SIGKILL'), STOP_TIMEOUT)
     await ended
     clearTimeout(timer)
   })
-  const code = await ended
+  const [code] = await ended
+  await closed
   forget()
-  return { code, report: existsSync(file) ? JSON.parse(readFileSync(file, 'utf8')) : undefined }
+  return { code: code ?? 128, report }
 }

@@ -1,4 +1,3 @@
-import { writeFileSync } from 'node:fs'
 import { noCounts } from './counts.mjs'
 
 /**
@@ -6,7 +5,7 @@ import { noCounts } from './counts.mjs'
  * @returns {import('./counts.mjs').Counts} its tests, and as one failure each the file or suite
  *   that has errors of its own (it did not load, or a hook threw)
  */
-const countModule = (module) => {
+export const countModule = (module) => {
   const counts = noCounts()
   for (const test of module.children.allTests()) {
     const { state } = test.result()
@@ -20,8 +19,8 @@ const countModule = (module) => {
 }
 
 /**
- * Writes the counts by project as JSON to the file named by TEST_REPORT_FILE, and ends the run when
- * the launcher that started it is gone.
+ * Sends the counts by project to the launcher that started the run, and ends the run when that
+ * launcher is gone.
  */
 export default class CountReporter {
   /** @param {import('vitest/node').Vitest} vitest */
@@ -34,6 +33,7 @@ export default class CountReporter {
   /**
    * @param {ReadonlyArray<import('vitest/node').TestModule>} modules
    * @param {ReadonlyArray<unknown>} unhandledErrors
+   * @returns {Promise<void>}
    */
   onTestRunEnd(modules, unhandledErrors) {
     /** @type {import('./counts.mjs').TestReport} */
@@ -45,8 +45,11 @@ export default class CountReporter {
       counts.failed += own.failed
       counts.skipped += own.skipped
     }
-    const file = process.env.TEST_REPORT_FILE
-    if (file === undefined) throw new Error('TEST_REPORT_FILE is not set')
-    writeFileSync(file, JSON.stringify(report))
+    return new Promise((resolve, reject) => {
+      if (process.send === undefined) throw new Error('This reporter is for the launcher alone.')
+      process.send(report, (/** @type {Error | null} */ error) =>
+        error ? reject(error) : resolve(),
+      )
+    })
   }
 }
