@@ -1,0 +1,17 @@
+import type { LiveTopic } from '#shared/live/live'
+
+/**
+ * Which query keys a change makes stale, by their first word. A moved piece changes the progress of
+ * its order and run and what lies on the rack; a new stock or brake changes the plans made with it.
+ */
+export const STALE_ROOTS: Record<LiveTopic, readonly string[]> = {
+  jobs: ['jobs'],
+  shelf: ['shelf'],
+  orders: ['orders', 'jobs'],
+  pieces: ['pieces', 'orders', 'runs', 'rack'],
+  runs: ['runs', 'pieces'],
+  rack: ['rack', 'pieces', 'orders'],
+  stocks: ['stocks', 'plans'],
+  brakes: ['brakes', 'plans'],
+  people: ['people'],
+}

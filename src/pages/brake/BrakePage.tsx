@@ -1,0 +1,11 @@
+import { useTranslation } from 'react-i18next'
+import { PlaceFrame } from '@/pages/shell/PlaceFrame'
+
+export function BrakePage() {
+  const { t } = useTranslation('brake')
+  return (
+    <PlaceFrame title={t('title')}>
+      <p className="max-w-prose">{t('purpose')}</p>
+    </PlaceFrame>
+  )
+}
