@@ -19,6 +19,8 @@ const stripInput = z.object({
 
 const answerStrip = ({ profile, stock, pieceLength }: z.output<typeof stripInput>): VerbAnswer => {
   const { widestStrip, density, thickness } = stock
+  const meaningless = valueProblems(profile)
+  if (hasErrors(meaningless)) return { exit: 3, output: { problems: meaningless } }
   const strip = flatStrip(profile, stock)
   const problems = profileProblems(profile, stock, widestStrip === undefined ? {} : { widestStrip })
   const ofThePiece =
