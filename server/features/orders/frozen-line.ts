@@ -1,0 +1,22 @@
+import { z } from 'zod'
+import { planSchema } from '#shared/bend-plan/plan.schema'
+import { stockSchema } from '#shared/stock/stock.schema'
+import { stripSchema } from '#shared/strip/strip.schema'
+
+/**
+ * What a line's pieces are made by, written into `order_lines.frozen` when the order is released.
+ * A later change of stock, brake or kernel does not reach them.
+ */
+export const frozenLineSchema = z.strictObject({
+  stock: stockSchema,
+  strip: stripSchema,
+  /** Pounds. */
+  pieceWeight: z.number(),
+  brakeId: z.uuid(),
+  brakeName: z.string(),
+  /** The plan of the run that the line's pieces belong to. */
+  plan: planSchema,
+  kernelVersion: z.int(),
+})
+
+export type FrozenLine = z.infer<typeof frozenLineSchema>

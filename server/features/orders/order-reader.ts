@@ -1,0 +1,82 @@
+import type { BrakesQueries } from '#server/features/brakes/brakes.queries'
+import type { OrderPiecesQueries } from '#server/features/orders/order-pieces.queries'
+import type { OrdersQueries, StoredLine } from '#server/features/orders/orders.queries'
+import type { StocksQueries } from '#server/features/stocks/stocks.queries'
+import type { PlannedBrake, Planner } from '#server/planning/planner'
+import { profileErrors } from '#server/planning/profile-errors'
+import type { Order, OrderLine } from '#shared/orders/order.schema'
+import type { Stock } from '#shared/stock/stock.schema'
+import { flatStrip } from '#shared/strip/flat-strip'
+import { pieceWeight } from '#shared/strip/weight'
+
+export interface OrderReaderDeps {
+  readonly queries: OrdersQueries
+  readonly pieces: OrderPiecesQueries
+  readonly stocks: StocksQueries
+  readonly brakes: BrakesQueries
+  readonly planner: Planner
+}
+
+type MadeOf = Pick<OrderLine, 'stock' | 'strip' | 'pieceWeight' | 'bendsOn'>
+
+/** Reads an order as its page shows it: frozen values once it is released, the kernel's before. */
+export const createOrderReader = (deps: OrderReaderDeps) => {
+  const { queries, pieces, stocks, brakes, planner } = deps
+
+  /** What holds before release: stock and brakes as they are now. */
+  async function computeLine(
+    line: StoredLine,
+    stock: Stock,
+    shopBrakes: readonly PlannedBrake[],
+  ): Promise<MadeOf> {
+    const strip = flatStrip(line.profile, stock.sheet)
+    const madeOf = { stock, strip, pieceWeight: pieceWeight(strip, stock.sheet, line.length) }
+    // The stock may have changed since the order was submitted.
+    if (profileErrors(line.profile, stock, '').length > 0) return { ...madeOf, bendsOn: [] }
+    const plans = await planner.planOnAll(line.profile, stock.sheet, line.length, shopBrakes)
+    const feasible = plans.filter(({ plan }) => plan.feasible)
+    return { ...madeOf, bendsOn: feasible.map(({ brakeName }) => brakeName) }
+  }
+
+  async function readLines(orderId: string): Promise<OrderLine[]> {
+    const lines = await queries.listLines(orderId)
+    const piecesByLine = await pieces.mapPieces(orderId)
+    const open = lines.filter(({ frozen }) => frozen === null)
+    const stockById = await stocks.mapStocks(open.map(({ stockId }) => stockId))
+    const shopBrakes = open.length > 0 ? await brakes.listBrakes() : []
+    const answers: OrderLine[] = []
+    for (const line of lines) {
+      const { frozen, stockId, ...written } = line
+      const madeOf = frozen
+        ? {
+            stock: frozen.stock,
+            strip: frozen.strip,
+            pieceWeight: frozen.pieceWeight,
+            bendsOn: [frozen.brakeName],
+          }
+        : await computeLine(line, getStock(stockById, stockId), shopBrakes)
+      answers.push({ ...written, ...madeOf, pieces: piecesByLine.get(line.id) ?? [] })
+    }
+    return answers
+  }
+
+  return {
+    /**
+     * The version is read before the lines, so that a change in between is met as a conflict later
+     * and never saved over.
+     */
+    async findOrder(id: string, scope: string | null): Promise<Order | undefined> {
+      const order = await queries.findOrder(id, scope)
+      if (!order) return undefined
+      return { ...order, lines: await readLines(id), events: await queries.listEvents(id) }
+    },
+  }
+}
+
+function getStock(stockById: ReadonlyMap<string, Stock>, id: string): Stock {
+  const stock = stockById.get(id)
+  if (!stock) throw new Error(`Stock ${id} of an order line is not there.`)
+  return stock
+}
+
+export type OrderReader = ReturnType<typeof createOrderReader>
