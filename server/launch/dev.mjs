@@ -14,18 +14,13 @@ import { startWebProcess } from './product/web-process.mjs'
 const SERVER_SOURCES = ['server', 'shared', 'migrations', 'seeds']
 
 /** @param {string} stateFolder */
-const prepareDatabase = async (stateFolder) => {
+const startDevelopment = async (stateFolder) => {
+  const { host, port, origin } = await chooseAddress(print)
   const database = await useDatabase(stateFolder)
   for (const verb of ['migrate', 'seed-if-empty']) {
     const code = await sourceDatabaseCommand([verb], database.url)
     if (code !== 0) throw new LaunchError(`The database command "${verb}" failed (exit ${code}).`)
   }
-  return { database, secret: sessionSecret(stateFolder) }
-}
-
-const dev = async () => {
-  const { database, secret } = await prepare(prepareDatabase)
-  const { host, port, origin } = await chooseAddress(print)
   const env = {
     COOKIE_SECURE: 'false',
     ...process.env,
@@ -33,7 +28,7 @@ const dev = async () => {
     HOST: host,
     PORT: String(port),
     DATABASE_URL: database.url,
-    SESSION_SECRET: secret,
+    SESSION_SECRET: sessionSecret(stateFolder),
   }
   const start = () => {
     const web = startWebProcess(['--import', 'tsx', 'server/dev.ts'], env)
@@ -50,7 +45,13 @@ const dev = async () => {
     })
   })
   print(`Development server at ${origin}; Ctrl-C stops it.`)
-  return new Promise((_, reject) => database.keepAlive(reject))
+  return database
 }
 
-await runToEnd(dev, { isServer: true })
+await runToEnd(
+  async () => {
+    const database = await prepare(startDevelopment)
+    return new Promise((_, reject) => database.keepAlive(reject))
+  },
+  { isServer: true },
+)

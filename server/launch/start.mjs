@@ -23,21 +23,20 @@ const databaseStep = (label, verb, url) =>
     done(output.trim().split('\n').at(-1) || 'done')
   })
 
-/** @param {string} stateFolder */
-const prepareProduct = async (stateFolder) => {
+/**
+ * Everything up to the first answer. It runs under the launch lock, so that of two launchers the
+ * second sees the port that the first has taken.
+ * @param {string} stateFolder
+ */
+const startProduct = async (stateFolder) => {
+  const { host, port, origin, probe } = await chooseAddress(print)
   const database = await useDatabase(stateFolder)
   await step('Build', ensureBuild)
   await databaseStep('Migrations', 'migrate', database.url)
-  if (process.env.SEED_DEMO !== 'false')
+  if (process.env.SEED_DEMO !== 'false') {
     await databaseStep('Demo data', 'seed-if-empty', database.url)
-  return { database, secret: sessionSecret(stateFolder) }
-}
-
-const start = async () => {
-  const begin = performance.now()
-  const { database, secret } = await prepare(prepareProduct)
-  const { web, origin } = await step('Server', async ({ note, done }) => {
-    const { host, port, origin } = await chooseAddress(note)
+  }
+  const web = await step('Server', async ({ done }) => {
     const web = startWebProcess([inRoot('dist/server/index.js')], {
       // The product is built for use behind TLS; here it is served in the clear to this machine.
       COOKIE_SECURE: 'false',
@@ -47,12 +46,18 @@ const start = async () => {
       HOST: host,
       PORT: String(port),
       DATABASE_URL: database.url,
-      SESSION_SECRET: secret,
+      SESSION_SECRET: sessionSecret(stateFolder),
     })
-    await waitUntilHealthy(web, `http://${host.includes(':') ? `[${host}]` : host}:${port}`)
-    done('answers')
-    return { web, origin }
+    await waitUntilHealthy(web, probe)
+    done(`answers on ${host}:${port}`)
+    return web
   })
+  return { database, web, origin }
+}
+
+const start = async () => {
+  const begin = performance.now()
+  const { database, web, origin } = await prepare(startProduct)
   const accounts = parseDemoAccounts(await builtDatabaseCommand('accounts', database.url))
   print(`\nFoldyard is ready at ${origin} (${seconds(performance.now() - begin)})`)
   if (accounts.length > 0) print(`\nDemo accounts\n  ${demoAccountLines(accounts).join('\n  ')}`)
