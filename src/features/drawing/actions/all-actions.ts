@@ -32,4 +32,6 @@ const isPressed = (shortcut: Shortcut, pressed: PressedKey): boolean =>
   pressed.shiftKey === (shortcut.shift ?? false)
 
 export const actionOfKey = (pressed: PressedKey): BoardAction | undefined =>
-  Object.values(ACTIONS).find((action) => action.shortcuts.some((shortcut) => isPressed(shortcut, pressed)))
+  Object.values(ACTIONS).find((action) =>
+    action.shortcuts.some((shortcut) => isPressed(shortcut, pressed)),
+  )

@@ -31,14 +31,14 @@ export const hemAAction: BoardAction = {
   id: 'hemA',
   shortcuts: [],
   perform: (board) => toggleHem(board, 'A'),
-  isOn: ({ history }) => history.present.profile?.hemA != null,
+  isOn: ({ history }) => (history.present.profile?.hemA ?? null) !== null,
 }
 
 export const hemBAction: BoardAction = {
   id: 'hemB',
   shortcuts: [],
   perform: (board) => toggleHem(board, 'B'),
-  isOn: ({ history }) => history.present.profile?.hemB != null,
+  isOn: ({ history }) => (history.present.profile?.hemB ?? null) !== null,
 }
 
 /**

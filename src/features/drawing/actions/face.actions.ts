@@ -25,5 +25,9 @@ export const reverseAction: BoardAction = {
   perform: ({ history }) =>
     history.present.profile === null
       ? null
-      : { type: 'change', document: reverseWalk(history.present), selection: { kind: 'leg', leg: 1 } },
+      : {
+          type: 'change',
+          document: reverseWalk(history.present),
+          selection: { kind: 'leg', leg: 1 },
+        },
 }

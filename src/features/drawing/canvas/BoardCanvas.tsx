@@ -1,9 +1,9 @@
-import { useMemo, useState, type Dispatch } from 'react'
+import { useState, type Dispatch } from 'react'
 import { Layer, Stage } from 'react-konva/lib/ReactKonvaCore'
 import { useTranslation } from 'react-i18next'
 import type { FigureColors } from '#shared/drawing/figure-colors'
 import type { Part } from '#shared/drawing/display-list'
-import { sectionFigure, type FigureLabels } from '#shared/drawing/section-figure'
+import type { FigureLabels } from '#shared/drawing/section-figure'
 import type { Sheet } from '#shared/stock/stock.schema'
 import type { Degrees } from '#shared/units/brands'
 import { KonvaFigure } from '../figure/KonvaFigure'
@@ -11,8 +11,9 @@ import { shownDocument, type Board, type BoardEvent } from '../model/board'
 import { cornersOf, type BoardDocument } from '../model/board-document'
 import { fitViewport, zoomAbout, type Viewport } from '../model/viewport'
 import { CornerHandles } from './CornerHandles'
-import { figureView, viewportOf } from './sheet-view'
+import { viewportOf } from './sheet-view'
 import { SnapGuides } from './SnapGuides'
+import { useBoardFigure } from './useBoardFigure'
 import type { ElementSize } from './useElementSize'
 import { useElementSize } from './useElementSize'
 import { useSheetPointers } from './useSheetPointers'
@@ -75,22 +76,15 @@ function SizedCanvas({
 
   const isHeld = held !== null && (isBusy || held.of === board.history.present)
   const heldView = isHeld ? held.view : null
-  const { profile, placement } = shown
-  const figure = useMemo(
-    () =>
-      profile === null
-        ? null
-        : sectionFigure(profile, sheet, {
-            ...size,
-            labels,
-            selected: board.selection,
-            problems,
-            rotation: placement.heading,
-            ...(heldView ? { view: figureView(heldView, placement) } : {}),
-          }),
-    [profile, placement, sheet, size, labels, board.selection, problems, heldView],
-  )
-  const viewport = heldView ?? (figure ? viewportOf(figure.view, placement) : fitViewport(corners, size))
+  const figure = useBoardFigure(shown, heldView, {
+    sheet,
+    size,
+    labels,
+    problems,
+    selected: board.selection,
+  })
+  const viewport =
+    heldView ?? (figure ? viewportOf(figure.view, shown.placement) : fitViewport(corners, size))
 
   const pointers = useSheetPointers({
     board,
@@ -119,13 +113,20 @@ function SizedCanvas({
       onWheel={(event) => {
         const box = event.currentTarget.getBoundingClientRect()
         const at = { x: event.clientX - box.left, y: event.clientY - box.top }
-        setHeld({ view: zoomAbout(viewport, at, Math.exp(-event.deltaY / 400)), of: board.history.present })
+        setHeld({
+          view: zoomAbout(viewport, at, Math.exp(-event.deltaY / 400)),
+          of: board.history.present,
+        })
       }}
     >
       <Stage {...size} listening={false}>
         <Layer listening={false}>
           {board.gesture.kind !== 'idle' && (
-            <SnapGuides guides={board.gesture.guides} viewport={viewport} color={colors.roles.selected} />
+            <SnapGuides
+              guides={board.gesture.guides}
+              viewport={viewport}
+              color={colors.roles.selected}
+            />
           )}
           {figure && <KonvaFigure display={figure.display} colors={colors} />}
           <CornerHandles

@@ -31,7 +31,13 @@ export function SnapGuides({ guides, viewport, color }: Props) {
             opacity={0.6}
           />
         ) : (
-          <Line key={index} points={ray(from, heading(guide.heading))} stroke={color} strokeWidth={1} dash={[6, 4]} />
+          <Line
+            key={index}
+            points={ray(from, heading(guide.heading))}
+            stroke={color}
+            strokeWidth={1}
+            dash={[6, 4]}
+          />
         )
       })}
     </Group>

@@ -23,14 +23,20 @@ const PART_REACH = 18
 type Fingers =
   | { readonly kind: 'none' }
   | { readonly kind: 'gesture'; readonly pointer: number }
-  | { readonly kind: 'pan'; readonly pointer: number; readonly last: Point; readonly moved: boolean }
+  | {
+      readonly kind: 'pan'
+      readonly pointer: number
+      readonly last: Point
+      readonly moved: boolean
+    }
   | { readonly kind: 'pinch'; readonly points: ReadonlyMap<number, Point> }
 
 const middle = ([a, b]: readonly Point[]): Point => ({
   x: ((a?.x ?? 0) + (b?.x ?? 0)) / 2,
   y: ((a?.y ?? 0) + (b?.y ?? 0)) / 2,
 })
-const spread = ([a, b]: readonly Point[]): number => Math.hypot((a?.x ?? 0) - (b?.x ?? 0), (a?.y ?? 0) - (b?.y ?? 0))
+const spread = ([a, b]: readonly Point[]): number =>
+  Math.hypot((a?.x ?? 0) - (b?.x ?? 0), (a?.y ?? 0) - (b?.y ?? 0))
 
 /**
  * Turns presses on the canvas into events of the board, and two fingers into zoom and pan. A
@@ -44,7 +50,10 @@ export function useSheetPointers({ board, dispatch, viewport, holdView, findPart
     const box = event.currentTarget.getBoundingClientRect()
     return { x: event.clientX - box.left, y: event.clientY - box.top }
   }
-  const withSnap = (event: PointerEvent): SnapSettings => ({ ...snap, on: snap.on && !event.altKey })
+  const withSnap = (event: PointerEvent): SnapSettings => ({
+    ...snap,
+    on: snap.on && !event.altKey,
+  })
 
   function onPointerDown(event: PointerEvent<HTMLElement>) {
     if (event.pointerType === 'mouse' && event.button !== 0) return
@@ -90,8 +99,14 @@ export function useSheetPointers({ board, dispatch, viewport, holdView, findPart
     } else if (now.kind === 'pinch' && now.points.has(event.pointerId)) {
       const before = [...now.points.values()]
       const after = [...now.points].map(([id, point]) => (id === event.pointerId ? at : point))
-      const zoomed = zoomAbout(viewport, middle(before), spread(after) / Math.max(spread(before), 1))
-      holdView(panBy(zoomed, middle(after).x - middle(before).x, middle(after).y - middle(before).y))
+      const zoomed = zoomAbout(
+        viewport,
+        middle(before),
+        spread(after) / Math.max(spread(before), 1),
+      )
+      holdView(
+        panBy(zoomed, middle(after).x - middle(before).x, middle(after).y - middle(before).y),
+      )
       fingers.current = { kind: 'pinch', points: new Map(now.points).set(event.pointerId, at) }
     }
   }

@@ -1,0 +1,85 @@
+import { useQueryClient } from '@tanstack/react-query'
+import type { BodyInputOf } from '#shared/http/endpoint'
+import type { Order } from '#shared/orders/order.schema'
+import {
+  amendOrder,
+  answerQuestion,
+  askAboutOrder,
+  releaseOrder,
+  submitOrder,
+  withdrawOrder,
+} from '#shared/orders/orders.contract'
+import { call } from '@/lib/api/call'
+import { useIdempotentMutation } from '@/lib/api/useIdempotentMutation'
+import { orderQuery } from './orders.queries'
+
+/** The answer of every change is the order as it now is; lists and the floor are read anew. */
+function useStoreOrder() {
+  const client = useQueryClient()
+  return async (order: Order) => {
+    client.setQueryData(orderQuery(order.id).queryKey, order)
+    await Promise.all([
+      client.invalidateQueries({ queryKey: ['orders', 'list'] }),
+      client.invalidateQueries({ queryKey: ['runs'] }),
+      client.invalidateQueries({ queryKey: ['jobs'] }),
+    ])
+  }
+}
+
+/** After a refusal because somebody was faster, what is shown is what is there now. */
+function useRereadOrder(orderId: string) {
+  const client = useQueryClient()
+  return () => client.invalidateQueries({ queryKey: orderQuery(orderId).queryKey })
+}
+
+export function useSubmitOrder() {
+  return useIdempotentMutation({
+    send: (body: BodyInputOf<typeof submitOrder>, idempotencyKey) =>
+      call(submitOrder, { body, idempotencyKey }),
+    onSuccess: useStoreOrder(),
+  })
+}
+
+export function useAmendOrder(orderId: string) {
+  return useIdempotentMutation({
+    send: (body: BodyInputOf<typeof amendOrder>, idempotencyKey) =>
+      call(amendOrder, { params: { orderId }, body, idempotencyKey }),
+    onSuccess: useStoreOrder(),
+  })
+}
+
+export function useAskAboutOrder(orderId: string) {
+  return useIdempotentMutation({
+    send: (body: BodyInputOf<typeof askAboutOrder>, idempotencyKey) =>
+      call(askAboutOrder, { params: { orderId }, body, idempotencyKey }),
+    onSuccess: useStoreOrder(),
+    onError: useRereadOrder(orderId),
+  })
+}
+
+export function useAnswerQuestion(orderId: string) {
+  return useIdempotentMutation({
+    send: (body: BodyInputOf<typeof answerQuestion>, idempotencyKey) =>
+      call(answerQuestion, { params: { orderId }, body, idempotencyKey }),
+    onSuccess: useStoreOrder(),
+    onError: useRereadOrder(orderId),
+  })
+}
+
+export function useReleaseOrder(orderId: string) {
+  return useIdempotentMutation({
+    send: (body: BodyInputOf<typeof releaseOrder>, idempotencyKey) =>
+      call(releaseOrder, { params: { orderId }, body, idempotencyKey }),
+    onSuccess: useStoreOrder(),
+    onError: useRereadOrder(orderId),
+  })
+}
+
+export function useWithdrawOrder(orderId: string) {
+  return useIdempotentMutation({
+    send: (body: BodyInputOf<typeof withdrawOrder>, idempotencyKey) =>
+      call(withdrawOrder, { params: { orderId }, body, idempotencyKey }),
+    onSuccess: useStoreOrder(),
+    onError: useRereadOrder(orderId),
+  })
+}
