@@ -1,5 +1,4 @@
 import type { Db } from '#server/db/knex'
-import { COMPANIES } from '#server/db/tables/companies'
 import { JOBS, type JobInsert, type JobUpdate } from '#server/db/tables/jobs'
 
 export const createJobsStore = (db: Db) => ({
@@ -19,10 +18,6 @@ export const createJobsStore = (db: Db) => ({
       .where({ id, version })
       .update({ ...changes, version: version + 1 })
     return count === 1
-  },
-
-  async companyExists(id: string): Promise<boolean> {
-    return (await db(COMPANIES).where({ id }).first('id')) !== undefined
   },
 })
 

@@ -1,4 +1,6 @@
 import { companyScope } from '#server/db/company-scope'
+import type { Db } from '#server/db/knex'
+import { COMPANIES } from '#server/db/tables/companies'
 import type { SignedIn } from '#server/http/define-route'
 import { invalidField, notFound } from '#server/http/errors'
 
@@ -11,7 +13,7 @@ export type OwningCompany = (companyId: string | undefined, person: SignedIn) =>
  * @throws not-found where a crew lead names another company, invalid-input naming `companyId`
  */
 export const createOwningCompany =
-  (companyExists: (id: string) => Promise<boolean>): OwningCompany =>
+  (db: Db): OwningCompany =>
   async (companyId, person) => {
     const own = companyScope(person)
     if (own !== null) {
@@ -19,6 +21,7 @@ export const createOwningCompany =
       return own
     }
     if (companyId === undefined) throw invalidField('companyId', 'Say which company it is for.')
-    if (await companyExists(companyId)) return companyId
+    const company = await db(COMPANIES).where({ id: companyId }).first('id')
+    if (company) return company.id
     throw invalidField('companyId', 'There is no such company. Choose one of the list.')
   }
