@@ -1,4 +1,3 @@
-import type { Clock } from '#server/adapters/clock'
 import type { Db } from '#server/db/knex'
 import { PIECES, type PieceRow } from '#server/db/tables/pieces'
 import { notFound, wrongState } from '#server/http/errors'
@@ -6,8 +5,9 @@ import type { SignedIn } from '#server/http/signed-in'
 import type { ResolvedCode } from '#shared/pieces/lookup.contract'
 import { findMove } from '#shared/pieces/piece-state'
 import type { Moved, Piece } from '#shared/pieces/pieces.contract'
-import { freshCode } from './fresh-codes'
+import { freshCode } from './fresh-code'
 import { getResolvedCode } from './lookup.queries'
+import { makingPorts, type MakingPorts } from './making-ports'
 import { lockPieces, movePieces } from './move-piece'
 import { pieceConflict } from './piece-conflict'
 import { getPiece, getPiecePlace, getPieces } from './pieces.queries'
@@ -30,8 +30,7 @@ export interface PiecesService {
   ) => Promise<{ pieces: Piece[] }>
 }
 
-/** Without a clock everything happens when the database says. */
-export const createPiecesService = (db: Db, clock?: Clock): PiecesService => ({
+export const createPiecesService = (db: Db, ports: MakingPorts = makingPorts): PiecesService => ({
   getPiece: (code, person) => getPiece(db, readCode(code, 'piece'), person),
 
   resolveCode: (code) => getResolvedCode(db, readAnyCode(code)),
@@ -51,7 +50,7 @@ export const createPiecesService = (db: Db, clock?: Clock): PiecesService => ({
       to: 'bent',
       person,
       station: 'brake',
-      at: clock?.now(),
+      at: ports.clock?.now(),
     })
     if (!moved) throw new Error(`Piece ${code} was bent without an event.`)
     return { piece: await getPiece(db, code, person), eventId: moved.eventId }
@@ -64,7 +63,7 @@ export const createPiecesService = (db: Db, clock?: Clock): PiecesService => ({
       throw await pieceConflict(db, piece.id, { from: 'bent', to: 'scrapped' })
     }
     const station = piece.state === 'bundled' ? 'rack' : 'brake'
-    const making = { person, station, at: clock?.now() } as const
+    const making = { person, station, at: ports.clock?.now() } as const
     // The remake takes the place of the spoiled piece in its line, which holds one living piece.
     await movePieces(db, {
       pieceIds: [piece.id],
@@ -73,7 +72,7 @@ export const createPiecesService = (db: Db, clock?: Clock): PiecesService => ({
       reason,
       ...making,
     })
-    const remakeCode = await freshCode(db, 'piece')
+    const remakeCode = await freshCode(db, 'piece', ports)
     await createPieces(db, [remakeOf(piece, remakeCode)], making)
     const [scrapped, remake] = await getPieces(db, [code, remakeCode], person)
     if (!scrapped || !remake) throw notFound('piece')
@@ -81,7 +80,7 @@ export const createPiecesService = (db: Db, clock?: Clock): PiecesService => ({
   },
 
   undoMoves: async (wish, person) => {
-    const codes = await undoMoves(db, wish, person, clock?.now())
+    const codes = await undoMoves(db, wish, person, ports.clock?.now())
     return { pieces: await getPieces(db, codes, person) }
   },
 })

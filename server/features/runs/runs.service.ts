@@ -1,6 +1,6 @@
-import type { Clock } from '#server/adapters/clock'
 import type { Db } from '#server/db/knex'
 import { momentWords } from '#server/features/pieces/move-words'
+import { makingPorts, type MakingPorts } from '#server/features/pieces/making-ports'
 import { movePieces } from '#server/features/pieces/move-piece'
 import { notAllowed, notFound, wrongState } from '#server/http/errors'
 import type { SignedIn } from '#server/http/signed-in'
@@ -26,8 +26,7 @@ export interface RunsService {
   ) => Promise<AnswerOf<typeof bendCount>>
 }
 
-/** Without a clock everything happens when the database says. */
-export const createRunsService = (db: Db, clock?: Clock): RunsService => ({
+export const createRunsService = (db: Db, ports: MakingPorts = makingPorts): RunsService => ({
   listRuns: async (state) => ({ items: await listRuns(db, state) }),
 
   getRun: (id) => getRun(db, id),
@@ -35,7 +34,7 @@ export const createRunsService = (db: Db, clock?: Clock): RunsService => ({
   claimRun: async (id, person) => {
     const { claimed_by: holderId } = await getLockedRun(db, id)
     if (holderId !== null && holderId !== person.id) throw heldByAnother(await getRun(db, id))
-    if (await claimRun(db, id, person.id, clock?.now())) await announceRun(db, id)
+    if (await claimRun(db, id, person.id, ports.clock?.now())) await announceRun(db, id)
     return getRun(db, id)
   },
 
@@ -61,7 +60,7 @@ export const createRunsService = (db: Db, clock?: Clock): RunsService => ({
       to: 'bent',
       person,
       station: 'brake',
-      at: clock?.now(),
+      at: ports.clock?.now(),
     })
     return { run: await getRun(db, id), eventIds: moved.map((piece) => piece.eventId) }
   },
