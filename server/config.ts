@@ -3,6 +3,16 @@ import { z } from 'zod'
 /** Signs sessions on a developer's machine only; production refuses it. */
 const DEVELOPMENT_SECRET = 'foldyard-development-secret-not-for-production'
 
+function isTimeZone(name: string): boolean {
+  try {
+    new Intl.DateTimeFormat('en', { timeZone: name })
+    return true
+  } catch (error) {
+    if (error instanceof RangeError) return false
+    throw error
+  }
+}
+
 const flag = z.enum(['true', 'false']).transform((text) => text === 'true')
 
 const environmentSchema = z.object({
@@ -22,6 +32,11 @@ const environmentSchema = z.object({
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
   /** Where the built client lies. */
   CLIENT_DIR: z.string().min(1).default('dist/client'),
+  /** The shop's own days begin and end here. */
+  SHOP_TIME_ZONE: z
+    .string()
+    .refine(isTimeZone, 'Must be an IANA name such as America/Chicago.')
+    .default('America/Chicago'),
 })
 
 export interface Config {
@@ -34,6 +49,7 @@ export interface Config {
   readonly trustProxy: number
   readonly logLevel: z.output<typeof environmentSchema>['LOG_LEVEL']
   readonly clientDir: string
+  readonly shopTimeZone: string
 }
 
 /** Names every setting that is missing or wrong, not only the first. */
@@ -76,6 +92,7 @@ export function readConfig(environment: Environment = process.env): Config {
     trustProxy: settings.TRUST_PROXY,
     logLevel: settings.LOG_LEVEL,
     clientDir: settings.CLIENT_DIR,
+    shopTimeZone: settings.SHOP_TIME_ZONE,
   }
 }
 

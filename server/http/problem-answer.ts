@@ -55,6 +55,7 @@ function problemOf(error: unknown): ProblemError {
 /** What Express and the body parser refuse before a handler sees the request. */
 function unreadableRequest(error: unknown): ProblemError | undefined {
   if (!isHttpError(error) || error.status >= 500) return undefined
+  if (error.status === 404) return notFound('file')
   switch (error.type) {
     case 'entity.parse.failed':
       return new ProblemError('invalid-input', 'The body is not JSON. Send valid JSON.')

@@ -1,11 +1,29 @@
+import { createHash } from 'node:crypto'
 import type { RequestHandler } from 'express'
 import helmet from 'helmet'
+
+/** The style elements that the widget library writes, letter for letter; any other is refused. */
+const LIBRARY_STYLES = [
+  `@layer {
+  [data-react-aria-pressable] {
+    touch-action: pan-x pan-y pinch-zoom;
+  }
+}`,
+  `@layer {
+  * {
+    overscroll-behavior: contain;
+  }
+}`,
+]
+
+const hashSource = (text: string): string =>
+  `'sha256-${createHash('sha256').update(text).digest('base64')}'`
 
 const CONTENT_SECURITY_POLICY = {
   defaultSrc: ["'self'"],
   scriptSrc: ["'self'"],
   scriptSrcAttr: ["'none'"],
-  styleSrc: ["'self'"],
+  styleSrc: ["'self'", ...LIBRARY_STYLES.map(hashSource)],
   // Positions that widgets and the canvas container compute at run time.
   styleSrcAttr: ["'unsafe-inline'"],
   imgSrc: ["'self'", 'data:', 'blob:'],

@@ -34,6 +34,7 @@ export interface LiveHubOptions {
 export class LiveHub {
   private readonly streams = new Set<Stream>()
   private readonly listener: LiveListener
+  /** 0 before the first message: a connection lost then means a reset. */
   private lastSeenId = 0
   private timer: NodeJS.Timeout | undefined
 
@@ -48,7 +49,6 @@ export class LiveHub {
 
   async start(): Promise<void> {
     await this.listener.start()
-    this.lastSeenId = Math.max(this.lastSeenId, await findLatestEventId(this.options.db))
     this.timer = setInterval(() => this.checkSessionsNow(), SESSION_CHECK_MS)
     this.timer.unref()
   }
@@ -105,7 +105,8 @@ export class LiveHub {
   }
 
   private async catchUpAll(): Promise<void> {
-    await this.replay(this.streams, await listEventsSince(this.options.db, this.lastSeenId))
+    const missed = await listEventsSince(this.options.db, this.lastSeenId)
+    await this.replay(this.streams, missed)
   }
 
   private async replay(streams: Iterable<Stream>, missed: CatchUp): Promise<void> {

@@ -20,9 +20,14 @@ export class LiveListener {
 
   constructor(private readonly options: LiveListenerOptions) {}
 
-  /** Resolves when listening. */
+  /** Resolves when listening, or when the first try failed and others will follow. */
   async start(): Promise<void> {
-    this.client = await this.connect()
+    try {
+      this.client = await this.connect()
+    } catch (error) {
+      this.options.onError('live connection not made yet', error)
+      void this.reconnect()
+    }
   }
 
   async stop(): Promise<void> {

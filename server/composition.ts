@@ -1,0 +1,65 @@
+import type { Knex } from 'knex'
+import type { Clock } from '#server/adapters/clock'
+import { createBundlesService } from '#server/features/bundles/bundles.service'
+import { bundlesRoutes } from '#server/features/bundles/bundles.routes'
+import { createHandOffService } from '#server/features/hand-off/hand-off.service'
+import { handOffRoutes } from '#server/features/hand-off/hand-off.routes'
+import { createPiecesService } from '#server/features/pieces/pieces.service'
+import { piecesRoutes } from '#server/features/pieces/pieces.routes'
+import { createRunsService } from '#server/features/runs/runs.service'
+import { runsRoutes } from '#server/features/runs/runs.routes'
+import { createBrakesQueries } from '#server/features/brakes/brakes.queries'
+import { brakesRoutes } from '#server/features/brakes/brakes.routes'
+import { createJobsServiceOn } from '#server/features/jobs/create-jobs-service'
+import { jobsRoutes } from '#server/features/jobs/jobs.routes'
+import { createOrdersServiceOn } from '#server/features/orders/create-orders-service'
+import { ordersRoutes } from '#server/features/orders/orders.routes'
+import { createPeopleService } from '#server/features/people/people.service'
+import { peopleRoutes } from '#server/features/people/people.routes'
+import { sessionRoutes } from '#server/features/people/session.routes'
+import { createSignIn, type SignIn } from '#server/features/people/sign-in'
+import { signInLimits } from '#server/features/people/sign-in-limits'
+import { createPlansServiceOn } from '#server/features/plans/create-plans-service'
+import { plansRoutes } from '#server/features/plans/plans.routes'
+import { createShelfServiceOn } from '#server/features/shelf/create-shelf-service'
+import { shelfRoutes } from '#server/features/shelf/shelf.routes'
+import { createStocksQueries } from '#server/features/stocks/stocks.queries'
+import { stocksRoutes } from '#server/features/stocks/stocks.routes'
+import type { Route } from '#server/http/define-route'
+import { createLocalPlanner } from '#server/planning/local-planner'
+
+export interface Ports {
+  /** The pool. */
+  readonly db: Knex
+  readonly clock: Clock
+  /** IANA name. */
+  readonly shopTimeZone: string
+}
+
+export interface Composition {
+  readonly routes: readonly Route[]
+  readonly signIn: SignIn
+}
+
+/** The only place that knows every feature: each service is built anew on the handle it is given. */
+export function compose({ db, clock, shopTimeZone }: Ports): Composition {
+  const signIn = createSignIn(db)
+  const planner = createLocalPlanner()
+  return {
+    signIn,
+    routes: [
+      ...sessionRoutes({ signIn, limits: signInLimits(db, clock), clock }),
+      ...peopleRoutes(createPeopleService),
+      ...jobsRoutes(createJobsServiceOn),
+      ...shelfRoutes((handle) => createShelfServiceOn(handle, clock)),
+      ...stocksRoutes(createStocksQueries),
+      ...brakesRoutes(createBrakesQueries),
+      ...plansRoutes((handle) => createPlansServiceOn(handle, planner)),
+      ...ordersRoutes((handle) => createOrdersServiceOn(handle, { clock, planner, shopTimeZone })),
+      ...piecesRoutes(createPiecesService),
+      ...runsRoutes(createRunsService),
+      ...bundlesRoutes(createBundlesService),
+      ...handOffRoutes(createHandOffService),
+    ],
+  }
+}

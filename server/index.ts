@@ -1,0 +1,19 @@
+import { pino } from 'pino'
+import { systemClock } from '#server/adapters/clock'
+import { readConfig } from '#server/config'
+import { endGracefully } from '#server/graceful-end'
+import { serveClient } from '#server/http/serve-client'
+import { exitOnConfigError } from '#server/exit-on-config-error'
+import { startServer } from '#server/running-server'
+
+const config = exitOnConfigError(readConfig)
+const logger = pino({ level: config.logLevel })
+const server = await startServer({
+  config,
+  logger,
+  clock: systemClock,
+  client: () => Promise.resolve(serveClient(config.clientDir)),
+  contentSecurityPolicy: true,
+})
+endGracefully(server, logger)
+logger.info({ url: server.url }, 'listening')

@@ -1,0 +1,138 @@
+import { randomUUID } from 'node:crypto'
+import { z } from 'zod'
+import type { AnswerOf, BodyInputOf, Endpoint, Method, QueryInputOf } from '#shared/http/endpoint'
+import { problemSchema, type Problem } from '#shared/http/problem'
+import { sessionSchema } from '#shared/people/people.contract'
+
+export interface ApiAnswer {
+  readonly status: number
+  readonly headers: Headers
+  readonly body: unknown
+  /** The body as a problem; throws when it is none. */
+  readonly problem: () => Problem
+}
+
+export interface SendOptions {
+  /** Taken in place of a new one. */
+  readonly idempotencyKey?: string
+  readonly headers?: Record<string, string>
+}
+
+interface CallInput<E extends Endpoint> extends SendOptions {
+  readonly params?: Record<string, string>
+  readonly query?: QueryInputOf<E>
+  readonly body?: BodyInputOf<E>
+}
+
+/**
+ * One browser: keeps its cookie, sends the CSRF token with every change and a new Idempotency-Key
+ * with each. Paths are relative to /api.
+ */
+export class ApiAgent {
+  private cookie = ''
+  private csrfToken = ''
+
+  constructor(private readonly origin: string) {}
+
+  get = (path: string, options?: SendOptions) => this.send('GET', path, undefined, options)
+  post = (path: string, body?: unknown, options?: SendOptions) =>
+    this.send('POST', path, body, options)
+  put = (path: string, body?: unknown, options?: SendOptions) =>
+    this.send('PUT', path, body, options)
+  patch = (path: string, body?: unknown, options?: SendOptions) =>
+    this.send('PATCH', path, body, options)
+  del = (path: string, options?: SendOptions) => this.send('DELETE', path, undefined, options)
+
+  /** Calls an endpoint of the contract and parses its answer; a problem is thrown. */
+  async call<E extends Endpoint>(endpoint: E, input: CallInput<E> = {}): Promise<AnswerOf<E>> {
+    const query = searchOf(input.query)
+    const path = fillPath(endpoint.path, input.params ?? {}) + query
+    const answer = await this.send(endpoint.method, path, input.body, input)
+    if (answer.status !== endpoint.success) {
+      throw new Error(
+        `${endpoint.method} ${path} answered ${answer.status}: ${JSON.stringify(answer.body)}`,
+      )
+    }
+    return z.parse<E['answer']>(endpoint.answer, answer.body)
+  }
+
+  /** Reads the session, as a page does when it loads. */
+  async loadSession() {
+    const { person, csrfToken } = sessionSchema.parse((await this.get('/session')).body)
+    this.csrfToken = csrfToken
+    return person
+  }
+
+  async signIn(email: string, password: string): Promise<ApiAnswer> {
+    await this.loadSession()
+    const answer = await this.post('/session', { email, password })
+    if (answer.status === 200) this.csrfToken = sessionSchema.parse(answer.body).csrfToken
+    return answer
+  }
+
+  /** The request as `fetch` sees it, for what is no plain JSON answer. */
+  fetch(path: string, init: RequestInit = {}): Promise<Response> {
+    const headers = new Headers(init.headers)
+    if (this.cookie) headers.set('cookie', this.cookie)
+    return fetch(`${this.origin}/api${path}`, { ...init, headers })
+  }
+
+  async send(
+    method: Method,
+    path: string,
+    body?: unknown,
+    options: SendOptions = {},
+  ): Promise<ApiAnswer> {
+    const headers = new Headers()
+    if (method !== 'GET') {
+      headers.set('x-csrf-token', this.csrfToken)
+      headers.set('idempotency-key', options.idempotencyKey ?? randomUUID())
+    }
+    if (body !== undefined) headers.set('content-type', 'application/json')
+    for (const [name, value] of Object.entries(options.headers ?? {})) headers.set(name, value)
+    const response = await this.fetch(path, {
+      method,
+      headers,
+      ...(body !== undefined && { body: JSON.stringify(body) }),
+    })
+    this.keepCookie(response)
+    return readAnswer(response)
+  }
+
+  private keepCookie(response: Response): void {
+    for (const line of response.headers.getSetCookie()) {
+      const pair = line.split(';', 1)[0] ?? ''
+      this.cookie = pair.endsWith('=') ? '' : pair
+    }
+  }
+}
+
+async function readAnswer(response: Response): Promise<ApiAnswer> {
+  const text = await response.text()
+  const isJson = response.headers.get('content-type')?.includes('json') ?? false
+  const body: unknown = text === '' ? undefined : isJson ? JSON.parse(text) : text
+  return {
+    status: response.status,
+    headers: response.headers,
+    body,
+    problem: () => problemSchema.parse(body),
+  }
+}
+
+export const fillPath = (path: string, params: Record<string, string>): string =>
+  path.replace(/:(\w+)/g, (_, name: string) => {
+    const value = params[name]
+    if (value === undefined) throw new Error(`The path ${path} needs ${name}.`)
+    return encodeURIComponent(value)
+  })
+
+function searchOf(query: unknown): string {
+  if (query === undefined) return ''
+  const given = z.record(z.string(), z.union([z.string(), z.number(), z.boolean()]).optional())
+  const search = new URLSearchParams()
+  for (const [name, value] of Object.entries(given.parse(query))) {
+    if (value !== undefined) search.set(name, String(value))
+  }
+  const text = search.toString()
+  return text && `?${text}`
+}
