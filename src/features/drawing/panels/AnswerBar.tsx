@@ -1,0 +1,51 @@
+import { useTranslation } from 'react-i18next'
+import type { Inches } from '#shared/units/brands'
+import { printRun, printSize } from '#shared/units/print-length'
+import { printWeight } from '#shared/units/weight'
+import { usePerson } from '@/features/people/person-context'
+import type { CheckedPlan, DrawingCheck } from '../check/check-drawing'
+import { BendsOn } from './BendsOn'
+
+interface Props {
+  readonly check: DrawingCheck | null
+  readonly plans: readonly CheckedPlan[]
+  readonly pieceLength: Inches
+  /** Whether the server has said the same: figures are worked out here first. */
+  readonly confirmed: boolean
+}
+
+/** The live figures under a drawing: what it takes, what it weighs, and where it bends. */
+export function AnswerBar({ check, plans, pieceLength, confirmed }: Props) {
+  const { t } = useTranslation('drawing')
+  const { units } = usePerson()
+  const strip = check?.strip ?? null
+  const hits = plans
+    .find(({ plan }) => plan.feasible)
+    ?.plan.steps.reduce((sum, step) => sum + step.hits, 0)
+  const cells = [
+    { label: t('answer.girth'), value: strip && printSize(strip.girth, units) },
+    { label: t('answer.strip'), value: strip && printSize(strip.stripWidth, units, 32) },
+    {
+      label: printRun(pieceLength, units),
+      value: check?.weight == null ? null : printWeight(check.weight, units),
+    },
+    { label: t('answer.hits'), value: hits === undefined ? null : String(hits) },
+  ]
+  return (
+    <section
+      aria-label={t('answer.name')}
+      data-confirmed={confirmed}
+      className="shrink-0 border-y border-rule"
+    >
+      <dl className="grid grid-cols-4 divide-x divide-rule">
+        {cells.map(({ label, value }) => (
+          <div key={label} className="px-3 py-1.5">
+            <dt className="text-small text-scribe">{label}</dt>
+            <dd className="font-figure text-lead whitespace-nowrap">{value ?? '–'}</dd>
+          </div>
+        ))}
+      </dl>
+      <BendsOn check={check} plans={plans} />
+    </section>
+  )
+}

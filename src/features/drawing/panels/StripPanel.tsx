@@ -1,0 +1,48 @@
+import { useMemo, type Dispatch } from 'react'
+import { useTranslation } from 'react-i18next'
+import type { FigureColors } from '#shared/drawing/figure-colors'
+import type { Part } from '#shared/drawing/display-list'
+import type { FigureLabels } from '#shared/drawing/section-figure'
+import { stripFigure } from '#shared/drawing/strip-figure'
+import type { Profile } from '#shared/profile/profile.schema'
+import type { Strip } from '#shared/strip/strip.schema'
+import { useElementSize } from '../canvas/useElementSize'
+import { SvgFigure } from '../figure/SvgFigure'
+import type { BoardEvent } from '../model/board'
+
+interface Props {
+  readonly profile: Profile
+  readonly strip: Strip
+  readonly selected: Part | null
+  readonly dispatch: Dispatch<BoardEvent>
+  readonly colors: FigureColors
+  readonly labels: FigureLabels
+}
+
+const HEIGHT = 84
+
+/** The same piece laid flat: edge A left, edge B right. A touch lights up the part in the section. */
+export function StripPanel({ profile, strip, selected, dispatch, colors, labels }: Props) {
+  const { t } = useTranslation('drawing')
+  const { ref, size } = useElementSize()
+  const width = size?.width ?? 0
+  const figure = useMemo(
+    () =>
+      width > 0
+        ? stripFigure(profile, strip, { width, height: HEIGHT, labels, selected, targets: true })
+        : null,
+    [profile, strip, width, labels, selected],
+  )
+  return (
+    <div ref={ref} className="shrink-0" style={{ height: HEIGHT }}>
+      {figure && (
+        <SvgFigure
+          display={figure.display}
+          colors={colors}
+          title={t('figure.stripOfDrawing')}
+          onPart={(part) => dispatch({ type: 'select', part })}
+        />
+      )}
+    </div>
+  )
+}
