@@ -39,6 +39,31 @@ export const figureColors = (theme: ThemeName, paintHex: string | null): FigureC
   }
 }
 
+/** A whole drawing in one color, such as the color of the text around a glyph. */
+export const oneColor = (color: string): FigureColors => ({
+  ground: 'none',
+  roles: {
+    metal: color,
+    bare: color,
+    paint: color,
+    paintEdge: color,
+    dimension: color,
+    dimensionText: color,
+    angleText: color,
+    edge: color,
+    strip: 'none',
+    crease: color,
+    hemHatch: color,
+    selected: color,
+    hovered: color,
+    problem: color,
+    tool: 'none',
+    toolEdge: color,
+    ghost: color,
+    target: 'none',
+  },
+})
+
 /** Ink on white paper: what a label printer or a fax can show. */
 export const inkColors = (): FigureColors => {
   const black = '#000000'

@@ -1,5 +1,5 @@
 import type { Bounds } from '#shared/geometry/bounds'
-import { contains, holds } from '#shared/geometry/bounds'
+import { boxAround, contains, holds } from '#shared/geometry/bounds'
 import type { Segment } from '#shared/geometry/segment'
 import { clipToBox, segment } from '#shared/geometry/segment'
 import type { Vector } from '#shared/geometry/vector'
@@ -9,7 +9,7 @@ import { isBoxClear, isLineClear } from './clearance'
 import type { Point } from './display-list'
 import type { Pen } from './pen'
 import type { Candidate } from './placement'
-import { textBox, textWidth } from './text-box'
+import { textBox } from './text-box'
 
 /** Where labels may go: inside the frame and off the metal. Pixels, y down. */
 export interface LabelSpace {
@@ -67,6 +67,8 @@ interface RingOptions {
   readonly gaps: readonly number[]
   /** From this gap on a leader is drawn. */
   readonly leaderFrom: number
+  /** How near to the anchor a leader ends; the metal's half weight and a hair unless given. */
+  readonly stop?: number
   /** The widest turn from the first direction, degrees. */
   readonly widest: number
   readonly cost: number
@@ -74,19 +76,20 @@ interface RingOptions {
   readonly costPerGap: number
 }
 
-/** The leader from the border of the text to the anchor, short of the metal by a hair. */
-const leaderTo = (space: LabelSpace, at: Vector, box: Bounds, anchor: Vector): Segment => {
+/** The leader from the border of the text towards the anchor, up to `stop` from it. */
+const leaderTo = (at: Vector, box: Bounds, anchor: Vector, stop: number): Segment => {
   const inside = clipToBox(segment(at, anchor), box)
   const from = inside?.to ?? at
   const back = subtract(from, anchor)
   const length = distance(from, anchor)
-  const stop = Math.min(length, space.metal.half + 2)
-  return segment(from, length === 0 ? anchor : add(anchor, scale(back, stop / length)))
+  const left = Math.min(length, stop)
+  return segment(from, length === 0 ? anchor : add(anchor, scale(back, left / length)))
 }
 
 /** Places around an anchor, nearer and straighter ones cheaper. */
 export const ringCandidates = (space: LabelSpace, options: RingOptions): PlacedLabel[] => {
   const { text, size, anchor } = options
+  const stop = options.stop ?? space.metal.half + 2
   const found: PlacedLabel[] = []
   for (const gap of options.gaps) {
     for (const { direction, turned } of fan(options.first, options.step)) {
@@ -94,8 +97,10 @@ export const ringCandidates = (space: LabelSpace, options: RingOptions): PlacedL
       const at = add(anchor, scale(direction, gap + reachOfText(text, size, direction)))
       const box = textBox(text, size, at)
       if (!isFree(space, box)) continue
-      const lines = gap >= options.leaderFrom ? [leaderTo(space, at, box, anchor)] : []
-      if (!lines.every((line) => isLineFree(space, line, 1))) continue
+      // Even without its leader drawn, nothing may stand between a label and what it means.
+      const leader = leaderTo(at, box, anchor, stop)
+      if (!isLineFree(space, leader, 1)) continue
+      const lines = gap >= options.leaderFrom ? [leader] : []
       const cost =
         options.cost + options.costPerTurn * turned + options.costPerGap * (gap / space.pen.text)
       found.push({ text, at, size, boxes: [box], lines, cost })
@@ -104,7 +109,10 @@ export const ringCandidates = (space: LabelSpace, options: RingOptions): PlacedL
   return found
 }
 
-/** The letter of an edge in its circle. */
+/** Room between an edge and its letter's circle; from the third on a leader leads there. */
+const LETTER_GAPS = [4, 9, 18, 30, 46]
+
+/** The letter of an edge in its circle, close to the edge or tied to it. */
 export const letterCandidates = (
   space: LabelSpace,
   letter: string,
@@ -112,20 +120,21 @@ export const letterCandidates = (
   first: Vector,
 ): PlacedLabel[] => {
   const size = space.pen.text * 0.85
-  const radius = Math.max(textWidth(letter, size), size) * 0.68
+  const radius = size * 0.68
   const found: PlacedLabel[] = []
-  for (const gap of [4, 10, 18, 30, 46]) {
-    for (const { direction, turned } of fan(first, 30)) {
+  for (const [row, gap] of LETTER_GAPS.entries()) {
+    for (const { direction, turned } of fan(first, 15)) {
       const at = add(anchor, scale(direction, space.metal.half + radius + gap))
-      const around = {
-        minX: at.x - radius,
-        minY: at.y - radius,
-        maxX: at.x + radius,
-        maxY: at.y + radius,
-      }
+      const around = boxAround(at, 2 * radius, 2 * radius)
       if (!isFree(space, around)) continue
-      const cost = turned / 20 + gap / 4
-      found.push({ text: letter, at, size, radius, boxes: [around], lines: [], cost })
+      const leader = segment(
+        add(at, scale(direction, 0 - radius)),
+        add(anchor, scale(direction, space.metal.half + 2)),
+      )
+      if (!isLineFree(space, leader, 0.5)) continue
+      const lines = row < 2 ? [] : [leader]
+      const cost = turned / 20 + row * 2
+      found.push({ text: letter, at, size, radius, boxes: [around], lines, cost })
     }
   }
   return found

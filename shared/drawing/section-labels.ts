@@ -175,23 +175,41 @@ const angleLabels = (
     const included = 180 - Math.abs(part.turn)
     const { half } = space.metal
     const size = space.pen.text * 0.9
-    const gaps = [0, 1, 2, 3, 4, 5, 6, 7, 8].map((row) => half + 3 + row * size * 0.5)
+    // In a sharp bend the metal of both legs leaves no room until this far from the corner.
+    const narrow = (half + 2) / Math.sin(radians(included) / 2)
+    const gaps = [0, 1, 2, 3, 4, 5, 6, 8, 10, 13].map((row) => narrow + 1 + row * size * 0.45)
+    const inside = insideOf(section, part)
+    const common = {
+      text: labels.angle(part.turn),
+      size,
+      anchor: section.toFrame(part.mid),
+      step: 10,
+      costPerTurn: 0.02,
+      costPerGap: 1,
+    }
     return {
       part: { kind: 'bend' as const, bend: part.fold },
       role: 'angleText' as const,
       weight: WEIGHT.angle,
-      candidates: ringCandidates(space, {
-        text: labels.angle(part.turn),
-        size,
-        anchor: section.toFrame(part.mid),
-        first: insideOf(section, part),
-        step: 10,
-        gaps,
-        leaderFrom: Infinity,
-        widest: Math.min(60, included / 2),
-        cost: 0,
-        costPerTurn: 0.02,
-        costPerGap: 1,
-      }),
+      candidates: [
+        ...ringCandidates(space, {
+          ...common,
+          first: inside,
+          gaps,
+          leaderFrom: narrow + 1 + 2.4 * size,
+          stop: narrow,
+          widest: Math.min(70, included / 2),
+          cost: 0,
+        }),
+        // Where the inside is taken, by a hem say, the angle stands outside and a line leads in.
+        ...ringCandidates(space, {
+          ...common,
+          first: scale(inside, -1),
+          gaps: [1.2, 2, 3, 4.5].map((rows) => half + rows * size),
+          leaderFrom: 0,
+          widest: 80,
+          cost: 11,
+        }),
+      ],
     }
   })

@@ -13,6 +13,9 @@ interface DimensionRoom {
   readonly length: (inches: number) => string
 }
 
+/** Smallest type of a running dimension, pixels. */
+const SMALLEST = 8
+
 interface Mark {
   readonly x: number
   readonly content: string
@@ -20,8 +23,9 @@ interface Mark {
 }
 
 /**
- * Moves marks along a row so that each keeps its width and its order, as near to its own place as
- * the others allow. Undefined when the row is too short for all of them.
+ * Moves marks along a row so that each keeps its width and its order, and together they move as
+ * little as can be (least squares, by pooling neighbors that push each other: isotonic
+ * regression). Undefined when the row is too short for all of them.
  */
 export const spreadAlong = (
   wanted: readonly number[],
@@ -29,24 +33,29 @@ export const spreadAlong = (
   from: number,
   to: number,
 ): number[] | undefined => {
-  const needed = widths.reduce((sum, width) => sum + width, 0)
-  if (needed > to - from) return undefined
-  const placed: number[] = []
-  let least = from
+  const total = widths.reduce((sum, width) => sum + width, 0)
+  if (total > to - from) return undefined
+  // Without their widths the marks only have to stay in order.
+  const before: number[] = []
+  widths.reduce((sum, width) => {
+    before.push(sum + width / 2)
+    return sum + width
+  }, 0)
+  const pools: { sum: number; count: number }[] = []
   wanted.forEach((x, index) => {
-    const half = (widths[index] ?? 0) / 2
-    const at = Math.max(x, least + half)
-    placed.push(at)
-    least = at + half
+    let pool = { sum: x - (before[index] ?? 0), count: 1 }
+    for (let last = pools.at(-1); last !== undefined; last = pools.at(-1)) {
+      if (last.sum / last.count <= pool.sum / pool.count) break
+      pools.pop()
+      pool = { sum: last.sum + pool.sum, count: last.count + pool.count }
+    }
+    pools.push(pool)
   })
-  let most = to
-  for (let index = placed.length - 1; index >= 0; index -= 1) {
-    const half = (widths[index] ?? 0) / 2
-    const at = Math.min(placed[index] ?? 0, most - half)
-    placed[index] = at
-    most = at - half
-  }
-  return placed
+  const bases = pools.flatMap(({ sum, count }) => Array.from({ length: count }, () => sum / count))
+  return bases.map((base, index) => {
+    const kept = Math.min(Math.max(base, from), to - total)
+    return kept + (before[index] ?? 0)
+  })
 }
 
 const marksOf = (strip: Strip, room: DimensionRoom): Mark[] => [
@@ -76,16 +85,19 @@ export const runningDimensions = (strip: Strip, room: DimensionRoom): DisplayIte
   const marks = marksOf(strip, room)
   const { minX, maxX, maxY } = room.frame
   const wanted = marks.map((mark) => mark.x)
-  for (const step of [1, 0.85, 0.7]) {
-    const size = room.text * step
+  for (const step of [1, 0.85, 0.7, 0.55]) {
+    const size = Math.max(Math.min(room.text, SMALLEST), room.text * step)
     for (const rotation of [0, -90]) {
       const lengths = marks.map((mark) => textWidth(mark.content, size))
       const thick = size * TEXT_HEIGHT
-      const widths = lengths.map((length) => (rotation === 0 ? length + size : thick + 3))
+      const widths = lengths.map((length) => (rotation === 0 ? length + 1.6 * size : thick + 3))
       const tall = rotation === 0 ? thick : Math.max(...lengths)
       const textTop = room.top + size * 1.2
       const places = spreadAlong(wanted, widths, minX, maxX)
       if (places === undefined || textTop + tall > maxY) continue
+      const shift = Math.max(...places.map((x, index) => Math.abs(x - (wanted[index] ?? x))))
+      // A number far from its crease is read against the wrong one.
+      if (rotation === 0 && shift > 3 * size) continue
       return marks.flatMap((mark, index) => {
         const x = places[index] ?? mark.x
         const at = { x, y: textTop + tall / 2 }

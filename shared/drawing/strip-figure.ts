@@ -86,7 +86,7 @@ interface StripPlace {
 
 const placeStrip = (strip: Strip, options: StripOptions): StripPlace => {
   const { width, height } = options
-  const text = options.textSize ?? Math.min(18, Math.max(9, Math.min(width / 28, height / 4)))
+  const text = options.textSize ?? Math.min(16, Math.max(9, Math.min(width / 28, height / 4)))
   const pen = { ...penFor(width, height), text }
   const arrow = Math.max(4, text * 0.42)
   const side = text * 2

@@ -3,6 +3,7 @@ import { createElement, useId } from 'react'
 import type { DisplayItem, DisplayList, Part } from '#shared/drawing/display-list'
 import type { FigureColors } from '#shared/drawing/figure-colors'
 import { svgElement } from '#shared/drawing/svg'
+import { reactAttributes } from './react-attributes'
 
 interface SvgFigureProps {
   display: DisplayList
@@ -17,10 +18,6 @@ interface SvgFigureProps {
   onPart?: (part: Part) => void
 }
 
-/** SVG's names in React's spelling: stroke-width is strokeWidth. */
-const reactName = (name: string) =>
-  name.replace(/-([a-z])/g, (_, letter: string) => letter.toUpperCase())
-
 const drawItem = (
   item: DisplayItem,
   index: number,
@@ -29,9 +26,7 @@ const drawItem = (
 ) => {
   const { tag, attributes, text } = svgElement(item, colors)
   const { part } = item
-  const props = Object.fromEntries(
-    Object.entries(attributes).map(([name, value]) => [reactName(name), value]),
-  )
+  const props = reactAttributes(attributes)
   const press =
     onPart && part && item.role === 'target'
       ? {
