@@ -1,7 +1,14 @@
 import { noCounts } from './counts.mjs'
 
 /**
- * @param {import('vitest/node').TestModule} module
+ * What is read of the runner's TestModule.
+ * @typedef {{ errors: () => ReadonlyArray<unknown> }} Part
+ * @typedef {{ result: () => { state: 'passed' | 'failed' | 'skipped' | 'pending' } }} Test
+ * @typedef {Part & { children: { allTests: () => Iterable<Test>, allSuites: () => Iterable<Part> } }} Module
+ */
+
+/**
+ * @param {Module} module
  * @returns {import('./counts.mjs').Counts} its tests, and as one failure each the file or suite
  *   that has errors of its own (it did not load, or a hook threw)
  */

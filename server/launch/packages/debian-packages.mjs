@@ -25,14 +25,16 @@ export const findInstallHint = (names, { isRoot, hasApt }) => {
 /**
  * Installs Debian packages, or throws with the one command that does.
  * @param {string[]} names
+ * @param {(line: string) => void} note
  * @param {string} [otherWay] a further way out, shown with the command
  */
-export const installDebianPackages = async (names, otherWay) => {
+export const installDebianPackages = async (names, note, otherWay) => {
   const hint = findInstallHint(names, {
     isRoot: process.getuid?.() === 0,
     hasApt: existsSync('/usr/bin/apt-get'),
   })
   if (hint !== undefined) throw new LaunchError([hint, otherWay].filter(Boolean).join('\n\n'))
+  note(`installing from Debian: ${names.join(', ')}`)
   const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' }
   await runOrThrow('apt-get update', '/usr/bin/apt-get', ['update', '-q'], { env })
   await runOrThrow('apt-get install', '/usr/bin/apt-get', [...INSTALL, '-q', ...names], { env })

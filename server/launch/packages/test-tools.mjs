@@ -20,9 +20,6 @@ export const missingTools = (tools, isThere) =>
  */
 export const ensureTestTools = async ({ note, done }) => {
   const missing = missingTools(TEST_TOOLS, existsSync)
-  if (missing.length > 0) {
-    note(`installing ${missing.join(', ')}`)
-    await installDebianPackages(missing)
-  }
+  if (missing.length > 0) await installDebianPackages(missing, note)
   done(TEST_TOOLS.map((tool) => tool.package).join(', '))
 }

@@ -60,8 +60,7 @@ export const ensurePrograms = async (major, note) => {
   if (found !== undefined) return found
   // An existing cluster can only be opened by its own major version.
   const name = major === undefined ? 'postgresql' : `postgresql-${major}`
-  note(`installing Debian's ${name}`)
-  await installDebianPackages([name], OTHER_WAY)
+  await installDebianPackages([name], note, OTHER_WAY)
   const installed = findPrograms({ major })
   if (installed === undefined)
     throw new Error(`${name} is installed, but ${NEEDED.join(', ')} are not found`)
