@@ -161,7 +161,10 @@ export const profileProblems = (
   const values = valueProblems(profile)
   if (hasErrors(values)) {
     const girth = girthOf(profile)
-    return [...values, ...(girth > WIDEST_STRIP ? widthProblems(girth, {}) : [])]
+    return [
+      ...values,
+      ...(Number.isFinite(girth) && girth > WIDEST_STRIP ? widthProblems(girth, {}) : []),
+    ]
   }
   const parts = flatParts(profile, sheet ?? THINNEST)
   const eaten = eatenProblems(parts)
