@@ -1,15 +1,11 @@
 import type { Knex } from 'knex'
 import type { Clock } from '#server/adapters/clock'
-import { createBundlesService } from '#server/features/bundles/bundles.service'
-import { bundlesRoutes } from '#server/features/bundles/bundles.routes'
-import { createHandOffService } from '#server/features/hand-off/hand-off.service'
-import { handOffRoutes } from '#server/features/hand-off/hand-off.routes'
-import { createPiecesService } from '#server/features/pieces/pieces.service'
-import { piecesRoutes } from '#server/features/pieces/pieces.routes'
-import { createRunsService } from '#server/features/runs/runs.service'
-import { runsRoutes } from '#server/features/runs/runs.routes'
 import { createBrakesQueries } from '#server/features/brakes/brakes.queries'
 import { brakesRoutes } from '#server/features/brakes/brakes.routes'
+import { bundlesRoutes } from '#server/features/bundles/bundles.routes'
+import { createBundlesService } from '#server/features/bundles/bundles.service'
+import { handOffRoutes } from '#server/features/hand-off/hand-off.routes'
+import { createHandOffService } from '#server/features/hand-off/hand-off.service'
 import { createJobsServiceOn } from '#server/features/jobs/create-jobs-service'
 import { jobsRoutes } from '#server/features/jobs/jobs.routes'
 import { createOrdersServiceOn } from '#server/features/orders/create-orders-service'
@@ -19,19 +15,25 @@ import { peopleRoutes } from '#server/features/people/people.routes'
 import { sessionRoutes } from '#server/features/people/session.routes'
 import { createSignIn, type SignIn } from '#server/features/people/sign-in'
 import { signInLimits } from '#server/features/people/sign-in-limits'
+import { newCode } from '#server/features/pieces/new-code'
+import { piecesRoutes } from '#server/features/pieces/pieces.routes'
+import { createPiecesService } from '#server/features/pieces/pieces.service'
 import { createPlansServiceOn } from '#server/features/plans/create-plans-service'
 import { plansRoutes } from '#server/features/plans/plans.routes'
+import { runsRoutes } from '#server/features/runs/runs.routes'
+import { createRunsService } from '#server/features/runs/runs.service'
 import { createShelfServiceOn } from '#server/features/shelf/create-shelf-service'
 import { shelfRoutes } from '#server/features/shelf/shelf.routes'
 import { createStocksQueries } from '#server/features/stocks/stocks.queries'
 import { stocksRoutes } from '#server/features/stocks/stocks.routes'
 import type { Route } from '#server/http/define-route'
-import { createLocalPlanner } from '#server/planning/local-planner'
+import type { Planner } from '#server/planning/planner'
 
 export interface Ports {
   /** The pool. */
   readonly db: Knex
   readonly clock: Clock
+  readonly planner: Planner
   /** IANA name. */
   readonly shopTimeZone: string
 }
@@ -42,24 +44,24 @@ export interface Composition {
 }
 
 /** The only place that knows every feature: each service is built anew on the handle it is given. */
-export function compose({ db, clock, shopTimeZone }: Ports): Composition {
-  const signIn = createSignIn(db)
-  const planner = createLocalPlanner()
+export function compose({ db: pool, clock, planner, shopTimeZone }: Ports): Composition {
+  const signIn = createSignIn(pool)
+  const making = { clock, drawCode: newCode }
   return {
     signIn,
     routes: [
-      ...sessionRoutes({ signIn, limits: signInLimits(db, clock), clock }),
+      ...sessionRoutes({ signIn, limits: signInLimits(pool, clock), clock }),
       ...peopleRoutes(createPeopleService),
       ...jobsRoutes(createJobsServiceOn),
-      ...shelfRoutes((handle) => createShelfServiceOn(handle, clock)),
+      ...shelfRoutes((db) => createShelfServiceOn(db, clock)),
       ...stocksRoutes(createStocksQueries),
       ...brakesRoutes(createBrakesQueries),
-      ...plansRoutes((handle) => createPlansServiceOn(handle, planner)),
-      ...ordersRoutes((handle) => createOrdersServiceOn(handle, { clock, planner, shopTimeZone })),
-      ...piecesRoutes(createPiecesService),
-      ...runsRoutes(createRunsService),
-      ...bundlesRoutes(createBundlesService),
-      ...handOffRoutes(createHandOffService),
+      ...plansRoutes((db) => createPlansServiceOn(db, planner)),
+      ...ordersRoutes((db) => createOrdersServiceOn(db, { clock, planner, shopTimeZone })),
+      ...piecesRoutes((db) => createPiecesService(db, making)),
+      ...runsRoutes((db) => createRunsService(db, making)),
+      ...bundlesRoutes((db) => createBundlesService(db, making)),
+      ...handOffRoutes((db) => createHandOffService(db, making)),
     ],
   }
 }

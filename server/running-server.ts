@@ -13,6 +13,7 @@ import { createDatabase } from '#server/db/knex'
 import { createSessions } from '#server/http/session'
 import { startHousekeeping } from '#server/jobs/housekeeping'
 import { LiveHub } from '#server/live/live-hub'
+import { createLocalPlanner } from '#server/planning/local-planner'
 
 const SESSION_CONNECTIONS = 4
 /** Below the ten seconds after which a supervisor kills. */
@@ -50,7 +51,12 @@ export async function startServer(options: ServerOptions): Promise<RunningServer
     onError,
   })
   const hub = new LiveHub({ db, databaseUrl: config.databaseUrl, onError })
-  const { routes, signIn } = compose({ db, clock, shopTimeZone: config.shopTimeZone })
+  const { routes, signIn } = compose({
+    db,
+    clock,
+    planner: createLocalPlanner(),
+    shopTimeZone: config.shopTimeZone,
+  })
 
   const server = createServer()
   const app = createApp({

@@ -1,5 +1,6 @@
 import knex, { type Knex } from 'knex'
 import pg from 'pg'
+import type {} from './tables/register'
 
 /** A pool or an open transaction: services are built on either (`Knex.Transaction` extends `Knex`). */
 export type Db = Knex
