@@ -1,4 +1,4 @@
-export type ButtonVariant = 'primary' | 'secondary' | 'quiet' | 'danger'
+export type ButtonVariant = 'primary' | 'secondary' | 'quiet' | 'danger' | 'onFill'
 
 const BASE =
   'inline-flex min-h-target min-w-target items-center justify-center gap-2 rounded-control px-4 ' +
@@ -13,6 +13,8 @@ const VARIANTS: Record<ButtonVariant, string> = {
   primary: `border border-dye bg-dye text-paper enabled:hover:bg-dye/90 ${IDLE}`,
   secondary: `border border-ink bg-sheet text-ink hover:bg-ink/5 ${IDLE}`,
   quiet: 'text-dye hover:bg-dye/10 disabled:text-scribe aria-disabled:text-scribe',
+  /** On a filled band. */
+  onFill: 'border border-current text-paper hover:bg-paper/15',
   danger: `border border-chalk bg-sheet text-chalk hover:bg-chalk/10 ${IDLE}`,
 }
 

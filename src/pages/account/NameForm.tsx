@@ -34,7 +34,12 @@ export function NameForm() {
           error={formState.errors.name && t('nameMissing')}
           {...register('name')}
         />
-        <Button type="submit" className="mt-8" pending={isPending} disabled={!formState.isDirty}>
+        <Button
+          type="submit"
+          className="mt-[calc(var(--body)*1.5+0.375rem)]"
+          pending={isPending}
+          disabled={!formState.isDirty}
+        >
           {t('saveName')}
         </Button>
       </div>

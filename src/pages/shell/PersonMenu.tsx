@@ -7,6 +7,7 @@ import { Icon } from '@/components/Icon'
 import { useDismiss } from '@/components/useDismiss'
 import { useSignOut } from '@/features/people/api/people.mutations'
 import { usePerson } from '@/features/people/person-context'
+import { setMuted, useMuted } from '@/lib/device/sound'
 import { errorWords } from '@/lib/api/error-words'
 
 const ITEM =
@@ -17,6 +18,7 @@ export function PersonMenu() {
   const { t } = useTranslation('shell')
   const person = usePerson()
   const signOut = useSignOut()
+  const muted = useMuted()
   const [open, setOpen] = useState(false)
   const root = useRef<HTMLDivElement>(null)
   const button = useRef<HTMLButtonElement>(null)
@@ -68,6 +70,9 @@ export function PersonMenu() {
         <NavLink className={ITEM} to={paths.account()} onClick={closeOnly}>
           {t('account')}
         </NavLink>
+        <button type="button" className={ITEM} onClick={() => setMuted(!muted)}>
+          {t(muted ? 'soundOff' : 'soundOn')}
+        </button>
         <button type="button" className={ITEM} onClick={() => signOut.mutate()}>
           {t('signOut')}
         </button>

@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { Place } from '#shared/access/permissions'
+import { OfflineNotice } from '@/components/OfflineNotice'
 import { FrameHead, type HeadProps } from '@/pages/shell/FrameHead'
 import { HandHead } from '@/pages/shell/HandHead'
 import { usePlace } from '@/pages/shell/place-context'
@@ -36,6 +37,7 @@ export function PlaceFrame({ primary, fill = false, children, ...head }: Props) 
       </a>
       <header className="frame-head">
         <Head {...head} />
+        <OfflineNotice />
       </header>
       <main id="main" tabIndex={-1} className="frame-main">
         {children}
