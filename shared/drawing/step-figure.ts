@@ -87,7 +87,7 @@ export const stepFigure = (picture: StepPicture, options: StepOptions): DisplayL
   const { pen, scale } = view
   const toPixels = (points: readonly Vector[]) =>
     points.map((point) => vector(point.x * scale, point.y * scale))
-  const hemRoom = pen.metal + pen.paint + pen.bare + 3
+  const hemRoom = pen.metal + 2 * Math.max(pen.paint, pen.bare) + 2
   const chainWith = (front: readonly Vector[]) =>
     openHems([...toPixels(picture.clamped).toReversed(), ...toPixels(front).slice(1)], hemRoom)
   const after = chainWith(picture.frontAfter)

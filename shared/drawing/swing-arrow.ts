@@ -1,7 +1,7 @@
 import { flattenArc } from '#shared/geometry/arc'
 import type { Bounds } from '#shared/geometry/bounds'
 import { contains, grow } from '#shared/geometry/bounds'
-import { distanceToPath } from '#shared/geometry/polyline'
+import { distanceToPath, pointAlong } from '#shared/geometry/polyline'
 import type { Vector } from '#shared/geometry/vector'
 import { add, degrees, heading, scale } from '#shared/geometry/vector'
 import type { DisplayItem, Point } from './display-list'
@@ -14,8 +14,8 @@ interface ArrowView {
   readonly place: (point: Vector) => Point
 }
 
-/** Radii tried, in parts of the front's reach. */
-const RADII = [0.5, 0.65, 0.8, 0.35, 0.95, 1.1, 0.25]
+/** Points of the front that the arrow may follow, in parts of its length from the bend line. */
+const FOLLOWED = [0.5, 0.65, 0.8, 1, 0.35, 0.25]
 
 /** Degrees left free at either end of the swing. */
 const GAP = 5
@@ -39,21 +39,23 @@ export const swingArrow = (
   const sign = direction === 'up' ? 1 : -1
   const angle = Math.abs(degrees(Math.atan2(first.y, first.x)))
   if (angle < 4 * GAP) return []
-  const reach = Math.max(...before.map((point) => Math.hypot(point.x, point.y)))
   const head = Math.max(7, pen.metal * 2.2)
   const keep = halfWeight(pen) + 3
   const inside = grow(frame, -4)
-  const options = RADII.map((share) => {
-    const radius = Math.max(reach * share, 4 * head)
+  const options = FOLLOWED.map((share) => {
+    const followed = pointAlong(before, share)
+    const radius = Math.max(Math.hypot(followed.x, followed.y), 4 * head)
+    const from = degrees(Math.atan2(followed.y, followed.x))
     const tipGap = degrees((head + keep) / radius)
-    const points = arcPoints(radius, sign * GAP, sign * Math.max(angle - tipGap, 2 * GAP))
+    const swing = sign * Math.max(angle - tipGap, 2 * GAP)
+    const points = arcPoints(radius, from + sign * GAP, from + swing)
     const touched = points.filter(
       (point) =>
         distanceToPath(after, point) < keep ||
         distanceToPath(before, point) < keep ||
         !contains(inside, place(point)),
     ).length
-    return { radius, points, touched: touched / points.length }
+    return { points, touched: touched / points.length }
   })
   const best = options.reduce((a, b) => (b.touched < a.touched - 0.02 ? b : a))
   const end = best.points.at(-1)

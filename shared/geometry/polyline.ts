@@ -1,7 +1,7 @@
 import type { Segment } from './segment'
 import { distanceToPoint, segment } from './segment'
 import type { Vector } from './vector'
-import { add, cross, distance, scale, vector } from './vector'
+import { add, between, cross, distance, scale, vector } from './vector'
 
 export const segmentsOf = (points: readonly Vector[], closed = false): Segment[] => {
   const segments: Segment[] = []
@@ -14,6 +14,19 @@ export const segmentsOf = (points: readonly Vector[], closed = false): Segment[]
 
 export const pathLength = (points: readonly Vector[]): number =>
   segmentsOf(points).reduce((sum, s) => sum + distance(s.from, s.to), 0)
+
+/** The point a part (0 to 1) of the way along a chain. Throws a RangeError on an empty chain. */
+export const pointAlong = (points: readonly Vector[], part: number): Vector => {
+  let left = pathLength(points) * part
+  for (const { from, to } of segmentsOf(points)) {
+    const length = distance(from, to)
+    if (left <= length && length > 0) return between(from, to, left / length)
+    left -= length
+  }
+  const last = points.at(-1)
+  if (last === undefined) throw new RangeError('A chain without points has no point along it.')
+  return last
+}
 
 /** Signed area of a closed chain: positive when it runs counter-clockwise. */
 export const areaOf = (polygon: readonly Vector[]): number =>
