@@ -2,6 +2,7 @@ import { describe, expect, test } from 'vitest'
 import {
   boardOf,
   cornersOf,
+  editProfile,
   EMPTY_BOARD,
   removeCorner,
   reverseWalk,
@@ -125,6 +126,25 @@ describe('dragging a corner', () => {
 
   test('a second press while one finger drags is not taken', () => {
     expect(nextBoard(held, { type: 'pressCorner', index: 2, at: vector(4, -5) })).toBe(held)
+  })
+})
+
+describe('typing a number', () => {
+  const leg = (length: number): BoardEvent => ({
+    type: 'change',
+    document: editProfile(boardOf(GABLE), { kind: 'setLeg', leg: 1, length }),
+    typing: 'leg 1',
+  })
+
+  test('digit by digit is one step of undo', () => {
+    const board = play(startBoard(boardOf(GABLE)), leg(1), leg(12), leg(12.5))
+    expect(board.history.present.profile?.legs[0]).toBe(12.5)
+    expect(nextBoard(board, { type: 'undo' }).history.present.profile).toEqual(GABLE)
+  })
+
+  test('after looking at another part it is a new step', () => {
+    const board = play(startBoard(boardOf(GABLE)), leg(1), { type: 'select', part: null }, leg(2))
+    expect(board.history.past).toHaveLength(2)
   })
 })
 

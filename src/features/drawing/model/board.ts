@@ -2,7 +2,7 @@ import type { Part } from '#shared/drawing/display-list'
 import { degrees, subtract, type Vector } from '#shared/geometry/vector'
 import type { Degrees, Inches } from '#shared/units/brands'
 import { addCorner, cornersOf, moveCorner, type BoardDocument, type Edge } from './board-document'
-import { record, startHistory, undo, redo, type History } from './history'
+import { amend, record, startHistory, undo, redo, type History } from './history'
 import { snapCorner, type Neighbor, type SnapGuide } from './snapping'
 
 /** What a press on the empty sheet does: take hold of things, or put down the next corner. */
@@ -30,6 +30,8 @@ export interface Board {
   readonly selection: Part | null
   readonly tool: Tool
   readonly gesture: Gesture
+  /** The number being typed: its keystrokes are one step of undo together. */
+  readonly typing: string | null
 }
 
 export interface SnapSettings {
@@ -49,8 +51,16 @@ export type BoardEvent =
   | { readonly type: 'cancel' }
   | { readonly type: 'select'; readonly part: Part | null }
   | { readonly type: 'tool'; readonly tool: Tool }
-  /** A finished change: one step of undo. */
-  | { readonly type: 'change'; readonly document: BoardDocument; readonly selection?: Part | null }
+  /**
+   * A finished change: one step of undo. Changes in a row with the same `typing` are keystrokes of
+   * one number and make one step.
+   */
+  | {
+      readonly type: 'change'
+      readonly document: BoardDocument
+      readonly selection?: Part | null
+      readonly typing?: string
+    }
   | { readonly type: 'undo' }
   | { readonly type: 'redo' }
 
@@ -61,6 +71,7 @@ export const startBoard = (document: BoardDocument): Board => ({
   selection: document.profile === null ? null : { kind: 'leg', leg: 1 },
   tool: document.profile === null ? 'draw' : 'select',
   gesture: IDLE,
+  typing: null,
 })
 
 /** What is to be seen now: the gesture's half-finished figure, or the document. */
@@ -72,6 +83,12 @@ export const shownDocument = ({ gesture, history }: Board): BoardDocument =>
  * copy; lifting records it as one step, cancelling drops it.
  */
 export function nextBoard(board: Board, event: BoardEvent): Board {
+  const next = step(board, event)
+  const typing = event.type === 'change' ? (event.typing ?? null) : null
+  return next.typing === typing ? next : { ...next, typing }
+}
+
+function step(board: Board, event: BoardEvent): Board {
   const { history } = board
   switch (event.type) {
     case 'pressCorner': {
@@ -128,7 +145,10 @@ export function nextBoard(board: Board, event: BoardEvent): Board {
     case 'change':
       return settle({
         ...board,
-        history: record(history, event.document),
+        history:
+          event.typing !== undefined && event.typing === board.typing
+            ? amend(history, event.document)
+            : record(history, event.document),
         selection: event.selection === undefined ? board.selection : event.selection,
         gesture: IDLE,
       })
