@@ -13,17 +13,16 @@ const colors = Object.fromEntries(tokens.map((token) => [token, `var(--${token})
 
 /**
  * The theme names the palette's variables, so that a class such as `bg-paper` follows the theme at
- * run time. Sizes hang on two variables of the place, `--target` and `--body` (src/styles/places.css).
+ * run time (there is no `dark:` variant to write). Sizes hang on two variables of the place, `--target` and `--body` (src/styles/places.css).
  */
 export default {
   content: ['./index.html', './src/**/*.{ts,tsx}'],
-  darkMode: ['selector', '[data-theme=dark]'],
   theme: {
     colors: { ...colors, transparent: 'transparent', current: 'currentColor' },
     fontFamily: {
       sans: ['"Atkinson Hyperlegible Next Variable"', 'system-ui', 'sans-serif'],
       figure: [
-        ['"JetBrains Mono"', 'ui-monospace', 'monospace'],
+        '"JetBrains Mono", ui-monospace, monospace',
         { fontFeatureSettings: '"calt" 0, "tnum" 1' },
       ],
     },

@@ -40,7 +40,7 @@ export function Dialog({
       onOpenChange={(next) => {
         if (!next && !pending) onCancel()
       }}
-      className="fixed inset-0 z-50 flex items-end justify-center bg-ink/50 sm:items-center dark:bg-paper/80"
+      className="fixed inset-0 z-50 flex items-end justify-center bg-(--veil) sm:items-center"
     >
       <Modal className="max-h-dvh w-full overflow-y-auto border-t-2 border-ink bg-sheet sm:max-w-lg sm:border-2">
         <AriaDialog role="alertdialog" className="flex flex-col gap-4 p-5 outline-none">

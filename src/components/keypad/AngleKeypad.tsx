@@ -75,7 +75,7 @@ export function AngleKeypad({
   )
 
   return (
-    <div className="flex flex-col gap-2">
+    <div className="flex max-w-3xl flex-col gap-2">
       <EntryLine
         label={label}
         text={state.text}

@@ -46,7 +46,7 @@ export function LengthKeypad({
   const words = useRefusalWords()
   const { length } = keypad
   return (
-    <div className="flex flex-col gap-2">
+    <div className="flex max-w-3xl flex-col gap-2">
       <EntryLine
         label={label}
         text={keypad.text}

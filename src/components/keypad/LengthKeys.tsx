@@ -29,7 +29,7 @@ export function LengthKeys({ state, press }: Keypad) {
   )
 
   return (
-    <div role="group" aria-label={t('keypad.keys')} className="flex flex-col gap-2">
+    <div role="group" aria-label={t('keypad.keys')} className="flex max-w-3xl flex-col gap-2">
       <div className="grid grid-cols-6 gap-2">
         {UPPER.map(digit)}
         {fractions ? (

@@ -9,6 +9,7 @@ const TONES: Record<Beep, readonly number[]> = { done: [660, 990], wrong: [220, 
 const TONE_SECONDS = 0.09
 const GAP_SECONDS = 0.03
 const LOUDNESS = 0.2
+const LATE_MS = 300
 
 function play(context: AudioContext, beep: Beep): void {
   TONES[beep].forEach((hertz, index) => {
@@ -46,7 +47,11 @@ export function useBeep(): (beep: Beep) => void {
     if (isMuted() || typeof AudioContext === 'undefined') return
     context.current ??= new AudioContext()
     const audio = context.current
-    if (audio.state === 'running') play(audio, beep)
-    else void audio.resume().then(() => play(audio, beep))
+    if (audio.state === 'running') return play(audio, beep)
+    const asked = performance.now()
+    // Before the first press `resume` waits for one: a beep that late would answer another scan.
+    void audio.resume().then(() => {
+      if (performance.now() - asked < LATE_MS) play(audio, beep)
+    })
   }, [])
 }
