@@ -1,0 +1,86 @@
+import type { Db } from '#server/db/knex'
+import { createBrakesQueries } from '#server/features/brakes/brakes.queries'
+import { createBundlesService, type BundlesService } from '#server/features/bundles/bundles.service'
+import {
+  createHandOffService,
+  type HandOffService,
+} from '#server/features/hand-off/hand-off.service'
+import { createJobsQueries } from '#server/features/jobs/jobs.queries'
+import { createOrderPiecesQueries } from '#server/features/orders/order-pieces.queries'
+import { createOrderReader } from '#server/features/orders/order-reader'
+import { createOrdersQueries } from '#server/features/orders/orders.queries'
+import { createOrdersService, type OrdersService } from '#server/features/orders/orders.service'
+import { createOrdersStore, type OrdersStore } from '#server/features/orders/orders.store'
+import { createReleaseOrder } from '#server/features/orders/release-order'
+import { createPiecesService, type PiecesService } from '#server/features/pieces/pieces.service'
+import { createRunsService, type RunsService } from '#server/features/runs/runs.service'
+import { createStocksQueries } from '#server/features/stocks/stocks.queries'
+import { announce } from '#server/live/announce'
+import { createLocalPlanner } from '#server/planning/local-planner'
+import type { Calendar } from './calendar'
+import type { DemoRandom } from './demo-random'
+import { createDemoReleaseStore } from './release-store'
+
+/** The product's own services under a clock that the seed sets, so that its history obeys every rule. */
+export interface DemoShop {
+  readonly db: Db
+  readonly calendar: Calendar
+  readonly setTime: (moment: Date) => void
+  readonly orders: OrdersService
+  readonly pieces: PiecesService
+  readonly runs: RunsService
+  readonly bundles: BundlesService
+  readonly handOff: HandOffService
+}
+
+export function createDemoShop(db: Db, calendar: Calendar, random: DemoRandom): DemoShop {
+  let time = calendar.moment(-12, '13:00')
+  const clock = { now: () => time }
+  const ports = { clock, drawCode: random.drawCode }
+  return {
+    db,
+    calendar,
+    setTime: (moment) => {
+      if (moment < time)
+        throw new RangeError(`${moment.toISOString()} lies before what was seeded.`)
+      time = moment
+    },
+    orders: createDemoOrders(db, random, clock),
+    pieces: createPiecesService(db, ports),
+    runs: createRunsService(db, ports),
+    bundles: createBundlesService(db, ports),
+    handOff: createHandOffService(db, ports),
+  }
+}
+
+function createDemoOrders(db: Db, random: DemoRandom, clock: { now: () => Date }): OrdersService {
+  const queries = createOrdersQueries(db)
+  const stocks = createStocksQueries(db)
+  const brakes = createBrakesQueries(db)
+  const planner = createLocalPlanner()
+  const pieces = createOrderPiecesQueries(db)
+  const base = createOrdersStore(db)
+  const store: OrdersStore = {
+    ...base,
+    createOrder: (order) => base.createOrder({ id: random.nextId(), ...order }),
+    addEvent: (event) => base.addEvent({ at: clock.now(), ...event }),
+  }
+  return createOrdersService({
+    queries,
+    stocks,
+    store,
+    clock,
+    // The demo shop's hours are UTC, see the calendar.
+    shopTimeZone: 'UTC',
+    reader: createOrderReader({ queries, pieces, stocks, brakes, planner }),
+    jobs: createJobsQueries(db),
+    release: createReleaseOrder({
+      queries,
+      stocks,
+      brakes,
+      planner,
+      store: createDemoReleaseStore(db, random, clock),
+    }),
+    announce: (announcement) => announce(db, announcement),
+  })
+}

@@ -1,0 +1,100 @@
+import type { StockInsert } from '#server/db/tables/stocks'
+
+/*
+ * Thickness: steel by the Galvanized Sheet Gauge (24 ga 0.0276 in., 26 ga 0.0217 in.), aluminum by
+ * its decimal, copper by ounce (16 oz 0.0216 in., Copper Development Association, Architecture
+ * Design Handbook, table 1.1.3). Density in lb/in³: steel 0.2836 (Gere, Mechanics of Materials),
+ * aluminum sheet 0.098 (Elements of Metric Gear Technology, table 18-10), copper 0.322 (Copper
+ * Development Association, table 1.1A).
+ *
+ * Inside radius: steel 1 mm, the least that DIN 6935 allows below 1 mm of thickness; painted
+ * aluminum one thickness, that of a 2T bend (ASTM D4145); copper one thickness, common practice, no
+ * source. K: Machinery's Handbook, 31st edition, p. 1421, equation 33 (half-hard copper, soft
+ * steel, aluminum at 90 degrees: 0.64 T + 1.57 R), which is K = 0.408. Springback: 90 / k - 90 with
+ * the factors of Tabellenbuch Metall for r/s from 1 to 1.6, steel and aluminum 0.99, copper 0.98.
+ *
+ * Widths are those of 48 in. coil and 36 in. copper sheet, lengths what the shop's brakes take:
+ * common practice, no source.
+ */
+const STEEL = {
+  metal: 'steel',
+  painted: true,
+  inside_radius: 0.0394,
+  k_factor: 0.408,
+  density: 0.2836,
+  springback_per_90: 0.9,
+  widest_strip: 48,
+  longest_piece: 126,
+} as const
+
+const ALUMINUM = {
+  ...STEEL,
+  metal: 'aluminum',
+  density: 0.098,
+} as const
+
+const steel24 = { ...STEEL, thickness_name: '24 ga', thickness: 0.0276 }
+
+export const DEMO_STOCKS = {
+  kiln: {
+    ...steel24,
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73301',
+    position: 1,
+    color_name: 'Kiln 4',
+    color_hex: '#8a3b2c',
+  },
+  slate: {
+    ...steel24,
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73302',
+    position: 2,
+    color_name: 'Slate 12',
+    color_hex: '#4a5560',
+  },
+  barley: {
+    ...STEEL,
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73303',
+    position: 3,
+    thickness_name: '26 ga',
+    thickness: 0.0217,
+    color_name: 'Barley 2',
+    color_hex: '#cdb98a',
+  },
+  harbor: {
+    ...ALUMINUM,
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73304',
+    position: 4,
+    thickness_name: '.032',
+    thickness: 0.032,
+    inside_radius: 0.032,
+    color_name: 'Harbor 7',
+    color_hex: '#2f5d73',
+  },
+  chalk: {
+    ...ALUMINUM,
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73305',
+    position: 5,
+    thickness_name: '.040',
+    thickness: 0.04,
+    inside_radius: 0.04,
+    color_name: 'Chalk 1',
+    color_hex: '#e9e6dc',
+  },
+  copper: {
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73306',
+    position: 6,
+    metal: 'copper',
+    thickness_name: '16 oz',
+    color_name: 'Bare',
+    color_hex: '#b4683f',
+    painted: false,
+    thickness: 0.0216,
+    inside_radius: 0.0216,
+    k_factor: 0.408,
+    density: 0.322,
+    springback_per_90: 1.84,
+    widest_strip: 36,
+    longest_piece: 120,
+  },
+} as const satisfies Record<string, StockInsert>
+
+export type DemoStock = keyof typeof DEMO_STOCKS
