@@ -103,7 +103,11 @@ export function AngleKeypad({
               aria-pressed={entered.ok && entered.degrees === degrees}
               onClick={() => enter({ ...openAngle(degrees), fresh: true })}
             >
-              {word ?? printAngle(degrees)}
+              {word === undefined ? (
+                printAngle(degrees)
+              ) : (
+                <span className="font-sans text-body leading-tight">{word}</span>
+              )}
             </Key>
           ))}
         </div>
