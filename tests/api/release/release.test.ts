@@ -248,6 +248,25 @@ describe('Releasing an order', () => {
     expect(now.state).toBe('submitted')
   })
 
+  it('ends what the crew and the counter may change, also with the version that is right', async () => {
+    const order = await shop.release(await shop.submit())
+    const { version } = order
+    const amended = { poNumber: '', neededBy: order.neededBy, notes: '', lines: [shop.line()] }
+    const answers = await Promise.all([
+      shop.crew.agent.put(`/orders/${order.id}`, { ...amended, version }),
+      shop.crew.agent.post(`/orders/${order.id}/answers`, { version, text: 'Yes' }),
+      shop.crew.agent.post(`/orders/${order.id}/withdrawal`, { version, reason: 'Too late' }),
+      shop.counter.post(`/orders/${order.id}/questions`, { version, text: 'Which?' }),
+      shop.counter.post(`/orders/${order.id}/release`, { version }),
+    ])
+    for (const answer of answers) {
+      expect(answer.status).toBe(409)
+      expect(answer.problem().code).toBe('wrong-state')
+      expect(answer.problem().detail).toContain('Cy Counter released')
+    }
+    expect(await shop.readOrder(order.id)).toEqual(order)
+  })
+
   it('takes an order of more pieces than one statement writes', async () => {
     const lines = ['A', 'B', 'C'].map((mark) => shop.line({ mark, quantity: 450 }))
     const order = await shop.release(await shop.submit(lines))
