@@ -17,6 +17,8 @@ export const paths = {
     orders: () => '/roof/orders',
     order: (orderId: string) => `/roof/orders/${orderId}`,
     newOrder: (jobId: string) => `/roof/jobs/${jobId}/order`,
+    amendOrder: (orderId: string) => `/roof/orders/${orderId}/amend`,
+    piece: (code: string) => `/roof/pieces/${encodeURIComponent(code)}`,
   },
   brake: {
     queue: () => '/brake',
