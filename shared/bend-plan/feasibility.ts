@@ -1,13 +1,13 @@
-import { isEqual } from '#shared/geometry/tolerance'
-import type { ToolSet } from './brake.schema'
+import { createAnswerTable } from './answer-table'
+import type { AnswerTable } from './answer-table'
 import { foldSetup } from './fold-setup'
 import type { FoldGround } from './fold-setup'
 import type { FoldFailure, FoldTest } from './fold-tests/fold-test'
 import { FOLD_TESTS } from './fold-tests/fold-tests'
-import { directionOf, frontSide, getOrientation, rearSide } from './orientation'
+import { ORIENTATIONS, directionOf, frontSide, getOrientation, rearSide } from './orientation'
 import type { PlanCheck } from './plan.schema'
-import { bendsBeside } from './workpiece'
-import type { PieceBend } from './workpiece'
+import { hasSameToolsBothWays } from './tool-sets'
+import type { PieceBend, Side } from './workpiece'
 
 export interface FailedCheck extends FoldFailure {
   readonly check: PlanCheck
@@ -16,34 +16,32 @@ export interface FailedCheck extends FoldFailure {
 export interface Feasibility {
   /** May this fold be made, all tests taken together? Remembers what it has been asked. */
   readonly passes: (made: number, bend: PieceBend, orientation: number) => boolean
-  /** The first test, in their order, that this fold fails. */
+  /** The orientations, by number, that can give different answers for a bend; none where none passes. */
+  readonly orientationsToTry: (bend: PieceBend) => readonly number[]
+  /** The first test, in their order, that this fold fails; of all tests or of those named. */
   readonly firstFailure: (
     made: number,
     bend: PieceBend,
     orientation: number,
+    among?: (test: FoldTest) => boolean,
   ) => FailedCheck | undefined
 }
 
-const isSamePolygon = (a: ToolSet['inner'], b: ToolSet['inner']): boolean =>
-  a.length === b.length &&
-  a.every(([x, y], i) => {
-    const other = b[i]
-    return other !== undefined && isEqual(x, other[0]) && isEqual(y, other[1])
-  })
-
-const isSameToolSet = (a: ToolSet, b: ToolSet): boolean =>
-  isSamePolygon(a.inner, b.inner) &&
-  isSamePolygon(a.outer, b.outer) &&
-  isSamePolygon(a.apron, b.apron)
-
-/** A group of tests that see the same part of the made set, with what they answered. */
+/** Tests that see the same part of the made set: that part as a number, and what they answered. */
 interface Group {
-  readonly sees: FoldTest['sees']
   readonly tests: readonly FoldTest[]
-  readonly known: Map<number, boolean>
+  readonly keyOf: (made: number) => number
+  readonly known: AnswerTable
 }
 
-const SEEN = ['bend', 'front', 'rear', 'all'] as const satisfies readonly FoldTest['sees'][]
+/** One bend in one orientation. */
+interface Slot {
+  /** What does not depend on the bends made. */
+  readonly isOpen: boolean
+  readonly groups: readonly Group[]
+  /** Slots with equal answers carry equal numbers. */
+  readonly answersLike: number
+}
 
 /**
  * The tests of section and brake as one question, cheapest part first. A test that sees one side only
@@ -54,55 +52,92 @@ export const createFeasibility = (
   tests: readonly FoldTest[] = FOLD_TESTS,
 ): Feasibility => {
   const { piece, brake } = ground
-  const groups: readonly Group[] = SEEN.map((sees) => ({
-    sees,
-    tests: tests.filter((test) => test.sees === sees),
-    known: new Map<number, boolean>(),
-  }))
-  // The fold frame is the same for both directions, so equal tools give equal answers.
-  const sharesTools = brake.down !== null && isSameToolSet(brake.up, brake.down)
+  const count = piece.bends.length
+  const sharesTools = hasSameToolsBothWays(brake)
+  const testsOf = (sees: FoldTest['sees']) => tests.filter((test) => test.sees === sees)
+  const testsByPart = {
+    bend: testsOf('bend'),
+    hems: testsOf('hems'),
+    front: testsOf('front'),
+    rear: testsOf('rear'),
+    all: testsOf('all'),
+  }
 
-  const seenBits = (group: Group, made: number, bend: PieceBend, orientation: number): number => {
+  const group = (
+    of: readonly FoldTest[],
+    bits: number,
+    keyOf: (made: number) => number,
+  ): readonly Group[] =>
+    of.length === 0 ? [] : [{ tests: of, keyOf, known: createAnswerTable(2 ** bits) }]
+
+  const sideGroup = (of: readonly FoldTest[], bend: PieceBend, side: Side): readonly Group[] => {
+    const bits = side === 'A' ? bend.index : count - 1 - bend.index
+    const mask = 2 ** bits - 1
+    const shift = side === 'A' ? 0 : bend.index + 1
+    return group(of, bits, (made) => (made >>> shift) & mask)
+  }
+
+  const groupsOf = (bend: PieceBend, orientation: number): readonly Group[] => {
     const o = getOrientation(orientation)
-    switch (group.sees) {
-      case 'bend':
-        return 0
-      case 'front':
-        return made & bendsBeside(piece, bend, frontSide(o))
-      case 'rear':
-        return made & bendsBeside(piece, bend, rearSide(o))
-      case 'all':
-        return made
-    }
+    return [
+      // Hems are the outermost bends.
+      ...group(testsByPart.hems, 2, (made) => (made & 1) + 2 * ((made >>> (count - 1)) & 1)),
+      ...sideGroup(testsByPart.front, bend, frontSide(o)),
+      ...sideGroup(testsByPart.rear, bend, rearSide(o)),
+      ...group(testsByPart.all, count, (made) => made),
+    ]
+  }
+
+  const slots: Slot[][] = piece.bends.map((bend) => {
+    const shared = new Map<number, readonly Group[]>()
+    return ORIENTATIONS.map((o, orientation) => {
+      const setup = foldSetup(ground, 0, bend, o)
+      const way = sharesTools || directionOf(bend, o) === 'up' ? 0 : 1
+      const answersLike = way * 2 + (o.aBack ? 1 : 0)
+      const groups = shared.get(answersLike) ?? groupsOf(bend, orientation)
+      shared.set(answersLike, groups)
+      const isOpen = testsByPart.bend.every((test) => test.find(setup) === undefined)
+      return { isOpen, groups, answersLike }
+    })
+  })
+
+  const ask = (of: Group, made: number, bend: PieceBend, orientation: number): boolean => {
+    const setup = foldSetup(ground, made, bend, getOrientation(orientation))
+    return of.tests.every((test) => test.find(setup) === undefined)
   }
 
   const passes = (made: number, bend: PieceBend, orientation: number): boolean => {
-    const o = getOrientation(orientation)
-    const way = sharesTools || directionOf(bend, o) === 'up' ? 0 : 1
-    const place = (bend.index * 2 + (o.aBack ? 1 : 0)) * 2 + way
-    const setup = () => foldSetup(ground, made, bend, o)
-    let built: ReturnType<typeof setup> | undefined
-    return groups.every((group) => {
-      if (group.tests.length === 0) return true
-      const key = seenBits(group, made, bend, orientation) * 128 + place
-      const known = group.known.get(key)
-      if (known !== undefined) return known
-      built ??= setup()
-      const current = built
-      const answer = group.tests.every((test) => test.find(current) === undefined)
-      group.known.set(key, answer)
-      return answer
-    })
+    const slot = slots[bend.index]?.[orientation]
+    if (slot === undefined || !slot.isOpen) return false
+    for (const each of slot.groups) {
+      const key = each.keyOf(made)
+      let answer = each.known.find(key)
+      if (answer === undefined) {
+        answer = ask(each, made, bend, orientation)
+        each.known.set(key, answer)
+      }
+      if (!answer) return false
+    }
+    return true
   }
 
-  const firstFailure = (made: number, bend: PieceBend, orientation: number) => {
+  const tries = slots.map((of) =>
+    [...of.keys()].filter(
+      (o) =>
+        of[o]?.isOpen === true &&
+        !of.slice(0, o).some((x) => x.isOpen && x.answersLike === of[o]?.answersLike),
+    ),
+  )
+
+  const firstFailure: Feasibility['firstFailure'] = (made, bend, orientation, among) => {
     const setup = foldSetup(ground, made, bend, getOrientation(orientation))
     for (const test of tests) {
+      if (among !== undefined && !among(test)) continue
       const failure = test.find(setup)
       if (failure !== undefined) return { check: test.check, ...failure }
     }
     return undefined
   }
 
-  return { passes, firstFailure }
+  return { passes, orientationsToTry: (bend) => tries[bend.index] ?? [], firstFailure }
 }

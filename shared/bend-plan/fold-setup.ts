@@ -31,18 +31,30 @@ export interface FoldSetup extends FoldGround {
 export const swingOf = (bend: PieceBend, sheet: Sheet, brake: Brake): Degrees =>
   bend.hem === null ? Math.abs(bend.turn) * (1 + sheet.springbackPer90 / 90) : brake.hemAngle
 
+/** The chains are built when a test first looks at them: many tests do not. */
 export const foldSetup = (
   ground: FoldGround,
   made: number,
   bend: PieceBend,
   orientation: Orientation,
-): FoldSetup => ({
-  ...ground,
-  made,
-  bend,
-  orientation,
-  direction: directionOf(bend, orientation),
-  swing: swingOf(bend, ground.sheet, ground.brake),
-  front: chainOf(ground.piece, bend, frontSide(orientation), made, 'front'),
-  rear: chainOf(ground.piece, bend, rearSide(orientation), made, 'rear'),
-})
+): FoldSetup => {
+  const { piece, sheet, brake } = ground
+  let front: Chain | undefined
+  let rear: Chain | undefined
+  return {
+    piece,
+    sheet,
+    brake,
+    made,
+    bend,
+    orientation,
+    direction: directionOf(bend, orientation),
+    swing: swingOf(bend, sheet, brake),
+    get front() {
+      return (front ??= chainOf(piece, bend, frontSide(orientation), made, 'front'))
+    },
+    get rear() {
+      return (rear ??= chainOf(piece, bend, rearSide(orientation), made, 'rear'))
+    },
+  }
+}

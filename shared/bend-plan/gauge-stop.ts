@@ -3,7 +3,7 @@ import type { Vector } from '#shared/geometry/vector'
 import type { Inches } from '#shared/units/brands'
 import type { Chain } from './fold-frame'
 import type { PlanStep } from './plan.schema'
-import { bendsBeside } from './workpiece'
+import { bendsBeside, closedHemsOf } from './workpiece'
 import type { PieceBend, Side, Workpiece } from './workpiece'
 
 /** The gauge stop is this high above and below the sheet's plane. */
@@ -33,6 +33,10 @@ export const gaugeDistance = (rear: Chain): Inches => {
   return -least
 }
 
+/** Whether the bends made behind are more than a single closed hem. */
+export const isFormedFace = (bentBehind: number, closedHems: number): boolean =>
+  bentBehind !== 0 && ((bentBehind & ~closedHems) !== 0 || (bentBehind & (bentBehind - 1)) !== 0)
+
 /**
  * A raw edge if nothing behind is bent, a hem if a closed hem is the only bend made behind, else a
  * formed face; an open hem is one.
@@ -43,10 +47,7 @@ export const restsOn = (
   rear: Side,
   made: number,
 ): NonNullable<PlanStep['restsOn']> => {
-  const behind = made & bendsBeside(piece, bend, rear)
-  if (behind === 0) return 'rawEdge'
-  const onlyClosedHem = piece.bends.some(
-    (other) => other.hem !== null && !other.hem.open && behind === 1 << other.index,
-  )
-  return onlyClosedHem ? 'hem' : 'formedFace'
+  const bentBehind = made & bendsBeside(piece, bend, rear)
+  if (bentBehind === 0) return 'rawEdge'
+  return isFormedFace(bentBehind, closedHemsOf(piece)) ? 'formedFace' : 'hem'
 }

@@ -51,18 +51,21 @@ export const createLowerBound = (ground: FoldGround, cost: OperationCost) => {
       (visit & (1 << end)) === 0 ? Infinity : cheapestWalk(visit, end, cost.move),
     ),
   )
-  const bendSum = (visit: number, bits: number): number => {
-    let sum = 0
-    sums[visit]?.forEach((table, chunk) => {
-      sum += table[(bits >>> (chunk * 8)) & (BYTE - 1)] ?? 0
-    })
-    return sum
-  }
+  const ends = ORIENTATIONS.map((_, end) =>
+    walks.flatMap((byEnd, visit) => {
+      const walk = byEnd[end] ?? Infinity
+      const tables = sums[visit]
+      return tables === undefined || walk === Infinity ? [] : [{ walk, tables }]
+    }),
+  )
   return (bits: number, end: number): number => {
     let best = Infinity
-    for (let visit = 1; visit < 16; visit++) {
-      const walk = walks[visit]?.[end] ?? Infinity
-      if (walk < best) best = Math.min(best, walk + bendSum(visit, bits))
+    for (const { walk, tables } of ends[end] ?? []) {
+      let sum = walk
+      for (let chunk = 0; chunk < tables.length; chunk++) {
+        sum += tables[chunk]?.[(bits >>> (chunk * 8)) & (BYTE - 1)] ?? 0
+      }
+      if (sum < best) best = sum
     }
     return best
   }

@@ -1,11 +1,12 @@
 import { TOLERANCE } from '#shared/geometry/tolerance'
 import type { Inches, Pounds } from '#shared/units/brands'
 import type { FoldGround } from './fold-setup'
-import { restsOn } from './gauge-stop'
-import { frontSide, getOrientation, moveBetween, rearSide } from './orientation'
+import { isFormedFace } from './gauge-stop'
+import { ORIENTATIONS, frontSide, moveBetween, rearSide } from './orientation'
+import type { Orientation } from './orientation'
 import { packCost } from './packed-cost'
 import type { PieceMove } from './plan.schema'
-import { widthBeside } from './workpiece'
+import { bendsBeside, closedHemsOf, widthBeside } from './workpiece'
 import type { PieceBend } from './workpiece'
 
 /** A front counts as wider than its rear above this difference. */
@@ -28,6 +29,9 @@ const SHORT_PIECE: HandlingTable = {
   moves: { load: 0, none: 0, roll: 2, endForEnd: 2, both: 4 },
   bigFront: 2,
 }
+
+const WIDE_FRONT = packCost({ handling: 0, wideFront: 1, faceGauge: 0 })
+const FACE_GAUGE = packCost({ handling: 0, wideFront: 0, faceGauge: 1 })
 
 /** 1 to 60 in. and 35 lb, 2 to 100 lb, else 3. */
 const crewFactor = (length: Inches, weight: Pounds): number => {
@@ -52,21 +56,32 @@ export const operationCost = (ground: FoldGround, pieceLength: Inches): Operatio
   const table = pieceLength <= SHORT + TOLERANCE ? SHORT_PIECE : LONG_PIECE
   const handling = (value: number) =>
     packCost({ handling: crew * value, wideFront: 0, faceGauge: 0 })
+  const fixedOf = (bend: PieceBend, o: Orientation): number => {
+    const front = widthBeside(piece, bend, frontSide(o))
+    const rear = widthBeside(piece, bend, rearSide(o))
+    if (front <= rear + WIDER) return 0
+    return front > brake.bigFront + TOLERANCE ? WIDE_FRONT + handling(table.bigFront) : WIDE_FRONT
+  }
+  const moves = ORIENTATIONS.map((from) =>
+    ORIENTATIONS.map((to) => handling(table.moves[moveBetween(from, to)])),
+  )
+  const fixed = piece.bends.map((bend) => ORIENTATIONS.map((o) => fixedOf(bend, o)))
+  const behind = piece.bends.map((bend) =>
+    ORIENTATIONS.map((o) => bendsBeside(piece, bend, rearSide(o))),
+  )
+  const closedHems = closedHemsOf(piece)
+  const get = (rows: readonly (readonly number[])[], row: number, column: number): number => {
+    const value = rows[row]?.[column]
+    if (value === undefined) throw new RangeError(`No cost at ${row}, ${column}.`)
+    return value
+  }
   return {
-    move: (from, to) =>
-      handling(table.moves[moveBetween(getOrientation(from), getOrientation(to))]),
-    fixed: (bend, orientation) => {
-      const o = getOrientation(orientation)
-      const front = widthBeside(piece, bend, frontSide(o))
-      const rear = widthBeside(piece, bend, rearSide(o))
-      if (front <= rear + WIDER) return 0
-      const wide = packCost({ handling: 0, wideFront: 1, faceGauge: 0 })
-      return front > brake.bigFront + TOLERANCE ? wide + handling(table.bigFront) : wide
+    move: (from, to) => get(moves, from, to),
+    fixed: (bend, orientation) => get(fixed, bend.index, orientation),
+    gauge: (made, bend, orientation) => {
+      if (brake.gauge === null) return 0
+      const bent = made & get(behind, bend.index, orientation)
+      return isFormedFace(bent, closedHems) ? FACE_GAUGE : 0
     },
-    gauge: (made, bend, orientation) =>
-      brake.gauge !== null &&
-      restsOn(piece, bend, rearSide(getOrientation(orientation)), made) === 'formedFace'
-        ? packCost({ handling: 0, wideFront: 0, faceGauge: 1 })
-        : 0,
   }
 }

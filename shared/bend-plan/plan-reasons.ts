@@ -1,6 +1,7 @@
 import { isAtMost } from '#shared/geometry/tolerance'
 import { findCapacity } from './capacity'
 import type { FailedCheck, Feasibility } from './feasibility'
+import type { FoldTest } from './fold-tests/fold-test'
 import { FOLD_TESTS } from './fold-tests/fold-tests'
 import { ORIENTATIONS } from './orientation'
 import type { PlanReason } from './plan.schema'
@@ -29,10 +30,11 @@ const nearestFailure = (
   feasibility: Feasibility,
   made: number,
   bend: PieceBend,
+  among?: (test: FoldTest) => boolean,
 ): FailedCheck | undefined => {
   let nearest: FailedCheck | undefined
   for (const orientation of ORIENTATIONS.keys()) {
-    const failure = feasibility.firstFailure(made, bend, orientation)
+    const failure = feasibility.firstFailure(made, bend, orientation, among)
     if (failure === undefined) return undefined
     if (nearest === undefined || rankOf(failure) > rankOf(nearest)) nearest = failure
   }
@@ -45,6 +47,14 @@ const asReason = (bend: PieceBend, { check, found, limit }: FailedCheck): PlanRe
   found,
   limit,
 })
+
+/** Bends that fail on the flat sheet in a way that no bend made before could mend: no order exists. */
+export const hopelessReasons = (piece: Workpiece, feasibility: Feasibility): PlanReason[] => {
+  return piece.bends.flatMap((bend) => {
+    const failure = nearestFailure(feasibility, 0, bend, (test) => test.neverEases)
+    return failure === undefined ? [] : [asReason(bend, failure)]
+  })
+}
 
 /** Bends that cannot be made even with nothing but the hems done before them, each with its reason. */
 export const flatSheetReasons = (piece: Workpiece, feasibility: Feasibility): PlanReason[] => {

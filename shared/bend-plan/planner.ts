@@ -7,7 +7,7 @@ import { operationCost } from './operation-cost'
 import { orientOrder } from './orient-order'
 import { unpackCost } from './packed-cost'
 import type { Plan, PlanReason } from './plan.schema'
-import { deadEndReasons, flatSheetReasons, pieceReasons } from './plan-reasons'
+import { deadEndReasons, flatSheetReasons, hopelessReasons, pieceReasons } from './plan-reasons'
 import type { PlanRequest } from './plan-request'
 import { planSteps } from './plan-steps'
 import type { SearchGround } from './search-ground'
@@ -60,6 +60,8 @@ export const planBends = (request: PlanRequest): Plan => {
   const ground = searchGround(request)
   const whole = pieceReasons(request)
   if (whole.length > 0) return infeasible(whole)
+  const hopeless = hopelessReasons(ground.piece, ground.feasibility)
+  if (hopeless.length > 0) return infeasible(hopeless)
 
   const sets = searchSets(ground)
   if (sets.outcome === 'none') {

@@ -1,5 +1,6 @@
 import { bitCount } from './bit-count'
 import { createHeap } from './heap'
+import { createNumberTable } from './number-table'
 import type { Sequence } from './orient-order'
 import { ORIENTATIONS, isOrientationOpen } from './orientation'
 import type { Operation, SearchGround } from './search-ground'
@@ -32,7 +33,8 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
   const queue = createHeap()
   const entries: { made: number; orientation: number; bend: PieceBend; g: number; next: number }[] =
     []
-  const closed = new Map<number, { g: number; entry: number }>()
+  /** The entry that closed a state. */
+  const closed = createNumberTable(4 * (full + 1))
   const stateOf = (made: number, orientation: number) => made * 4 + orientation
   const open = piece.bends.map((bend) =>
     ORIENTATIONS.flatMap((o, number) => (isOrientationOpen(bend, o, brake) ? [number] : [])),
@@ -44,7 +46,7 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
       if ((made & bit) === 0) continue
       const rest = made & ~bit
       for (const orientation of open[bend.index] ?? []) {
-        if (closed.has(stateOf(rest, orientation))) continue
+        if (closed.find(stateOf(rest, orientation)) !== undefined) continue
         const g =
           (from === null ? 0 : from.g + cost.move(orientation, from.orientation)) +
           cost.fixed(bend, orientation) +
@@ -66,7 +68,8 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
     return operations
   }
 
-  const findRest = (made: number, orientation: number) => closed.get(stateOf(made, orientation))?.g
+  const findRest = (made: number, orientation: number) =>
+    entries[closed.find(stateOf(made, orientation)) ?? -1]?.g
   expand(full, null)
   for (let looked = 0; ; looked++) {
     const key = queue.leastKey()
@@ -80,8 +83,8 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
     }
     const { made, orientation, bend, g } = entry
     const state = stateOf(made, orientation)
-    if (closed.has(state) || !feasibility.passes(made, bend, orientation)) continue
-    closed.set(state, { g, entry: index })
+    if (closed.find(state) !== undefined || !feasibility.passes(made, bend, orientation)) continue
+    closed.set(state, index)
     if (made === 0) {
       const best = { cost: g, operations: operationsFrom(index) }
       return { best, lowerBound: g, proven: true, findRest }

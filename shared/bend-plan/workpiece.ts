@@ -87,6 +87,13 @@ export const workpieceOf = (section: Section, thickness: Inches): Workpiece => {
 /** The set of all bends. */
 export const allBends = (piece: Workpiece): number => 2 ** piece.bends.length - 1
 
+/** The closed hems, as a set. */
+export const closedHemsOf = (piece: Workpiece): number =>
+  piece.bends.reduce(
+    (set, { hem, index }) => (hem === null || hem.open ? set : set | (1 << index)),
+    0,
+  )
+
 /** The bends on one side of a bend line, as a set. */
 export const bendsBeside = (piece: Workpiece, bend: PieceBend, side: Side): number => {
   const towardsA = 2 ** bend.index - 1

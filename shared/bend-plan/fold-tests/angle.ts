@@ -9,6 +9,7 @@ import type { FoldTest } from './fold-test'
 export const angle: FoldTest = {
   check: 'angle',
   sees: 'bend',
+  neverEases: true,
   find: ({ bend, swing, brake }) => {
     if (bend.hem === null) {
       return isAtMost(swing, brake.maxFold) ? undefined : { found: swing, limit: brake.maxFold }

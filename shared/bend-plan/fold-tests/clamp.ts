@@ -5,6 +5,7 @@ import type { FoldTest } from './fold-test'
 export const clamp: FoldTest = {
   check: 'clamp',
   sees: 'rear',
+  neverEases: true,
   find: ({ rear, brake }) =>
     isLess(rear.firstRun, brake.minClamp)
       ? { found: rear.firstRun, limit: brake.minClamp }

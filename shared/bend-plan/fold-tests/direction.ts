@@ -5,6 +5,7 @@ import type { FoldTest } from './fold-test'
 export const direction: FoldTest = {
   check: 'direction',
   sees: 'bend',
+  neverEases: true,
   find: ({ direction, brake }) =>
     direction === 'down' && brake.down === null ? NO_FIGURE : undefined,
 }

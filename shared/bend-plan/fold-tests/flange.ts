@@ -5,6 +5,7 @@ import type { FoldTest } from './fold-test'
 export const flange: FoldTest = {
   check: 'flange',
   sees: 'front',
+  neverEases: true,
   find: ({ bend, front, brake }) => {
     const least = bend.hem === null ? brake.minFlange : brake.hemMin
     return isLess(front.firstRun, least) ? { found: front.firstRun, limit: least } : undefined

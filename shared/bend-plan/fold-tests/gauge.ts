@@ -6,6 +6,7 @@ import { gaugeDistance } from '../gauge-stop'
 export const gauge: FoldTest = {
   check: 'gauge',
   sees: 'rear',
+  neverEases: false,
   find: ({ rear, brake }) => {
     if (brake.gauge === null) return undefined
     const found = gaugeDistance(rear)

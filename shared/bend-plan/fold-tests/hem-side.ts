@@ -5,6 +5,7 @@ import type { FoldTest } from './fold-test'
 export const hemSide: FoldTest = {
   check: 'hemSide',
   sees: 'bend',
+  neverEases: true,
   find: ({ bend, orientation }) =>
     bend.hem !== null && (bend.fold === 'hemB') !== orientation.aBack ? NO_FIGURE : undefined,
 }

@@ -4,7 +4,8 @@ import type { FoldTest } from './fold-test'
 /** Where the shop makes hems first: no plain bend while a hem is unmade. */
 export const policy: FoldTest = {
   check: 'policy',
-  sees: 'all',
+  sees: 'hems',
+  neverEases: false,
   find: ({ bend, brake, piece, made }) =>
     brake.hemsFirst &&
     bend.hem === null &&

@@ -5,6 +5,7 @@ import type { FoldTest } from './fold-test'
 export const throat: FoldTest = {
   check: 'throat',
   sees: 'rear',
+  neverEases: false,
   find: ({ rear, brake }) => {
     const depth = -Math.min(...rear.points.map((point) => point.x))
     return isAtMost(depth, brake.throat) ? undefined : { found: depth, limit: brake.throat }

@@ -1,11 +1,14 @@
 import fc from 'fast-check'
-import { describe, expect, test } from 'vitest'
+import { describe, expect, test, vi } from 'vitest'
 import type { Plan } from '#shared/bend-plan/plan.schema'
 import { planBends } from '#shared/bend-plan/planner'
 import { CASES, requestArbitrary } from '../../support/bend-plan-cases'
 import { bruteForce, forwardSearch } from '../../support/planner-opinions'
 
 const costOf = ({ cost }: Plan) => cost && [cost.handling, cost.wideFront, cost.faceGauge]
+
+// Hundreds of plans in one test: a busy machine needs longer than the usual five seconds.
+vi.setConfig({ testTimeout: 60_000 })
 
 describe('the planner agrees with other opinions', () => {
   test('backward equals forward equals brute force to four bends', () => {

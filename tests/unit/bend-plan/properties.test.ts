@@ -1,5 +1,5 @@
 import fc from 'fast-check'
-import { describe, expect, test } from 'vitest'
+import { describe, expect, test, vi } from 'vitest'
 import type { Brake, ToolSet } from '#shared/bend-plan/brake.schema'
 import { DEMO_BRAKE } from '#shared/bend-plan/demo-brakes'
 import { packCost } from '#shared/bend-plan/packed-cost'
@@ -25,6 +25,9 @@ const check = (most: number, of: Parameters<typeof fc.property<[Asked]>>[1], num
   fc.assert(fc.property(requestArbitrary(most), of), { ...CASES, numRuns })
 }
 type Asked = Parameters<typeof planBends>[0]
+
+// Hundreds of plans in one test: a busy machine needs longer than the usual five seconds.
+vi.setConfig({ testTimeout: 60_000 })
 
 describe('what every plan must hold', () => {
   test('the mirror image costs the same', () => {
