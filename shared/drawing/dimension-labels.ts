@@ -18,6 +18,9 @@ export interface Measured {
 /** How far the extension lines run past the dimension line. */
 const OVERSHOOT = 4
 
+/** Half the length of the slash at the end of a dimension line. */
+const TICK = 3.5
+
 /** Room between the metal and an extension line. */
 const EXTENSION_GAP = 3
 
@@ -57,7 +60,7 @@ const extension = (
 /** A slash at either end of a dimension line, as drafters set it. */
 const ticks = (line: Segment): Segment[] => {
   const along = unit(subtract(line.to, line.from))
-  const slant = scale(unit(add(along, leftOf(along))), 3.5)
+  const slant = scale(unit(add(along, leftOf(along))), TICK)
   return [line.from, line.to].map((end) => segment(subtract(end, slant), add(end, slant)))
 }
 
@@ -74,7 +77,8 @@ const dimensionOn = (
   const from = add(leg.from, scale(normal, offset))
   const to = add(leg.to, scale(normal, offset))
   const line = segment(from, to)
-  if (!isLineFree(space, line, 2)) return []
+  // The slashes at its ends reach out from the line.
+  if (!isLineFree(space, line, TICK + 1)) return []
   const ends = [leg.from, leg.to].map((foot) => extension(space, foot, normal, offset))
   const [first, second] = ends
   if (first === undefined || second === undefined) return []

@@ -9,7 +9,7 @@ import { isBoxClear, isLineClear } from './clearance'
 import type { Point } from './display-list'
 import type { Pen } from './pen'
 import type { Candidate } from './placement'
-import { textBox } from './text-box'
+import { TEXT_HEIGHT, textBox, textWidth } from './text-box'
 
 /** Where labels may go: inside the frame and off the metal. Pixels, y down. */
 export interface LabelSpace {
@@ -44,11 +44,15 @@ export const reachOfText = (text: string, size: number, along: Vector): number =
   return Math.abs(along.x) * box.maxX + Math.abs(along.y) * box.maxY
 }
 
-/** Directions fanned out from a first one, nearest first: 0, +step, -step, +2 step … to ±180. */
-export const fan = (first: Vector, step: number): { direction: Vector; turned: number }[] => {
+/** Directions fanned out from a first one, nearest first: 0, +step, -step, +2 step … to the widest. */
+export const fan = (
+  first: Vector,
+  step: number,
+  widest: number,
+): { direction: Vector; turned: number }[] => {
   const base = degrees(Math.atan2(first.y, first.x))
   const directions = [{ direction: heading(base), turned: 0 }]
-  for (let turned = step; turned <= 180; turned += step) {
+  for (let turned = step; turned <= widest; turned += step) {
     directions.push({ direction: heading(base + turned), turned })
     if (turned < 180) directions.push({ direction: heading(base - turned), turned })
   }
@@ -90,12 +94,15 @@ const leaderTo = (at: Vector, box: Bounds, anchor: Vector, stop: number): Segmen
 export const ringCandidates = (space: LabelSpace, options: RingOptions): PlacedLabel[] => {
   const { text, size, anchor } = options
   const stop = options.stop ?? space.metal.half + 2
+  const width = textWidth(text, size)
+  const height = size * TEXT_HEIGHT
+  const directions = fan(options.first, options.step, options.widest)
   const found: PlacedLabel[] = []
   for (const gap of options.gaps) {
-    for (const { direction, turned } of fan(options.first, options.step)) {
-      if (turned > options.widest) continue
-      const at = add(anchor, scale(direction, gap + reachOfText(text, size, direction)))
-      const box = textBox(text, size, at)
+    for (const { direction, turned } of directions) {
+      const reach = (Math.abs(direction.x) * width + Math.abs(direction.y) * height) / 2
+      const at = add(anchor, scale(direction, gap + reach))
+      const box = boxAround(at, width, height)
       if (!isFree(space, box)) continue
       // Even without its leader drawn, nothing may stand between a label and what it means.
       const leader = leaderTo(at, box, anchor, stop)
@@ -110,7 +117,7 @@ export const ringCandidates = (space: LabelSpace, options: RingOptions): PlacedL
 }
 
 /** Room between an edge and its letter's circle; from the third on a leader leads there. */
-const LETTER_GAPS = [4, 9, 18, 30, 46]
+const LETTER_GAPS = [4, 9, 18, 30, 46, 70, 100]
 
 /** The letter of an edge in its circle, close to the edge or tied to it. */
 export const letterCandidates = (
@@ -121,9 +128,10 @@ export const letterCandidates = (
 ): PlacedLabel[] => {
   const size = space.pen.text * 0.85
   const radius = size * 0.68
+  const directions = fan(first, 15, 180)
   const found: PlacedLabel[] = []
   for (const [row, gap] of LETTER_GAPS.entries()) {
-    for (const { direction, turned } of fan(first, 15)) {
+    for (const { direction, turned } of directions) {
       const at = add(anchor, scale(direction, space.metal.half + radius + gap))
       const around = boxAround(at, 2 * radius, 2 * radius)
       if (!isFree(space, around)) continue

@@ -1,7 +1,7 @@
 import type { Bounds } from '#shared/geometry/bounds'
 import { grow, heightOf, overlap, union } from '#shared/geometry/bounds'
 import type { Segment } from '#shared/geometry/segment'
-import { boxOfSegment, distanceToBox, findCrossing } from '#shared/geometry/segment'
+import { boxOfSegment, crosses, meetsBox } from '#shared/geometry/segment'
 
 /** One way to set a label: its boxes of text, the lines that go with it, and how good it is. */
 export interface Candidate {
@@ -65,9 +65,7 @@ const prepare = <C extends Candidate>(candidate: C): Prepared<C> => {
 }
 
 const linesEnter = (lines: readonly Segment[], rooms: readonly Bounds[]): boolean =>
-  rooms.some((room) =>
-    lines.some((line) => overlap(boxOfSegment(line), room) && distanceToBox(line, room) === 0),
-  )
+  rooms.some((room) => lines.some((line) => meetsBox(line, room)))
 
 const clash = (a: Prepared<Candidate>, b: Prepared<Candidate>): boolean =>
   a.textRoom.some((room) => b.candidate.boxes.some((box) => overlap(room, box))) ||
@@ -77,7 +75,7 @@ const clash = (a: Prepared<Candidate>, b: Prepared<Candidate>): boolean =>
 const crossings = (a: Candidate, b: Candidate): number => {
   let count = 0
   for (const line of a.lines) {
-    for (const other of b.lines) if (findCrossing(line, other) !== undefined) count += 1
+    for (const other of b.lines) if (crosses(line, other)) count += 1
   }
   return count
 }

@@ -146,7 +146,7 @@ const hemLabels = (
           anchor,
           first: away,
           step: 15,
-          gaps: [0.35, 0.8, 1.4, 2.2, 3.5, 5].map(
+          gaps: [0.35, 0.8, 1.4, 2.2, 3.5, 5, 7.5].map(
             (rows) => space.metal.half + rows * space.pen.text,
           ),
           leaderFrom: space.metal.half + 0.7 * space.pen.text,
