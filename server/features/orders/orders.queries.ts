@@ -2,6 +2,7 @@ import { z } from 'zod'
 import type { Db } from '#server/db/knex'
 import { ORDER_LINES, type OrderLineRow } from '#server/db/tables/order-lines'
 import type { OrderEventRow } from '#server/db/tables/order-events'
+import { isBeforeRelease } from '#server/features/orders/before-release'
 import { frozenLineSchema, type FrozenLine } from '#server/features/orders/frozen-line'
 import { searchOrders } from '#server/features/orders/order-search'
 import { selectOrderSummaries, toOrderSummary } from '#server/features/orders/order-summary'
@@ -44,6 +45,11 @@ export const createOrdersQueries = (db: Db) => ({
       .limit(limit + 1)
     if (start !== null) void query.where('o.number', '<', start)
     if (states) void query.whereIn('s.state', states)
+    // Says nothing new, but spares the database deriving the state of every order ever released
+    // when the counter looks for what came in.
+    if (states?.every(isBeforeRelease)) {
+      void query.whereNull('o.released_at').whereNull('o.withdrawn_at')
+    }
     if (jobId !== undefined) void query.where('o.job_id', jobId)
     if (search) searchOrders(query, search)
     return toPage(await query, limit, toOrderSummary, (row) => row.number)

@@ -1,6 +1,7 @@
 import type { Clock } from '#server/adapters/clock'
 import { companyScope } from '#server/db/company-scope'
 import type { JobsQueries } from '#server/features/jobs/jobs.queries'
+import { isBeforeRelease } from '#server/features/orders/before-release'
 import { orderConflict } from '#server/features/orders/order-conflict'
 import { checkLines, linesForPitch } from '#server/features/orders/order-lines'
 import type { OrderReader } from '#server/features/orders/order-reader'
@@ -83,8 +84,8 @@ export const createOrdersService = (deps: OrdersDeps) => {
   ): Promise<Order> => {
     const standing = await queries.findOrder(id, companyScope(person))
     if (!standing) throw notFound('order')
-    const open = standing.state === 'submitted' || standing.state === 'question'
-    const refusal = open && standing.version === version ? refuse?.(standing.state) : null
+    const asSeen = standing.version === version && isBeforeRelease(standing.state)
+    const refusal = asSeen ? refuse?.(standing.state) : null
     // Before the order is taken: what is shown as current must not carry the version of a change
     // that is rolled back.
     if (refusal) throw wrongState(refusal, await getOrder(id, person))
