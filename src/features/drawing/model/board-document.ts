@@ -91,6 +91,26 @@ export function addCorner(document: BoardDocument, edge: Edge, at: Vector): Boar
   return withCorners(document, edge === 'A' ? [at, ...corners] : [...corners, at])
 }
 
+/** The size of a leg that is added from the table, to be typed over; inches and degrees. */
+const ADDED_LENGTH = 1
+const ADDED_TURN = 90
+
+/** A new leg at an edge; the first one where nothing is drawn yet. */
+export function addLeg(document: BoardDocument, edge: Edge): BoardDocument {
+  if (document.profile === null) return { ...boardOf({ ...BLANK_PROFILE, legs: [ADDED_LENGTH] }) }
+  const edit = { kind: 'addLeg', edge, length: ADDED_LENGTH, turn: -ADDED_TURN } as const
+  if (edge === 'B') return editProfile(document, edit)
+  // Edge A moves out: the legs that were there stay where they lie.
+  const before = cornersOf(document)[0] ?? document.placement.origin
+  const heading = document.placement.heading + ADDED_TURN
+  const radians = (heading * Math.PI) / 180
+  const origin = vector(
+    before.x - Math.cos(radians) * ADDED_LENGTH,
+    before.y - Math.sin(radians) * ADDED_LENGTH,
+  )
+  return { ...editProfile(document, edit), placement: { origin, heading } }
+}
+
 /** Without a corner: the legs beside it become one; at an edge its leg goes. */
 export const removeCorner = (document: BoardDocument, index: number): BoardDocument =>
   withCorners(

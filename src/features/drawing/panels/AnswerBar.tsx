@@ -27,7 +27,7 @@ export function AnswerBar({ check, plans, pieceLength, confirmed }: Props) {
     { label: t('answer.strip'), value: strip && printSize(strip.stripWidth, units, 32) },
     {
       label: printRun(pieceLength, units),
-      value: check?.weight == null ? null : printWeight(check.weight, units),
+      value: check === null || check.weight === null ? null : printWeight(check.weight, units),
     },
     { label: t('answer.hits'), value: hits === undefined ? null : String(hits) },
   ]

@@ -1,0 +1,107 @@
+import { useMemo, useState, type Dispatch, type ReactNode } from 'react'
+import type { ShopBrake } from '#shared/brakes/brakes.contract'
+import type { Stock } from '#shared/stock/stock.schema'
+import { pitchAngle } from '#shared/units/angle'
+import type { Inches } from '#shared/units/brands'
+import { BoardCanvas } from './canvas/BoardCanvas'
+import { partsOfProblem } from './check/check-drawing'
+import { useFigureColors, useFigureLabels } from './figure/useFigureLook'
+import { shownDocument, type Board, type BoardEvent } from './model/board'
+import { AnswerBar } from './panels/AnswerBar'
+import { LegTable } from './panels/LegTable'
+import { PartPanel } from './panels/PartPanel'
+import { StripPanel } from './panels/StripPanel'
+import { Toolbar } from './panels/Toolbar'
+import { useAnswer } from './usePlans'
+
+interface Props {
+  readonly board: Board
+  readonly dispatch: Dispatch<BoardEvent>
+  readonly stock: Stock
+  /** The choice of stock, laid over the corner of the sheet. */
+  readonly stockSelect: ReactNode
+  readonly pieceLength: Inches
+  readonly brakes: readonly ShopBrake[]
+  /** Rise in 12 of the job's roof. */
+  readonly pitchRise: number | null
+  readonly finish: { readonly label: string; readonly onPress: () => void }
+}
+
+/** The section and its strip, the figures under them, and the part in hand: on a phone one above the other. */
+export function DrawingBoard({
+  board,
+  dispatch,
+  stock,
+  stockSelect,
+  pieceLength,
+  brakes,
+  pitchRise,
+  finish,
+}: Props) {
+  const [snapping, setSnapping] = useState(true)
+  const [tabled, setTabled] = useState(false)
+  const colors = useFigureColors(stock.painted ? stock.colorHex : null)
+  const labels = useFigureLabels()
+  const { profile } = shownDocument(board)
+  const { check, plans, confirmed } = useAnswer(profile, stock, pieceLength, brakes)
+  const problems = useMemo(
+    () =>
+      (check?.problems ?? [])
+        .filter(({ severity }) => severity === 'error')
+        .flatMap(partsOfProblem),
+    [check],
+  )
+
+  return (
+    <div className="flex min-h-0 flex-1 flex-col lg:flex-row">
+      <div className="flex min-h-0 min-w-0 flex-1 flex-col">
+        <div className="relative flex min-h-52 flex-1 flex-col">
+          <BoardCanvas
+            board={board}
+            dispatch={dispatch}
+            sheet={stock.sheet}
+            colors={colors}
+            labels={labels}
+            problems={problems}
+            pitch={pitchRise === null ? null : pitchAngle(pitchRise)}
+            snapping={snapping}
+          />
+          <div className="absolute top-2 right-2">{stockSelect}</div>
+        </div>
+        {profile && check?.strip && (
+          <StripPanel
+            profile={profile}
+            strip={check.strip}
+            selected={board.selection}
+            dispatch={dispatch}
+            colors={colors}
+            labels={labels}
+          />
+        )}
+        <Toolbar
+          board={board}
+          dispatch={dispatch}
+          snapping={snapping}
+          setSnapping={setSnapping}
+          tabled={tabled}
+          setTabled={setTabled}
+        />
+        <AnswerBar check={check} plans={plans} pieceLength={pieceLength} confirmed={confirmed} />
+      </div>
+      <aside className="max-h-[55dvh] shrink-0 overflow-y-auto border-t border-rule bg-sheet px-(--gutter) pb-3 lg:max-h-none lg:w-104 lg:overflow-y-auto lg:border-t-0 lg:border-l">
+        <div className={tabled ? 'hidden lg:block' : ''}>
+          <PartPanel
+            board={board}
+            dispatch={dispatch}
+            check={check}
+            pitchRise={pitchRise}
+            finish={finish}
+          />
+        </div>
+        <div className={tabled ? 'pt-3' : 'hidden pt-4 lg:block'}>
+          <LegTable board={board} dispatch={dispatch} />
+        </div>
+      </aside>
+    </div>
+  )
+}
