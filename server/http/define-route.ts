@@ -20,6 +20,8 @@ export interface RouteInput<E extends Endpoint> {
 
 export interface PublicRouteInput<E extends Endpoint> extends Omit<RouteInput<E>, 'person'> {
   readonly person: SignedIn | null
+  /** Always the pool: who is not signed in yet holds no transaction. */
+  readonly db: Db
 }
 
 /** Runs on the pool or in a transaction; may run twice when the database asks for a retry. */
@@ -27,7 +29,9 @@ type Act = (db: Db) => Promise<unknown>
 
 export interface Route {
   readonly endpoint: Endpoint
-  /** Runs after the input was found good and before the handler. */
+  /** Whether the handler runs in a transaction of its own. */
+  readonly transaction: boolean
+  /** Runs before the input is parsed. */
   readonly before: readonly RequestHandler[]
   /** Parses the input (throws `invalid-input`) and gives what remains to be done. */
   readonly prepare: (request: Request) => Act
@@ -48,6 +52,7 @@ export function defineRoute<E extends Endpoint>(
   }
   return {
     endpoint,
+    transaction: endpoint.method !== 'GET',
     before: [],
     prepare: (request) => {
       const input = parseInput(endpoint, request)
@@ -58,7 +63,7 @@ export function defineRoute<E extends Endpoint>(
   }
 }
 
-/** Like `defineRoute`, for the few endpoints that need no session. */
+/** Like `defineRoute`, for the few endpoints that need no session; not in a transaction. */
 export function definePublicRoute<E extends Endpoint>(
   endpoint: E,
   handle: (input: PublicRouteInput<E>) => Promise<AnswerOf<E>>,
@@ -66,6 +71,7 @@ export function definePublicRoute<E extends Endpoint>(
 ): Route {
   return {
     endpoint,
+    transaction: false,
     before,
     prepare: (request) => {
       const input = parseInput(endpoint, request)

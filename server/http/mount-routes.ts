@@ -41,20 +41,20 @@ function answerWith(route: Route, db: Db): RequestHandler {
       status: endpoint.success,
       answer: checkAnswer(endpoint, await act(handle)),
     })
-    send(response, await runOnce(endpoint, request, db, work))
+    send(response, await runOnce(route, request, db, work))
   }
 }
 
 async function runOnce(
-  endpoint: Endpoint,
+  { endpoint, transaction }: Route,
   request: Request,
   db: Db,
   work: (db: Db) => Promise<Omit<Outcome, 'replayed'>>,
 ): Promise<Outcome> {
-  if (endpoint.method === 'GET') return { ...(await work(db)), replayed: false }
+  if (!transaction) return { ...(await work(db)), replayed: false }
   if (!endpoint.idempotent) return { ...(await inTransaction(db, work)), replayed: false }
   const keyed = readKeyedRequest(request)
-  return inTransaction(db, (transaction) => once(transaction, keyed, () => work(transaction)))
+  return inTransaction(db, (handle) => once(handle, keyed, () => work(handle)))
 }
 
 /** What does not fit the contract is never sent: the transaction rolls back and the log says why. */

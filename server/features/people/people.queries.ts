@@ -59,7 +59,7 @@ export async function findActiveAccount(db: Db, email: string): Promise<Account 
 }
 
 export async function listPeople(db: Db): Promise<PersonRow[]> {
-  const rows = await peopleWithCompany(db).orderBy(['people.name', 'people.id'])
+  const rows = await peopleWithCompany(db).orderByRaw('lower(people.name), people.id')
   return rows.map((row) => ({
     id: row.id,
     name: row.name,
@@ -72,4 +72,4 @@ export async function listPeople(db: Db): Promise<PersonRow[]> {
 }
 
 export const listCompanies = (db: Db): Promise<Company[]> =>
-  db(COMPANIES).select('id', 'name').orderBy('name')
+  db(COMPANIES).select('id', 'name').orderByRaw('lower(name)')
