@@ -1,6 +1,7 @@
 import { spawn } from 'node:child_process'
 import { LaunchError } from '../base/launch-error.mjs'
 import { ROOT } from '../base/repository.mjs'
+import { noteChild } from './children.mjs'
 import { atEnd, isEnding } from './ending.mjs'
 
 /**
@@ -36,9 +37,14 @@ export const run = (program, args, options = {}) => {
       ],
       ...options.account,
     })
-    const forget = atEnd(() => {
+    const forgetChild = noteChild(child.pid)
+    const forgetKill = atEnd(() => {
       child.kill('SIGTERM')
     })
+    const forget = () => {
+      forgetChild()
+      forgetKill()
+    }
     /** @type {Buffer[]} */
     const chunks = []
     child.stdout?.on('data', (chunk) => chunks.push(chunk))
