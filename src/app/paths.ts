@@ -1,5 +1,19 @@
 import type { Place } from '#shared/access/permissions'
 
+/** The parts of a query that are given. */
+function query(parts: Record<string, string | undefined>): string {
+  const given = Object.entries(parts).filter((part): part is [string, string] => !!part[1])
+  return given.length === 0 ? '' : `?${new URLSearchParams(given).toString()}`
+}
+
+/** What the drawing board opens with; an empty sheet where nothing is named. */
+interface BoardOpening {
+  readonly shelf?: string
+  readonly line?: string
+  /** The order whose amendment is drawn. */
+  readonly order?: string
+}
+
 /** Route patterns and the builders of links to them: no address is written anywhere else. */
 export const paths = {
   landing: () => '/',
@@ -11,8 +25,10 @@ export const paths = {
     home: () => '/roof',
     job: (jobId: string) => `/roof/jobs/${jobId}`,
     newJob: () => '/roof/jobs/new',
-    board: (jobId: string) => `/roof/jobs/${jobId}/board`,
-    shelf: () => '/roof/shelf',
+    board: (jobId: string, { shelf, line, order }: BoardOpening = {}) =>
+      `/roof/jobs/${jobId}/board${query({ shelf, line, order })}`,
+    /** Within a job, what is taken goes to its board, for a new order or for an amendment. */
+    shelf: (job?: string, order?: string) => `/roof/shelf${query({ job, order })}`,
     shelfProfile: (profileId: string) => `/roof/shelf/${profileId}`,
     orders: () => '/roof/orders',
     order: (orderId: string) => `/roof/orders/${orderId}`,

@@ -2,19 +2,20 @@ import { useQueryClient } from '@tanstack/react-query'
 import type { BodyInputOf } from '#shared/http/endpoint'
 import type { Order } from '#shared/orders/order.schema'
 import {
-  amendOrder,
   answerQuestion,
   askAboutOrder,
   releaseOrder,
-  submitOrder,
   withdrawOrder,
 } from '#shared/orders/orders.contract'
 import { call } from '@/lib/api/call'
 import { useIdempotentMutation } from '@/lib/api/useIdempotentMutation'
 import { orderQuery } from './orders.queries'
 
-/** The answer of every change is the order as it now is; lists and the floor are read anew. */
-function useStoreOrder() {
+/**
+ * Submitting and amending go through the drafts (`draft/useDelivery.ts`), which keep their key.
+ * The answer of every change is the order as it now is; lists and the floor are read anew.
+ */
+export function useStoreOrder() {
   const client = useQueryClient()
   return async (order: Order) => {
     client.setQueryData(orderQuery(order.id).queryKey, order)
@@ -30,22 +31,6 @@ function useStoreOrder() {
 function useRereadOrder(orderId: string) {
   const client = useQueryClient()
   return () => client.invalidateQueries({ queryKey: orderQuery(orderId).queryKey })
-}
-
-export function useSubmitOrder() {
-  return useIdempotentMutation({
-    send: (body: BodyInputOf<typeof submitOrder>, idempotencyKey) =>
-      call(submitOrder, { body, idempotencyKey }),
-    onSuccess: useStoreOrder(),
-  })
-}
-
-export function useAmendOrder(orderId: string) {
-  return useIdempotentMutation({
-    send: (body: BodyInputOf<typeof amendOrder>, idempotencyKey) =>
-      call(amendOrder, { params: { orderId }, body, idempotencyKey }),
-    onSuccess: useStoreOrder(),
-  })
 }
 
 export function useAskAboutOrder(orderId: string) {

@@ -1,6 +1,6 @@
 import { newKey } from '@/lib/api/idempotency'
 import { readDraft, writeDraft } from './draft-text'
-import { emptyDraft, type OrderDraft } from './order-draft'
+import { emptyDraft, isBlank, type OrderDraft } from './order-draft'
 
 /** Under which a draft is kept: `<person>.new.<job>` or `<person>.amend.<order>`. */
 export type Slot = `${string}.new.${string}` | `${string}.amend.${string}`
@@ -19,12 +19,17 @@ export interface KeptDraft {
 const PREFIX = 'foldyard.order-draft.'
 const BROKEN_PREFIX = 'foldyard.order-draft-broken.'
 
+export interface SlottedDraft {
+  readonly slot: Slot
+  readonly draft: OrderDraft
+}
+
 const held = new Map<Slot, KeptDraft>()
+const begun = new Map<string, readonly SlottedDraft[]>()
 const listeners = new Set<() => void>()
-let version = 0
 
 function announce(): void {
-  version += 1
+  begun.clear()
   for (const listener of listeners) listener()
 }
 
@@ -95,7 +100,7 @@ const isSlotOf = (personId: string, name: string): name is Slot =>
   name.startsWith(`${personId}.new.`) || name.startsWith(`${personId}.amend.`)
 
 /** The slots of a person in which something is kept, on the device or in this tab. */
-export function slotsOf(personId: string): Slot[] {
+function slotsOf(personId: string): Slot[] {
   const place = storage()
   const stored = Array.from({ length: place?.length ?? 0 }, (_, index) => place?.key(index) ?? '')
     .filter((key) => key.startsWith(PREFIX))
@@ -103,8 +108,16 @@ export function slotsOf(personId: string): Slot[] {
   return [...new Set([...stored, ...held.keys()])].filter((name) => isSlotOf(personId, name)).sort()
 }
 
-/** Counts changes, for those who follow all drafts at once. */
-export const draftsVersion = (): number => version
+/** What a person has begun on this device; the same array until a draft changes. */
+export function draftsOf(personId: string): readonly SlottedDraft[] {
+  const known = begun.get(personId)
+  if (known) return known
+  const drafts = slotsOf(personId)
+    .map((slot) => ({ slot, draft: readSlot(slot).draft }))
+    .filter(({ draft }) => !isBlank(draft))
+  begun.set(personId, drafts)
+  return drafts
+}
 
 function onStorage({ key }: StorageEvent): void {
   // Another tab wrote or cleared; null means that everything was cleared.

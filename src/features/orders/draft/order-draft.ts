@@ -74,19 +74,23 @@ export function nextMark({ lines }: Pick<OrderDraft, 'lines'>): string {
   return letters(index)
 }
 
+/* A change of the lines takes an order back that was on its way: what is sent is what was submitted. */
+
 /** Puts a line at the end, or back at the place it was taken from. */
 export const withLine = (
   draft: OrderDraft,
   line: DraftLine,
   at: number = draft.lines.length,
-): OrderDraft => ({ ...draft, lines: draft.lines.toSpliced(at, 0, line) })
+): OrderDraft => ({ ...draft, sending: false, lines: draft.lines.toSpliced(at, 0, line) })
 
 export const withLinePatch = (draft: OrderDraft, key: string, patch: LinePatch): OrderDraft => ({
   ...draft,
+  sending: false,
   lines: draft.lines.map((line) => (line.key === key ? { ...line, ...patch } : line)),
 })
 
 export const withoutLine = (draft: OrderDraft, key: string): OrderDraft => ({
   ...draft,
+  sending: false,
   lines: draft.lines.filter((line) => line.key !== key),
 })
