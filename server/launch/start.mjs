@@ -36,7 +36,7 @@ const startProduct = async (stateFolder) => {
   if (process.env.SEED_DEMO !== 'false') {
     await databaseStep('Demo data', 'seed-if-empty', database.url)
   }
-  const web = await step('Server', async ({ done }) => {
+  const starting = step('Server', async ({ done }) => {
     const web = startWebProcess([inRoot('dist/server/index.js')], {
       // The product is built for use behind TLS; here it is served in the clear to this machine.
       COOKIE_SECURE: 'false',
@@ -52,13 +52,16 @@ const startProduct = async (stateFolder) => {
     done(`answers on ${host}:${port}`)
     return web
   })
-  return { database, web, origin }
+  const [web, accounts] = await Promise.all([
+    starting,
+    builtDatabaseCommand('accounts', database.url).then(parseDemoAccounts),
+  ])
+  return { database, web, origin, accounts }
 }
 
 const start = async () => {
   const begin = performance.now()
-  const { database, web, origin } = await prepare(startProduct)
-  const accounts = parseDemoAccounts(await builtDatabaseCommand('accounts', database.url))
+  const { database, web, origin, accounts } = await prepare(startProduct)
   print(`\nFoldyard is ready at ${origin} (${seconds(performance.now() - begin)})`)
   if (accounts.length > 0) print(`\nDemo accounts\n  ${demoAccountLines(accounts).join('\n  ')}`)
   print('\nCtrl-C stops it.')
