@@ -18,6 +18,7 @@ import { createLocalPlanner } from '#server/planning/local-planner'
 const SESSION_CONNECTIONS = 4
 /** Below the ten seconds after which a supervisor kills. */
 const LONGEST_CLOSE_MS = 8_000
+const IDLE_CHECK_MS = 50
 
 export interface ServerOptions {
   readonly config: Config
@@ -114,8 +115,14 @@ const listen = (server: Server, { host, port }: Config): Promise<AddressInfo> =>
 const originOf = ({ address, family, port }: AddressInfo): string =>
   `http://${family === 'IPv6' ? `[${address}]` : address}:${port}`
 
+/** Takes no new requests; ends each connection when its last answer is out, and all in the end. */
 async function closeServer(server: Server): Promise<void> {
-  const timer = setTimeout(() => server.closeAllConnections(), LONGEST_CLOSE_MS)
-  await promisify(server.close.bind(server))()
-  clearTimeout(timer)
+  const idle = setInterval(() => server.closeIdleConnections(), IDLE_CHECK_MS)
+  const late = setTimeout(() => server.closeAllConnections(), LONGEST_CLOSE_MS)
+  try {
+    await promisify(server.close.bind(server))()
+  } finally {
+    clearInterval(idle)
+    clearTimeout(late)
+  }
 }
