@@ -66,9 +66,7 @@ export const createReleaseStore = (db: Db) => ({
     )
     await db.raw(
       `insert into piece_events (piece_id, from_state, to_state, person_id, station)
-       select p.id, null, 'queued', ?, 'counter'
-       from pieces p join order_lines l on l.id = p.line_id
-       where p.order_id = ? order by l.position, p.sequence`,
+       select id, null, 'queued', ?, 'counter' from pieces where order_id = ?`,
       [personId, orderId],
     )
   },
