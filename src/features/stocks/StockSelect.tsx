@@ -7,12 +7,12 @@ interface Props {
   readonly onChange: (stockId: string) => void
 }
 
-/** Metal, thickness and the true color, in one press; small enough to lie over a drawing. */
+/** Metal, thickness and the true color, in one press; on a phone the color alone lies over the drawing. */
 export function StockSelect({ stocks, value, onChange }: Props) {
   const { t } = useTranslation('stocks')
   const chosen = stocks.find(({ id }) => id === value)
   return (
-    <label className="inline-flex min-h-target items-center gap-2 rounded-full border border-edge bg-sheet pr-2 pl-3 has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-dye">
+    <label className="relative inline-flex size-target items-center justify-center rounded-full border border-edge bg-sheet has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-dye lg:w-auto lg:gap-2 lg:pr-2 lg:pl-3">
       <span className="sr-only">{t('choose')}</span>
       <svg viewBox="0 0 16 16" className="size-5 shrink-0" aria-hidden="true" focusable="false">
         <circle
@@ -26,7 +26,7 @@ export function StockSelect({ stocks, value, onChange }: Props) {
       </svg>
       <select
         value={value}
-        className="min-h-target max-w-44 bg-transparent text-small outline-none"
+        className="absolute inset-0 cursor-pointer opacity-0 outline-none lg:static lg:min-h-target lg:max-w-56 lg:bg-transparent lg:opacity-100"
         onChange={(event) => onChange(event.target.value)}
       >
         {stocks.map((stock) => (

@@ -1,4 +1,4 @@
-import { useState, type Dispatch } from 'react'
+import { useState, type CSSProperties, type Dispatch } from 'react'
 import { Layer, Stage } from 'react-konva/lib/ReactKonvaCore'
 import { useTranslation } from 'react-i18next'
 import type { FigureColors } from '#shared/drawing/figure-colors'
@@ -104,6 +104,7 @@ function SizedCanvas({
   return (
     <div
       className="absolute inset-0"
+      style={board.tool === 'draw' ? inchDots(viewport) : undefined}
       {...pointers}
       onPointerUp={(event) => {
         // The gesture's figure becomes the document: the view stays under the finger.
@@ -140,6 +141,16 @@ function SizedCanvas({
       </Stage>
     </div>
   )
+}
+
+/** A dot at every inch while corners are being put down. */
+function inchDots({ scale, origin }: Viewport): CSSProperties {
+  const half = scale / 2
+  return {
+    backgroundImage: 'radial-gradient(circle, var(--edge) 1px, transparent 1.5px)',
+    backgroundSize: `${scale}px ${scale}px`,
+    backgroundPosition: `${origin.x - half}px ${origin.y - half}px`,
+  }
 }
 
 function activeCorner({ gesture, selection }: Board, count: number): number | null {

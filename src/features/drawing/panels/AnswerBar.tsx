@@ -39,9 +39,9 @@ export function AnswerBar({ check, plans, pieceLength, confirmed }: Props) {
     >
       <dl className="grid grid-cols-4 divide-x divide-rule">
         {cells.map(({ label, value }) => (
-          <div key={label} className="px-3 py-1.5">
+          <div key={label} className="min-w-0 px-2 py-1.5 lg:px-3">
             <dt className="text-small text-scribe">{label}</dt>
-            <dd className="font-figure text-lead whitespace-nowrap">{value ?? '–'}</dd>
+            <dd className="font-figure text-body whitespace-nowrap lg:text-lead">{value ?? '–'}</dd>
           </div>
         ))}
       </dl>

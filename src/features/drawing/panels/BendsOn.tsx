@@ -1,4 +1,5 @@
 import { useTranslation } from 'react-i18next'
+import type { Plan } from '#shared/bend-plan/plan.schema'
 import { problemMessage } from '#shared/profile/problem-message'
 import { Icon } from '@/components/Icon'
 import { usePerson } from '@/features/people/person-context'
@@ -50,10 +51,20 @@ export function BendsOn({ check, plans }: Props) {
           {say(problemMessage(warning, units).key, problemMessage(warning, units).values)}
         </span>
       )}
-      <span className="block text-small text-scribe">
-        {words.checks(bending[0]?.plan.checks ?? [])}
-      </span>
+      {bending[0] && <ChecksMade plan={bending[0].plan} />}
     </Line>
+  )
+}
+
+/** Which tests the plan has passed; what was not tested is not promised. */
+function ChecksMade({ plan }: { plan: Plan }) {
+  const { t } = useTranslation('drawing')
+  const words = usePlanWords()
+  return (
+    <details className="text-small text-scribe">
+      <summary>{t('answer.checked', { count: plan.checks.length })}</summary>
+      {words.checks(plan.checks)}
+    </details>
   )
 }
 
@@ -68,7 +79,7 @@ function Line({ tone, children }: { tone: keyof typeof TONES; children: React.Re
       {tone !== 'plain' && (
         <Icon name={tone === 'good' ? 'done' : 'warn'} className="mt-0.5 size-5" />
       )}
-      <p>{children}</p>
+      <div className="min-w-0">{children}</div>
     </div>
   )
 }

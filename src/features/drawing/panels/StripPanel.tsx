@@ -19,7 +19,8 @@ interface Props {
   readonly labels: FigureLabels
 }
 
-const HEIGHT = 84
+/** Low enough to leave the section its room on a phone. */
+const HEIGHT = 72
 
 /** The same piece laid flat: edge A left, edge B right. A touch lights up the part in the section. */
 export function StripPanel({ profile, strip, selected, dispatch, colors, labels }: Props) {
