@@ -102,8 +102,11 @@ describe('Changing a profile of the shelf', () => {
 
   it('does not reach an order that was drawn from it', async () => {
     const id = await createSavedProfile(shop.db, { companyId: shop.crew.companyId })
-    const order = await shop.submit([shop.line({ profile: zProfile() })])
-    await shop.crew.agent.put(`/profiles/${id}`, { ...changed, version: 1 })
+    const { items } = await shop.crew.agent.call(listShelf)
+    const saved = items.find((item) => item.id === id)
+    const order = await shop.submit([shop.line({ profile: saved?.profile })])
+    const answer = await shop.crew.agent.put(`/profiles/${id}`, { ...changed, version: 1 })
+    expect(answer.status).toBe(200)
     expect(await shop.readOrder(order.id)).toEqual(order)
   })
 })
