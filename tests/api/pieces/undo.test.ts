@@ -176,6 +176,25 @@ describe('Undoing', () => {
       expect(answer.problem().detail).toContain(bundle.code)
       expect((await floor.readPiece(code)).state).toBe('bent')
     })
+
+    it('while its bundle is handed over: the piece leaves with it or stays out', async () => {
+      for (let round = 0; round < 6; round += 1) {
+        const { order, bundle } = await floor.bundled()
+        const code = firstCode(order)
+        await floor.wren.call(openBundle, {
+          params: { bundleId: bundle.id },
+          body: { pieceCodes: [code], reason: 'Wrong end up.' },
+        })
+        const events = [await lastEvent(code)]
+        const [undone, sheet] = await Promise.all([
+          floor.undo(events),
+          floor.handOver(order, [bundle.code]),
+        ])
+        const left = undone.status === 200 ? 'pickedUp' : 'bent'
+        expect((await floor.readPiece(code)).state).toBe(left)
+        expect(sheet.bundles[0]?.pieces).toHaveLength(undone.status === 200 ? 3 : 2)
+      }
+    })
   })
 
   describe('of a hand-off', () => {
