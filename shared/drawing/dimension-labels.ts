@@ -18,6 +18,9 @@ export interface Measured {
 /** How far the extension lines run past the dimension line. */
 const OVERSHOOT = 4
 
+/** With so many places around its middle, a leg needs no leader to its quarters. */
+const ENOUGH_AROUND = 30
+
 /** Half the length of the slash at the end of a dimension line. */
 const TICK = 3.5
 
@@ -130,21 +133,21 @@ export const dimensionCandidates = (
   if (!ways.leaders) return found
   const first = scale(unit(subtract(mid, middle)), distance(mid, middle) > 1 ? 1 : -1)
   for (const part of [0.5, 0.25, 0.75]) {
-    found.push(
-      ...ringCandidates(space, {
-        text: leg.text,
-        size,
-        anchor: between(leg.from, leg.to, part),
-        first,
-        step: 15,
-        gaps: [1, 2, 3, 4.5, 6, 8, 11].map((rows) => space.metal.half + rows * size),
-        leaderFrom: 0,
-        widest: 180,
-        cost: part === 0.5 ? 14 : 16,
-        costPerTurn: 0.01,
-        costPerGap: 1,
-      }),
-    )
+    const around = ringCandidates(space, {
+      text: leg.text,
+      size,
+      anchor: between(leg.from, leg.to, part),
+      first,
+      step: 18,
+      gaps: [1, 2, 3, 4.5, 6, 8, 11].map((rows) => space.metal.half + rows * size),
+      leaderFrom: 0,
+      widest: 180,
+      cost: part === 0.5 ? 14 : 16,
+      costPerTurn: 0.01,
+      costPerGap: 1,
+    })
+    found.push(...around)
+    if (around.length >= ENOUGH_AROUND) break
   }
   return found
 }

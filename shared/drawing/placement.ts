@@ -21,10 +21,10 @@ export interface Label<C extends Candidate> {
 const LINE_GAP = 2
 
 /**
- * Room between texts side by side, in parts of a line's height: over a character, so that "2"
+ * Room between texts side by side, in parts of a line's height: over two characters, so that "2"
  * and "1/2" never read as 2 1/2.
  */
-const SIDE_GAP = 0.85
+const SIDE_GAP = 1.4
 
 /** What a line across another line costs. */
 const CROSSING = 4

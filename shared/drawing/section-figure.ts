@@ -85,6 +85,9 @@ const TRIALS = [
   { margin: 2.4, text: 0.65, leaders: true },
 ]
 
+/** With this many legs the larger type has no chance, and trying it costs most. */
+const CROWDED = 13
+
 /** A layout whose worst label costs less than this is not improved on. */
 const GOOD_ENOUGH = 13
 
@@ -135,15 +138,19 @@ export const sectionFigure = (profile: Profile, sheet: Sheet, options: SectionOp
 
 const bestLayout = (profile: Profile, sheet: Sheet, options: SectionOptions): Layout => {
   const pen = penFor(options.width, options.height, options.textSize)
+  const trials =
+    profile.legs.length < CROWDED
+      ? TRIALS
+      : TRIALS.filter((trial) => trial.text < 1 && trial.margin < 3)
   let best: Layout | undefined
-  for (const [tried, trial] of TRIALS.entries()) {
+  for (const [tried, trial] of trials.entries()) {
     const text = Math.max(Math.min(pen.text, SMALLEST_TEXT), pen.text * trial.text)
     const layout = layOut(profile, sheet, options, { ...pen, text }, trial)
     const cost = layout.cost + 5 * tried
     if (best === undefined || cost < best.cost) best = { ...layout, cost }
     const worst = Math.max(0, ...layout.placed.map((label) => label?.cost ?? Infinity))
     if (worst < GOOD_ENOUGH) return best
-    const next = TRIALS[tried + 1]
+    const next = trials[tried + 1]
     const isComplete = best.placed.every((label) => label !== undefined)
     if (isComplete && next !== undefined && next.text < trial.text) return best
   }

@@ -45,7 +45,7 @@ export const drawMetal = (
     items.push(line(isPainted ? 'paint' : 'bare', points, band + overlap))
   }
   items.push(line('metal', section.chain(0), pen.metal))
-  for (const { part, points } of section.parts) {
+  for (const { part, points } of section.parts.toReversed()) {
     const role = markOf(part, marks)
     if (role !== undefined) items.push(line(role, points, pen.metal, part))
   }
@@ -60,12 +60,8 @@ const markOf = (part: Part, marks: Marks): Role | undefined => {
 }
 
 /** Legs first, so that the bends and hems between them lie on top. */
-export const drawTargets = (section: PlacedSection): DisplayItem[] => {
-  const order = (part: Part) => (part.kind === 'leg' ? 0 : 1)
-  return section.parts
-    .toSorted((a, b) => order(a.part) - order(b.part))
-    .map(({ part, points }) => line('target', points, TARGET_WIDTH, part))
-}
+export const drawTargets = (section: PlacedSection): DisplayItem[] =>
+  section.parts.toReversed().map(({ part, points }) => line('target', points, TARGET_WIDTH, part))
 
 export const drawLabel = (
   label: PlacedLabel,

@@ -3,7 +3,7 @@ import { boundsOf, heightOf, middleOf, widthOf } from '#shared/geometry/bounds'
 import { segmentsOf } from '#shared/geometry/polyline'
 import type { Segment } from '#shared/geometry/segment'
 import type { Vector } from '#shared/geometry/vector'
-import { rotate, vector } from '#shared/geometry/vector'
+import { between, distance, rotate, vector } from '#shared/geometry/vector'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Sheet } from '#shared/stock/stock.schema'
 import type { WalkedPart } from '#shared/strip/section-walk'
@@ -129,7 +129,7 @@ export const placeSection = (
     ...transform,
     walked,
     pen,
-    parts: drawnParts(walked, (parts) => chainOf(parts, 0)),
+    parts: drawnParts(walked, scale, (parts) => chainOf(parts, 0)),
     metal: { chords: chordsOf(walked, scale, transform.toFrame), half: halfWeight(pen) },
     chain: (left) => chainOf(walked, left),
   }
@@ -141,22 +141,50 @@ const scaleToFit = (bounds: Bounds, frame: FitOptions, margin: number): number =
   return Math.min(across / Math.max(widthOf(bounds), 1e-6), down / Math.max(heightOf(bounds), 1e-6))
 }
 
-/** One entry a part: a hem's lip and fold together. */
+/** How far a bend's mark runs into the legs beside it, pixels and share of the leg. */
+const MARK_REACH = 9
+const MARK_SHARE = 0.35
+
+/** The piece of a straight part next to the bend, so that a marked bend can be seen. */
+const besideBend = (
+  neighbor: WalkedPart | undefined,
+  end: 'from' | 'to',
+  scale: number,
+): WalkedPart[] => {
+  if (neighbor?.kind !== 'straight') return []
+  const length = distance(neighbor.from, neighbor.to)
+  const share = length === 0 ? 0 : Math.min(MARK_SHARE, MARK_REACH / scale / length)
+  return end === 'from'
+    ? [{ ...neighbor, to: between(neighbor.from, neighbor.to, share) }]
+    : [{ ...neighbor, from: between(neighbor.to, neighbor.from, share) }]
+}
+
+/** One entry a part, bends and hems before the legs they lie on: a hem's lip and fold together. */
 const drawnParts = (
   walked: readonly WalkedPart[],
+  scale: number,
   chain: (parts: readonly WalkedPart[]) => Point[],
 ): DrawnPart[] => {
-  const groups: { part: Part; parts: WalkedPart[] }[] = []
-  for (const piece of walked) {
+  const parts = walked.flatMap((piece, index): { part: Part; pieces: WalkedPart[] }[] => {
     const part = partOf(piece)
-    const last = groups.at(-1)
-    if (last !== undefined && last.part.kind === 'hem' && part.kind === 'hem') {
-      if (last.part.edge === part.edge) {
-        last.parts.push(piece)
-        continue
-      }
+    const before = walked[index - 1]
+    const after = walked[index + 1]
+    if (part.kind === 'leg') return [{ part, pieces: [piece] }]
+    if (part.kind === 'bend') {
+      const pieces = [
+        ...besideBend(before, 'to', scale),
+        piece,
+        ...besideBend(after, 'from', scale),
+      ]
+      return [{ part, pieces }]
     }
-    groups.push({ part, parts: [piece] })
-  }
-  return groups.map(({ part, parts }) => ({ part, points: chain(parts) }))
+    // A hem is entered once, at its fold, with the lip on its far side.
+    if (piece.kind !== 'round') return []
+    const pieces = piece.fold === 'hemA' ? [before, piece] : [piece, after]
+    return [{ part, pieces: pieces.filter((each) => each !== undefined) }]
+  })
+  const order = (part: Part) => (part.kind === 'leg' ? 1 : 0)
+  return parts
+    .toSorted((a, b) => order(a.part) - order(b.part))
+    .map(({ part, pieces }) => ({ part, points: chain(pieces) }))
 }

@@ -9,6 +9,9 @@ const WEIGHT = 2.4
 
 type Pair = readonly [number, number]
 
+/** Three lines in one glyph are lighter, so that they stay three. */
+const STRAPPED_WEIGHT = 1.9
+
 const line = (points: readonly Pair[], width = WEIGHT): DisplayItem =>
   path(
     'metal',
@@ -18,27 +21,22 @@ const line = (points: readonly Pair[], width = WEIGHT): DisplayItem =>
 
 /** Three folded lines in each other and the strap around them; `drop` moves them down. */
 const strapped = (drop: number): DisplayItem[] => [
-  line([
-    [2, 13 + drop],
-    [21, 13 + drop],
-    [21, 2 + drop],
-  ]),
-  line([
-    [2, 9 + drop],
-    [17, 9 + drop],
-    [17, 2 + drop],
-  ]),
-  line([
-    [2, 5 + drop],
-    [13, 5 + drop],
-    [13, 2 + drop],
-  ]),
+  ...[0, 1, 2].map((row) =>
+    line(
+      [
+        [2, 14 - 4.5 * row + drop],
+        [21 - 4.5 * row, 14 - 4.5 * row + drop],
+        [21 - 4.5 * row, 1 + drop],
+      ],
+      STRAPPED_WEIGHT,
+    ),
+  ),
   line(
     [
-      [6.5, 2.4 + drop],
-      [6.5, 15.6 + drop],
+      [6.5, 2.2 + drop],
+      [6.5, 16.8 + drop],
     ],
-    1.6,
+    1.4,
   ),
 ]
 
@@ -56,15 +54,15 @@ const GLYPHS: Readonly<Record<PieceState, readonly DisplayItem[]>> = {
       [19, 5],
     ]),
   ],
-  bundled: strapped(4),
+  bundled: strapped(4.5),
   pickedUp: [
-    ...strapped(-0.5),
+    ...strapped(0),
     {
       kind: 'circle',
       role: 'metal',
-      center: { x: 12, y: 19.6 },
-      radius: 3,
-      width: 2,
+      center: { x: 13, y: 20 },
+      radius: 2.8,
+      width: 1.9,
       filled: false,
     },
   ],

@@ -44,7 +44,7 @@ export const figureFaults = (display: DisplayList): string[] => {
       if (overlap(a.box, b.box)) faults.push(`${a.name} lies on ${b.name}`)
       const gap = Math.max(a.box.minX - b.box.maxX, b.box.minX - a.box.maxX)
       const isOneLine = a.box.minY < b.box.maxY && b.box.minY < a.box.maxY
-      if (isOneLine && gap >= 0 && gap < heightOf(a.box) * 0.5) {
+      if (isOneLine && gap >= 0 && gap < heightOf(a.box)) {
         faults.push(`${a.name} reads together with ${b.name}`)
       }
     }

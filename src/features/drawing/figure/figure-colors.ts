@@ -1,2 +1,0 @@
-export type { FigureColors } from '#shared/drawing/figure-colors'
-export { figureColors } from '#shared/drawing/figure-colors'
