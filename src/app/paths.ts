@@ -20,6 +20,8 @@ export const paths = {
   signIn: () => '/sign-in',
   account: () => '/account',
   place: (place: Place) => `/${place}`,
+  /** The history of a piece, shown within the place one stands in. */
+  piece: (place: Place, code: string) => `/${place}/pieces/${encodeURIComponent(code)}`,
 
   roof: {
     home: () => '/roof',
@@ -34,7 +36,6 @@ export const paths = {
     order: (orderId: string) => `/roof/orders/${orderId}`,
     newOrder: (jobId: string) => `/roof/jobs/${jobId}/order`,
     amendOrder: (orderId: string) => `/roof/orders/${orderId}/amend`,
-    piece: (code: string) => `/roof/pieces/${encodeURIComponent(code)}`,
   },
   brake: {
     queue: () => '/brake',

@@ -2,5 +2,11 @@ import type { RouteObject } from 'react-router-dom'
 import { lazyPage } from '@/app/lazy-page'
 
 export const routes: RouteObject[] = [
-  { index: true, ...lazyPage(async () => (await import('./BrakePage')).BrakePage) },
+  { index: true, ...lazyPage(async () => (await import('./QueuePage')).QueuePage) },
+  { path: 'done', ...lazyPage(async () => (await import('./QueuePage')).DonePage) },
+  { path: 'runs/:runId', ...lazyPage(async () => (await import('./RunPage')).RunPage) },
+  {
+    path: 'pieces/:code',
+    ...lazyPage(async () => (await import('@/pages/piece/PiecePage')).PiecePage),
+  },
 ]

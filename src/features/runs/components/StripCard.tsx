@@ -1,0 +1,59 @@
+import { useTranslation } from 'react-i18next'
+import type { Run } from '#shared/runs/runs.contract'
+import { useElementSize } from '@/features/drawing/canvas/useElementSize'
+import { ProfilePair } from '@/features/drawing/figure/ProfilePair'
+import { usePlanWords } from '@/features/drawing/usePlanWords'
+import { useUnits } from '@/features/people/useUnits'
+
+/** The first card of a run: what to cut, where the creases lie, what the finished piece looks like. */
+export function StripCard({ run }: { readonly run: Run }) {
+  const { t } = useTranslation('brake')
+  const { size, run: length, weight } = useUnits()
+  const words = usePlanWords()
+  const { ref, size: room } = useElementSize()
+  const heaviest = Math.max(...run.pieces.map((piece) => piece.weight))
+
+  return (
+    <div className="flex min-h-0 flex-1 max-lg:flex-col">
+      <div
+        ref={ref}
+        className="flex min-h-80 min-w-0 flex-1 items-center justify-center overflow-hidden"
+      >
+        {room && room.height > 0 && (
+          <ProfilePair
+            profile={run.profile}
+            stock={run.stock}
+            strip={run.strip}
+            name={run.name}
+            width={room.width}
+            height={room.height}
+            stripMode="layout"
+          />
+        )}
+      </div>
+      <aside className="flex w-104 shrink-0 flex-col gap-2 overflow-y-auto border-l border-rule px-6 py-4 max-lg:w-full max-lg:border-t max-lg:border-l-0">
+        <p className="text-scribe">{t('strip.width')}</p>
+        <p
+          className="font-figure text-stand font-medium whitespace-nowrap"
+          data-testid="strip-width"
+        >
+          {size(run.strip.stripWidth, 32).replace(/"$/, '')}
+        </p>
+        <p className="text-scribe">{t('strip.lengths')}</p>
+        <ul className="font-figure text-figure">
+          {run.lengths.map(({ length: inches, count }) => (
+            <li key={inches}>
+              {count} × {length(inches)}
+            </li>
+          ))}
+        </ul>
+        <p className="text-small">
+          {t('strip.brake', { brake: run.brakeName })} {words.checks(run.plan.checks)}
+        </p>
+        <p className="mt-auto border-t border-rule pt-3 text-small text-scribe">
+          {t('strip.caution', { weight: weight(heaviest) })}
+        </p>
+      </aside>
+    </div>
+  )
+}
