@@ -1,6 +1,7 @@
 import { useQueryClient, type QueryClient } from '@tanstack/react-query'
 import { useEffect, useState } from 'react'
 import { liveEventSchema, type LiveEvent } from '#shared/live/live'
+import { reportAnswering } from '@/lib/api/reachability'
 import { STALE_ROOTS } from '@/lib/live/live-topics'
 
 export type LiveState = 'off' | 'live' | 'reconnecting'
@@ -43,6 +44,7 @@ export function useLive(follow: boolean): LiveState {
       source = new EventSource('/api/live')
       source.onopen = () => {
         setConnected(true)
+        reportAnswering(true)
         if (missed) void client.invalidateQueries()
         missed = false
       }

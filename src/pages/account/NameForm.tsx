@@ -4,11 +4,11 @@ import { useTranslation } from 'react-i18next'
 import { z } from 'zod'
 import { textField } from '#shared/http/fields'
 import { Button } from '@/components/Button'
+import { ErrorNotice } from '@/components/ErrorNotice'
 import { Notice } from '@/components/Notice'
 import { TextField } from '@/components/TextField'
 import { useUpdateSelf } from '@/features/people/api/people.mutations'
 import { usePerson } from '@/features/people/person-context'
-import { errorWords } from '@/lib/api/error-words'
 
 const nameSchema = z.strictObject({ name: textField(80) })
 
@@ -43,7 +43,7 @@ export function NameForm() {
           {t('saveName')}
         </Button>
       </div>
-      {error && <Notice kind="error">{t(`problems:${errorWords(error)}.todo`)}</Notice>}
+      <ErrorNotice error={error} />
       {isSuccess && !formState.isDirty && <Notice kind="done">{t('saved')}</Notice>}
     </form>
   )

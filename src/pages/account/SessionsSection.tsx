@@ -1,9 +1,9 @@
 import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Button } from '@/components/Button'
+import { ErrorNotice } from '@/components/ErrorNotice'
 import { Notice } from '@/components/Notice'
 import { useSignOut, useSignOutEverywhere } from '@/features/people/api/people.mutations'
-import { errorWords } from '@/lib/api/error-words'
 
 /** Signing out here, or on every device at once, which asks back first. */
 export function SessionsSection() {
@@ -38,7 +38,7 @@ export function SessionsSection() {
           <Button onClick={() => setAsking(true)}>{t('everywhere')}</Button>
         </div>
       )}
-      {error && <Notice kind="error">{t(`problems:${errorWords(error)}.todo`)}</Notice>}
+      <ErrorNotice error={error} />
     </section>
   )
 }

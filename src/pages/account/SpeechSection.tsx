@@ -1,38 +1,38 @@
 import { useTranslation } from 'react-i18next'
 import { languageSchema, themeSchema, unitsSchema } from '#shared/people/people.contract'
 import { Choice } from '@/components/Choice'
-import { Notice } from '@/components/Notice'
+import { ErrorNotice } from '@/components/ErrorNotice'
 import { useUpdateSelf } from '@/features/people/api/people.mutations'
 import { usePerson } from '@/features/people/person-context'
-import { errorWords } from '@/lib/api/error-words'
 import { LANGUAGE_NAMES } from '@/locales/languages'
 
 /** How the product speaks to the person. Each choice is saved as it is made. */
 export function SpeechSection() {
   const { t } = useTranslation('account')
   const person = usePerson()
-  const { mutate, error } = useUpdateSelf()
+  const { mutate, error, isPending, variables } = useUpdateSelf()
+  const chosen = isPending ? { ...person, ...variables } : person
   return (
     <div className="flex flex-col gap-6">
       <Choice
         legend={t('language')}
-        value={person.language}
+        value={chosen.language}
         options={languageSchema.options.map((value) => ({ value, label: LANGUAGE_NAMES[value] }))}
         onChange={(language) => mutate({ language })}
       />
       <Choice
         legend={t('units')}
-        value={person.units}
+        value={chosen.units}
         options={unitsSchema.options.map((value) => ({ value, label: t(`unit.${value}`) }))}
         onChange={(units) => mutate({ units })}
       />
       <Choice
         legend={t('theme')}
-        value={person.theme}
+        value={chosen.theme}
         options={themeSchema.options.map((value) => ({ value, label: t(`themes.${value}`) }))}
         onChange={(theme) => mutate({ theme })}
       />
-      {error && <Notice kind="error">{t(`problems:${errorWords(error)}.todo`)}</Notice>}
+      <ErrorNotice error={error} />
     </div>
   )
 }

@@ -3,10 +3,9 @@ import { useForm } from 'react-hook-form'
 import { useTranslation } from 'react-i18next'
 import { signIn, type Self } from '#shared/people/people.contract'
 import { Button } from '@/components/Button'
-import { Notice } from '@/components/Notice'
+import { ErrorNotice } from '@/components/ErrorNotice'
 import { TextField } from '@/components/TextField'
 import { useSignIn, type Credentials } from '@/features/people/api/people.mutations'
-import { errorWords } from '@/lib/api/error-words'
 
 interface Props {
   readonly email: string
@@ -45,12 +44,7 @@ export function SignInForm({ email, onSignedIn }: Props) {
         error={errors.password && t('passwordMissing')}
         {...register('password')}
       />
-      {error && (
-        <Notice kind="error">
-          <strong className="block">{t(`problems:${errorWords(error)}.happened`)}</strong>
-          {t(`problems:${errorWords(error)}.todo`)}
-        </Notice>
-      )}
+      <ErrorNotice error={error} />
       <Button type="submit" variant="primary" pending={isPending}>
         {t('submit')}
       </Button>

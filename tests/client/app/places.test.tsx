@@ -1,6 +1,7 @@
 import { act, screen, waitFor, within } from '@testing-library/react'
 import { beforeEach, describe, expect, it } from 'vitest'
 import { PLACES_OF, ROLES } from '#shared/access/permissions'
+import { sessionKey } from '@/features/people/api/people.queries'
 import { holdCsrfToken } from '@/lib/api/csrf-token'
 import { startLocales } from '@/locales/index'
 import { fakeApi, json, noAnswer, personOf, problem } from '../../support/fake-api'
@@ -97,10 +98,27 @@ describe('the connection', () => {
     expect(screen.getByText(/what was last read/)).toBeVisible()
 
     api.on('PATCH /api/me', () => json(personOf('manager', { units: 'mm' })))
-    await user.click(screen.getByRole('radio', { name: 'Millimeters' }))
+    act(() => live.last().fail({ refused: false }))
+    act(() => live.last().open())
     await waitFor(() => expect(screen.queryByText('No connection')).not.toBeInTheDocument())
-    expect(screen.getByRole('radio', { name: 'Millimeters' })).toBeChecked()
   })
+
+  it('that comes back gets what was chosen meanwhile, without another press', async () => {
+    const api = as('manager')
+    const { user, client } = renderApp('/account')
+    const millimeters = await screen.findByRole('radio', { name: 'Millimeters' })
+    api.on('PATCH /api/me', noAnswer)
+    await user.click(millimeters)
+    expect(await screen.findByText('No connection')).toBeVisible()
+    expect(millimeters).toBeChecked()
+    api.on('PATCH /api/me', () => json(personOf('manager', { units: 'mm' })))
+    await waitFor(
+      () => expect(client.getQueryData(sessionKey)).toMatchObject({ person: { units: 'mm' } }),
+      { timeout: 10_000 },
+    )
+    expect(screen.queryByText('No connection')).not.toBeInTheDocument()
+    expect(millimeters).toBeChecked()
+  }, 20_000)
 
   it('that fails at the door says what happened and tries again', async () => {
     const api = fakeApi({ 'GET /api/session': () => problem('internal') })

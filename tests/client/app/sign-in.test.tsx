@@ -123,6 +123,7 @@ describe('a session that ends by itself', () => {
     await user.click(screen.getByRole('button', { name: 'Sign in' }))
     expect(await screen.findByRole('textbox', { name: 'Name' })).toHaveValue('Ines C.')
     expect(router.state.location.pathname).toBe('/account')
+    expect(screen.queryByRole('alert')).not.toBeInTheDocument()
   })
 
   it('shows nothing of it to another person, who begins at the start', async () => {

@@ -19,6 +19,8 @@ export function useSignIn() {
   const client = useQueryClient()
   return useMutation({
     mutationFn: (body: Credentials) => call(signIn, { body }),
+    // Somebody stands at the door and waits: they are told at once.
+    retry: false,
     onSuccess: async (session: Session) => {
       holdCsrfToken(session.csrfToken)
       const before = client.getQueryData<SignedIn>(sessionKey)
