@@ -50,6 +50,9 @@ export const paths = {
   },
   counter: {
     incoming: () => '/counter',
+    /** Incoming orders as a search through all of them. */
+    search: (text: string) => `/counter${query({ q: text })}`,
+    due: () => '/counter/due',
     order: (orderId: string) => `/counter/orders/${orderId}`,
     handOff: () => '/counter/hand-off',
     handOffOrder: (orderId: string) => `/counter/hand-off/${orderId}`,
