@@ -40,7 +40,8 @@ export const noAnswer = (): never => {
 
 /**
  * The server at the edge of the client: `fetch` itself is replaced, all above it is real. Answers
- * are named by method and path; the last one given for a route stays in force.
+ * are named by method and path; the last one given for a route stays in force, and what the test
+ * does not name is not found.
  *
  *     const api = fakeApi({ 'GET /api/session': () => json({ person: null, csrfToken: 'a' }) })
  *     api.on('POST /api/session', () => problem('wrong-credentials'))
@@ -59,8 +60,7 @@ export function fakeApi(answers: Record<string, Answer> = {}) {
       body: typeof init.body === 'string' ? (JSON.parse(init.body) as unknown) : undefined,
     }
     requests.push(request)
-    const answer = routes.get(route)
-    if (!answer) throw new Error(`The test gives no answer to ${route}.`)
+    const answer = routes.get(route) ?? (() => problem('not-found'))
     return Promise.resolve().then(() => answer(request))
   })
 

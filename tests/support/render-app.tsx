@@ -2,6 +2,7 @@ import { QueryClientProvider } from '@tanstack/react-query'
 import { render } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { createMemoryRouter, RouterProvider } from 'react-router-dom'
+import { onTestFinished } from 'vitest'
 import { createQueryClient } from '@/app/query-client'
 import { routes } from '@/app/router'
 import { fakeEventSource } from './fake-event-source'
@@ -10,6 +11,8 @@ import { fakeEventSource } from './fake-event-source'
 export function renderApp(address: string) {
   const live = fakeEventSource()
   const client = createQueryClient()
+  // What still waits to be tried again must not reach into the next test.
+  onTestFinished(() => client.clear())
   const router = createMemoryRouter(routes, { initialEntries: [address] })
   render(
     <QueryClientProvider client={client}>
