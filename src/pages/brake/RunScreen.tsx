@@ -113,7 +113,7 @@ export function RunScreen({ run }: { readonly run: Run }) {
               label={t('pieceCode')}
               action={t('markBent')}
               kinds={['piece']}
-              autoFocus
+              takesScans
               onCode={marking.markBent}
               onFault={marking.tellFault}
             />

@@ -12,7 +12,7 @@ interface Props {
   readonly kinds: readonly CodeKind[]
   readonly disabled?: boolean
   /** The cursor waits here, so that a scanner can be used at once. */
-  readonly autoFocus?: boolean
+  readonly takesScans?: boolean
   readonly primary?: boolean
   readonly onCode: (code: string, kind: CodeKind) => void
   readonly onFault: (fault: CodeFault | 'otherKind', typed: string) => void
@@ -27,7 +27,7 @@ export function CodeEntry({
   action,
   kinds,
   disabled = false,
-  autoFocus = false,
+  takesScans = false,
   primary = false,
   onCode,
   onFault,
@@ -59,7 +59,7 @@ export function CodeEntry({
         disabled={disabled}
         // A scanner types where the cursor is: on the floor it waits in this field.
         // eslint-disable-next-line jsx-a11y/no-autofocus
-        autoFocus={autoFocus}
+        autoFocus={takesScans}
         autoComplete="off"
         autoCapitalize="characters"
         spellCheck={false}
