@@ -1,10 +1,11 @@
-import { useMutation, useMutationState } from '@tanstack/react-query'
+import { useMutation, useMutationState, useQueryClient } from '@tanstack/react-query'
 import { useEffect, useRef } from 'react'
 import type { Order } from '#shared/orders/order.schema'
 import { mayPass } from '@/lib/api/api-errors'
 import { retryDelay } from '@/lib/api/retry'
 import { useStoreOrder } from '../api/orders.mutations'
-import { deliverDraft } from './deliver-draft'
+import { orderQuery } from '../api/orders.queries'
+import { deliverDraft, slotTarget } from './deliver-draft'
 import { changeSlot, clearSlot, readSlot, type Slot } from './draft-store'
 
 const deliveryKey = (draftKey: string) => ['orders', 'deliver', draftKey] as const
@@ -28,6 +29,7 @@ export function useDelivery(
   draftKey: string,
   onDelivered: (order: Order) => void,
 ): void {
+  const client = useQueryClient()
   const storeOrder = useStoreOrder()
   const started = useRef(false)
   const { mutate } = useMutation({
@@ -48,9 +50,14 @@ export function useDelivery(
       }
       await stored
     },
-    onError: () => {
+    onError: async () => {
       if (isWanted(slot, draftKey)) {
         changeSlot(slot, (draft) => ({ ...draft, sending: false }))
+      }
+      // Refused because somebody was faster: the form compares with what is there now.
+      const { kind, id } = slotTarget(slot)
+      if (kind === 'amend') {
+        await client.invalidateQueries({ queryKey: orderQuery(id).queryKey })
       }
     },
   })

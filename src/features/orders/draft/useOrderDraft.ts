@@ -18,6 +18,7 @@ import {
   type DraftFields,
   type DraftLine,
   type LinePatch,
+  type OrderDraft,
 } from './order-draft'
 
 export interface OrderDraftHandle extends KeptDraft {
@@ -27,6 +28,7 @@ export interface OrderDraftHandle extends KeptDraft {
   readonly updateLine: (key: string, patch: LinePatch) => void
   readonly removeLine: (key: string) => void
   readonly setFields: (patch: DraftFields) => void
+  readonly replace: (draft: OrderDraft) => void
   readonly clear: () => void
   readonly dismissBroken: () => void
 }
@@ -42,6 +44,7 @@ export function useDraftSlot(slot: Slot): OrderDraftHandle {
       updateLine: (key, patch) => changeSlot(slot, (draft) => withLinePatch(draft, key, patch)),
       removeLine: (key) => changeSlot(slot, (draft) => withoutLine(draft, key)),
       setFields: (patch) => changeSlot(slot, (draft) => ({ ...draft, ...patch })),
+      replace: (next) => changeSlot(slot, () => next),
       clear: () => clearSlot(slot),
       dismissBroken: () => dropBroken(slot),
     }),

@@ -133,3 +133,16 @@ export const faultsElsewhere = (faults: readonly Fault[], lineCount: number): Fa
     return index === undefined || Number(index) >= lineCount
   })
 }
+
+const fieldOf = (draft: OrderDraft, path: string): unknown => {
+  const [, index, field] = /^lines\.(\d+)\.(\w+)$/.exec(path) ?? []
+  if (index !== undefined && field !== undefined) {
+    const line = draft.lines[Number(index)]
+    return line && [line.key, new Map<string, unknown>(Object.entries(line)).get(field)]
+  }
+  return new Map<string, unknown>(Object.entries(draft)).get(path)
+}
+
+/** Whether a fault the server found still holds: its field is as it was when it was sent. */
+export const stillStands = ({ path }: Fault, sent: OrderDraft, now: OrderDraft): boolean =>
+  JSON.stringify(fieldOf(sent, path)) === JSON.stringify(fieldOf(now, path))

@@ -1,0 +1,32 @@
+import { useTranslation } from 'react-i18next'
+import type { Strip } from '#shared/strip/strip.schema'
+import { useUnits } from '@/features/people/useUnits'
+
+interface Props {
+  readonly strip: Strip | null
+  /** Pounds of one piece; null while it cannot be made or has no length. */
+  readonly pieceWeight: number | null
+  readonly quantity: number | null
+}
+
+/** What a line takes: girth, strip, one piece's weight and that of all. */
+export function LineFacts({ strip, pieceWeight, quantity }: Props) {
+  const { t } = useTranslation('orders')
+  const { size, weight } = useUnits()
+  const cells = [
+    [t('line.girth'), strip && size(strip.girth)],
+    [t('line.strip'), strip && size(strip.stripWidth, 32)],
+    [t('line.each'), pieceWeight !== null && weight(pieceWeight)],
+    [t('line.all'), pieceWeight !== null && quantity !== null && weight(pieceWeight * quantity)],
+  ] as const
+  return (
+    <dl className="grid grid-cols-2 border-y border-rule min-[26rem]:grid-cols-4">
+      {cells.map(([label, value]) => (
+        <div key={label} className="py-1.5 pr-2">
+          <dt className="text-small text-scribe">{label}</dt>
+          <dd className="font-figure whitespace-nowrap">{value || '–'}</dd>
+        </div>
+      ))}
+    </dl>
+  )
+}

@@ -1,0 +1,81 @@
+import { useTranslation } from 'react-i18next'
+import type { Stock } from '#shared/stock/stock.schema'
+import { DimensionField } from '@/components/keypad/DimensionField'
+import { Select } from '@/components/Select'
+import { TextField } from '@/components/TextField'
+import { useUnits } from '@/features/people/useUnits'
+import type { DraftLine, LinePatch } from '../draft/order-draft'
+import { faultAt, type Fault } from '../form/order-faults'
+import { useFaultWords } from '../form/useFaultWords'
+import { QuantityField } from './QuantityField'
+
+interface Props {
+  readonly line: DraftLine
+  readonly index: number
+  readonly stocks: readonly Stock[]
+  readonly faults: readonly Fault[]
+  readonly disabled: boolean
+  readonly onChange: (patch: LinePatch) => void
+}
+
+/** What a line says in words and numbers; its shape is changed on the board. */
+export function LineFields({ line, index, stocks, faults, disabled, onChange }: Props) {
+  const { t } = useTranslation('orders')
+  const { t: stockText } = useTranslation('stocks')
+  const { units } = useUnits()
+  const words = useFaultWords()
+  const error = (field: string) => words(faultAt(faults, `lines.${index}.${field}`))
+  return (
+    <div className="flex flex-col gap-4">
+      <TextField
+        label={t('line.name')}
+        value={line.name}
+        maxLength={80}
+        disabled={disabled}
+        error={error('name')}
+        onChange={(event) => onChange({ name: event.target.value })}
+      />
+      <div className="grid grid-cols-[5.5rem_1fr] items-start gap-4">
+        <TextField
+          label={t('line.mark')}
+          value={line.mark}
+          maxLength={20}
+          disabled={disabled}
+          error={error('mark')}
+          onChange={(event) => onChange({ mark: event.target.value })}
+        />
+        <QuantityField
+          value={line.quantity}
+          error={error('quantity')}
+          disabled={disabled}
+          onChange={(quantity) => onChange({ quantity })}
+        />
+      </div>
+      <DimensionField
+        label={t('line.length')}
+        purpose="run"
+        units={units}
+        value={line.length}
+        disabled={disabled}
+        error={error('length')}
+        onChange={(length) => onChange({ length })}
+      />
+      <Select
+        label={t('line.stock')}
+        placeholder={t('line.stockChoose')}
+        value={line.stockId ?? ''}
+        disabled={disabled}
+        error={error('stockId')}
+        options={stocks.map(({ id, colorName, thicknessName, sheet }) => ({
+          value: id,
+          label: stockText('line', {
+            color: colorName,
+            thickness: thicknessName,
+            metal: stockText(`metal.${sheet.metal}`),
+          }),
+        }))}
+        onChange={(event) => onChange({ stockId: event.target.value || null })}
+      />
+    </div>
+  )
+}

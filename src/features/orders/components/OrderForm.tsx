@@ -1,0 +1,138 @@
+import { useEffect, useRef, useState, type ReactNode } from 'react'
+import { useTranslation } from 'react-i18next'
+import { Button } from '@/components/Button'
+import { Notice } from '@/components/Notice'
+import { newKey } from '@/lib/api/idempotency'
+import { nextMark, type DraftLine } from '../draft/order-draft'
+import type { OrderDraftHandle } from '../draft/useOrderDraft'
+import type { LineGround } from '../form/check-line'
+import { faultAt, faultsElsewhere } from '../form/order-faults'
+import { useFaultWords } from '../form/useFaultWords'
+import type { OrderFormState } from '../form/useOrderForm'
+import { DeliveryNotice } from './DeliveryNotice'
+import { DraftLineCard } from './DraftLineCard'
+import { DraftTroubles } from './DraftTroubles'
+import { OrderCaution } from './OrderCaution'
+import { OrderFields } from './OrderFields'
+import { OrderReview } from './OrderReview'
+
+interface Props {
+  readonly id: string
+  readonly handle: OrderDraftHandle
+  readonly state: OrderFormState
+  readonly ground: LineGround
+  readonly boardPath: (lineKey: string) => string
+  readonly arrivedAt: { readonly to: string; readonly label: string }
+  readonly question?: string
+  /** How more lines are added: links to board and shelf. */
+  readonly more: ReactNode
+  readonly onDrop: () => void
+  readonly onSendAnother?: () => void
+}
+
+interface Removed {
+  readonly line: DraftLine
+  readonly at: number
+}
+
+/** An order being written or amended: its lines, what belongs to the whole, and the last look. */
+export function OrderForm({
+  id,
+  handle,
+  state,
+  ground,
+  boardPath,
+  arrivedAt,
+  question,
+  more,
+  onDrop,
+  onSendAnother,
+}: Props) {
+  const { t } = useTranslation('orders')
+  const words = useFaultWords()
+  const { draft } = handle
+  const { faults, delivery, presses } = state
+  const form = useRef<HTMLFormElement>(null)
+  const [removed, setRemoved] = useState<Removed | null>(null)
+  const linesFault = words(faultAt(faults, 'lines'))
+
+  // A press that found something missing leads to the first of it.
+  useEffect(() => {
+    if (presses === 0) return
+    const first = form.current?.querySelector<HTMLElement>('[aria-invalid="true"], [role="alert"]')
+    first?.scrollIntoView({ block: 'center' })
+    first?.focus({ preventScroll: true })
+  }, [presses])
+
+  return (
+    <form
+      id={id}
+      ref={form}
+      noValidate
+      className="flex flex-col gap-6"
+      onSubmit={(event) => {
+        event.preventDefault()
+        if (!draft.sending) state.submit()
+      }}
+    >
+      <DraftTroubles {...handle} />
+      <DeliveryNotice
+        sending={draft.sending}
+        delivery={delivery}
+        elsewhere={faultsElsewhere(faults, draft.lines.length)}
+        arrivedAt={arrivedAt}
+        onStop={state.stop}
+        onDrop={onDrop}
+        onSendAnother={onSendAnother}
+      />
+      {draft.lines.map((line, index) => (
+        <DraftLineCard
+          key={line.key}
+          line={line}
+          index={index}
+          ground={ground}
+          faults={faults}
+          disabled={draft.sending}
+          boardPath={boardPath(line.key)}
+          onChange={(patch) => handle.updateLine(line.key, patch)}
+          onDuplicate={() =>
+            handle.addLine({ ...line, key: newKey(), mark: nextMark(draft) }, index + 1)
+          }
+          onRemove={() => {
+            setRemoved({ line, at: index })
+            handle.removeLine(line.key)
+          }}
+        />
+      ))}
+      {removed && (
+        <Notice kind="info">
+          <span className="flex flex-wrap items-center justify-between gap-3">
+            {t('line.removed', { mark: removed.line.mark, name: removed.line.name })}
+            <Button
+              onClick={() => {
+                handle.addLine(removed.line, removed.at)
+                setRemoved(null)
+              }}
+            >
+              {t('line.undo')}
+            </Button>
+          </span>
+        </Notice>
+      )}
+      {linesFault && <Notice kind="error">{linesFault}</Notice>}
+      {!draft.sending && <div className="flex flex-wrap gap-3">{more}</div>}
+      <div className="flex flex-col gap-6 border-t-2 border-ink pt-4">
+        <OrderFields
+          draft={draft}
+          today={state.today}
+          faults={faults}
+          disabled={draft.sending}
+          question={question}
+          onChange={handle.setFields}
+        />
+        <OrderReview lines={draft.lines} ground={ground} />
+        <OrderCaution />
+      </div>
+    </form>
+  )
+}

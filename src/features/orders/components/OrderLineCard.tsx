@@ -1,0 +1,54 @@
+import { useId } from 'react'
+import { useTranslation } from 'react-i18next'
+import type { OrderLine } from '#shared/orders/order.schema'
+import { BendsLine } from './LineBends'
+import { LineFacts } from './LineFacts'
+import { LineFigure } from './LineFigure'
+import { LineHead } from './LineHead'
+import { LinePieces } from './LinePieces'
+import { StockName } from './StockName'
+
+interface Props {
+  readonly line: OrderLine
+  /** Where a piece's history is; absent where the reader has no such page. */
+  readonly piecePath?: (code: string) => string
+}
+
+/** A line of an order that is in: the drawing as the shop has it, and how far its pieces are. */
+export function OrderLineCard({ line, piecePath }: Props) {
+  const { t } = useTranslation('orders')
+  const { t: drawing } = useTranslation('drawing')
+  const id = useId()
+  const { bendsOn, stock, strip, quantity, pieces } = line
+  return (
+    <article aria-labelledby={id} className="flex flex-col gap-3 border-t-2 border-ink pt-4">
+      <LineHead
+        id={id}
+        mark={line.mark}
+        name={line.name}
+        quantity={quantity}
+        length={line.length}
+      />
+      <div className="grid gap-x-10 gap-y-3 lg:grid-cols-[22.5rem_minmax(0,34rem)]">
+        <LineFigure profile={line.profile} stock={stock} strip={strip} name={line.name} />
+        <div className="flex flex-col gap-3">
+          <LineFacts strip={strip} pieceWeight={line.pieceWeight} quantity={quantity} />
+          <StockName stock={stock} />
+          <BendsLine
+            good={bendsOn.length > 0}
+            words={
+              bendsOn.length > 0
+                ? drawing('answer.bendsOn', { brakes: bendsOn.join(', ') })
+                : drawing('answer.bendsNowhere')
+            }
+          />
+          {pieces.length === 0 ? (
+            <p className="text-small text-scribe">{t('line.noPieces')}</p>
+          ) : (
+            <LinePieces pieces={pieces} quantity={quantity} piecePath={piecePath} />
+          )}
+        </div>
+      </div>
+    </article>
+  )
+}

@@ -1,0 +1,42 @@
+import { useTranslation } from 'react-i18next'
+import { Link } from 'react-router-dom'
+import { orderNumber, type OrderSummary } from '#shared/orders/order.schema'
+import { useFormats } from '@/lib/format/useFormats'
+import { OrderStateWord } from './OrderStateWord'
+import { PieceProgress } from './PieceProgress'
+
+interface Props {
+  readonly order: OrderSummary
+  readonly to: string
+  /** Whose order: for those who see more than one company's. */
+  readonly withCompany?: boolean
+  /** Left out on the page of the job itself. */
+  readonly withJob?: boolean
+}
+
+/** An order in a list: the whole row leads to it. */
+export function OrderRow({ order, to, withCompany = false, withJob = true }: Props) {
+  const { t } = useTranslation('orders')
+  const { day, count } = useFormats()
+  const { number, job, company, state, neededBy, poNumber, pieceCount, progress } = order
+  const facts = [
+    t('row.needed', { day: day(neededBy) }),
+    t('row.pieces', { count: pieceCount, shown: count(pieceCount) }),
+    ...(poNumber === '' ? [] : [t('row.po', { number: poNumber })]),
+  ]
+  return (
+    <li className="relative flex flex-col gap-1.5 border-b border-rule py-3 hover:bg-ink/5">
+      <div className="flex flex-wrap items-center justify-between gap-x-4">
+        <Link to={to} className="font-semibold after:absolute after:inset-0">
+          <span className="font-figure">{orderNumber(number)}</span>
+          {withJob && <span className="ml-3">{job.name}</span>}
+        </Link>
+        <OrderStateWord state={state} />
+      </div>
+      <p className="text-small text-scribe">
+        {[...(withCompany ? [company.name] : []), ...facts].join(' · ')}
+      </p>
+      <PieceProgress progress={progress} compact />
+    </li>
+  )
+}
