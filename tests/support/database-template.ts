@@ -59,7 +59,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
 /** The process id in the name of a test database. */
 export const runnerOf = (name: string): number => Number(name.split('_')[2])
 
-function isAlive(pid: number): boolean {
+export function isAlive(pid: number): boolean {
   try {
     return process.kill(pid, 0)
   } catch (error) {
