@@ -26,7 +26,8 @@ const person = (
   companyId: company?.id ?? null,
   language,
   units: 'fraction',
-  theme: 'system',
+  // Light is read in the sun; at the other places the system's choice is followed.
+  theme: role === 'crewLead' ? 'light' : 'system',
 })
 
 /** One person for every role, and a crew lead for each company. */

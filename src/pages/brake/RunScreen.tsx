@@ -21,7 +21,7 @@ import { PlaceFrame } from '@/pages/shell/PlaceFrame'
 /** A run at the brake: the bend card, the pieces as they are done, and one thing to press. */
 export function RunScreen({ run }: { readonly run: Run }) {
   const { t } = useTranslation('brake')
-  const { day, time } = useFormats()
+  const { day, daysUntil, time } = useFormats()
   const { run: length } = useUnits()
   const person = usePerson()
   const mayBend = useMay('pieces.bend')
@@ -61,7 +61,11 @@ export function RunScreen({ run }: { readonly run: Run }) {
               .map(({ length: inches, count }) => `${count} × ${length(inches)}`)
               .join(', ')}
           </span>
-          <span className="text-ochre">{t('queue.due', { day: day(run.neededBy) })}</span>
+          <span className={daysUntil(run.neededBy) < 0 ? 'text-chalk' : 'text-ochre'}>
+            {t(daysUntil(run.neededBy) < 0 ? 'queue.late' : 'queue.due', {
+              day: day(run.neededBy),
+            })}
+          </span>
         </span>
       }
       back={{ to: paths.brake.queue(), label: t('back') }}
@@ -92,16 +96,18 @@ export function RunScreen({ run }: { readonly run: Run }) {
           }
         }
       />
-      <footer className="flex shrink-0 flex-wrap items-center gap-3 border-t border-rule px-(--gutter) py-2">
+      <div className="flex shrink-0 items-center gap-5 border-t border-rule px-(--gutter) pt-1">
         <PieceMarks pieces={run.pieces} />
-        <p className="shrink-0">
-          <b className="block text-lead" data-testid="bent-count">
+        <p className="shrink-0 text-right">
+          <b className="text-lead" data-testid="bent-count">
             {t('bentCount', { done, count: living })}
           </b>
-          <span className="text-small text-scribe">
+          <span className="ml-3 text-small text-scribe">
             {queued === 0 ? t('allBent') : t('scanHint')}
           </span>
         </p>
+      </div>
+      <footer className="flex shrink-0 flex-wrap items-center gap-3 px-(--gutter) pt-1 pb-2">
         {mayBend && run.claimedBy === null && queued > 0 && (
           <Button variant="primary" pending={claim.isPending} onClick={() => claim.mutate()}>
             {t('take')}
@@ -121,7 +127,7 @@ export function RunScreen({ run }: { readonly run: Run }) {
             <Button onClick={() => setAsking('trouble')}>{t('trouble.open')}</Button>
           </>
         )}
-        <div className="flex gap-3">
+        <div className="ml-auto flex gap-3">
           <Button disabled={card === 0} onClick={() => setCard(card - 1)}>
             {card <= 1 ? t('toStrip') : t('toStep', { number: card - 1 })}
           </Button>

@@ -35,7 +35,7 @@ export function ProfilePair({
 }: Props) {
   const { t } = useTranslation('drawing')
   const colors = useFigureColors(stock.painted ? stock.colorHex : null)
-  const labels = useFigureLabels()
+  const labels = useFigureLabels(stripMode === 'layout' ? 32 : 16)
   const stripHeight =
     stripMode === 'layout'
       ? Math.max(110, Math.round(height * 0.32))

@@ -4,7 +4,7 @@ import type { ThemeName } from '#shared/drawing/palette'
 import type { FigureLabels } from '#shared/drawing/section-figure'
 import { printBend } from '#shared/units/angle'
 import type { LengthUnits } from '#shared/units/length-units'
-import { printSize } from '#shared/units/print-length'
+import { printSize, type Denominator } from '#shared/units/print-length'
 import { usePerson } from '@/features/people/person-context'
 
 const DARK = '(prefers-color-scheme: dark)'
@@ -23,14 +23,15 @@ export function useShownTheme(): ThemeName {
 }
 
 /** A drawing says its unit once, not at every number. */
-export const figureLabels = (units: LengthUnits): FigureLabels => ({
-  length: (inches) => printSize(inches, units).replace(/("| mm)$/, ''),
+export const figureLabels = (units: LengthUnits, denominator: Denominator = 16): FigureLabels => ({
+  length: (inches) => printSize(inches, units, denominator).replace(/("| mm)$/, ''),
   angle: (turn) => printBend(turn, 'included'),
 })
 
-export function useFigureLabels(): FigureLabels {
+/** To 16ths for a crew; the shop marks its creases to 32nds. */
+export function useFigureLabels(denominator: Denominator = 16): FigureLabels {
   const { units } = usePerson()
-  return useMemo(() => figureLabels(units), [units])
+  return useMemo(() => figureLabels(units, denominator), [units, denominator])
 }
 
 /** `paintHex` is the stock's real color; null draws bare metal. */

@@ -1,10 +1,10 @@
 import { useTranslation } from 'react-i18next'
-import type { Plan } from '#shared/bend-plan/plan.schema'
 import { problemMessage } from '#shared/profile/problem-message'
 import { Icon } from '@/components/Icon'
 import { usePerson } from '@/features/people/person-context'
 import type { CheckedPlan, DrawingCheck } from '../check/check-drawing'
 import { usePlanWords } from '../usePlanWords'
+import { ChecksMade } from './ChecksMade'
 
 interface Props {
   readonly check: DrawingCheck | null
@@ -53,18 +53,6 @@ export function BendsOn({ check, plans }: Props) {
       )}
       {bending[0] && <ChecksMade plan={bending[0].plan} />}
     </Line>
-  )
-}
-
-/** Which tests the plan has passed; what was not tested is not promised. */
-function ChecksMade({ plan }: { plan: Plan }) {
-  const { t } = useTranslation('drawing')
-  const words = usePlanWords()
-  return (
-    <details className="text-small text-scribe">
-      <summary>{t('answer.checked', { count: plan.checks.length })}</summary>
-      {words.checks(plan.checks)}
-    </details>
   )
 }
 

@@ -64,7 +64,7 @@ export function CodeEntry({
         autoCapitalize="characters"
         spellCheck={false}
         enterKeyHint="done"
-        className={`${CONTROL} w-48 font-figure uppercase`}
+        className={`${CONTROL} w-44! font-figure uppercase placeholder:normal-case`}
         onChange={(event) => setText(event.target.value)}
       />
       <Button type="submit" variant={primary ? 'primary' : 'secondary'} disabled={disabled}>

@@ -11,6 +11,7 @@ import { SvgFigure } from '@/features/drawing/figure/SvgFigure'
 import { useFigureColors } from '@/features/drawing/figure/useFigureLook'
 import { usePlanWords } from '@/features/drawing/usePlanWords'
 import { useUnits } from '@/features/people/useUnits'
+import { StandFigure } from './StandFigure'
 
 interface Props {
   readonly run: Run
@@ -50,7 +51,7 @@ export function BendStep({ run, step, picture, number }: Props) {
             <p className="text-lead font-bold">{plan(`move.${step.move}`)}</p>
             <p className="text-small text-scribe">
               {picture.paintedUp !== null &&
-                `${plan(picture.paintedUp ? 'side.paintUp' : 'side.paintDown')}, `}
+                `${plan(picture.paintedUp ? 'side.paintUp' : 'side.paintDown')} · `}
               {plan(`edgeAtBack.${picture.edgeAtBack}`)}
             </p>
           </div>
@@ -101,12 +102,7 @@ function GaugeFigure({ run, step }: Pick<Props, 'run' | 'step'>) {
         {step.gauge === null ? t('step.markedLine') : words.gauge(step)}
       </p>
       {figure !== undefined && (
-        <p
-          className="font-figure text-stand font-medium whitespace-nowrap"
-          data-testid="step-gauge"
-        >
-          {size(figure, 32).replace(/"$/, '')}
-        </p>
+        <StandFigure text={size(figure, 32).replace(/"$/, '')} testId="step-gauge" />
       )}
     </>
   )

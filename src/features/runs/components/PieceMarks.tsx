@@ -13,7 +13,7 @@ export function PieceMarks({ pieces }: Props) {
   const { t } = useTranslation('piece')
   const { t: say } = useTranslation('pieces')
   return (
-    <ul className="flex max-h-24 min-w-0 flex-1 flex-wrap gap-x-1 overflow-y-auto">
+    <ul className="flex min-w-0 flex-1 gap-x-1 overflow-x-auto">
       {pieces.map((piece) => (
         <li key={piece.code}>
           <Link

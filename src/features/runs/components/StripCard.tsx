@@ -2,14 +2,14 @@ import { useTranslation } from 'react-i18next'
 import type { Run } from '#shared/runs/runs.contract'
 import { useElementSize } from '@/features/drawing/canvas/useElementSize'
 import { ProfilePair } from '@/features/drawing/figure/ProfilePair'
-import { usePlanWords } from '@/features/drawing/usePlanWords'
+import { ChecksMade } from '@/features/drawing/panels/ChecksMade'
 import { useUnits } from '@/features/people/useUnits'
+import { StandFigure } from './StandFigure'
 
 /** The first card of a run: what to cut, where the creases lie, what the finished piece looks like. */
 export function StripCard({ run }: { readonly run: Run }) {
   const { t } = useTranslation('brake')
   const { size, run: length, weight } = useUnits()
-  const words = usePlanWords()
   const { ref, size: room } = useElementSize()
   const heaviest = Math.max(...run.pieces.map((piece) => piece.weight))
 
@@ -33,12 +33,7 @@ export function StripCard({ run }: { readonly run: Run }) {
       </div>
       <aside className="flex w-104 shrink-0 flex-col gap-2 overflow-y-auto border-l border-rule px-6 py-4 max-lg:w-full max-lg:border-t max-lg:border-l-0">
         <p className="text-scribe">{t('strip.width')}</p>
-        <p
-          className="font-figure text-stand font-medium whitespace-nowrap"
-          data-testid="strip-width"
-        >
-          {size(run.strip.stripWidth, 32).replace(/"$/, '')}
-        </p>
+        <StandFigure text={size(run.strip.stripWidth, 32).replace(/"$/, '')} testId="strip-width" />
         <p className="text-scribe">{t('strip.lengths')}</p>
         <ul className="font-figure text-figure">
           {run.lengths.map(({ length: inches, count }) => (
@@ -47,9 +42,8 @@ export function StripCard({ run }: { readonly run: Run }) {
             </li>
           ))}
         </ul>
-        <p className="text-small">
-          {t('strip.brake', { brake: run.brakeName })} {words.checks(run.plan.checks)}
-        </p>
+        <p className="text-small">{t('strip.brake', { brake: run.brakeName })}</p>
+        <ChecksMade plan={run.plan} />
         <p className="mt-auto border-t border-rule pt-3 text-small text-scribe">
           {t('strip.caution', { weight: weight(heaviest) })}
         </p>
