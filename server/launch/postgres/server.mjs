@@ -145,11 +145,14 @@ export const stopServer = async (cluster, mode = 'fast') => {
 export const ensureDatabase = async (cluster, port) => {
   const { superuserPassword, ownerPassword } = readClusterFile(cluster)
   const rights = cluster.isThrowAway ? 'createdb' : 'nocreatedb'
+  // Dropping a database by force ends an autovacuum worker that happens to be at it, too.
+  const signal = cluster.isThrowAway ? `grant pg_signal_backend to ${OWNER};` : ''
   const { code, output } = await psql(
     { bin: cluster.bin, port, user: SUPERUSER, password: superuserPassword },
     `select 'create role ${OWNER} login ${rights}'
        where not exists (select from pg_roles where rolname = '${OWNER}') \\gexec
      alter role ${OWNER} password '${ownerPassword}';
+     ${signal}
      select 'create database ${OWNER} owner ${OWNER}'
        where not exists (select from pg_database where datname = '${OWNER}') \\gexec`,
   )
