@@ -23,10 +23,12 @@ export function PieceMarks({ pieces }: Props) {
               code: piece.code,
               state: say(`state.${piece.state}`),
             })}
-            className={`inline-flex min-w-12 flex-col items-center rounded-control px-1 py-1 hover:bg-ink/5 ${piece.state === 'queued' ? 'text-scribe' : piece.state === 'scrapped' ? 'text-chalk' : 'text-oxide'}`}
+            className={`inline-flex min-h-target min-w-12 flex-col items-center justify-center rounded-control px-2 whitespace-nowrap hover:bg-ink/5 ${piece.state === 'queued' ? 'text-scribe' : piece.state === 'scrapped' ? 'text-chalk' : 'text-oxide'}`}
           >
-            <StateGlyph state={piece.state} size={32} />
-            <span className="font-figure text-small">{`${piece.mark}${piece.sequence}`}</span>
+            <StateGlyph state={piece.state} size={28} />
+            <span className="font-figure text-small">
+              <b>{`${piece.mark}${piece.sequence}`}</b> {piece.code}
+            </span>
           </Link>
         </li>
       ))}
