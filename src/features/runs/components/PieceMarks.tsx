@@ -8,13 +8,19 @@ interface Props {
   readonly pieces: readonly RunPiece[]
 }
 
-/** Each piece of a run as it looks now, under its number; it leads to its history. */
+const queuedFirst = (pieces: readonly RunPiece[]) =>
+  pieces.toSorted((a, b) => Number(b.state === 'queued') - Number(a.state === 'queued'))
+
+/**
+ * Each piece of a run as it looks now, under its number; it leads to its history.
+ * What is still to be bent comes first.
+ */
 export function PieceMarks({ pieces }: Props) {
   const { t } = useTranslation('piece')
   const { t: say } = useTranslation('pieces')
   return (
     <ul className="flex min-w-0 flex-1 gap-x-1 overflow-x-auto">
-      {pieces.map((piece) => (
+      {queuedFirst(pieces).map((piece) => (
         <li key={piece.code}>
           <Link
             to={paths.piece('brake', piece.code)}
