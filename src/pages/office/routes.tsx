@@ -2,5 +2,8 @@ import type { RouteObject } from 'react-router-dom'
 import { lazyPage } from '@/app/lazy-page'
 
 export const routes: RouteObject[] = [
-  { index: true, ...lazyPage(async () => (await import('./OfficePage')).OfficePage) },
+  { index: true, ...lazyPage(async () => (await import('./OverviewPage')).OverviewPage) },
+  { path: 'stocks', ...lazyPage(async () => (await import('./StocksPage')).StocksPage) },
+  { path: 'brakes', ...lazyPage(async () => (await import('./BrakesPage')).BrakesPage) },
+  { path: 'people', ...lazyPage(async () => (await import('./PeoplePage')).PeoplePage) },
 ]

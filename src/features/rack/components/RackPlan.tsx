@@ -15,7 +15,7 @@ interface Props {
 
 /** The places in use as one looks at them from the counter door; those to go to stand out. */
 export function RackPlan({ bundles, found }: Props) {
-  const { t } = useTranslation('hand-off')
+  const { t } = useTranslation('rack-plan')
   const rack = useQuery(rackQuery())
   const places = useMemo(
     () => rackPlan(bundles, rack.data?.bundles ?? []),
@@ -25,7 +25,7 @@ export function RackPlan({ bundles, found }: Props) {
   return (
     <section aria-labelledby="rack-plan">
       <h2 id="rack-plan" className="mb-3 text-small text-scribe">
-        {t('plan.title')}
+        {t('title')}
       </h2>
       <ul className="flex flex-wrap items-end gap-3">
         {places.map((place) => (

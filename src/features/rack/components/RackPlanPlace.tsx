@@ -1,6 +1,6 @@
 import { useTranslation } from 'react-i18next'
 import { Icon } from '@/components/Icon'
-import { bundleMark } from '@/features/hand-off/bundle-words'
+import { bundleMark } from '../bundle-words'
 import type { PlanPlace } from '../rack-plan'
 
 interface Props {
@@ -15,7 +15,7 @@ const LEAST_WIDTH = 45
 
 /** A bay with its arms, or a spot on the floor; bundles lie on it as folded metal. */
 export function RackPlanPlace({ place, found, longest }: Props) {
-  const { t } = useTranslation('hand-off')
+  const { t } = useTranslation('rack-plan')
   const { name, onFloor, bundles, others } = place
   const wanted = bundles.length > 0
   return (
@@ -24,7 +24,7 @@ export function RackPlanPlace({ place, found, longest }: Props) {
     >
       <p className="font-figure">
         <span className={wanted ? 'font-bold' : ''}>{name}</span>
-        {onFloor && ` ${t('plan.floor')}`}
+        {onFloor && ` ${t('floor')}`}
       </p>
       <ul className="mt-auto flex flex-col gap-1">
         {bundles.map((bundle) => (
@@ -39,16 +39,14 @@ export function RackPlanPlace({ place, found, longest }: Props) {
               {found.includes(bundle.code) && (
                 <>
                   <Icon name="done" className="size-4" />
-                  <span className="sr-only">{t('bundle.scanned')}</span>
+                  <span className="sr-only">{t('scanned')}</span>
                 </>
               )}
             </span>
           </li>
         ))}
         {others > 0 && (
-          <li className="border-b border-edge pt-1 text-small">
-            {t('plan.others', { count: others })}
-          </li>
+          <li className="border-b border-edge pt-1 text-small">{t('others', { count: others })}</li>
         )}
       </ul>
     </li>

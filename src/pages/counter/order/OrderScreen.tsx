@@ -1,0 +1,132 @@
+import { useState } from 'react'
+import { useTranslation } from 'react-i18next'
+import { orderNumber, type Order } from '#shared/orders/order.schema'
+import { paths } from '@/app/paths'
+import { Button } from '@/components/Button'
+import { ButtonLink } from '@/components/ButtonLink'
+import { Notice } from '@/components/Notice'
+import { useAnswerQuestion, useReleaseOrder } from '@/features/orders/api/orders.mutations'
+import { QuestionAnswer } from '@/features/orders/components/QuestionAnswer'
+import { WithdrawDialog } from '@/features/orders/components/WithdrawDialog'
+import { isIncoming } from '@/features/orders/open-orders'
+import { useSeenVersion } from '@/features/orders/useSeenVersion'
+import { useFormats } from '@/lib/format/useFormats'
+import { PlaceFrame } from '@/pages/shell/PlaceFrame'
+import { CounterNav } from '../CounterNav'
+import { AskDialog } from './AskDialog'
+import { CounterLine } from './CounterLine'
+import { OrderSummaryPanel } from './OrderSummaryPanel'
+import { ReleaseRefusal } from './ReleaseRefusal'
+
+const ANSWER_FORM = 'answer'
+
+export function OrderScreen({ order }: { readonly order: Order }) {
+  const { t } = useTranslation('counter')
+  const { moment } = useFormats()
+  const release = useReleaseOrder(order.id)
+  const answer = useAnswerQuestion(order.id)
+  const { unseen, look } = useSeenVersion(order, [release.data, answer.data])
+  const [asking, setAsking] = useState<'question' | 'withdrawal' | null>(null)
+  const asked = order.state === 'question'
+  const nowhere = order.lines.filter(({ bendsOn }) => bendsOn.length === 0)
+  const incoming = isIncoming(order)
+  const mayRelease = nowhere.length === 0 && unseen === null
+
+  const buttons = (
+    <>
+      <Button variant="danger" onClick={() => setAsking('withdrawal')}>
+        {t('order.withdraw')}
+      </Button>
+      <Button disabled={release.isPending} onClick={() => setAsking('question')}>
+        {t(asked ? 'order.askAgain' : 'order.ask')}
+      </Button>
+      {asked ? (
+        <Button variant="primary" type="submit" form={ANSWER_FORM} pending={answer.isPending}>
+          {t('order.answer')}
+        </Button>
+      ) : (
+        <Button
+          variant="primary"
+          disabled={!mayRelease}
+          pending={release.isPending}
+          onClick={() => release.mutate({ version: order.version })}
+        >
+          {t('order.release')}
+        </Button>
+      )}
+    </>
+  )
+
+  return (
+    <PlaceFrame
+      title={orderNumber(order.number)}
+      subtitle={
+        <>
+          <span className="text-lead text-ink">{order.company.name}</span> {order.job.name}
+        </>
+      }
+      back={{ to: paths.counter.incoming(), label: t('order.back') }}
+      nav={<CounterNav />}
+      actions={
+        !incoming &&
+        order.state !== 'withdrawn' && (
+          <ButtonLink variant="quiet" to={paths.counter.handOffOrder(order.id)}>
+            {t('order.toHandOff')}
+          </ButtonLink>
+        )
+      }
+      primary={incoming ? buttons : undefined}
+    >
+      <div className="flex flex-col gap-4">
+        {unseen && order.state !== 'withdrawn' && (
+          <Notice kind="warn">
+            <strong className="block">
+              {t(`orders:event.${unseen.kind}`, { name: unseen.by })}, {moment(unseen.at)}.
+            </strong>
+            {t('order.changedHere')}
+            <Button className="mt-2 flex" onClick={() => look(order.version)}>
+              {t('order.looked')}
+            </Button>
+          </Notice>
+        )}
+        {incoming && nowhere.length > 0 && (
+          <Notice kind="error">
+            <strong className="block">
+              {t('order.nowhere', { marks: nowhere.map(({ mark }) => mark).join(', ') })}
+            </strong>
+            {t('order.nowhereCure')}
+          </Notice>
+        )}
+        <ReleaseRefusal error={release.error} order={order} />
+        {asked && (
+          <QuestionAnswer key={order.version} formId={ANSWER_FORM} order={order} answer={answer} />
+        )}
+      </div>
+      <div className="mt-5 flex flex-col gap-8 xl:grid xl:grid-cols-[minmax(0,1fr)_21rem] xl:gap-12">
+        <div className="order-2 flex min-w-0 flex-col gap-8 xl:order-none">
+          {order.lines.map((line) => (
+            <CounterLine key={line.id} line={line} />
+          ))}
+        </div>
+        <aside aria-label={t('order.summary')}>
+          <OrderSummaryPanel order={order} />
+        </aside>
+      </div>
+      {asking === 'question' && (
+        <AskDialog
+          order={order}
+          onClose={() => setAsking(null)}
+          onAsked={({ version }) => {
+            look(version)
+            setAsking(null)
+          }}
+        />
+      )}
+      <WithdrawDialog
+        order={order}
+        open={asking === 'withdrawal'}
+        onClose={() => setAsking(null)}
+      />
+    </PlaceFrame>
+  )
+}
