@@ -26,6 +26,14 @@ export const claim =
     await told.shop.runs.claimRun(run.id, wren)
   }
 
+/** Gives a run that is not finished back to the queue. */
+export const leave =
+  (place: number): Act =>
+  async (told) => {
+    const run = await getRun(told, place)
+    await told.shop.runs.leaveRun(run.id, wren)
+  }
+
 /** Takes the run if need be and bends so many of its pieces, or all that are queued, one by one. */
 export const bend =
   (place: number, count?: number): Act =>
