@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto'
+import supertest, { type Response as SupertestResponse } from 'supertest'
 import { z } from 'zod'
 import type { AnswerOf, BodyInputOf, Endpoint, Method, QueryInputOf } from '#shared/http/endpoint'
 import { problemSchema, type Problem } from '#shared/http/problem'
@@ -29,10 +30,13 @@ interface CallInput<E extends Endpoint> extends SendOptions {
  * with each. Paths are relative to /api.
  */
 export class ApiAgent {
+  private readonly browser: ReturnType<typeof supertest.agent>
   private cookie = ''
   private csrfToken = ''
 
-  constructor(private readonly origin: string) {}
+  constructor(private readonly origin: string) {
+    this.browser = supertest.agent(origin)
+  }
 
   get = (path: string, options?: SendOptions) => this.send('GET', path, undefined, options)
   post = (path: string, body?: unknown, options?: SendOptions) =>
@@ -83,41 +87,47 @@ export class ApiAgent {
     body?: unknown,
     options: SendOptions = {},
   ): Promise<ApiAnswer> {
-    const headers = new Headers()
+    const request = this.browser[VERBS[method]](`/api${path}`)
     if (method !== 'GET') {
-      headers.set('x-csrf-token', this.csrfToken)
-      headers.set('idempotency-key', options.idempotencyKey ?? randomUUID())
+      request.set('x-csrf-token', this.csrfToken)
+      request.set('idempotency-key', options.idempotencyKey ?? randomUUID())
     }
-    if (body !== undefined) headers.set('content-type', 'application/json')
-    for (const [name, value] of Object.entries(options.headers ?? {})) headers.set(name, value)
-    const response = await this.fetch(path, {
-      method,
-      headers,
-      ...(body !== undefined && { body: JSON.stringify(body) }),
-    })
+    request.set(options.headers ?? {})
+    if (body !== undefined) request.type('application/json').send(JSON.stringify(body))
+    const response = await request
     this.keepCookie(response)
     return readAnswer(response)
   }
 
-  private keepCookie(response: Response): void {
-    for (const line of response.headers.getSetCookie()) {
+  /** The jar of the browser serves its own requests; streams are opened with a copy. */
+  private keepCookie(response: SupertestResponse): void {
+    const lines = z.array(z.string()).default([]).parse(response.headers['set-cookie'])
+    for (const line of lines) {
       const pair = line.split(';', 1)[0] ?? ''
       this.cookie = pair.endsWith('=') ? '' : pair
     }
   }
 }
 
-async function readAnswer(response: Response): Promise<ApiAnswer> {
-  const text = await response.text()
-  const isJson = response.headers.get('content-type')?.includes('json') ?? false
+const VERBS = {
+  GET: 'get',
+  POST: 'post',
+  PUT: 'put',
+  PATCH: 'patch',
+  DELETE: 'delete',
+} as const satisfies Record<Method, string>
+
+function readAnswer(response: SupertestResponse): ApiAnswer {
+  const headers = new Headers()
+  for (const [name, value] of Object.entries(headersOf(response))) headers.set(name, String(value))
+  const isJson = headers.get('content-type')?.includes('json') ?? false
+  const text = response.text ?? ''
   const body: unknown = text === '' ? undefined : isJson ? JSON.parse(text) : text
-  return {
-    status: response.status,
-    headers: response.headers,
-    body,
-    problem: () => problemSchema.parse(body),
-  }
+  return { status: response.status, headers, body, problem: () => problemSchema.parse(body) }
 }
+
+const headersOf = (response: SupertestResponse) =>
+  z.record(z.string(), z.union([z.string(), z.array(z.string())])).parse(response.headers)
 
 export const fillPath = (path: string, params: Record<string, string>): string =>
   path.replace(/:(\w+)/g, (_, name: string) => {
