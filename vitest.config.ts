@@ -13,7 +13,13 @@ export default defineConfig({
     projects: [
       {
         resolve: { alias },
-        test: { name: 'unit', include: ['tests/unit/**/*.test.ts'], environment: 'node' },
+        test: {
+          name: 'unit',
+          include: ['tests/unit/**/*.test.ts'],
+          environment: 'node',
+          // A bound against hanging, not a measure: a shared machine may be very slow.
+          testTimeout: 60_000,
+        },
       },
       {
         resolve: { alias },
@@ -22,6 +28,7 @@ export default defineConfig({
           include: ['tests/client/**/*.test.{ts,tsx}'],
           environment: 'jsdom',
           setupFiles: ['tests/support/client-setup.ts'],
+          testTimeout: 60_000,
         },
       },
       {
