@@ -21,7 +21,7 @@ interface Props {
 /** A state: its glyph and its word, never a color alone. */
 export function StateWord({ glyph, tone = 'plain', children }: Props) {
   return (
-    <span className={`inline-flex items-center gap-2 whitespace-nowrap ${INK[tone]}`}>
+    <span className={`inline-flex items-center gap-2 align-middle whitespace-nowrap ${INK[tone]}`}>
       {glyph !== undefined && (
         <span aria-hidden="true" className="inline-flex shrink-0">
           {glyph}

@@ -43,19 +43,23 @@ export function handOverStep(
 }
 
 export interface LeftBehind {
-  /** Bundles that lie here and were not scanned. */
+  /** Bundles that lie here and were not scanned; none are named before the first scan. */
   readonly bundles: readonly Bundle[]
   /** Bent pieces in no bundle. */
   readonly loose: number
   /** Pieces not bent yet. */
   readonly queued: number
-  readonly nothing: boolean
+  readonly some: boolean
 }
 
 /** What stays when the scanned bundles go: nobody should find out on the roof. */
 export function leftBehind(sheet: HandOffSheet, scanned: readonly string[]): LeftBehind {
-  const bundles = sheet.bundles.filter((bundle) => isHere(bundle) && !scanned.includes(bundle.code))
+  const taken = scannedBundles(sheet, scanned)
+  const bundles =
+    taken.length === 0
+      ? []
+      : sheet.bundles.filter((bundle) => isHere(bundle) && !taken.includes(bundle))
   const loose = sheet.looseCount
   const { queued } = sheet.order.progress
-  return { bundles, loose, queued, nothing: bundles.length === 0 && loose === 0 && queued === 0 }
+  return { bundles, loose, queued, some: bundles.length + loose + queued > 0 }
 }

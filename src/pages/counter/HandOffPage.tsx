@@ -4,7 +4,6 @@ import { useTranslation } from 'react-i18next'
 import { useNavigate } from 'react-router-dom'
 import type { OrderState } from '#shared/orders/order.schema'
 import { paths } from '@/app/paths'
-import { Band } from '@/components/Band'
 import { Button } from '@/components/Button'
 import { EmptyState } from '@/components/EmptyState'
 import { SearchField } from '@/components/SearchField'
@@ -15,6 +14,7 @@ import { ordersQuery } from '@/features/orders/api/orders.queries'
 import { isAtCounter } from '@/features/orders/open-orders'
 import { useSettled } from '@/pages/roof/useSettled'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
+import { CounterBand } from './CounterBand'
 import { CounterNav } from './CounterNav'
 
 /** A search looks through whatever was released: somebody may come back with a bundle. */
@@ -48,9 +48,7 @@ export function HandOffPage() {
         />
       }
     >
-      <div className="-mx-(--gutter) -mt-5 mb-5">
-        <Band answer={answer} />
-      </div>
+      <CounterBand answer={answer} />
       {settled === '' ? <AtCounter /> : <Found search={settled} onClear={() => setSearch('')} />}
     </PlaceFrame>
   )

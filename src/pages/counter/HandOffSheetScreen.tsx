@@ -56,7 +56,7 @@ export function HandOffSheetScreen({ sheet }: { readonly sheet: HandOffSheet }) 
       title={orderNumber(order.number)}
       subtitle={
         <>
-          <span className="text-lead text-ink">{order.company.name}</span>{' '}
+          <span className="mr-4 text-lead text-ink">{order.company.name}</span>
           {t('orderOf', { job: order.job.name, name: order.orderedBy })}
         </>
       }
@@ -68,16 +68,18 @@ export function HandOffSheetScreen({ sheet }: { readonly sheet: HandOffSheet }) 
         </ButtonLink>
       }
       search={
-        <CodeEntry
-          key={round}
-          takesScans
-          label={t('scan.label')}
-          action={t('scan.action')}
-          kinds={['bundle', 'piece']}
-          disabled={handOff.isPending}
-          onCode={scan}
-          onFault={refuse}
-        />
+        <div className="lg:flex lg:justify-end">
+          <CodeEntry
+            key={round}
+            takesScans
+            label={t('scan.label')}
+            action={t('scan.action')}
+            kinds={['bundle', 'piece']}
+            disabled={handOff.isPending}
+            onCode={scan}
+            onFault={refuse}
+          />
+        </div>
       }
     >
       <Band answer={answer} />

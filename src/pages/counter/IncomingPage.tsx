@@ -5,7 +5,6 @@ import { useNavigate, useSearchParams } from 'react-router-dom'
 import { z } from 'zod'
 import { ORDER_STATES, orderStateSchema } from '#shared/orders/order.schema'
 import { paths } from '@/app/paths'
-import { Band } from '@/components/Band'
 import { Button } from '@/components/Button'
 import { EmptyState } from '@/components/EmptyState'
 import { SearchField } from '@/components/SearchField'
@@ -17,6 +16,7 @@ import { OrdersTable } from '@/features/orders/components/OrdersTable'
 import { isIncoming } from '@/features/orders/open-orders'
 import { useSettled } from '@/pages/roof/useSettled'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
+import { CounterBand } from './CounterBand'
 import { CounterNav } from './CounterNav'
 
 const INCOMING = 'incoming'
@@ -66,9 +66,7 @@ export function IncomingPage() {
         />
       }
     >
-      <div className="-mx-(--gutter) -mt-5 mb-5">
-        <Band answer={answer} />
-      </div>
+      <CounterBand answer={answer} />
       <Select
         className="mb-4 max-w-72"
         label={t('incoming.show')}

@@ -34,6 +34,7 @@ export function HandOverPanel({ sheet, scanned, onScan, onHandedOver, handOff }:
 
   const step = handOverStep(sheet, { scanned, receivedBy, signature, signedOnPaper })
   const taken = scannedBundles(sheet, scanned)
+  const left = leftBehind(sheet, scanned)
   const heavy = taken.some((bundle) => liftOf(bundle) !== 'onePerson')
   const refusal = handOff.error && words.ofError(handOff.error)
 
@@ -85,7 +86,7 @@ export function HandOverPanel({ sheet, scanned, onScan, onHandedOver, handOff }:
             <span className="block text-small text-scribe">{t('sign.onPaperHint')}</span>
           </span>
         </label>
-        <LeftBehindNotice left={leftBehind(sheet, scanned)} />
+        {(taken.length > 0 || left.some) && <LeftBehindNotice left={left} />}
         {heavy && <Notice kind="warn">{t('lift.caution')}</Notice>}
         <OrderCaution />
       </div>
@@ -98,7 +99,7 @@ export function HandOverPanel({ sheet, scanned, onScan, onHandedOver, handOff }:
         )}
         <Button
           variant="primary"
-          className="min-h-14 w-full text-lead"
+          className="min-h-14! w-full text-lead"
           disabled={step.waitsFor !== 'nothing'}
           pending={pending}
           onClick={handOver}

@@ -6,7 +6,7 @@ import type { LeftBehind } from '../hand-over'
 /** What stays here when the scanned bundles go. */
 export function LeftBehindNotice({ left }: { readonly left: LeftBehind }) {
   const { t } = useTranslation('hand-off')
-  if (left.nothing) return <Notice kind="done">{t('left.nothing')}</Notice>
+  if (!left.some) return <Notice kind="done">{t('left.nothing')}</Notice>
   return (
     <Notice kind="warn">
       <ul>

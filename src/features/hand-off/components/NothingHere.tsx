@@ -8,7 +8,7 @@ export function NothingHere({ sheet }: { readonly sheet: HandOffSheet }) {
   const { t } = useTranslation('hand-off')
   const left = leftBehind(sheet, [])
   const { state } = sheet.order
-  const words = state === 'withdrawn' ? 'withdrawn' : left.nothing ? 'allGone' : 'notYet'
+  const words = state === 'withdrawn' ? 'withdrawn' : !left.some ? 'allGone' : 'notYet'
   return (
     <div className="flex flex-col gap-3 p-(--gutter)">
       <h2 className="text-title font-bold">{t(`nothing.${words}`)}</h2>

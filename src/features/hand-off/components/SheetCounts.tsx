@@ -25,14 +25,16 @@ export function SheetCounts({ sheet }: { readonly sheet: HandOffSheet }) {
           </StateWord>
         </li>
       )}
-      <li>
-        <StateWord glyph={<StateGlyph state="bundled" />} tone={bundled > 0 ? 'done' : 'quiet'}>
-          {t('counts.bundled', {
-            pieces: t('counts.pieces', { count: bundled }),
-            bundles: t('counts.bundles', { count: bundles }),
-          })}
-        </StateWord>
-      </li>
+      {bundles > 0 && (
+        <li>
+          <StateWord glyph={<StateGlyph state="bundled" />} tone="done">
+            {t('counts.bundled', {
+              count: bundled,
+              bundles: t('counts.bundles', { count: bundles }),
+            })}
+          </StateWord>
+        </li>
+      )}
       <li>
         <StateWord glyph={<StateGlyph state="pickedUp" />} tone="quiet">
           {t('counts.pickedUp', { count: pickedUp })}

@@ -10,30 +10,40 @@ interface Props {
   readonly longest: number
 }
 
-/** The shortest bundle is still wide enough for its mark. */
-const LEAST_WIDTH = 45
+/** The shortest bundle is still wide enough for its mark and its tick. */
+const LEAST_WIDTH = 55
+
+/** A bay is drawn with so many arms, more where more lies on it; a spot on the floor has none. */
+const ARMS = 4
+
+const ROW = 'h-7 border-b border-edge'
 
 /** A bay with its arms, or a spot on the floor; bundles lie on it as folded metal. */
 export function RackPlanPlace({ place, found, longest }: Props) {
   const { t } = useTranslation('rack-plan')
   const { name, onFloor, bundles, others } = place
   const wanted = bundles.length > 0
+  const free = onFloor ? 0 : Math.max(0, ARMS - bundles.length - (others > 0 ? 1 : 0))
   return (
     <li
-      className={`flex flex-col border-2 p-2.5 ${onFloor ? 'min-h-24 w-56' : 'min-h-36 w-34'} ${wanted ? 'border-dye bg-dye/8' : 'border-rule bg-sheet text-scribe'}`}
+      className={`flex flex-col border-2 px-2.5 pt-2 pb-3 ${onFloor ? 'w-40' : 'w-28'} ${wanted ? 'border-dye bg-dye/8' : 'border-rule bg-sheet text-scribe'}`}
     >
       <p className="font-figure">
         <span className={wanted ? 'font-bold' : ''}>{name}</span>
         {onFloor && ` ${t('floor')}`}
       </p>
-      <ul className="mt-auto flex flex-col gap-1">
+      {Array.from({ length: free }, (_, arm) => (
+        <span key={arm} aria-hidden="true" className={ROW} />
+      ))}
+      <ul>
+        {others > 0 && (
+          <li className={`flex items-end text-small ${ROW}`}>{t('others', { count: others })}</li>
+        )}
         {bundles.map((bundle) => (
-          <li key={bundle.code} className="border-b border-edge">
+          <li key={bundle.code} className={`flex items-end ${ROW}`}>
             <span
               className="flex h-6 items-center gap-1 border-3 border-b-0 border-dye px-1.5 font-figure text-small leading-none font-bold text-dye"
-              style={{
-                width: `${Math.max(LEAST_WIDTH, (bundle.longest / longest) * 100)}%`,
-              }}
+              style={{ width: `${Math.max(LEAST_WIDTH, (bundle.longest / longest) * 100)}%` }}
             >
               {bundleMark(bundle)}
               {found.includes(bundle.code) && (
@@ -45,9 +55,6 @@ export function RackPlanPlace({ place, found, longest }: Props) {
             </span>
           </li>
         ))}
-        {others > 0 && (
-          <li className="border-b border-edge pt-1 text-small">{t('others', { count: others })}</li>
-        )}
       </ul>
     </li>
   )

@@ -13,6 +13,7 @@ import { useSeenVersion } from '@/features/orders/useSeenVersion'
 import { useFormats } from '@/lib/format/useFormats'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
 import { CounterNav } from '../CounterNav'
+import { useCounterSearch } from '../useCounterSearch'
 import { AskDialog } from './AskDialog'
 import { CounterLine } from './CounterLine'
 import { OrderSummaryPanel } from './OrderSummaryPanel'
@@ -26,6 +27,7 @@ export function OrderScreen({ order }: { readonly order: Order }) {
   const release = useReleaseOrder(order.id)
   const answer = useAnswerQuestion(order.id)
   const { unseen, look } = useSeenVersion(order, [release.data, answer.data])
+  const { search, band } = useCounterSearch()
   const [asking, setAsking] = useState<'question' | 'withdrawal' | null>(null)
   const asked = order.state === 'question'
   const nowhere = order.lines.filter(({ bendsOn }) => bendsOn.length === 0)
@@ -62,11 +64,13 @@ export function OrderScreen({ order }: { readonly order: Order }) {
       title={orderNumber(order.number)}
       subtitle={
         <>
-          <span className="text-lead text-ink">{order.company.name}</span> {order.job.name}
+          <span className="mr-4 text-lead text-ink">{order.company.name}</span>
+          {order.job.name}
         </>
       }
       back={{ to: paths.counter.incoming(), label: t('order.back') }}
       nav={<CounterNav />}
+      search={search}
       actions={
         !incoming &&
         order.state !== 'withdrawn' && (
@@ -77,7 +81,8 @@ export function OrderScreen({ order }: { readonly order: Order }) {
       }
       primary={incoming ? buttons : undefined}
     >
-      <div className="flex flex-col gap-4">
+      {band}
+      <div className="mb-6 flex flex-col gap-4 empty:hidden">
         {unseen && order.state !== 'withdrawn' && (
           <Notice kind="warn">
             <strong className="block">
@@ -102,7 +107,7 @@ export function OrderScreen({ order }: { readonly order: Order }) {
           <QuestionAnswer key={order.version} formId={ANSWER_FORM} order={order} answer={answer} />
         )}
       </div>
-      <div className="mt-5 flex flex-col gap-8 xl:grid xl:grid-cols-[minmax(0,1fr)_21rem] xl:gap-12">
+      <div className="flex flex-col gap-8 xl:grid xl:grid-cols-[minmax(0,1fr)_21rem] xl:gap-12">
         <div className="order-2 flex min-w-0 flex-col gap-8 xl:order-none">
           {order.lines.map((line) => (
             <CounterLine key={line.id} line={line} />
