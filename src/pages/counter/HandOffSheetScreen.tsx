@@ -61,14 +61,19 @@ export function HandOffSheetScreen({ sheet }: { readonly sheet: HandOffSheet }) 
         </>
       }
       back={{ to: paths.counter.handOff(), label: t('back') }}
-      nav={<CounterNav />}
+      nav={
+        // Where the screen is low the pad needs the room; the way back stands beside the title.
+        <div className="hidden xl:block">
+          <CounterNav />
+        </div>
+      }
       actions={
         <ButtonLink variant="quiet" to={paths.counter.order(order.id)}>
           {t('toOrder')}
         </ButtonLink>
       }
       search={
-        <div className="lg:flex lg:justify-end">
+        <div className="xl:flex xl:justify-end">
           <CodeEntry
             key={round}
             takesScans

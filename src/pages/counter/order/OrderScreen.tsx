@@ -16,6 +16,7 @@ import { CounterNav } from '../CounterNav'
 import { useCounterSearch } from '../useCounterSearch'
 import { AskDialog } from './AskDialog'
 import { CounterLine } from './CounterLine'
+import { OrderPast } from './OrderPast'
 import { OrderSummaryPanel } from './OrderSummaryPanel'
 import { ReleaseRefusal } from './ReleaseRefusal'
 
@@ -107,15 +108,18 @@ export function OrderScreen({ order }: { readonly order: Order }) {
           <QuestionAnswer key={order.version} formId={ANSWER_FORM} order={order} answer={answer} />
         )}
       </div>
-      <div className="flex flex-col gap-8 xl:grid xl:grid-cols-[minmax(0,1fr)_21rem] xl:gap-12">
-        <div className="order-2 flex min-w-0 flex-col gap-8 xl:order-none">
+      <div className="flex flex-col gap-8 xl:grid xl:grid-cols-[minmax(0,1fr)_21rem] xl:grid-rows-[auto_1fr] xl:gap-x-12">
+        <section aria-label={t('order.summary')} className="xl:col-start-2">
+          <OrderSummaryPanel order={order} />
+        </section>
+        <div className="flex min-w-0 flex-col gap-8 xl:col-start-1 xl:row-span-2 xl:row-start-1">
           {order.lines.map((line) => (
             <CounterLine key={line.id} line={line} />
           ))}
         </div>
-        <aside aria-label={t('order.summary')}>
-          <OrderSummaryPanel order={order} />
-        </aside>
+        <div className="xl:col-start-2">
+          <OrderPast order={order} />
+        </div>
       </div>
       {asking === 'question' && (
         <AskDialog

@@ -2,14 +2,12 @@ import type { ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { Order } from '#shared/orders/order.schema'
 import { NeededBy } from '@/features/orders/components/NeededBy'
-import { OrderCaution } from '@/features/orders/components/OrderCaution'
-import { OrderHistory } from '@/features/orders/components/OrderHistory'
 import { OrderStateWord } from '@/features/orders/components/OrderStateWord'
 import { PieceProgress } from '@/features/orders/components/PieceProgress'
 import { useUnits } from '@/features/people/useUnits'
 import { useFormats } from '@/lib/format/useFormats'
 
-/** Who ordered what for when, how far it is, and what was done with it. */
+/** Who ordered what for when, and how far it is. */
 export function OrderSummaryPanel({ order }: { readonly order: Order }) {
   const { t } = useTranslation('counter')
   const { moment, count } = useFormats()
@@ -21,7 +19,7 @@ export function OrderSummaryPanel({ order }: { readonly order: Order }) {
         <OrderStateWord state={order.state} />
       </p>
       <PieceProgress progress={order.progress} />
-      <dl>
+      <dl className="gap-x-10 sm:grid sm:grid-cols-2 xl:block">
         <Fact label={t('order.neededBy')}>
           <NeededBy order={order} />
         </Fact>
@@ -48,13 +46,6 @@ export function OrderSummaryPanel({ order }: { readonly order: Order }) {
           <p className="whitespace-pre-line">{order.notes}</p>
         </div>
       )}
-      <section aria-labelledby="history">
-        <h2 id="history" className="mb-2 font-bold">
-          {t('order.history')}
-        </h2>
-        <OrderHistory events={order.events} />
-      </section>
-      <OrderCaution />
     </div>
   )
 }
