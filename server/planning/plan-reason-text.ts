@@ -18,6 +18,12 @@ const REASONS: Record<ReasonText['key'], string> = {
   clamp: '{bend} leaves {found} of flat sheet to clamp and the brake needs {limit}',
   throat: '{bend} puts {found} behind the clamp and the brake has room for {limit}',
   gauge: '{bend} would be gauged at {found} and the gauge stops at {limit}',
+  rearMeetsTool: 'at {bend} what lies behind it meets the clamp',
+  frontMeetsTool: 'at {bend} the part that swings up meets the brake',
+  meetsItself: 'at {bend} the piece meets itself',
+  apronMeetsRear: 'at {bend} the apron meets what is bent behind it',
+  cannotLoad: 'for {bend} the piece does not go into the brake',
+  trapped: 'after {bend} the piece would be trapped in the brake',
   noOrder: 'no order of the bends works',
   limit: 'the search stopped before it was certain',
 }

@@ -4,7 +4,11 @@ const point = z.tuple([z.number(), z.number()])
 const polygon = z.array(point).min(3)
 
 /** Tools of one fold direction in the fold frame: bend line at the origin, front at x > 0. Inches. */
-export const toolSetSchema = z.strictObject({ inner: polygon, outer: polygon, apron: polygon })
+export const toolSetSchema = z.strictObject({
+  inner: polygon,
+  outer: polygon,
+  apron: polygon,
+})
 
 /**
  * A folding brake as data. Lengths in inches, angles in degrees of bend. An up-only brake has no

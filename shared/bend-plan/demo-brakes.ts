@@ -21,7 +21,11 @@ const shopApron: Polygon = [
   [0, -8],
 ]
 
-const bothWays: ToolSet = { inner: shopInner, outer: mirrored(shopInner), apron: shopApron }
+const bothWays: ToolSet = {
+  inner: shopInner,
+  outer: mirrored(shopInner),
+  apron: shopApron,
+}
 
 /** Generic illustrative brakes: no make's values. */
 const upOnly: Brake = {

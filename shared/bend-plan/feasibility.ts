@@ -139,5 +139,9 @@ export const createFeasibility = (
     return undefined
   }
 
-  return { passes, orientationsToTry: (bend) => tries[bend.index] ?? [], firstFailure }
+  return {
+    passes,
+    orientationsToTry: (bend) => tries[bend.index] ?? [],
+    firstFailure,
+  }
 }

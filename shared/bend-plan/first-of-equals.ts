@@ -42,48 +42,51 @@ const rankedChoices = (ground: SearchGround, paintedSide: ColorSide): readonly C
 }
 
 /**
- * Among all sequences that cost as little as `best`, the one with the smallest ranks, looked for
- * forwards with what the backward search knows of the rest. Gives `best` itself back should the
- * limit on folds be reached before: still the same answer every time, and as cheap.
+ * Among all sequences that cost as little as `best`, the one with the smallest ranks, walked forwards
+ * over what the backward search knows of the rest of each: every choice it offers can be finished.
  */
 export const firstOfEquals = (
   ground: SearchGround,
   best: Sequence,
-  findRest: SequenceSearch['findRest'],
+  findRest: NonNullable<SequenceSearch['findRest']>,
   paintedSide: ColorSide,
 ): Sequence => {
-  const { piece, feasibility, cost, lowerBound } = ground
+  const { piece, feasibility, cost } = ground
   const full = allBends(piece)
   const choices = rankedChoices(ground, paintedSide)
-  const failed = new Map<number, number>()
   const operations: Operation[] = []
-  let looked = 0
+  let made = 0
+  let from: number | undefined
+  let spent = 0
 
-  const isHopeless = (state: number, spent: number) => spent >= (failed.get(state) ?? Infinity)
+  const canFinish = (next: number, orientation: number, total: number): boolean =>
+    next === full
+      ? total === best.cost
+      : ORIENTATIONS.some((_, then) => {
+          const rest = findRest(next, then)
+          return rest !== undefined && total + cost.move(orientation, then) + rest === best.cost
+        })
 
-  /** True when `operations` has become a whole sequence within the cost. */
-  const complete = (made: number, from: number | undefined, spent: number): boolean => {
-    if (made === full) return true
-    for (const choice of choices) {
-      const { orientation } = choice
-      const bit = 1 << choice.bend
-      if ((made & bit) !== 0) continue
-      const moved = spent + (from === undefined ? 0 : cost.move(from, orientation))
-      if (moved + (findRest(made, orientation) ?? 0) > best.cost) continue
-      const total =
-        moved + cost.fixed(choice.piece, orientation) + cost.gauge(made, choice.piece, orientation)
-      const next = made | bit
-      if (total + lowerBound(full & ~next, orientation) > best.cost) continue
-      if (isHopeless(next * 4 + orientation, total)) continue
-      if (looked++ >= ground.nodes) return false
-      if (!feasibility.passes(made, choice.piece, orientation)) continue
-      operations.push({ bend: choice.bend, orientation })
-      if (complete(next, orientation, total)) return true
-      operations.pop()
-    }
-    if (from !== undefined) failed.set(made * 4 + from, spent)
-    return false
+  const costOf = ({ piece: bend, orientation }: Choice): number =>
+    spent +
+    (from === undefined ? 0 : cost.move(from, orientation)) +
+    cost.fixed(bend, orientation) +
+    cost.gauge(made, bend, orientation)
+
+  while (made !== full) {
+    const choice = choices.find((each) => {
+      const next = made | (1 << each.bend)
+      return (
+        next !== made &&
+        canFinish(next, each.orientation, costOf(each)) &&
+        feasibility.passes(made, each.piece, each.orientation)
+      )
+    })
+    if (choice === undefined) throw new Error('A cheapest sequence has no first one.')
+    spent = costOf(choice)
+    made |= 1 << choice.bend
+    from = choice.orientation
+    operations.push({ bend: choice.bend, orientation: choice.orientation })
   }
-
-  return complete(0, undefined, 0) ? { cost: best.cost, operations } : best
+  return { cost: spent, operations }
 }

@@ -1,10 +1,14 @@
 import type { Sheet } from '#shared/stock/stock.schema'
-import type { Degrees } from '#shared/units/brands'
+import type { Degrees, Inches } from '#shared/units/brands'
 import type { Brake } from './brake.schema'
-import { chainOf } from './fold-frame'
-import type { Chain } from './fold-frame'
+import { openTools, toolClearance } from './collision/open-tools'
+import type { OpenTools } from './collision/open-tools'
 import { directionOf, frontSide, rearSide } from './orientation'
 import type { Direction, Orientation } from './orientation'
+import type { Section } from './plan.schema'
+import { createSideShapes } from './side-shapes'
+import type { SideShape, SideShapes } from './side-shapes'
+import { workpieceOf } from './workpiece'
 import type { PieceBend, Workpiece } from './workpiece'
 
 /** What stays the same for every fold of one piece on one brake. */
@@ -12,10 +16,17 @@ export interface FoldGround {
   readonly piece: Workpiece
   readonly sheet: Sheet
   readonly brake: Brake
+  /** From the sheet's centre line to a tool. */
+  readonly clearance: Inches
+  readonly openTools: Readonly<Record<Direction, OpenTools | null>>
+  readonly sideShapes: SideShapes
 }
 
 /** One fold about to be made: everything that a test of it may look at, in the fold frame. */
-export interface FoldSetup extends FoldGround {
+export interface FoldSetup {
+  readonly piece: Workpiece
+  readonly brake: Brake
+  readonly clearance: Inches
   /** Bends already made, as bits; this bend is not among them. */
   readonly made: number
   readonly bend: PieceBend
@@ -23,38 +34,63 @@ export interface FoldSetup extends FoldGround {
   readonly direction: Direction
   /** Degrees the front swings, springback included; a hem's first hit has none. */
   readonly swing: Degrees
-  readonly front: Chain
-  readonly rear: Chain
+  /** The tools of this direction, opened. Throws RangeError where the brake has none. */
+  readonly tools: OpenTools
+  readonly front: SideShape
+  readonly rear: SideShape
+}
+
+/** Throws RangeError where turns and legs of the section do not match or there are too many bends. */
+export const foldGroundOf = (section: Section, sheet: Sheet, brake: Brake): FoldGround => {
+  const clearance = toolClearance(sheet.thickness, brake)
+  const piece = workpieceOf(section, sheet.thickness)
+  return {
+    piece,
+    sheet,
+    brake,
+    clearance,
+    openTools: {
+      up: openTools(brake.up, clearance),
+      down: brake.down && openTools(brake.down, clearance),
+    },
+    sideShapes: createSideShapes(piece, brake.noseZone),
+  }
 }
 
 /** |turn| (1 + springback/90), or the brake's hem angle. */
 export const swingOf = (bend: PieceBend, sheet: Sheet, brake: Brake): Degrees =>
   bend.hem === null ? Math.abs(bend.turn) * (1 + sheet.springbackPer90 / 90) : brake.hemAngle
 
-/** The chains are built when a test first looks at them: many tests do not. */
+/** A side's shape is built when a test first looks at it: many tests do not. */
 export const foldSetup = (
   ground: FoldGround,
   made: number,
   bend: PieceBend,
   orientation: Orientation,
 ): FoldSetup => {
-  const { piece, sheet, brake } = ground
-  let front: Chain | undefined
-  let rear: Chain | undefined
+  const { piece, sheet, brake, clearance } = ground
+  const direction = directionOf(bend, orientation)
+  let front: SideShape | undefined
+  let rear: SideShape | undefined
   return {
     piece,
-    sheet,
     brake,
+    clearance,
     made,
     bend,
     orientation,
-    direction: directionOf(bend, orientation),
+    direction,
     swing: swingOf(bend, sheet, brake),
+    get tools() {
+      const tools = ground.openTools[direction]
+      if (tools === null) throw new RangeError(`${brake.name} does not fold ${direction}.`)
+      return tools
+    },
     get front() {
-      return (front ??= chainOf(piece, bend, frontSide(orientation), made, 'front'))
+      return (front ??= ground.sideShapes(bend, frontSide(orientation), made, 'front'))
     },
     get rear() {
-      return (rear ??= chainOf(piece, bend, rearSide(orientation), made, 'rear'))
+      return (rear ??= ground.sideShapes(bend, rearSide(orientation), made, 'rear'))
     },
   }
 }

@@ -12,12 +12,22 @@ import type { PieceBend, Workpiece } from './workpiece'
 export const pieceReasons = ({ brake, sheet, pieceLength }: PlanRequest): PlanReason[] => {
   const reasons: PlanReason[] = []
   if (!isAtMost(pieceLength, brake.length)) {
-    reasons.push({ code: 'length', bend: null, found: pieceLength, limit: brake.length })
+    reasons.push({
+      code: 'length',
+      bend: null,
+      found: pieceLength,
+      limit: brake.length,
+    })
   }
   const capacity = findCapacity(brake, sheet.metal)
   if (capacity === null) reasons.push({ code: 'metal', bend: null, found: null, limit: null })
   else if (capacity !== undefined && !isAtMost(sheet.thickness, capacity)) {
-    reasons.push({ code: 'thickness', bend: null, found: sheet.thickness, limit: capacity })
+    reasons.push({
+      code: 'thickness',
+      bend: null,
+      found: sheet.thickness,
+      limit: capacity,
+    })
   }
   return reasons
 }

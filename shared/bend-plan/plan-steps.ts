@@ -25,7 +25,7 @@ export const planSteps = (ground: FoldGround, operations: readonly Operation[]):
       angle: Math.abs(bend.turn),
       swing: setup.swing,
       hits: bend.hem === null ? 1 : 2,
-      gauge: isGauged ? gaugeDistance(setup.rear) : null,
+      gauge: isGauged ? gaugeDistance(setup.rear.chain) : null,
       restsOn: isGauged ? restsOn(ground.piece, bend, rearSide(orientation), made) : null,
     }
     before = orientation

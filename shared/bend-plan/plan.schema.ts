@@ -11,6 +11,12 @@ export const PLAN_CHECKS = [
   'clamp',
   'throat',
   'gauge',
+  'rearMeetsTool',
+  'frontMeetsTool',
+  'meetsItself',
+  'apronMeetsRear',
+  'cannotLoad',
+  'trapped',
 ] as const
 
 /** Reasons that hold for the whole piece on a brake, before any fold is looked at. */

@@ -1,6 +1,6 @@
 import { createFeasibility } from './feasibility'
 import { firstOfEquals } from './first-of-equals'
-import type { FoldGround } from './fold-setup'
+import { foldGroundOf } from './fold-setup'
 import { FOLD_TESTS } from './fold-tests/fold-tests'
 import { createLowerBound } from './lower-bound'
 import { operationCost } from './operation-cost'
@@ -13,16 +13,15 @@ import { planSteps } from './plan-steps'
 import type { SearchGround } from './search-ground'
 import { searchSequence } from './sequence-search'
 import { searchSets } from './set-search'
-import { workpieceOf } from './workpiece'
 
 export type { PlanRequest } from './plan-request'
 
-/** Enough for any panel of twenty bends; a search that reaches it answers with the best so far. */
-const DEFAULT_NODES = 2_000_000
+/** Enough for panels of twenty bends; a search that reaches it answers with the best so far. */
+const DEFAULT_NODES = 400_000
 
 const searchGround = (request: PlanRequest): SearchGround => {
   const { section, sheet, brake, pieceLength, limits } = request
-  const ground: FoldGround = { piece: workpieceOf(section, sheet.thickness), sheet, brake }
+  const ground = foldGroundOf(section, sheet, brake)
   const cost = operationCost(ground, pieceLength)
   return {
     ...ground,
@@ -71,17 +70,21 @@ export const planBends = (request: PlanRequest): Plan => {
     )
   }
   if (sets.outcome === 'limit') {
-    const limit: PlanReason = { code: 'limit', bend: null, found: null, limit: ground.nodes }
+    const limit: PlanReason = {
+      code: 'limit',
+      bend: null,
+      found: null,
+      limit: ground.nodes,
+    }
     return { ...infeasible([limit]), proven: false }
   }
 
   const known = orientOrder(ground, sets.order)
   if (known === undefined) throw new Error('An order that was found bendable has no orientations.')
   const search = searchSequence(ground, known)
-  const best = search.best ?? known
-  const chosen = search.proven
-    ? firstOfEquals(ground, best, search.findRest, request.paintedSide)
-    : best
+  const { best, findRest } = search
+  const chosen =
+    findRest === null ? best : firstOfEquals(ground, best, findRest, request.paintedSide)
   return {
     feasible: true,
     proven: search.proven,

@@ -1,7 +1,7 @@
 import { isEqual } from '#shared/geometry/tolerance'
 import { createFeasibility } from './feasibility'
 import type { FailedCheck } from './feasibility'
-import type { FoldGround } from './fold-setup'
+import { foldGroundOf } from './fold-setup'
 import { operationCost } from './operation-cost'
 import { orientationNumber } from './orientation'
 import { unpackCost } from './packed-cost'
@@ -10,7 +10,7 @@ import { pieceReasons } from './plan-reasons'
 import type { PlanRequest } from './plan-request'
 import { planSteps } from './plan-steps'
 import type { Operation } from './search-ground'
-import { allBends, workpieceOf } from './workpiece'
+import { allBends } from './workpiece'
 
 export type ReplayProblem =
   /** The piece does not go on the brake at all. */
@@ -18,9 +18,17 @@ export type ReplayProblem =
   /** A step names a bend the section does not have, or one made before. */
   | { readonly code: 'unknownBend' | 'madeBefore'; readonly step: number }
   /** A step fails a test of the fold. */
-  | { readonly code: 'test'; readonly step: number; readonly failure: FailedCheck }
+  | {
+      readonly code: 'test'
+      readonly step: number
+      readonly failure: FailedCheck
+    }
   /** A figure of the step is not what the section and the brake give. */
-  | { readonly code: 'figure'; readonly step: number; readonly figure: keyof PlanStep }
+  | {
+      readonly code: 'figure'
+      readonly step: number
+      readonly figure: keyof PlanStep
+    }
   /** The steps end before the piece is finished. */
   | { readonly code: 'unfinished' }
 
@@ -49,7 +57,7 @@ const FIGURES = [
  */
 export const replayPlan = (plan: Plan, request: PlanRequest): Replay => {
   const { section, sheet, brake, pieceLength } = request
-  const ground: FoldGround = { piece: workpieceOf(section, sheet.thickness), sheet, brake }
+  const ground = foldGroundOf(section, sheet, brake)
   const { bends } = ground.piece
   const feasibility = createFeasibility(ground)
   const cost = operationCost(ground, pieceLength)

@@ -8,14 +8,19 @@ import { allBends } from './workpiece'
 import type { PieceBend } from './workpiece'
 
 export interface SequenceSearch {
-  /** The cheapest sequence; undefined when nothing better than the given one was found. */
-  readonly best: Sequence | undefined
+  readonly best: Sequence
   /** Packed; equals the best cost when the search ran to its end. */
   readonly lowerBound: number
   readonly proven: boolean
-  /** Cheapest way to finish from a made set whose next fold is made in an orientation, where known. */
-  readonly findRest: (made: number, orientation: number) => number | undefined
+  /**
+   * Cheapest way to finish from a made set whose next fold is made in an orientation, known for every
+   * state of every cheapest sequence; null when the limit was reached before all were.
+   */
+  readonly findRest: ((made: number, orientation: number) => number | undefined) | null
 }
+
+/** Folds put into the queue to know all sequences as cheap as the best one. */
+const EQUALS = 100_000
 
 /** Room for the number of bends left beside the cost in one sort key: the deeper node goes first. */
 const DEPTH = 32
@@ -25,14 +30,20 @@ const DEPTH = 32
  * fold made next). A fold is tested when it is taken from the queue, not when it is put there. The
  * bound is consistent, so the first way into a state whose fold passes is its cheapest.
  *
- * `known` is a sequence found before; only cheaper ones are looked for.
+ * It goes on through all states that cost no more than the best sequence, so that the choice among
+ * equals can be made. `known` is a sequence found before: nothing dearer is looked at.
  */
 export const searchSequence = (ground: SearchGround, known: Sequence): SequenceSearch => {
   const { piece, brake, feasibility, cost, lowerBound, nodes } = ground
   const full = allBends(piece)
   const queue = createHeap()
-  const entries: { made: number; orientation: number; bend: PieceBend; g: number; next: number }[] =
-    []
+  const entries: {
+    made: number
+    orientation: number
+    bend: PieceBend
+    g: number
+    next: number
+  }[] = []
   /** The entry that closed a state. */
   const closed = createNumberTable(4 * (full + 1))
   const stateOf = (made: number, orientation: number) => made * 4 + orientation
@@ -52,7 +63,7 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
           cost.fixed(bend, orientation) +
           cost.gauge(rest, bend, orientation)
         const f = g + lowerBound(rest, orientation)
-        if (f >= known.cost) continue
+        if (f > known.cost) continue
         const next = from === null ? -1 : from.entry
         entries.push({ made: rest, orientation, bend, g, next })
         queue.push(entries.length - 1, f * DEPTH + bitCount(rest))
@@ -70,25 +81,34 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
 
   const findRest = (made: number, orientation: number) =>
     entries[closed.find(stateOf(made, orientation)) ?? -1]?.g
+
+  if (full === 0) return { best: known, lowerBound: known.cost, proven: true, findRest }
   expand(full, null)
-  for (let looked = 0; ; looked++) {
+  let best: Sequence | undefined
+  // The queue holds the folds, so they are what is counted: they take the room.
+  let most = nodes
+  for (;;) {
     const key = queue.leastKey()
     const index = queue.pop()
     const entry = index === undefined ? undefined : entries[index]
-    if (key === undefined || index === undefined || entry === undefined) {
-      return { best: undefined, lowerBound: known.cost, proven: true, findRest }
-    }
-    if (looked >= nodes) {
-      return { best: undefined, lowerBound: Math.floor(key / DEPTH), proven: false, findRest }
+    if (key === undefined || index === undefined || entry === undefined) break
+    const f = Math.floor(key / DEPTH)
+    if (best !== undefined && f > best.cost) break
+    if (entries.length > most) {
+      if (best !== undefined) return { best, lowerBound: best.cost, proven: true, findRest: null }
+      return { best: known, lowerBound: f, proven: false, findRest: null }
     }
     const { made, orientation, bend, g } = entry
     const state = stateOf(made, orientation)
     if (closed.find(state) !== undefined || !feasibility.passes(made, bend, orientation)) continue
     closed.set(state, index)
-    if (made === 0) {
-      const best = { cost: g, operations: operationsFrom(index) }
-      return { best, lowerBound: g, proven: true, findRest }
+    if (made !== 0) expand(made, { orientation, g, entry: index })
+    else if (best === undefined) {
+      best = { cost: g, operations: operationsFrom(index) }
+      most = Math.min(nodes, entries.length + EQUALS)
     }
-    expand(made, { orientation, g, entry: index })
   }
+  if (best === undefined)
+    throw new Error('A sequence that was found before has not been found again.')
+  return { best, lowerBound: best.cost, proven: true, findRest }
 }

@@ -81,7 +81,12 @@ export const workpieceOf = (section: Section, thickness: Inches): Workpiece => {
   if (bends.length > MOST_BENDS) {
     throw new RangeError(`${bends.length} bends are more than the ${MOST_BENDS} the planner takes.`)
   }
-  return { bends, legs, thickness, width: legs.reduce((sum, each) => sum + each, 0) }
+  return {
+    bends,
+    legs,
+    thickness,
+    width: legs.reduce((sum, each) => sum + each, 0),
+  }
 }
 
 /** The set of all bends. */

@@ -1,10 +1,8 @@
-import { foldSetup } from '#shared/bend-plan/fold-setup'
-import type { FoldGround } from '#shared/bend-plan/fold-setup'
+import { foldGroundOf, foldSetup } from '#shared/bend-plan/fold-setup'
 import { FOLD_TESTS } from '#shared/bend-plan/fold-tests/fold-tests'
 import { restsOn } from '#shared/bend-plan/gauge-stop'
 import type { Orientation } from '#shared/bend-plan/orientation'
 import type { PlanRequest } from '#shared/bend-plan/planner'
-import { workpieceOf } from '#shared/bend-plan/workpiece'
 import type { PieceBend } from '#shared/bend-plan/workpiece'
 
 /**
@@ -31,7 +29,7 @@ const sum = (values: readonly number[]) => values.reduce((total, value) => total
 
 const openGround = (request: PlanRequest) => {
   const { section, sheet, brake, pieceLength } = request
-  const ground: FoldGround = { piece: workpieceOf(section, sheet.thickness), sheet, brake }
+  const ground = foldGroundOf(section, sheet, brake)
   const { legs, bends } = ground.piece
   const weight = sum(legs) * pieceLength * sheet.thickness * sheet.density
   const isShort = pieceLength <= 60

@@ -7,7 +7,7 @@ export const clamp: FoldTest = {
   sees: 'rear',
   neverEases: true,
   find: ({ rear, brake }) =>
-    isLess(rear.firstRun, brake.minClamp)
-      ? { found: rear.firstRun, limit: brake.minClamp }
+    isLess(rear.chain.firstRun, brake.minClamp)
+      ? { found: rear.chain.firstRun, limit: brake.minClamp }
       : undefined,
 }

@@ -8,6 +8,8 @@ export const flange: FoldTest = {
   neverEases: true,
   find: ({ bend, front, brake }) => {
     const least = bend.hem === null ? brake.minFlange : brake.hemMin
-    return isLess(front.firstRun, least) ? { found: front.firstRun, limit: least } : undefined
+    return isLess(front.chain.firstRun, least)
+      ? { found: front.chain.firstRun, limit: least }
+      : undefined
   },
 }

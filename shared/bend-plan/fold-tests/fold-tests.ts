@@ -1,3 +1,9 @@
+import { apronMeetsRear } from './apron-meets-rear'
+import { cannotLoad } from './cannot-load'
+import { frontMeetsTool } from './front-meets-tool'
+import { meetsItself } from './meets-itself'
+import { rearMeetsTool } from './rear-meets-tool'
+import { trapped } from './trapped'
 import { angle } from './angle'
 import { clamp } from './clamp'
 import { direction } from './direction'
@@ -18,4 +24,10 @@ export const FOLD_TESTS: readonly FoldTest[] = [
   clamp,
   throat,
   gauge,
+  rearMeetsTool,
+  frontMeetsTool,
+  meetsItself,
+  apronMeetsRear,
+  cannotLoad,
+  trapped,
 ]

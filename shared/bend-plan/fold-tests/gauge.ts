@@ -9,7 +9,7 @@ export const gauge: FoldTest = {
   neverEases: false,
   find: ({ rear, brake }) => {
     if (brake.gauge === null) return undefined
-    const found = gaugeDistance(rear)
+    const found = gaugeDistance(rear.chain)
     if (isLess(found, brake.gauge.min)) return { found, limit: brake.gauge.min }
     return isAtMost(found, brake.gauge.max) ? undefined : { found, limit: brake.gauge.max }
   },

@@ -7,7 +7,7 @@ export const throat: FoldTest = {
   sees: 'rear',
   neverEases: false,
   find: ({ rear, brake }) => {
-    const depth = -Math.min(...rear.points.map((point) => point.x))
+    const depth = 0 - rear.outline.box.left
     return isAtMost(depth, brake.throat) ? undefined : { found: depth, limit: brake.throat }
   },
 }

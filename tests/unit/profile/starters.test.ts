@@ -21,9 +21,11 @@ describe('starter profiles', () => {
     }
   })
 
-  it.each(STARTERS)('$key bends on every demo brake in 10 ft', ({ profile }) => {
+  it.each(STARTERS)('$key bends on every demo brake in 10 ft', ({ key, profile }) => {
     for (const brake of DEMO_BRAKES) {
-      expect(planProfile(profile, STEEL, brake, 120).feasible).toBe(true)
+      // With a hem at each edge the valley reaches further back than the site brake's throat.
+      const isTooDeep = key === 'valley' && brake.throat < 21
+      expect(planProfile(profile, STEEL, brake, 120).feasible).toBe(!isTooDeep)
     }
   })
 
