@@ -66,23 +66,24 @@ function PieceSheet({ piece, place }: { readonly piece: Piece; readonly place: P
         ? piece.bundleCode
         : t('bundleAt', { code: piece.bundleCode, place: piece.rackPlace })
   const facts = [
-    [t('code'), piece.code],
-    [t('length'), run(piece.length)],
-    [t('order'), `${orderNumber(piece.orderNumber)} · ${piece.job}`],
-    [t('company'), piece.company],
-    [t('run'), String(piece.runNumber)],
-    ...(lies === null ? [] : [[t('bundle'), lies]]),
-  ] as const
+    { label: t('code'), value: piece.code, figure: true },
+    { label: t('length'), value: run(piece.length), figure: true },
+    { label: t('order'), value: orderNumber(piece.orderNumber), figure: true },
+    { label: t('job'), value: piece.job, figure: false },
+    { label: t('company'), value: piece.company, figure: false },
+    { label: t('run'), value: String(piece.runNumber), figure: true },
+    ...(lies === null ? [] : [{ label: t('bundle'), value: lies, figure: true }]),
+  ]
   return (
     <div className="flex max-w-3xl flex-col gap-6">
       <p className="text-title">
         <PieceStateWord state={piece.state} />
       </p>
       <dl className="grid gap-x-8 gap-y-2 sm:grid-cols-2">
-        {facts.map(([label, value]) => (
+        {facts.map(({ label, value, figure }) => (
           <div key={label} className="flex justify-between gap-4 border-b border-rule py-1">
             <dt className="text-scribe">{label}</dt>
-            <dd className="text-right font-figure">{value}</dd>
+            <dd className={figure ? 'text-right font-figure' : 'text-right'}>{value}</dd>
           </div>
         ))}
       </dl>

@@ -1,14 +1,16 @@
 import { useTranslation } from 'react-i18next'
 
-/** The roof's triangle and its pitch: 12 along, so many up. */
+const SIDE = 20
+
+/** The roof's triangle, drawn to its slope, and the pitch in figures: 12 along, so many up. */
 export function PitchSign({ rise }: { readonly rise: number }) {
   const { t } = useTranslation('jobs')
-  const height = Math.min(rise, 24) / 2
+  const scale = SIDE / Math.max(12, rise)
   return (
-    <span className="inline-flex items-center gap-2 whitespace-nowrap">
+    <span className="inline-flex items-baseline gap-2 whitespace-nowrap">
       <svg
-        viewBox="0 0 28 16"
-        className="h-[1em] w-auto shrink-0"
+        viewBox={`-1.5 -1.5 ${SIDE + 3} ${SIDE + 3}`}
+        className="size-[1.25em] shrink-0 self-center"
         fill="none"
         stroke="currentColor"
         strokeWidth="1.8"
@@ -16,7 +18,7 @@ export function PitchSign({ rise }: { readonly rise: number }) {
         aria-hidden="true"
         focusable="false"
       >
-        <path d={`M2 14H26V${14 - height}Z`} />
+        <path d={`M0 ${SIDE}H${12 * scale}V${SIDE - rise * scale}Z`} />
       </svg>
       <span className="font-figure">{t('pitchShort', { rise })}</span>
     </span>

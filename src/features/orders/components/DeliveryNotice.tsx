@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react'
+import { useEffect, useRef, type ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Link } from 'react-router-dom'
 import { Button } from '@/components/Button'
@@ -21,8 +21,26 @@ interface Props {
   readonly onSendAnother?: () => void
 }
 
-/** How the sending stands: on its way, waiting for a signal, arrived before, or refused and why. */
-export function DeliveryNotice({
+/**
+ * How the sending stands: on its way, waiting for a signal, arrived before, or refused and why. What
+ * has to be read comes into view, wherever on the form the button was pressed.
+ */
+export function DeliveryNotice(props: Props) {
+  const { waiting, error } = props.delivery
+  const root = useRef<HTMLDivElement>(null)
+
+  useEffect(() => {
+    if (waiting || error) root.current?.scrollIntoView({ block: 'center' })
+  }, [waiting, error])
+
+  return (
+    <div ref={root} className="empty:hidden">
+      <NoticeOf {...props} />
+    </div>
+  )
+}
+
+function NoticeOf({
   sending,
   delivery,
   elsewhere,

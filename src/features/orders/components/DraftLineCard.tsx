@@ -4,12 +4,12 @@ import { Button } from '@/components/Button'
 import { ButtonLink } from '@/components/ButtonLink'
 import { Notice } from '@/components/Notice'
 import type { DraftLine, LinePatch } from '../draft/order-draft'
-import { faultAt, lineHasFault, type Fault } from '../form/order-faults'
+import { faultAt, type Fault } from '../form/order-faults'
 import { useFaultWords } from '../form/useFaultWords'
 import { checkLine, type LineGround } from '../form/check-line'
 import { LineBends } from './LineBends'
 import { LineFacts } from './LineFacts'
-import { LineFields } from './LineFields'
+import { LineAmounts, LineNames } from './LineFields'
 import { LineFigure } from './LineFigure'
 import { LineHead } from './LineHead'
 import { StockName } from './StockName'
@@ -27,10 +27,10 @@ interface Props {
   readonly onRemove: () => void
 }
 
-const isFilledIn = ({ mark, name, stockId, quantity, length }: DraftLine): boolean =>
-  mark !== '' && name !== '' && stockId !== null && quantity !== null && length !== null
+const isNamed = ({ mark, name, stockId }: DraftLine): boolean =>
+  mark !== '' && name !== '' && stockId !== null
 
-/** One line of an order being written: the drawing, what it takes, and its fields when asked for. */
+/** One line of an order being written: the drawing, what it takes, how many and how long. */
 export function DraftLineCard({
   line,
   index,
@@ -47,13 +47,17 @@ export function DraftLineCard({
   const id = useId()
   const checked = checkLine(line, ground)
   // Fields that stood open stay so while they are typed into.
-  const [open, setOpen] = useState(() => !isFilledIn(line))
-  const shown = open || lineHasFault(faults, index)
+  const [open, setOpen] = useState(() => !isNamed(line))
+  const shown =
+    open || ['mark', 'name', 'stockId'].some((field) => faultAt(faults, `lines.${index}.${field}`))
   const drawingFault = words(faultAt(faults, `lines.${index}.profile`))
   const { check, drawnIn, stock } = checked
 
   return (
-    <article aria-labelledby={id} className="flex flex-col gap-3 border-t-2 border-ink pt-4">
+    <article
+      aria-labelledby={id}
+      className="flex max-w-[59rem] flex-col gap-3 border-t-2 border-ink pt-4"
+    >
       <LineHead
         id={id}
         mark={line.mark}
@@ -76,12 +80,19 @@ export function DraftLineCard({
             pieceWeight={line.length === null ? null : (check?.weight ?? null)}
             quantity={line.quantity}
           />
-          {stock && !shown && <StockName stock={stock} />}
           <LineBends check={check} plans={checked.plans} />
           {drawingFault && <Notice kind="error">{drawingFault}</Notice>}
+          {stock && <StockName stock={stock} />}
+          <LineAmounts
+            line={line}
+            index={index}
+            faults={faults}
+            disabled={disabled}
+            onChange={onChange}
+          />
           {shown && (
-            <div id={`${id}-fields`}>
-              <LineFields
+            <div id={`${id}-names`}>
+              <LineNames
                 line={line}
                 index={index}
                 stocks={ground.stocks}
@@ -95,23 +106,23 @@ export function DraftLineCard({
             </div>
           )}
           {!disabled && (
-            <div className="-mx-2 flex flex-wrap gap-x-1">
+            <div className="-mx-1.5 flex flex-wrap">
               <Button
                 variant="quiet"
-                className="px-2!"
+                className="px-1.5!"
                 aria-expanded={shown}
-                aria-controls={`${id}-fields`}
+                aria-controls={`${id}-names`}
                 onClick={() => setOpen(!shown)}
               >
                 {shown ? t('line.close') : t('line.change')}
               </Button>
-              <ButtonLink variant="quiet" className="px-2!" to={boardPath}>
+              <ButtonLink variant="quiet" className="px-1.5!" to={boardPath}>
                 {t('line.editDrawing')}
               </ButtonLink>
-              <Button variant="quiet" className="px-2!" onClick={onDuplicate}>
+              <Button variant="quiet" className="px-1.5!" onClick={onDuplicate}>
                 {t('line.duplicate')}
               </Button>
-              <Button variant="quiet" className="px-2!" onClick={onRemove}>
+              <Button variant="quiet" className="px-1.5!" onClick={onRemove}>
                 {t('line.remove')}
               </Button>
             </div>

@@ -12,45 +12,29 @@ import { QuantityField } from './QuantityField'
 interface Props {
   readonly line: DraftLine
   readonly index: number
-  readonly stocks: readonly Stock[]
   readonly faults: readonly Fault[]
   readonly disabled: boolean
   readonly onChange: (patch: LinePatch) => void
 }
 
-/** What a line says in words and numbers; its shape is changed on the board. */
-export function LineFields({ line, index, stocks, faults, disabled, onChange }: Props) {
-  const { t } = useTranslation('orders')
-  const { t: stockText } = useTranslation('stocks')
-  const { units } = useUnits()
+function useLineError(index: number, faults: readonly Fault[]) {
   const words = useFaultWords()
-  const error = (field: string) => words(faultAt(faults, `lines.${index}.${field}`))
+  return (field: string) => words(faultAt(faults, `lines.${index}.${field}`))
+}
+
+/** What every line has to be told: how many and how long. */
+export function LineAmounts({ line, index, faults, disabled, onChange }: Props) {
+  const { t } = useTranslation('orders')
+  const { units } = useUnits()
+  const error = useLineError(index, faults)
   return (
-    <div className="flex flex-col gap-4">
-      <TextField
-        label={t('line.name')}
-        value={line.name}
-        maxLength={80}
+    <div className="grid items-start gap-4 sm:grid-cols-2">
+      <QuantityField
+        value={line.quantity}
+        error={error('quantity')}
         disabled={disabled}
-        error={error('name')}
-        onChange={(event) => onChange({ name: event.target.value })}
+        onChange={(quantity) => onChange({ quantity })}
       />
-      <div className="grid grid-cols-[5.5rem_1fr] items-start gap-4">
-        <TextField
-          label={t('line.mark')}
-          value={line.mark}
-          maxLength={20}
-          disabled={disabled}
-          error={error('mark')}
-          onChange={(event) => onChange({ mark: event.target.value })}
-        />
-        <QuantityField
-          value={line.quantity}
-          error={error('quantity')}
-          disabled={disabled}
-          onChange={(quantity) => onChange({ quantity })}
-        />
-      </div>
       <DimensionField
         label={t('line.length')}
         purpose="run"
@@ -60,6 +44,44 @@ export function LineFields({ line, index, stocks, faults, disabled, onChange }: 
         error={error('length')}
         onChange={(length) => onChange({ length })}
       />
+    </div>
+  )
+}
+
+/** What the board has filled in already: mark, name and stock. */
+export function LineNames({
+  line,
+  index,
+  stocks,
+  faults,
+  disabled,
+  onChange,
+}: Props & { readonly stocks: readonly Stock[] }) {
+  const { t } = useTranslation('orders')
+  const { t: stockText } = useTranslation('stocks')
+  const error = useLineError(index, faults)
+  return (
+    <div className="flex flex-col gap-4">
+      <div className="grid grid-cols-[5.5rem_1fr] items-start gap-4">
+        <TextField
+          label={t('line.mark')}
+          value={line.mark}
+          maxLength={20}
+          autoComplete="off"
+          disabled={disabled}
+          error={error('mark')}
+          onChange={(event) => onChange({ mark: event.target.value })}
+        />
+        <TextField
+          label={t('line.name')}
+          value={line.name}
+          maxLength={80}
+          autoComplete="off"
+          disabled={disabled}
+          error={error('name')}
+          onChange={(event) => onChange({ name: event.target.value })}
+        />
+      </div>
       <Select
         label={t('line.stock')}
         placeholder={t('line.stockChoose')}

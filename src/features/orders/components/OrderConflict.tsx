@@ -1,13 +1,12 @@
 import type { ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { Order } from '#shared/orders/order.schema'
-import type { Profile } from '#shared/profile/profile.schema'
 import type { Stock } from '#shared/stock/stock.schema'
 import { Button } from '@/components/Button'
 import { ProfileThumb } from '@/features/drawing/figure/ProfileThumb'
 import { useUnits } from '@/features/people/useUnits'
 import { useFormats } from '@/lib/format/useFormats'
-import type { OrderDraft } from '../draft/order-draft'
+import type { DraftLine, OrderDraft } from '../draft/order-draft'
 import { compareOrders } from '../form/compare-orders'
 import { StockName } from './StockName'
 
@@ -35,11 +34,18 @@ export function OrderConflict({ draft, order, stocks, onKeepMine, onTakeTheirs }
         {last && `${t(`event.${last.kind}`, { name: last.by })}, ${moment(last.at)}. `}
         {t('conflict.meaning')}
       </p>
-      <div role="table" aria-label={t('conflict.table')} className="border-t-2 border-ink">
-        <div role="row" className="grid grid-cols-2 gap-4 border-b border-rule py-2 font-bold">
-          <span role="columnheader">{t('conflict.mine')}</span>
-          <span role="columnheader">{t('conflict.theirs')}</span>
-        </div>
+      <table className="w-full table-fixed border-t-2 border-ink">
+        <caption className="sr-only">{t('conflict.table')}</caption>
+        <thead>
+          <tr className="border-b border-rule text-left">
+            <th scope="col" className="py-2 pr-4">
+              {t('conflict.mine')}
+            </th>
+            <th scope="col" className="py-2">
+              {t('conflict.theirs')}
+            </th>
+          </tr>
+        </thead>
         <Row
           label={t('form.neededBy')}
           differs={difference.neededBy}
@@ -65,15 +71,15 @@ export function OrderConflict({ draft, order, stocks, onKeepMine, onTakeTheirs }
             differs={differs}
             mine={
               mine ? (
-                <LineCell {...mine} stock={stocks.find(({ id }) => id === mine.stockId)} />
+                <LineCell line={mine} stock={stocks.find(({ id }) => id === mine.stockId)} />
               ) : (
                 none
               )
             }
-            theirs={theirs ? <LineCell {...theirs} /> : none}
+            theirs={theirs ? <LineCell line={theirs} stock={theirs.stock} /> : none}
           />
         ))}
-      </div>
+      </table>
       <div className="grid grid-cols-2 gap-4">
         <Button onClick={onKeepMine}>{t('conflict.keepMine')}</Button>
         <Button onClick={onTakeTheirs}>{t('conflict.takeTheirs')}</Button>
@@ -92,28 +98,31 @@ interface RowProps {
 function Row({ label, differs, mine, theirs }: RowProps) {
   const { t } = useTranslation('orders')
   return (
-    <div role="row" className="border-b border-rule py-2">
-      <p role="rowheader" className="text-small text-scribe">
-        {label}
-        {differs && <span className="font-semibold text-chalk"> · {t('conflict.differs')}</span>}
-      </p>
-      <div className="grid grid-cols-2 gap-4" role="presentation">
-        <div role="cell">{mine}</div>
-        <div role="cell">{theirs}</div>
-      </div>
-    </div>
+    <tbody className="border-b border-rule align-top">
+      <tr>
+        <th
+          scope="rowgroup"
+          colSpan={2}
+          className="pt-2 text-left text-small font-normal text-scribe"
+        >
+          {label}
+          {differs && <span className="font-semibold text-chalk"> · {t('conflict.differs')}</span>}
+        </th>
+      </tr>
+      <tr>
+        <td className="pr-4 pb-2">{mine}</td>
+        <td className="pb-2">{theirs}</td>
+      </tr>
+    </tbody>
   )
 }
 
 interface LineCellProps {
-  readonly name: string
-  readonly profile: Profile
+  readonly line: Pick<DraftLine, 'name' | 'profile' | 'quantity' | 'length'>
   readonly stock: Stock | undefined
-  readonly quantity: number | null
-  readonly length: number | null
 }
 
-function LineCell({ name, profile, stock, quantity, length }: LineCellProps) {
+function LineCell({ line: { name, profile, quantity, length }, stock }: LineCellProps) {
   const { run } = useUnits()
   return (
     <>

@@ -22,7 +22,7 @@ export function OrderFields({ draft, today, faults, disabled, question, onChange
   const words = useFaultWords()
   const { amends } = draft
   return (
-    <div className="grid items-start gap-4 lg:max-w-4xl lg:grid-cols-2">
+    <div className="grid items-start gap-4 lg:grid-cols-2">
       {amends && question !== undefined && (
         <TextArea
           label={t('form.answer')}

@@ -121,7 +121,7 @@ export function OrderForm({
       )}
       {linesFault && <Notice kind="error">{linesFault}</Notice>}
       {!draft.sending && <div className="flex flex-wrap gap-3">{more}</div>}
-      <div className="flex flex-col gap-6 border-t-2 border-ink pt-4">
+      <div className="flex max-w-[59rem] flex-col gap-6 border-t-2 border-ink pt-4">
         <OrderFields
           draft={draft}
           today={state.today}

@@ -21,7 +21,10 @@ export function OrderLineCard({ line, piecePath }: Props) {
   const id = useId()
   const { bendsOn, stock, strip, quantity, pieces } = line
   return (
-    <article aria-labelledby={id} className="flex flex-col gap-3 border-t-2 border-ink pt-4">
+    <article
+      aria-labelledby={id}
+      className="flex max-w-[59rem] flex-col gap-3 border-t-2 border-ink pt-4"
+    >
       <LineHead
         id={id}
         mark={line.mark}

@@ -17,10 +17,10 @@ interface Props {
 /** An order in a list: the whole row leads to it. */
 export function OrderRow({ order, to, withCompany = false, withJob = true }: Props) {
   const { t } = useTranslation('orders')
-  const { day, count } = useFormats()
+  const { day, daysUntil, count } = useFormats()
   const { number, job, company, state, neededBy, poNumber, pieceCount, progress } = order
+  const late = daysUntil(neededBy) < 0 && state !== 'pickedUp' && state !== 'withdrawn'
   const facts = [
-    t('row.needed', { day: day(neededBy) }),
     t('row.pieces', { count: pieceCount, shown: count(pieceCount) }),
     ...(poNumber === '' ? [] : [t('row.po', { number: poNumber })]),
   ]
@@ -34,7 +34,10 @@ export function OrderRow({ order, to, withCompany = false, withJob = true }: Pro
         <OrderStateWord state={state} />
       </div>
       <p className="text-small text-scribe">
-        {[...(withCompany ? [company.name] : []), ...facts].join(' · ')}
+        <span className={late ? 'font-semibold text-chalk' : ''}>
+          {t(late ? 'row.late' : 'row.needed', { day: day(neededBy) })}
+        </span>
+        {[...facts, ...(withCompany ? [company.name] : [])].map((fact) => ` · ${fact}`)}
       </p>
       <PieceProgress progress={progress} compact />
     </li>

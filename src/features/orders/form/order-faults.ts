@@ -119,10 +119,6 @@ export function faultsOfErrors(errors: readonly FieldError[]): Fault[] {
 export const faultAt = (faults: readonly Fault[], path: string): Fault | undefined =>
   faults.find((fault) => fault.path === path)
 
-/** Whether a line has a fault in any of its fields. */
-export const lineHasFault = (faults: readonly Fault[], index: number): boolean =>
-  faults.some(({ path }) => path.startsWith(`lines.${index}.`))
-
 /** Faults that belong to no field of the form, which has to say them at its foot. */
 export const faultsElsewhere = (faults: readonly Fault[], lineCount: number): Fault[] => {
   const known = new Set(['neededBy', 'poNumber', 'notes', 'lines', 'answer'])

@@ -15,11 +15,11 @@ export function PieceHistory({ events }: Props) {
   return (
     <ol aria-label={t('history')} className="divide-y divide-rule border-y border-rule">
       {events.toReversed().map(({ id, to, at, by, station, reason, undoes }) => (
-        <li key={id} className="flex flex-wrap items-baseline gap-x-4 gap-y-1 py-3">
+        <li key={id} className="flex flex-wrap items-start gap-x-4 gap-y-1 py-3">
           <div className="w-40">
             <PieceStateWord state={to} />
           </div>
-          <time dateTime={at} className="w-40 font-figure">
+          <time dateTime={at} className="w-48 font-figure text-small leading-6">
             {moment(at)}
           </time>
           <p className="min-w-40 flex-1">

@@ -33,11 +33,11 @@ export function JobsPage() {
       title={t('title')}
       nav={<RoofNav />}
       primary={
-        mayWrite && (
+        mayWrite ? (
           <ButtonLink variant="primary" to={paths.roof.newJob()}>
             {t('new')}
           </ButtonLink>
-        )
+        ) : undefined
       }
     >
       <div className="flex max-w-3xl flex-col gap-3">

@@ -27,7 +27,7 @@ export function NewJobPage() {
       title={t('new')}
       back={{ to: paths.roof.home(), label: t('back') }}
       primary={
-        !waiting && (
+        waiting ? undefined : (
           <Button variant="primary" type="submit" form={FORM} pending={create.isPending}>
             {t('create')}
           </Button>

@@ -19,6 +19,7 @@ import type { LineGround } from '@/features/orders/form/check-line'
 import { compareOrders, sameContent } from '@/features/orders/form/compare-orders'
 import { draftOfOrder } from '@/features/orders/form/order-body'
 import { useOrderForm } from '@/features/orders/form/useOrderForm'
+import { useSubmitWords } from '@/features/orders/form/useSubmitWords'
 import { useOrderGround } from '@/features/orders/form/useOrderGround'
 import { NotFoundPage } from '@/pages/not-found/NotFoundPage'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
@@ -66,6 +67,7 @@ function Amendment({ order, ground }: { readonly order: Order; readonly ground: 
   const handle = useOrderDraft(order.job.id, order.id)
   const state = useOrderForm(handle, ground, order.neededBy)
   const { draft, setFields } = handle
+  const submitWords = useSubmitWords(state, draft.sending)
   const { amends } = draft
   const outdated = amends !== null && amends.version !== order.version
   const same = outdated && sameContent(compareOrders(draft, order))
@@ -135,7 +137,7 @@ function Amendment({ order, ground }: { readonly order: Order; readonly ground: 
       {...frame}
       primary={
         <Button variant="primary" type="submit" form={FORM} pending={draft.sending}>
-          {draft.sending ? t('delivery.sending') : t('amend.submit')}
+          {submitWords(t('amend.submit'))}
         </Button>
       }
     >

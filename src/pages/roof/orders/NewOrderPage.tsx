@@ -18,6 +18,7 @@ import { isBlank } from '@/features/orders/draft/order-draft'
 import { useOrderDraft } from '@/features/orders/draft/useOrderDraft'
 import type { LineGround } from '@/features/orders/form/check-line'
 import { useOrderForm } from '@/features/orders/form/useOrderForm'
+import { useSubmitWords } from '@/features/orders/form/useSubmitWords'
 import { useOrderGround } from '@/features/orders/form/useOrderGround'
 import { newKey } from '@/lib/api/idempotency'
 import { NotFoundPage } from '@/pages/not-found/NotFoundPage'
@@ -64,6 +65,7 @@ function NewOrder({ job, ground }: { readonly job: Job; readonly ground: LineGro
   const state = useOrderForm(handle, ground)
   const [dropping, setDropping] = useState(false)
   const { draft } = handle
+  const submitWords = useSubmitWords(state, draft.sending)
   const frame = {
     title: t('new'),
     subtitle: job.name,
@@ -97,7 +99,7 @@ function NewOrder({ job, ground }: { readonly job: Job; readonly ground: LineGro
       {...frame}
       primary={
         <Button variant="primary" type="submit" form={FORM} pending={draft.sending}>
-          {draft.sending ? t('delivery.sending') : t('submit')}
+          {submitWords(t('submit'))}
         </Button>
       }
     >

@@ -65,7 +65,7 @@ function OrderScreen({ order }: { readonly order: Order }) {
       subtitle={order.job.name}
       back={{ to: paths.roof.orders(), label: t('back') }}
       primary={
-        open && (
+        open ? (
           <>
             {mayAmend && (
               <Button variant={asked ? 'secondary' : 'primary'} onClick={beginAmendment}>
@@ -78,7 +78,7 @@ function OrderScreen({ order }: { readonly order: Order }) {
               </Button>
             )}
           </>
-        )
+        ) : undefined
       }
     >
       <div className="flex flex-col gap-6">
@@ -147,7 +147,7 @@ function OrderHead({ order }: { readonly order: Order }) {
       <dl>
         {facts.map(([label, value]) => (
           <div key={label} className="flex justify-between gap-4 border-b border-rule py-1">
-            <dt className="text-scribe">{label}</dt>
+            <dt className="shrink-0 text-scribe">{label}</dt>
             <dd className="text-right">{value}</dd>
           </div>
         ))}

@@ -35,12 +35,11 @@ export function ShelfProfilePage() {
       subtitle={item && (item.company?.name ?? t('starter'))}
       back={{ to: paths.roof.shelf(), label: t('back') }}
       primary={
-        item &&
-        jobId !== '' && (
+        item && jobId !== '' ? (
           <ButtonLink variant="primary" to={paths.roof.board(jobId, { shelf: item.id })}>
             {t('drawWith')}
           </ButtonLink>
-        )
+        ) : undefined
       }
     >
       {item ? (
@@ -86,7 +85,7 @@ function Figure({ item, name }: { readonly item: ShelfProfile; readonly name: st
       <LineFigure profile={profile} stock={stock} strip={check?.strip ?? null} name={name} />
       <div className="flex flex-col gap-3">
         {item.starterKey !== null && <p>{about(`${item.starterKey}.about`)}</p>}
-        <LineFacts strip={check?.strip ?? null} pieceWeight={null} quantity={null} />
+        <LineFacts strip={check?.strip ?? null} />
         <LineBends check={check} plans={plans} />
         <StockChoice stocks={ground.stocks} value={stock.id} onChange={setStockId} />
       </div>
