@@ -10,7 +10,7 @@ const IDLE =
   'aria-disabled:bg-rule aria-disabled:text-scribe'
 
 const VARIANTS: Record<ButtonVariant, string> = {
-  primary: `border border-dye bg-dye text-paper enabled:hover:bg-dye/90 ${IDLE}`,
+  primary: `border border-dye bg-dye text-paper not-disabled:not-aria-disabled:hover:bg-dye/90 ${IDLE}`,
   secondary: `border border-ink bg-sheet text-ink hover:bg-ink/5 ${IDLE}`,
   quiet: 'text-dye hover:bg-dye/10 disabled:text-scribe aria-disabled:text-scribe',
   /** On a filled band. */
