@@ -89,10 +89,8 @@ export function OrderScreen({ order }: { readonly order: Order }) {
             <strong className="block">
               {t(`orders:event.${unseen.kind}`, { name: unseen.by })}, {moment(unseen.at)}.
             </strong>
-            {t('order.changedHere')}
-            <Button className="mt-2 flex" onClick={() => look(order.version)}>
-              {t('order.looked')}
-            </Button>
+            <span className="mb-2 block">{t('order.changedHere')}</span>
+            <Button onClick={() => look(order.version)}>{t('order.looked')}</Button>
           </Notice>
         )}
         {incoming && nowhere.length > 0 && (
