@@ -18,21 +18,17 @@ const figure = { figure: true, align: 'end' } as const
 
 export function StocksPage() {
   const { t } = useTranslation('office')
-  const { run, size, units } = useUnits()
+  const { run, size } = useUnits()
   const { data, error, refetch } = useQuery(stocksQuery())
   const columns = useMemo(() => {
-    /** Sheets are measured in thousandths, not read off a tape. */
-    const fine = (inches: number) => printSize(inches, units === 'mm' ? 'mm' : 'decimal')
+    /** Sheets are measured in thousandths, not read off a tape; a tenth of a millimeter is too coarse. */
+    const fine = (inches: number) => printSize(inches, 'decimal')
     return column.columns([
       column.display({
         id: 'color',
         header: t('stocks.color'),
         cell: ({ row: { original } }) => (
-          <ColorChip
-            hex={original.colorHex}
-            name={original.colorName}
-            detail={original.painted ? undefined : t('stocks.bare')}
-          />
+          <ColorChip hex={original.colorHex} name={original.colorName} />
         ),
       }),
       column.accessor(({ sheet }) => t(`stocks:metal.${sheet.metal}`), {
@@ -71,7 +67,7 @@ export function StocksPage() {
         meta: figure,
       }),
     ])
-  }, [t, run, size, units])
+  }, [t, run, size])
   return (
     <PlaceFrame title={t('stocks.title')} subtitle={t('stocks.meaning')} nav={<OfficeNav />}>
       <DataTable

@@ -6,11 +6,11 @@ import { Button } from '@/components/Button'
 import { Notice } from '@/components/Notice'
 import { TextField } from '@/components/TextField'
 import { OrderCaution } from '@/features/orders/components/OrderCaution'
-import { useScanWords } from '@/features/pieces/useScanWords'
 import { bundleMark } from '@/features/rack/bundle-words'
 import type { useHandOff } from '../api/hand-off.mutations'
 import { handOverStep, leftBehind, scannedBundles, type HandOverStep } from '../hand-over'
 import { takeScan } from '../scan-outcome'
+import { HandOverRefusal } from './HandOverRefusal'
 import { LeftBehindNotice } from './LeftBehindNotice'
 import { SignaturePad } from './SignaturePad'
 
@@ -26,7 +26,6 @@ interface Props {
 /** Who takes it, the signature, what stays behind, and the one button. */
 export function HandOverPanel({ sheet, scanned, onScan, onHandedOver, handOff }: Props) {
   const { t } = useTranslation('hand-off')
-  const words = useScanWords()
   const pending = handOff.isPending
   const [receivedBy, setReceivedBy] = useState('')
   const [signature, setSignature] = useState<Signature>([])
@@ -36,7 +35,6 @@ export function HandOverPanel({ sheet, scanned, onScan, onHandedOver, handOff }:
   const taken = scannedBundles(sheet, scanned)
   const left = leftBehind(sheet, scanned)
   const heavy = taken.some((bundle) => liftOf(bundle) !== 'onePerson')
-  const refusal = handOff.error && words.ofError(handOff.error)
 
   function keepScans(event: KeyboardEvent<HTMLInputElement>) {
     if (event.key !== 'Enter') return
@@ -91,12 +89,7 @@ export function HandOverPanel({ sheet, scanned, onScan, onHandedOver, handOff }:
         <OrderCaution />
       </div>
       <div className="sticky bottom-0 flex flex-col gap-3 border-t border-rule bg-sheet px-(--gutter) py-3">
-        {refusal && (
-          <Notice kind="error">
-            <strong className="block">{refusal.title}</strong>
-            {refusal.detail} {t('over.nothingMoved')}
-          </Notice>
-        )}
+        <HandOverRefusal error={handOff.error} bundles={sheet.bundles} />
         <Button
           variant="primary"
           className="min-h-14! w-full text-lead"
