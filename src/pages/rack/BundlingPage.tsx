@@ -1,4 +1,5 @@
 import { useQuery } from '@tanstack/react-query'
+import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
 import { useLocation, useParams } from 'react-router-dom'
 import { z } from 'zod'
@@ -19,7 +20,11 @@ export function BundlingPage() {
   const scanned = z.object({ code: z.string() }).safeParse(useLocation().state)
   const rack = useQuery(rackQuery())
   const back = { to: paths.rack.home(), label: t('back') }
-  const work = rack.data?.work.find((each) => each.orderId === orderId)
+  const found = rack.data?.work.find((each) => each.orderId === orderId)
+  const [last, setLast] = useState(found)
+  if (found && found !== last) setLast(found)
+  // Strapping the last loose pieces empties the work: the screen stays to say what was strapped.
+  const work = found ?? (last?.orderId === orderId ? { ...last, loose: [] } : undefined)
   const bundles = rack.data?.bundles.filter((bundle) => bundle.orderId === orderId) ?? []
 
   if (work) {
