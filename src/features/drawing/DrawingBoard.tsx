@@ -88,7 +88,7 @@ export function DrawingBoard({
         />
         <AnswerBar check={check} plans={plans} pieceLength={pieceLength} confirmed={confirmed} />
       </div>
-      <aside className="max-h-[43dvh] shrink-0 overflow-y-auto border-t border-rule bg-sheet px-(--gutter) pb-3 lg:max-h-none lg:w-104 lg:overflow-y-auto lg:border-t-0 lg:border-l">
+      <aside className="max-h-[46dvh] shrink-0 overflow-y-auto border-t border-rule bg-sheet px-(--gutter) pb-3 lg:max-h-none lg:w-104 lg:overflow-y-auto lg:border-t-0 lg:border-l">
         <div className={tabled ? 'hidden lg:block' : ''}>
           <PartPanel
             board={board}

@@ -114,7 +114,7 @@ function Steps({ previous, next, goTo, finish }: StepsProps) {
   const { t } = useTranslation('drawing')
   const nameOf = usePartName()
   return (
-    <div className="sticky bottom-0 -mb-3 grid grid-cols-2 gap-2 bg-sheet pt-1 pb-3">
+    <div className="sticky -bottom-3 -mb-3 grid grid-cols-2 gap-2 bg-sheet pt-1 pb-3">
       <Button disabled={previous === null} onClick={() => previous && goTo(previous)}>
         {previous ? nameOf(previous) : t('part.previous')}
       </Button>
