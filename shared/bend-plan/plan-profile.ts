@@ -3,18 +3,20 @@ import type { Sheet } from '#shared/stock/stock.schema'
 import type { Inches } from '#shared/units/brands'
 import type { Brake } from './brake.schema'
 import type { Plan } from './plan.schema'
+import type { PlanRequest } from './plan-request'
 import { planBends } from './planner'
 import { sectionOf } from './section'
 
 /**
  * Plans a profile as the crew draws it. Throws RangeError where the profile has a leg shorter than its
- * bends consume: ask for the profile's problems first.
+ * bends consume: ask for the profile's problems first. `limits` as for `planBends`.
  */
 export const planProfile = (
   profile: Profile,
   sheet: Sheet,
   brake: Brake,
   pieceLength: Inches,
+  limits?: PlanRequest['limits'],
 ): Plan =>
   planBends({
     section: sectionOf(profile, sheet),
@@ -22,4 +24,5 @@ export const planProfile = (
     brake,
     pieceLength,
     paintedSide: profile.colorSide,
+    limits,
   })

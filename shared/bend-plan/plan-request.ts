@@ -11,7 +11,7 @@ export interface PlanRequest {
   readonly pieceLength: Inches
   readonly paintedSide: ColorSide
   readonly limits?: {
-    /** Folds looked at by each search before it answers with the best so far. */
+    /** Folds tested, in the worst case, before the planner answers with the best so far. */
     readonly nodes?: number
   }
 }

@@ -17,7 +17,7 @@ import { searchSets } from './set-search'
 export type { PlanRequest } from './plan-request'
 
 /** Enough for panels of twenty bends; a search that reaches it answers with the best so far. */
-const DEFAULT_NODES = 400_000
+const DEFAULT_NODES = 100_000
 
 const searchGround = (request: PlanRequest): SearchGround => {
   const { section, sheet, brake, pieceLength, limits } = request

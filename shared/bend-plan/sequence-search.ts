@@ -19,6 +19,9 @@ export interface SequenceSearch {
   readonly findRest: ((made: number, orientation: number) => number | undefined) | null
 }
 
+/** A fold put into the queue costs far less than one that is tested, and most are never taken out. */
+const QUEUED_PER_NODE = 8
+
 /** Folds put into the queue to know all sequences as cheap as the best one. */
 const EQUALS = 100_000
 
@@ -85,8 +88,8 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
   if (full === 0) return { best: known, lowerBound: known.cost, proven: true, findRest }
   expand(full, null)
   let best: Sequence | undefined
-  // The queue holds the folds, so they are what is counted: they take the room.
-  let most = nodes
+  const mostQueued = nodes * QUEUED_PER_NODE
+  let most = mostQueued
   for (;;) {
     const key = queue.leastKey()
     const index = queue.pop()
@@ -105,7 +108,7 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
     if (made !== 0) expand(made, { orientation, g, entry: index })
     else if (best === undefined) {
       best = { cost: g, operations: operationsFrom(index) }
-      most = Math.min(nodes, entries.length + EQUALS)
+      most = Math.min(mostQueued, entries.length + EQUALS)
     }
   }
   if (best === undefined)

@@ -11,12 +11,12 @@ const numbers = (seed: number) => () => {
   return seed / 2 ** 31
 }
 
-/** Panels: legs of 1/2 to 2 1/2 in., turns in pairs to either side. */
+/** Panels: legs of 1 to 3 in., turns in pairs to either side. */
 const panels = (bends: number, count: number): Section[] => {
   const next = numbers(bends)
   return Array.from({ length: count }, () =>
     section(
-      Array.from({ length: bends + 1 }, () => 0.5 + Math.floor(next() * 16) / 8),
+      Array.from({ length: bends + 1 }, () => 1 + Math.floor(next() * 16) / 8),
       Array.from({ length: bends }, (_, i) => {
         const side = Math.floor(i / 2) % 2 === 0 ? 1 : -1
         return side * (45 + Math.floor(next() * 4) * 15)

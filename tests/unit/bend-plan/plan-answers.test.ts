@@ -143,7 +143,7 @@ describe('limit on nodes', () => {
   const wide = section([2, 3, 4, 3, 2, 3, 2], [90, -90, 90, -45, 60, -90])
 
   test('answers with the best so far and an honest bound', () => {
-    const limited = request(wide, upOnly, { limits: { nodes: 20 } })
+    const limited = request(wide, upOnly, { limits: { nodes: 10 } })
     const plan = planBends(limited)
     const best = planBends(request(wide, upOnly))
     expect([plan.feasible, plan.proven, best.proven]).toEqual([true, false, true])
