@@ -10,12 +10,14 @@ import { StockName } from './StockName'
 
 interface Props {
   readonly line: OrderLine
+  /** The order waits for its release, at which its pieces come into being. */
+  readonly unreleased: boolean
   /** Where a piece's history is; absent where the reader has no such page. */
   readonly piecePath?: (code: string) => string
 }
 
 /** A line of an order that is in: the drawing as the shop has it, and how far its pieces are. */
-export function OrderLineCard({ line, piecePath }: Props) {
+export function OrderLineCard({ line, unreleased, piecePath }: Props) {
   const { t } = useTranslation('orders')
   const { t: drawing } = useTranslation('drawing')
   const id = useId()
@@ -45,9 +47,8 @@ export function OrderLineCard({ line, piecePath }: Props) {
                 : drawing('answer.bendsNowhere')
             }
           />
-          {pieces.length === 0 ? (
-            <p className="text-small text-scribe">{t('line.noPieces')}</p>
-          ) : (
+          {unreleased && <p className="text-small text-scribe">{t('line.noPieces')}</p>}
+          {pieces.length > 0 && (
             <LinePieces pieces={pieces} quantity={quantity} piecePath={piecePath} />
           )}
         </div>

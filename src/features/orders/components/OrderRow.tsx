@@ -1,9 +1,12 @@
 import { useTranslation } from 'react-i18next'
 import { Link } from 'react-router-dom'
-import { orderNumber, type OrderSummary } from '#shared/orders/order.schema'
+import { orderNumber, type OrderState, type OrderSummary } from '#shared/orders/order.schema'
 import { useFormats } from '@/lib/format/useFormats'
 import { OrderStateWord } from './OrderStateWord'
 import { PieceProgress } from './PieceProgress'
+
+/** Nothing can be picked up yet: a day that has passed is a delay. */
+const UNFINISHED: readonly OrderState[] = ['submitted', 'question', 'released', 'inWork']
 
 interface Props {
   readonly order: OrderSummary
@@ -19,7 +22,7 @@ export function OrderRow({ order, to, withCompany = false, withJob = true }: Pro
   const { t } = useTranslation('orders')
   const { day, daysUntil, count } = useFormats()
   const { number, job, company, state, neededBy, poNumber, pieceCount, progress } = order
-  const late = daysUntil(neededBy) < 0 && state !== 'pickedUp' && state !== 'withdrawn'
+  const late = UNFINISHED.includes(state) && daysUntil(neededBy) < 0
   const facts = [
     t('row.pieces', { count: pieceCount, shown: count(pieceCount) }),
     ...(poNumber === '' ? [] : [t('row.po', { number: poNumber })]),

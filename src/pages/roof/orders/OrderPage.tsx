@@ -90,6 +90,7 @@ function OrderScreen({ order }: { readonly order: Order }) {
           <OrderLineCard
             key={line.id}
             line={line}
+            unreleased={open}
             piecePath={(code) => paths.piece('roof', code)}
           />
         ))}
