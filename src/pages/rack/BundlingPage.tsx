@@ -24,7 +24,8 @@ export function BundlingPage() {
   const [last, setLast] = useState(found)
   if (found && found !== last) setLast(found)
   // Strapping the last loose pieces empties the work: the screen stays to say what was strapped.
-  const work = found ?? (last?.orderId === orderId ? { ...last, loose: [] } : undefined)
+  const work =
+    found ?? (last !== undefined && last.orderId === orderId ? { ...last, loose: [] } : undefined)
   const bundles = rack.data?.bundles.filter((bundle) => bundle.orderId === orderId) ?? []
 
   if (work) {
