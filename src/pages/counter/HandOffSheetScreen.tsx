@@ -104,7 +104,8 @@ export function HandOffSheetScreen({ sheet }: { readonly sheet: HandOffSheet }) 
         </div>
         <aside
           aria-label={t('over.title')}
-          className="flex flex-col border-t border-rule bg-sheet lg:overflow-y-auto lg:border-t-0 lg:border-l"
+          // On a tablet held upright it dissolves, so that its button stays at the bottom edge.
+          className="border-rule bg-sheet max-lg:contents lg:flex lg:flex-col lg:overflow-y-auto lg:border-l"
         >
           {here.length > 0 ? (
             <HandOverPanel

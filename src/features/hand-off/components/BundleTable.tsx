@@ -86,25 +86,29 @@ export function BundleTable({ bundles, handOffs, scanned, onToggle, onReturn, lo
                     </span>
                     {gone && <span className="text-small text-scribe">{gone.receivedBy}</span>}
                   </span>
-                  <Button variant="quiet" onClick={() => onReturn(bundle)}>
+                  <Button
+                    variant="quiet"
+                    aria-label={`${t('bundle.takeBack')} ${bundleMark(bundle)}`}
+                    onClick={() => onReturn(bundle)}
+                  >
                     {t('bundle.takeBack')}
-                    <span className="sr-only"> {bundleMark(bundle)}</span>
                   </Button>
                 </span>
               )
             }
             const ticked = scanned.includes(bundle.code)
+            const word = t(ticked ? 'bundle.scanned' : 'bundle.waiting')
             return (
               <button
                 type="button"
+                aria-label={`${bundleMark(bundle)} ${word}`}
                 aria-pressed={ticked}
                 disabled={locked}
                 className={`inline-flex min-h-target items-center gap-2 rounded-control border px-3 font-semibold disabled:cursor-not-allowed ${ticked ? 'border-oxide text-oxide' : 'border-edge text-dye'}`}
                 onClick={() => onToggle(bundle)}
               >
-                <span className="sr-only">{bundleMark(bundle)} </span>
                 {ticked && <Icon name="done" className="size-5" />}
-                {t(ticked ? 'bundle.scanned' : 'bundle.waiting')}
+                {word}
               </button>
             )
           },

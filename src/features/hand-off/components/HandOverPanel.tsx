@@ -56,7 +56,7 @@ export function HandOverPanel({ sheet, scanned, onScan, onHandedOver, handOff }:
 
   return (
     <>
-      <div className="flex flex-1 flex-col gap-4 p-(--gutter)">
+      <div className="flex flex-1 flex-col gap-4 bg-sheet p-(--gutter) max-lg:border-t max-lg:border-rule">
         <h2 className="text-title font-bold">{t('over.title')}</h2>
         <TextField
           label={t('over.name')}

@@ -10,7 +10,7 @@ export function NothingHere({ sheet }: { readonly sheet: HandOffSheet }) {
   const { state } = sheet.order
   const words = state === 'withdrawn' ? 'withdrawn' : !left.some ? 'allGone' : 'notYet'
   return (
-    <div className="flex flex-col gap-3 p-(--gutter)">
+    <div className="flex flex-col gap-3 bg-sheet p-(--gutter)">
       <h2 className="text-title font-bold">{t(`nothing.${words}`)}</h2>
       <p className="text-scribe">{t(`nothing.${words}Hint`)}</p>
       {words === 'notYet' && <LeftBehindNotice left={left} />}

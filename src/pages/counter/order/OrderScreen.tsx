@@ -93,7 +93,7 @@ export function OrderScreen({ order }: { readonly order: Order }) {
             <Button onClick={() => look(order.version)}>{t('order.looked')}</Button>
           </Notice>
         )}
-        {incoming && nowhere.length > 0 && (
+        {incoming && nowhere.length > 0 && !release.error && (
           <Notice kind="error">
             <strong className="block">
               {t('order.nowhere', { marks: nowhere.map(({ mark }) => mark).join(', ') })}
