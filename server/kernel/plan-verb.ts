@@ -1,6 +1,6 @@
 import { z } from 'zod'
+import { planProfile } from '#shared/bend-plan/plan-profile'
 import { planBends } from '#shared/bend-plan/planner'
-import { sectionOf } from '#shared/bend-plan/section'
 import { hasErrors } from '#shared/profile/problem'
 import { profileProblems } from '#shared/profile/problems'
 import { colorSideSchema } from '#shared/profile/profile.schema'
@@ -38,13 +38,7 @@ const planOfProfile = defineVerb(
     if (hasErrors(problems)) {
       return { exit: 3, output: { feasible: false, proven: true, steps: [], problems } }
     }
-    const plan = planBends({
-      section: sectionOf(profile, stock),
-      sheet: stock,
-      brake,
-      pieceLength,
-      paintedSide: profile.colorSide,
-    })
+    const plan = planProfile(profile, stock, brake, pieceLength)
     return { exit: plan.feasible ? 0 : 3, output: { ...plan, problems } }
   },
 )

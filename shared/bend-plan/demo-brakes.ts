@@ -27,7 +27,9 @@ const bothWays: ToolSet = {
   apron: shopApron,
 }
 
-/** Generic illustrative brakes: no make's values. */
+const weekdays: NonNullable<Brake['hours']>[number]['days'] = ['mon', 'tue', 'wed', 'thu', 'fri']
+
+/** Generic illustrative brakes: no make's values. Speeds, hours, scales and line offsets are invented. */
 const upOnly: Brake = {
   name: 'Ten-six folder',
   length: 126,
@@ -57,6 +59,10 @@ const upOnly: Brake = {
   },
   down: null,
   capacity: { steel: 0.04, stainless: 0.025, aluminum: 0.05, copper: 0.032 },
+  speeds: { load: 12, hit: 9, roll: 8, endForEnd: 14, both: 20, gaugeMove: 4 },
+  hours: [{ days: weekdays, from: '06:30', to: '15:00' }],
+  scale: { reads: 'bend', overbend: 'hand' },
+  lineOffset: 0.03,
 }
 
 const upAndDown: Brake = {
@@ -65,6 +71,13 @@ const upAndDown: Brake = {
   up: bothWays,
   down: bothWays,
   capacity: { steel: 0.052, stainless: 0.031, aluminum: 0.063, copper: 0.043 },
+  speeds: { load: 12, hit: 6, roll: 8, endForEnd: 14, both: 20, gaugeMove: 2 },
+  hours: [
+    { days: weekdays, from: '06:00', to: '16:30' },
+    { days: ['sat'], from: '07:00', to: '11:00' },
+  ],
+  scale: { reads: 'included', overbend: 'machine' },
+  lineOffset: 0.015,
 }
 
 const site: Brake = {
@@ -109,6 +122,9 @@ const site: Brake = {
   },
   down: null,
   capacity: { steel: 0.025, stainless: null, aluminum: 0.032, copper: 0.022 },
+  speeds: { load: 20, hit: 12, roll: 10, endForEnd: 18, both: 25, gaugeMove: 0 },
+  hours: [{ days: weekdays, from: '07:00', to: '15:30' }],
+  scale: { reads: 'included', overbend: 'hand' },
 }
 
 /** The three demo brakes by what they can do. */

@@ -1,4 +1,5 @@
-import { between } from '#shared/geometry/vector'
+import { isEqual } from '#shared/geometry/tolerance'
+import { between, vector } from '#shared/geometry/vector'
 import type { Vector } from '#shared/geometry/vector'
 import type { Inches } from '#shared/units/brands'
 import type { Chain } from './fold-frame'
@@ -9,29 +10,38 @@ import type { PieceBend, Side, Workpiece } from './workpiece'
 /** The gauge stop is this high above and below the sheet's plane. */
 const STOP_REACH = 0.5
 
+/** A height just at the stop's end is at it: whether a face counts must not hang on rounding. */
+const toStopEnd = (y: Inches): Inches =>
+  isEqual(Math.abs(y), STOP_REACH) ? Math.sign(y) * STOP_REACH : y
+
 /** The part of a segment within the stop's height; undefined when none is. */
 const clipToStop = (a: Vector, b: Vector): readonly [Vector, Vector] | undefined => {
-  const rise = b.y - a.y
-  if (rise === 0) return Math.abs(a.y) <= STOP_REACH ? [a, b] : undefined
-  const low = (-STOP_REACH - a.y) / rise
-  const high = (STOP_REACH - a.y) / rise
+  const start = toStopEnd(a.y)
+  const rise = toStopEnd(b.y) - start
+  if (rise === 0) return Math.abs(start) <= STOP_REACH ? [a, b] : undefined
+  const low = (-STOP_REACH - start) / rise
+  const high = (STOP_REACH - start) / rise
   const from = Math.max(0, Math.min(low, high))
   const to = Math.min(1, Math.max(low, high))
   return from <= to ? [between(a, b, from), between(a, b, to)] : undefined
 }
 
-/** The rearmost point of the rear chain within half an inch of the sheet's plane: inches behind the bend. */
-export const gaugeDistance = (rear: Chain): Inches => {
-  let least = 0
-  rear.points.forEach((to, i) => {
-    const from = rear.points[i - 1]
+/** The greatest x of a run of points within the stop's height; 0 where none is further. */
+export const stopReach = (points: readonly Vector[]): Inches => {
+  let most = 0
+  points.forEach((to, i) => {
+    const from = points[i - 1]
     if (from === undefined) return
-    clipToStop(from, to)?.forEach((point) => {
-      least = Math.min(least, point.x)
+    clipToStop(from, to)?.forEach(({ x }) => {
+      most = Math.max(most, x)
     })
   })
-  return -least
+  return most
 }
+
+/** The rearmost point of the rear chain within half an inch of the sheet's plane: inches behind the bend. */
+export const gaugeDistance = (rear: Chain): Inches =>
+  stopReach(rear.points.map(({ x, y }) => vector(0 - x, y)))
 
 /** Whether the bends made behind are more than a single closed hem. */
 export const isFormedFace = (bentBehind: number, closedHems: number): boolean =>

@@ -2,6 +2,7 @@ import type { Profile } from '#shared/profile/profile.schema'
 import type { Sheet } from '#shared/stock/stock.schema'
 import type { Inches } from '#shared/units/brands'
 import type { Brake } from './brake.schema'
+import { withFloorData } from './floor-data'
 import type { Plan } from './plan.schema'
 import type { PlanRequest } from './plan-request'
 import { planBends } from './planner'
@@ -17,12 +18,9 @@ export const planProfile = (
   brake: Brake,
   pieceLength: Inches,
   limits?: PlanRequest['limits'],
-): Plan =>
-  planBends({
-    section: sectionOf(profile, sheet),
-    sheet,
-    brake,
-    pieceLength,
-    paintedSide: profile.colorSide,
-    limits,
-  })
+): Plan => {
+  const section = sectionOf(profile, sheet)
+  const paintedSide = profile.colorSide
+  const plan = planBends({ section, sheet, brake, pieceLength, paintedSide, limits })
+  return withFloorData(plan, profile, sheet, brake)
+}

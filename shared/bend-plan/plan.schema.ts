@@ -54,6 +54,16 @@ export const planStepSchema = z.strictObject({
   gauge: z.number().nullable(),
   /** What the gauge rests on; null on a brake without a gauge. */
   restsOn: gaugeRestSchema.nullable(),
+  /**
+   * What is set on the gauge, in inches: from the true strip or the true folded outside with the
+   * brake's line offset. Of a bare section, which knows neither, the model's distance. Null on a brake
+   * without a gauge.
+   */
+  gaugeSetting: z.number().nullable(),
+  /** Degrees as the brake's scale reads them; of a hem, the angle of its first hit. */
+  scaleAngle: z.number(),
+  /** The move before, the hits, and the gauge where its setting changes; null where speeds are unknown. */
+  seconds: z.number().nullable(),
 })
 
 export const planReasonSchema = z.strictObject({
@@ -107,6 +117,8 @@ export const planSchema = z.strictObject({
   cost: planCostSchema.nullable(),
   lowerBound: planCostSchema.nullable(),
   steps: z.array(planStepSchema),
+  /** Of one piece among others like it; null where the brake's speeds are unknown or nothing bends it. */
+  seconds: z.number().nullable(),
   section: sectionSchema,
   reasons: z.array(planReasonSchema),
   cures: z.array(planCureSchema),

@@ -13,6 +13,7 @@ import { planSteps } from './plan-steps'
 import type { SearchGround } from './search-ground'
 import { searchSequence } from './sequence-search'
 import { searchSets } from './set-search'
+import { secondsOf } from './step-seconds'
 
 export type { PlanRequest } from './plan-request'
 
@@ -50,6 +51,7 @@ export const planBends = (request: PlanRequest): Plan => {
     cost: null,
     lowerBound: null,
     steps: [],
+    seconds: null,
     section,
     reasons,
     cures: [],
@@ -85,12 +87,14 @@ export const planBends = (request: PlanRequest): Plan => {
   const { best, findRest } = search
   const chosen =
     findRest === null ? best : firstOfEquals(ground, best, findRest, request.paintedSide)
+  const steps = planSteps(ground, chosen.operations)
   return {
     feasible: true,
     proven: search.proven,
     cost: unpackCost(chosen.cost),
     lowerBound: unpackCost(search.lowerBound),
-    steps: planSteps(ground, chosen.operations),
+    steps,
+    seconds: secondsOf(steps),
     section,
     reasons: [],
     cures: [],

@@ -49,6 +49,7 @@ const FIGURES = [
   'hits',
   'gauge',
   'restsOn',
+  'scaleAngle',
 ] as const satisfies readonly (keyof PlanStep)[]
 
 /**

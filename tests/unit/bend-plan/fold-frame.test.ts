@@ -122,4 +122,11 @@ describe('gauge', () => {
     const chain = chainOf(kicked, bendOf(kicked, 1), 'A', 0b01, 'rear')
     expect(gaugeDistance(chain)).toBeCloseTo(2.5, 12)
   })
+
+  test('a face exactly at the end of the stop counts, whatever a sine rounds to', () => {
+    const stepped = workpieceOf(section([2, 0.5, 3, 4], [-90, 90, 45]), T)
+    const chain = chainOf(stepped, bendOf(stepped, 2), 'A', 0b011, 'rear')
+    expect(chain.points.map(({ y }) => Math.abs(y) <= 0.5)).toContain(false)
+    expect(gaugeDistance(chain)).toBeCloseTo(5, 12)
+  })
 })

@@ -12,6 +12,7 @@ const plan = (name: string, cost: PlanCost | null): BrakePlan => ({
     cost,
     lowerBound: cost,
     steps: [],
+    seconds: null,
     section: { legs: [1], turns: [], hemA: null, hemB: null },
     reasons: [],
     cures: [],
