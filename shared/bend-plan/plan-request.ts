@@ -13,5 +13,10 @@ export interface PlanRequest {
   readonly limits?: {
     /** Folds tested, in the worst case, before the planner answers with the best so far. */
     readonly nodes?: number
+    /**
+     * Asked before each fold that is looked at; once true it must stay true, and the search ends as at
+     * the limit on nodes. For callers that have a clock: such an answer depends on the machine.
+     */
+    readonly isOver?: () => boolean
   }
 }

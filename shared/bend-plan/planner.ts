@@ -30,6 +30,7 @@ const searchGround = (request: PlanRequest): SearchGround => {
     feasibility: createFeasibility(ground),
     lowerBound: createLowerBound(ground, cost),
     nodes: limits?.nodes ?? DEFAULT_NODES,
+    isOver: limits?.isOver ?? (() => false),
   }
 }
 

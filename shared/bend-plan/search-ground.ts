@@ -10,6 +10,8 @@ export interface SearchGround extends FoldGround {
   readonly lowerBound: (bits: number, orientation: number) => number
   /** Folds a search may look at. */
   readonly nodes: number
+  /** Asked before each of them; true ends the search. */
+  readonly isOver: () => boolean
 }
 
 /** One operation of a sequence, by index of the bend and number of the orientation. */

@@ -37,7 +37,7 @@ const DEPTH = 32
  * equals can be made. `known` is a sequence found before: nothing dearer is looked at.
  */
 export const searchSequence = (ground: SearchGround, known: Sequence): SequenceSearch => {
-  const { piece, brake, feasibility, cost, lowerBound, nodes } = ground
+  const { piece, brake, feasibility, cost, lowerBound, nodes, isOver } = ground
   const full = allBends(piece)
   const queue = createHeap()
   const entries: {
@@ -97,7 +97,7 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
     if (key === undefined || index === undefined || entry === undefined) break
     const f = Math.floor(key / DEPTH)
     if (best !== undefined && f > best.cost) break
-    if (entries.length > most) {
+    if (entries.length > most || isOver()) {
       if (best !== undefined) return { best, lowerBound: best.cost, proven: true, findRest: null }
       return { best: known, lowerBound: f, proven: false, findRest: null }
     }

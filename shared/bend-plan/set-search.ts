@@ -15,7 +15,7 @@ export type SetSearch =
 
 /** Backwards from the finished piece over made sets alone, depth first. */
 const searchBackwards = (ground: SearchGround, nodes: number): SetSearch => {
-  const { piece, feasibility } = ground
+  const { piece, feasibility, isOver } = ground
   const seen = createAnswerTable(2 ** piece.bends.length)
   const order: PieceBend[] = []
   let looked = 0
@@ -39,7 +39,7 @@ const searchBackwards = (ground: SearchGround, nodes: number): SetSearch => {
         if (isDead && canBeLast(bend, rest)) isDead = false
         continue
       }
-      if (looked++ >= nodes) return 'limit'
+      if (looked++ >= nodes || isOver()) return 'limit'
       if (!canBeLast(bend, rest)) continue
       isDead = false
       seen.set(rest, true)
@@ -62,7 +62,7 @@ const searchBackwards = (ground: SearchGround, nodes: number): SetSearch => {
 
 /** True when the sets that can be made from the flat sheet run out before the piece is finished. */
 const isStuckForwards = (ground: SearchGround, nodes: number): boolean => {
-  const { piece, feasibility } = ground
+  const { piece, feasibility, isOver } = ground
   const full = allBends(piece)
   const seen = createAnswerTable(full + 1)
   const tries = piece.bends.map((bend) => feasibility.orientationsToTry(bend))
@@ -73,7 +73,7 @@ const isStuckForwards = (ground: SearchGround, nodes: number): boolean => {
     for (const bend of piece.bends) {
       const next: number = made | (1 << bend.index)
       if (next === made || seen.find(next) === true) continue
-      if (looked++ >= nodes) return false
+      if (looked++ >= nodes || isOver()) return false
       const current = made
       if (tries[bend.index]?.some((o) => feasibility.passes(current, bend, o)) !== true) continue
       seen.set(next, true)
