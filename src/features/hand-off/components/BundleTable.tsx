@@ -104,7 +104,7 @@ export function BundleTable({ bundles, handOffs, scanned, onToggle, onReturn, lo
                 aria-label={`${bundleMark(bundle)} ${word}`}
                 aria-pressed={ticked}
                 disabled={locked}
-                className={`inline-flex min-h-target items-center gap-2 rounded-control border px-3 font-semibold disabled:cursor-not-allowed ${ticked ? 'border-oxide text-oxide' : 'border-edge text-dye'}`}
+                className={`inline-flex min-h-target items-center gap-2 rounded-control border px-3 font-semibold whitespace-nowrap disabled:cursor-not-allowed ${ticked ? 'border-oxide text-oxide' : 'border-edge text-dye'}`}
                 onClick={() => onToggle(bundle)}
               >
                 {ticked && <Icon name="done" className="size-5" />}

@@ -99,6 +99,18 @@ export function OrderScreen({ order }: { readonly order: Order }) {
               {t('order.nowhere', { marks: nowhere.map(({ mark }) => mark).join(', ') })}
             </strong>
             {t('order.nowhereCure')}
+            <ul className="flex flex-wrap gap-x-5">
+              {nowhere.map(({ id, mark, name }) => (
+                <li key={id}>
+                  <a
+                    href={`#line-${id}`}
+                    className="inline-flex min-h-target items-center font-semibold underline"
+                  >
+                    {mark} {name}
+                  </a>
+                </li>
+              ))}
+            </ul>
           </Notice>
         )}
         <ReleaseRefusal error={release.error} order={order} />
