@@ -57,3 +57,18 @@ export function formatMoment(moment: string, language: Language, now: Date): str
 /** `1,284`, `1284` as the language groups it. */
 export const formatCount = (count: number, language: Language): string =>
   new Intl.NumberFormat(LOCALES[language]).format(count)
+
+/** `45 sec`, `2 min 10 sec`: seconds of work, to the next five. */
+export function formatDuration(seconds: number, language: Language): string {
+  const whole = Math.max(5, Math.ceil(seconds / 5) * 5)
+  const print = (value: number, unit: 'minute' | 'second') =>
+    new Intl.NumberFormat(LOCALES[language], { style: 'unit', unit, unitDisplay: 'short' }).format(
+      value,
+    )
+  const minutes = Math.floor(whole / 60)
+  const rest = whole % 60
+  return [
+    ...(minutes > 0 ? [print(minutes, 'minute')] : []),
+    ...(rest > 0 ? [print(rest, 'second')] : []),
+  ].join(' ')
+}

@@ -1,6 +1,13 @@
 import { useMemo } from 'react'
 import { useTranslation } from 'react-i18next'
-import { daysUntil, formatCount, formatDay, formatMoment, formatTime } from '@/lib/format/dates'
+import {
+  daysUntil,
+  formatCount,
+  formatDay,
+  formatDuration,
+  formatMoment,
+  formatTime,
+} from '@/lib/format/dates'
 import { asLanguage } from '@/locales/languages'
 
 /** Days, times and counts in the language on screen, on the clock of the device. */
@@ -13,6 +20,7 @@ export function useFormats() {
       daysUntil: (day: string) => daysUntil(day, new Date()),
       time: (moment: string) => formatTime(moment, language),
       moment: (moment: string) => formatMoment(moment, language, new Date()),
+      duration: (seconds: number) => formatDuration(seconds, language),
       count: (count: number) => formatCount(count, language),
     }),
     [language],

@@ -63,25 +63,7 @@ export function BendStep({ run, step, picture, number }: Props) {
           <b className="text-ink">{fold}</b>
         </p>
         <GaugeFigure run={run} step={step} />
-        <p className="mt-2 text-scribe">
-          {t(step.hits > 1 ? 'step.firstHit' : 'step.angle', {
-            direction: plan(`direction.${step.direction}`),
-          })}
-        </p>
-        <p
-          className="font-figure text-stand font-medium whitespace-nowrap"
-          data-testid="step-angle"
-        >
-          {printAngle(step.swing)}
-        </p>
-        <p className="text-scribe">
-          {step.hits > 1
-            ? t('step.thenFlatten')
-            : t('step.opensTo', {
-                turn: printAngle(step.angle),
-                included: printAngle(includedAngle(step.angle)),
-              })}
-        </p>
+        <AngleFigure run={run} step={step} />
         <p className="mt-auto border-t border-rule pt-3 text-small text-scribe">
           {t('step.caution', { edge: picture.edgeAtFront })}
         </p>
@@ -95,15 +77,38 @@ function GaugeFigure({ run, step }: Pick<Props, 'run' | 'step'>) {
   const words = usePlanWords()
   const { size } = useUnits()
   const crease = run.strip.creases.find(({ fold }) => fold === step.bend)
-  const figure = step.gauge ?? crease?.at
+  const figure = step.gaugeSetting ?? crease?.at
   return (
     <>
       <p className="text-scribe">
-        {step.gauge === null ? t('step.markedLine') : words.gauge(step)}
+        {step.gaugeSetting === null ? t('step.markedLine') : words.gauge(step)}
       </p>
       {figure !== undefined && (
         <StandFigure text={size(figure, 32).replace(/"$/, '')} testId="step-gauge" />
       )}
+    </>
+  )
+}
+
+/** What the brake's own scale must show, and what comes out when the sheet has sprung back. */
+function AngleFigure({ run, step }: Pick<Props, 'run' | 'step'>) {
+  const { t } = useTranslation('brake')
+  const { t: plan } = useTranslation('plan')
+  const reads = run.brake.scale?.reads ?? 'bend'
+  const byMachine = run.brake.scale?.overbend === 'machine'
+  const said = { direction: plan(`direction.${step.direction}`), scale: t(`step.scale.${reads}`) }
+  return (
+    <>
+      <p className="mt-2 text-scribe">{t(step.hits > 1 ? 'step.firstHit' : 'step.angle', said)}</p>
+      <StandFigure text={printAngle(step.scaleAngle)} testId="step-angle" />
+      <p className="text-scribe">
+        {step.hits > 1
+          ? t('step.thenFlatten')
+          : t(byMachine ? 'step.machineAdds' : 'step.opensTo', {
+              turn: printAngle(step.angle),
+              included: printAngle(includedAngle(step.angle)),
+            })}
+      </p>
     </>
   )
 }

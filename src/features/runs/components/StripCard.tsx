@@ -4,12 +4,14 @@ import { useElementSize } from '@/features/drawing/canvas/useElementSize'
 import { ProfilePair } from '@/features/drawing/figure/ProfilePair'
 import { ChecksMade } from '@/features/drawing/panels/ChecksMade'
 import { useUnits } from '@/features/people/useUnits'
+import { useFormats } from '@/lib/format/useFormats'
 import { StandFigure } from './StandFigure'
 
 /** The first card of a run: what to cut, where the creases lie, what the finished piece looks like. */
 export function StripCard({ run }: { readonly run: Run }) {
   const { t } = useTranslation('brake')
   const { size, run: length, weight } = useUnits()
+  const { duration } = useFormats()
   const { ref, size: room } = useElementSize()
   const heaviest = Math.max(...run.pieces.map((piece) => piece.weight))
 
@@ -42,7 +44,10 @@ export function StripCard({ run }: { readonly run: Run }) {
             </li>
           ))}
         </ul>
-        <p className="text-small">{t('strip.brake', { brake: run.brakeName })}</p>
+        <p className="text-small">
+          {t('strip.brake', { brake: run.brakeName })}
+          {run.plan.seconds !== null && ` ${t('strip.time', { time: duration(run.plan.seconds) })}`}
+        </p>
         <ChecksMade plan={run.plan} />
         <p className="mt-auto border-t border-rule pt-3 text-small text-scribe">
           {t('strip.caution', { weight: weight(heaviest) })}
