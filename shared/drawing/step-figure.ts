@@ -25,6 +25,8 @@ export interface StepOptions {
   /** The brake's tools for that direction in the planner's fold frame; null draws none. */
   readonly tools: ToolSet | null
   readonly textSize?: number
+  /** A place to ring, in the picture's inches: where the piece meets something. */
+  readonly mark?: Vector
 }
 
 /** How much of a deep rear is shown, against the reach of the front; never less than these inches. */
@@ -98,9 +100,24 @@ export const stepFigure = (picture: StepPicture, options: StepOptions): DisplayL
     ...drawSheet(after, picture.paintedUp, view),
     ...swingArrow(before, toPixels(picture.frontAfter), options.direction, pen, view),
     ...drawLetters(after, picture, view),
+    ...drawMark(options.mark, view),
   ]
   return { width: options.width, height: options.height, items }
 }
+
+const drawMark = (mark: Vector | undefined, { pen, scale, place }: StepView): DisplayItem[] =>
+  mark === undefined
+    ? []
+    : [
+        {
+          kind: 'circle',
+          role: 'problem',
+          center: place(vector(mark.x * scale, mark.y * scale)),
+          radius: pen.metal * 1.6 + 4,
+          width: 2.5,
+          filled: false,
+        },
+      ]
 
 const drawTools = (picture: StepPicture, options: StepOptions, view: StepView): DisplayItem[] => {
   const { tools, direction } = options

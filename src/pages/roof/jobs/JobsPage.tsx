@@ -16,7 +16,7 @@ import { useMay, usePerson } from '@/features/people/person-context'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
 import { MoreButton } from '../MoreButton'
 import { RoofNav } from '../RoofNav'
-import { useSettled } from '../useSettled'
+import { useSettled } from '@/lib/useSettled'
 
 export function JobsPage() {
   const { t } = useTranslation('jobs')

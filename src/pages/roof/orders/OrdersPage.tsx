@@ -19,7 +19,7 @@ import { PlaceFrame } from '@/pages/shell/PlaceFrame'
 import { draftPath } from '../draft-path'
 import { MoreButton } from '../MoreButton'
 import { RoofNav } from '../RoofNav'
-import { useSettled } from '../useSettled'
+import { useSettled } from '@/lib/useSettled'
 
 /** Search and state stand in the address, so that the way back from an order leads to the same list. */
 function useOrderFilter() {
