@@ -1,8 +1,8 @@
 import { distance, vector } from '#shared/geometry/vector'
 import type { Vector } from '#shared/geometry/vector'
 import type { Inches } from '#shared/units/brands'
-import { polarPoint, polarSide } from './polar'
-import type { PolarPoint, PolarSide } from './polar'
+import { polarOf } from './polar'
+import type { Polar } from './polar'
 
 /** One straight side of an outline. */
 export interface OutlineSide {
@@ -17,68 +17,92 @@ export interface Box {
   readonly top: Inches
 }
 
-/** A tool (closed and solid) or a run of sheet (open, its centre line). */
-export interface Outline {
-  readonly points: readonly Vector[]
-  readonly isSolid: boolean
-  readonly sides: readonly OutlineSide[]
+/**
+ * A tool (closed and solid) or a run of sheet (open, its centre line). Side i runs from point i to the
+ * next. Coordinates lie in arrays of numbers, which the sweeps read; points and sides as objects are
+ * made when they are first asked for.
+ */
+export class Outline {
   readonly box: Box
-  /** Points and sides seen from the bend line, worked out when a swing first asks. */
-  readonly polar: {
-    readonly points: readonly PolarPoint[]
-    readonly sides: readonly PolarSide[]
+  readonly sideCount: number
+  private madePoints: readonly Vector[] | undefined
+  private madeSides: readonly OutlineSide[] | undefined
+  private madePolar: Polar | undefined
+  private madeSwung: { readonly swing: number; readonly outline: Outline } | undefined
+
+  /** Throws RangeError where there are no two points. */
+  constructor(
+    readonly xs: Float64Array,
+    readonly ys: Float64Array,
+    readonly isSolid: boolean,
+  ) {
+    const count = xs.length
+    if (count < 2) throw new RangeError(`An outline has two points or more, not ${count}.`)
+    let [left, right, bottom, top] = [Infinity, -Infinity, Infinity, -Infinity]
+    for (let i = 0; i < count; i++) {
+      const x = xs[i] ?? NaN
+      const y = ys[i] ?? NaN
+      if (x < left) left = x
+      if (x > right) right = x
+      if (y < bottom) bottom = y
+      if (y > top) top = y
+    }
+    this.box = { left, right, bottom, top }
+    this.sideCount = isSolid ? count : count - 1
+  }
+
+  get points(): readonly Vector[] {
+    return (this.madePoints ??= Array.from(this.xs, (x, i) => vector(x, this.ys[i] ?? NaN)))
+  }
+
+  get sides(): readonly OutlineSide[] {
+    return (this.madeSides ??= this.points.flatMap((a, i) => {
+      const b = this.points[i + 1] ?? (this.isSolid ? this.points[0] : undefined)
+      return b === undefined ? [] : [{ a, b }]
+    }))
+  }
+
+  /** Points and sides seen from the bend line at the origin. */
+  get polar(): Polar {
+    return (this.madePolar ??= polarOf(this.xs, this.ys, this.isSolid))
+  }
+
+  /** Turned counter-clockwise about the bend line, radians; the last answer is kept. */
+  swung(swing: number): Outline {
+    if (this.madeSwung?.swing === swing) return this.madeSwung.outline
+    const c = Math.cos(swing)
+    const s = Math.sin(swing)
+    const { xs, ys } = this
+    const outline = new Outline(
+      xs.map((x, i) => x * c - (ys[i] ?? NaN) * s),
+      ys.map((y, i) => (xs[i] ?? NaN) * s + y * c),
+      this.isSolid,
+    )
+    this.madeSwung = { swing, outline }
+    return outline
   }
 }
 
-/** Throws RangeError where there are no two points. */
 const outlineOf = (points: readonly Vector[], isSolid: boolean): Outline => {
-  const [first] = points
-  if (first === undefined || points.length < 2) {
-    throw new RangeError(`An outline has two points or more, not ${points.length}.`)
-  }
-  const sides: OutlineSide[] = []
-  let [left, right, bottom, top] = [first.x, first.x, first.y, first.y]
-  let before = first
-  for (const point of points) {
-    if (point !== first) sides.push({ a: before, b: point })
-    left = Math.min(left, point.x)
-    right = Math.max(right, point.x)
-    bottom = Math.min(bottom, point.y)
-    top = Math.max(top, point.y)
-    before = point
-  }
-  if (isSolid) sides.push({ a: before, b: first })
-  let polar: Outline['polar'] | undefined
-  return {
-    points,
-    isSolid,
-    sides,
-    box: { left, right, bottom, top },
-    get polar() {
-      return (polar ??= {
-        points: points.map(polarPoint),
-        sides: sides.map(polarSide),
-      })
-    },
-  }
+  const xs = new Float64Array(points.length)
+  const ys = new Float64Array(points.length)
+  points.forEach(({ x, y }, i) => {
+    xs[i] = x
+    ys[i] = y
+  })
+  return new Outline(xs, ys, isSolid)
 }
 
 export const sheetOutline = (points: readonly Vector[]): Outline => outlineOf(points, false)
 
 export const toolOutline = (points: readonly Vector[]): Outline => outlineOf(points, true)
 
-export const movedOutline = (outline: Outline, dx: Inches, dy: Inches): Outline =>
-  outlineOf(
-    outline.points.map(({ x, y }) => vector(x + dx, y + dy)),
-    outline.isSolid,
+export const movedOutline = ({ xs, ys, isSolid }: Outline, dx: Inches, dy: Inches): Outline =>
+  new Outline(
+    xs.map((x) => x + dx),
+    ys.map((y) => y + dy),
+    isSolid,
   )
-
-/** Whether the boxes come nearer than a clearance, the first one moved by up to (dx, dy). */
-export const boxesMeet = (a: Box, b: Box, clearance: Inches, dx = 0, dy = 0): boolean =>
-  a.left + Math.min(0, dx) <= b.right + clearance &&
-  a.right + Math.max(0, dx) >= b.left - clearance &&
-  a.bottom + Math.min(0, dy) <= b.top + clearance &&
-  a.top + Math.max(0, dy) >= b.bottom - clearance
 
 /**
  * What is left of a run of points after its first inches are cut off; undefined when nothing is.

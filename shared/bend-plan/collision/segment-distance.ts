@@ -1,56 +1,64 @@
-import type { Vector } from '#shared/geometry/vector'
-import type { Inches } from '#shared/units/brands'
-
-/** Square of the distance of the point (x, y) from a segment. */
-const squareToSegment = (x: number, y: number, a: Vector, b: Vector): number => {
-  const dx = b.x - a.x
-  const dy = b.y - a.y
+/** Square of the distance of the point (x, y) from the segment a b. */
+export const pointSquare = (
+  x: number,
+  y: number,
+  ax: number,
+  ay: number,
+  bx: number,
+  by: number,
+): number => {
+  const dx = bx - ax
+  const dy = by - ay
   const square = dx * dx + dy * dy
-  const t = square === 0 ? 0 : ((x - a.x) * dx + (y - a.y) * dy) / square
+  const t = square === 0 ? 0 : ((x - ax) * dx + (y - ay) * dy) / square
   const at = t < 0 ? 0 : t > 1 ? 1 : t
-  const offX = x - a.x - at * dx
-  const offY = y - a.y - at * dy
+  const offX = x - ax - at * dx
+  const offY = y - ay - at * dy
   return offX * offX + offY * offY
 }
 
-/** Distance of the point (x, y) from a segment. */
-export const pointToSegment = (x: number, y: number, a: Vector, b: Vector): Inches =>
-  Math.sqrt(squareToSegment(x, y, a, b))
-
-const side = (a: Vector, b: Vector, p: Vector): number =>
-  (b.x - a.x) * (p.y - a.y) - (b.y - a.y) * (p.x - a.x)
-
-const cross = (a: Vector, b: Vector, c: Vector, d: Vector): boolean => {
-  const c1 = side(a, b, c)
-  const c2 = side(a, b, d)
-  if (!((c1 > 0 && c2 < 0) || (c1 < 0 && c2 > 0))) return false
-  const d1 = side(c, d, a)
-  const d2 = side(c, d, b)
-  return (d1 > 0 && d2 < 0) || (d1 < 0 && d2 > 0)
+/**
+ * Square of the distance between the segments a b and c d; 0 where they cross. Otherwise an end point
+ * of one is nearest.
+ */
+export const segmentSquare = (
+  ax: number,
+  ay: number,
+  bx: number,
+  by: number,
+  cx: number,
+  cy: number,
+  dx: number,
+  dy: number,
+): number => {
+  const c1 = (bx - ax) * (cy - ay) - (by - ay) * (cx - ax)
+  const c2 = (bx - ax) * (dy - ay) - (by - ay) * (dx - ax)
+  if ((c1 > 0 && c2 < 0) || (c1 < 0 && c2 > 0)) {
+    const d1 = (dx - cx) * (ay - cy) - (dy - cy) * (ax - cx)
+    const d2 = (dx - cx) * (by - cy) - (dy - cy) * (bx - cx)
+    if ((d1 > 0 && d2 < 0) || (d1 < 0 && d2 > 0)) return 0
+  }
+  return Math.min(
+    pointSquare(ax, ay, cx, cy, dx, dy),
+    pointSquare(bx, by, cx, cy, dx, dy),
+    pointSquare(cx, cy, ax, ay, bx, by),
+    pointSquare(dx, dy, ax, ay, bx, by),
+  )
 }
 
-/** Distance between two segments; 0 where they cross. Otherwise an end point of one is nearest. */
-export const segmentToSegment = (a: Vector, b: Vector, c: Vector, d: Vector): Inches =>
-  cross(a, b, c, d)
-    ? 0
-    : Math.sqrt(
-        Math.min(
-          squareToSegment(a.x, a.y, c, d),
-          squareToSegment(b.x, b.y, c, d),
-          squareToSegment(c.x, c.y, a, b),
-          squareToSegment(d.x, d.y, a, b),
-        ),
-      )
-
-/** Whether the boxes about two segments are further apart than a clearance: then the segments are. */
+/** Whether the boxes about the segments a b and c d are further apart than a clearance: then they are. */
 export const areFarApart = (
-  a: Vector,
-  b: Vector,
-  c: Vector,
-  d: Vector,
-  clearance: Inches,
+  ax: number,
+  ay: number,
+  bx: number,
+  by: number,
+  cx: number,
+  cy: number,
+  dx: number,
+  dy: number,
+  clearance: number,
 ): boolean =>
-  (a.x < b.x ? a.x : b.x) > (c.x > d.x ? c.x : d.x) + clearance ||
-  (a.x > b.x ? a.x : b.x) < (c.x < d.x ? c.x : d.x) - clearance ||
-  (a.y < b.y ? a.y : b.y) > (c.y > d.y ? c.y : d.y) + clearance ||
-  (a.y > b.y ? a.y : b.y) < (c.y < d.y ? c.y : d.y) - clearance
+  (ax < bx ? ax : bx) > (cx > dx ? cx : dx) + clearance ||
+  (ax > bx ? ax : bx) < (cx < dx ? cx : dx) - clearance ||
+  (ay < by ? ay : by) > (cy > dy ? cy : dy) + clearance ||
+  (ay > by ? ay : by) < (cy < dy ? cy : dy) - clearance

@@ -1,11 +1,14 @@
 import { TOLERANCE } from '#shared/geometry/tolerance'
 import type { Inches } from '#shared/units/brands'
 import type { Outline } from './outline'
-import type { PolarPoint, PolarSide } from './polar'
-import { pointToSegment } from './segment-distance'
+import { withinHalfTurn } from './polar'
+import { pointSquare } from './segment-distance'
 import { meetsStill } from './still'
 
 const FULL_TURN = 2 * Math.PI
+
+/** Far above the rounding of a sum of angles; only ever keeps a side in the running. */
+const ANGLE_SLACK = 1e-9
 
 /** The angles of one swing at which something changes, kept in order. One list serves many swings. */
 interface Angles {
@@ -50,33 +53,41 @@ const circleCosine = (radius: Inches, center: Inches, clearance: Inches): number
  * `way` is 1 counter-clockwise, -1 clockwise; `swing` radians.
  */
 const arcEnters = (
-  { radius, towards }: PolarPoint,
+  radius: Inches,
+  towards: number,
   swing: number,
   way: 1 | -1,
-  side: PolarSide,
+  sides: Outline,
+  side: number,
   clearance: Inches,
   angles: Angles,
 ): boolean => {
-  if (radius === 0 || radius < side.near - clearance || radius > side.far + clearance) return false
+  const { xs, ys, polar } = sides
+  const next = side + 1 === xs.length ? 0 : side + 1
   angles.count = 0
   insert(angles, 0)
   insert(angles, swing)
   // An end at the origin is the bend line itself: a cosine without a value, and no angle added.
-  const { radiusA, radiusB, offset } = side
-  const toA = way * (side.towardsA - towards)
-  const toB = way * (side.towardsB - towards)
-  const square = way * (side.normalTowards - towards)
-  insertCrossings(angles, swing, toA, circleCosine(radius, radiusA, clearance))
-  insertCrossings(angles, swing, toB, circleCosine(radius, radiusB, clearance))
+  const toA = way * ((polar.towards[side] ?? NaN) - towards)
+  const toB = way * ((polar.towards[next] ?? NaN) - towards)
+  const square = way * ((polar.normal[side] ?? NaN) - towards)
+  const offset = polar.offset[side] ?? NaN
+  insertCrossings(angles, swing, toA, circleCosine(radius, polar.radius[side] ?? NaN, clearance))
+  insertCrossings(angles, swing, toB, circleCosine(radius, polar.radius[next] ?? NaN, clearance))
   insertCrossings(angles, swing, square, (offset - clearance) / radius)
   insertCrossings(angles, swing, square, (offset + clearance) / radius)
+  const near = clearance - TOLERANCE
+  const ax = xs[side] ?? NaN
+  const ay = ys[side] ?? NaN
+  const bx = xs[next] ?? NaN
+  const by = ys[next] ?? NaN
   for (let i = 1; i < angles.count; i++) {
     const start = angles.values[i - 1] ?? 0
     const end = angles.values[i] ?? 0
     if (end <= start) continue
     const at = towards + (way * (start + end)) / 2
-    const distance = pointToSegment(radius * Math.cos(at), radius * Math.sin(at), side.a, side.b)
-    if (distance < clearance - TOLERANCE) return true
+    const found = pointSquare(radius * Math.cos(at), radius * Math.sin(at), ax, ay, bx, by)
+    if (found < near * near) return true
   }
   return false
 }
@@ -90,15 +101,27 @@ const pointsEnter = (
   skipFirst: boolean,
 ): boolean => {
   const angles: Angles = { count: 0, values: new Float64Array(MOST_ANGLES) }
-  return points.polar.points.some((point, i) => {
+  const from = points.polar
+  const to = sides.polar
+  for (let i = 0; i < points.xs.length; i++) {
+    const radius = from.radius[i] ?? NaN
+    if (radius === 0) continue
+    const towards = from.towards[i] ?? NaN
     // A point belongs to the sides before and after it: skipped where only the first side has it.
-    const onlyOnFirst = i === 0 || (i === 1 && points.sides.length === 1)
-    return sides.polar.sides.some(
-      (side, j) =>
-        !(skipFirst && j === 0 && onlyOnFirst) &&
-        arcEnters(point, swing, way, side, clearance, angles),
-    )
-  })
+    const onlyOnFirst = i === 0 || (i === 1 && points.sideCount === 1)
+    // A side nearer than the clearance is seen from the point's arc at most so far off.
+    const aside = radius > clearance ? Math.asin(clearance / radius) : Math.PI
+    const half = swing / 2 + aside + ANGLE_SLACK
+    const middle = towards + (way * swing) / 2
+    for (let j = skipFirst && onlyOnFirst ? 1 : 0; j < sides.sideCount; j++) {
+      if (radius < (to.near[j] ?? NaN) - clearance) continue
+      if (radius > (to.far[j] ?? NaN) + clearance) continue
+      const apart = Math.abs(withinHalfTurn((to.middle[j] ?? NaN) - middle))
+      if (apart > half + (to.spread[j] ?? NaN)) continue
+      if (arcEnters(radius, towards, swing, way, sides, j, clearance, angles)) return true
+    }
+  }
+  return false
 }
 
 /**

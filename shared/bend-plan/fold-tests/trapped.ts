@@ -1,6 +1,5 @@
-import { rotate } from '#shared/geometry/vector'
+import { radians } from '#shared/geometry/vector'
 import { canDrawOut } from '../collision/draw-out'
-import { sheetOutline } from '../collision/outline'
 import { NO_FIGURE } from './fold-test'
 import type { FoldTest } from './fold-test'
 
@@ -12,9 +11,7 @@ export const trapped: FoldTest = {
   find: ({ bend, brake, rear, front, tools, clearance }) => {
     if (!brake.checkRemoval) return undefined
     const folded =
-      bend.hem !== null || front.pastNose === undefined
-        ? undefined
-        : sheetOutline(front.pastNose.points.map((point) => rotate(point, Math.abs(bend.turn))))
+      bend.hem === null ? front.pastNose?.swung(radians(Math.abs(bend.turn))) : undefined
     return canDrawOut(rear.outline, folded, tools, brake.opening, clearance) ? undefined : NO_FIGURE
   },
 }

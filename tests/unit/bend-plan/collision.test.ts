@@ -8,8 +8,7 @@ import {
   sheetOutline,
   toolOutline,
 } from '#shared/bend-plan/collision/outline'
-import type { Outline } from '#shared/bend-plan/collision/outline'
-import { segmentToSegment } from '#shared/bend-plan/collision/segment-distance'
+import type { Outline, OutlineSide } from '#shared/bend-plan/collision/outline'
 import { meetsSliding } from '#shared/bend-plan/collision/slide'
 import { meetsStill } from '#shared/bend-plan/collision/still'
 import { meetsSwinging } from '#shared/bend-plan/collision/swing'
@@ -26,10 +25,29 @@ const square = (x: number, y: number, size: number): Outline =>
 const sheet = (...points: [number, number][]): Outline =>
   sheetOutline(points.map(([x, y]) => vector(x, y)))
 
+const toSide = ({ x, y }: Vector, { a, b }: OutlineSide): number => {
+  const along = { x: b.x - a.x, y: b.y - a.y }
+  const square = along.x ** 2 + along.y ** 2
+  const t = Math.max(0, Math.min(1, ((x - a.x) * along.x + (y - a.y) * along.y) / square))
+  return Math.hypot(x - a.x - t * along.x, y - a.y - t * along.y)
+}
+
+const doCross = (p: OutlineSide, q: OutlineSide): boolean => {
+  const leftOf = ({ a, b }: OutlineSide, { x, y }: Vector) =>
+    (b.x - a.x) * (y - a.y) - (b.y - a.y) * (x - a.x) > 0
+  return leftOf(p, q.a) !== leftOf(p, q.b) && leftOf(q, p.a) !== leftOf(q, p.b)
+}
+
 /** Least distance between the sides of two outlines. */
 const gapBetween = (one: Outline, other: Outline): number =>
   Math.min(
-    ...one.sides.flatMap((p) => other.sides.map((q) => segmentToSegment(p.a, p.b, q.a, q.b))),
+    ...one.sides.flatMap((p) =>
+      other.sides.map((q) =>
+        doCross(p, q)
+          ? 0
+          : Math.min(toSide(p.a, q), toSide(p.b, q), toSide(q.a, p), toSide(q.b, p)),
+      ),
+    ),
   )
 
 const STEPS = 1500
