@@ -1,6 +1,5 @@
 import { z } from 'zod'
-import { planProfile } from '#shared/bend-plan/plan-profile'
-import { planBends } from '#shared/bend-plan/planner'
+import { planProfile, planSection } from '#shared/bend-plan/plan-profile'
 import { hasErrors } from '#shared/profile/problem'
 import { profileProblems } from '#shared/profile/problems'
 import { colorSideSchema } from '#shared/profile/profile.schema'
@@ -46,7 +45,7 @@ const planOfProfile = defineVerb(
 const planOfSection = defineVerb(
   ofSection,
   ({ section, stock, brake, pieceLength, colorSide }): VerbAnswer => {
-    const plan = planBends({ section, sheet: stock, brake, pieceLength, paintedSide: colorSide })
+    const plan = planSection({ section, sheet: stock, brake, pieceLength, paintedSide: colorSide })
     return { exit: plan.feasible ? 0 : 3, output: plan }
   },
 )

@@ -19,12 +19,24 @@ const REASONS: Record<ReasonText['key'], string> = {
   throat: '{bend} puts {found} behind the clamp and the brake has room for {limit}',
   gauge: '{bend} would be gauged at {found} and the gauge stops at {limit}',
   rearMeetsTool: 'at {bend} what lies behind it meets the clamp',
+  rearMeetsToolOver:
+    'at {bend} what lies behind it meets the clamp and {overlap} less at edge {edge} would clear it',
   frontMeetsTool: 'at {bend} the part that swings up meets the brake',
+  frontMeetsToolOver:
+    'at {bend} the part that swings up meets the brake and {overlap} less at edge {edge} would clear it',
   meetsItself: 'at {bend} the piece meets itself',
+  meetsItselfOver:
+    'at {bend} the piece meets itself and {overlap} less at edge {edge} would clear it',
   apronMeetsRear: 'at {bend} the apron meets what is bent behind it',
+  apronMeetsRearOver:
+    'at {bend} the apron meets what is bent behind it and {overlap} less at edge {edge} would clear it',
   cannotLoad: 'for {bend} the piece does not go into the brake',
+  cannotLoadOver:
+    'for {bend} the piece does not go into the brake and would with {overlap} less at edge {edge}',
   trapped: 'after {bend} the piece would be trapped in the brake',
-  noOrder: 'no order of the bends works',
+  trappedOver:
+    'after {bend} the piece would be trapped in the brake and would come out with {overlap} less at edge {edge}',
+  noOrder: 'no order of single full folds works; a bender may know a two-stage way',
   limit: 'the search stopped before it was certain',
 }
 
@@ -35,7 +47,7 @@ function foldName(fold: PlanReason['bend']): string {
 
 /** Why a brake does not bend it, in the API's English. */
 export function planReasonText(reason: PlanReason): string {
-  const { key, unit } = reasonText(reason)
+  const { key, unit, overlap } = reasonText(reason)
   const print = (value: number | null): string => {
     if (value === null) return 'some'
     return unit === 'degrees' ? printAngle(value) : printSize(value, 'fraction', 64)
@@ -44,4 +56,6 @@ export function planReasonText(reason: PlanReason): string {
     .replace('{bend}', foldName(reason.bend))
     .replace('{found}', print(reason.found))
     .replace('{limit}', print(reason.limit))
+    .replace('{overlap}', print(overlap))
+    .replace('{edge}', reason.edge ?? '')
 }

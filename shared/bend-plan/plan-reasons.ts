@@ -1,97 +1,98 @@
 import { isAtMost } from '#shared/geometry/tolerance'
 import { findCapacity } from './capacity'
-import type { FailedCheck, Feasibility } from './feasibility'
-import type { FoldTest } from './fold-tests/fold-test'
-import { FOLD_TESTS } from './fold-tests/fold-tests'
-import { ORIENTATIONS } from './orientation'
-import type { PlanReason } from './plan.schema'
+import { findBlockedFold, setupOf } from './explain/blocked-fold'
+import type { BlockedFold, BlockedGround } from './explain/blocked-fold'
+import { contactOf } from './explain/contact'
+import { nearestDeadEnd } from './explain/dead-ends'
+import { frontSide, getOrientation, rearSide } from './orientation'
+import type { PlanReason, ReasonCode } from './plan.schema'
 import type { PlanRequest } from './plan-request'
-import type { PieceBend, Workpiece } from './workpiece'
+
+/** A reason that no single fold gives. */
+export const pieceReason = (
+  code: ReasonCode,
+  found: number | null = null,
+  limit: number | null = null,
+): PlanReason => ({ code, bend: null, found, limit, overlap: null, edge: null, contact: null })
 
 /** What rules the whole piece out on this brake before any fold is looked at. */
 export const pieceReasons = ({ brake, sheet, pieceLength }: PlanRequest): PlanReason[] => {
   const reasons: PlanReason[] = []
   if (!isAtMost(pieceLength, brake.length)) {
-    reasons.push({
-      code: 'length',
-      bend: null,
-      found: pieceLength,
-      limit: brake.length,
-    })
+    reasons.push(pieceReason('length', pieceLength, brake.length))
   }
   const capacity = findCapacity(brake, sheet.metal)
-  if (capacity === null) reasons.push({ code: 'metal', bend: null, found: null, limit: null })
+  if (capacity === null) reasons.push(pieceReason('metal'))
   else if (capacity !== undefined && !isAtMost(sheet.thickness, capacity)) {
-    reasons.push({
-      code: 'thickness',
-      bend: null,
-      found: sheet.thickness,
-      limit: capacity,
-    })
+    reasons.push(pieceReason('thickness', sheet.thickness, capacity))
   }
   return reasons
 }
 
-const rankOf = (failure: FailedCheck): number =>
-  FOLD_TESTS.findIndex((test) => test.check === failure.check)
-
-/** The failure that comes last in the order of the tests: the orientation that got furthest. */
-const nearestFailure = (
-  feasibility: Feasibility,
-  made: number,
-  bend: PieceBend,
-  among?: (test: FoldTest) => boolean,
-): FailedCheck | undefined => {
-  let nearest: FailedCheck | undefined
-  for (const orientation of ORIENTATIONS.keys()) {
-    const failure = feasibility.firstFailure(made, bend, orientation, among)
-    if (failure === undefined) return undefined
-    if (nearest === undefined || rankOf(failure) > rankOf(nearest)) nearest = failure
-  }
-  return nearest
+/** The edge on the side that is too short or in the way. */
+const edgeOf = ({ failure, orientation, overlap }: BlockedFold): PlanReason['edge'] => {
+  const o = getOrientation(orientation)
+  if (overlap !== null) return overlap.place === 'front' ? frontSide(o) : rearSide(o)
+  if (failure.check === 'flange') return frontSide(o)
+  return failure.check === 'clamp' ? rearSide(o) : null
 }
 
-const asReason = (bend: PieceBend, { check, found, limit }: FailedCheck): PlanReason => ({
-  code: check,
-  bend: bend.fold,
-  found,
-  limit,
-})
+const asReason = (ground: BlockedGround, fold: BlockedFold, explain: boolean): PlanReason => {
+  const { bend, failure, overlap } = fold
+  return {
+    code: failure.check,
+    bend: bend.fold,
+    found: failure.found,
+    limit: failure.limit,
+    overlap: overlap?.length ?? null,
+    edge: edgeOf(fold),
+    contact: explain ? contactOf(setupOf(ground, fold), failure.check, overlap) : null,
+  }
+}
 
 /** Bends that fail on the flat sheet in a way that no bend made before could mend: no order exists. */
-export const hopelessReasons = (piece: Workpiece, feasibility: Feasibility): PlanReason[] => {
-  return piece.bends.flatMap((bend) => {
-    const failure = nearestFailure(feasibility, 0, bend, (test) => test.neverEases)
-    return failure === undefined ? [] : [asReason(bend, failure)]
+export const hopelessReasons = (ground: BlockedGround): PlanReason[] =>
+  ground.piece.bends.flatMap((bend) => {
+    const fold = findBlockedFold(ground, 0, bend, null, (test) => test.neverEases)
+    return fold === undefined ? [] : [asReason(ground, fold, false)]
   })
-}
 
-/** Bends that cannot be made even with nothing but the hems done before them, each with its reason. */
-export const flatSheetReasons = (piece: Workpiece, feasibility: Feasibility): PlanReason[] => {
-  const hems = piece.bends.reduce(
-    (set, bend) => (bend.hem === null ? set : set | (1 << bend.index)),
-    0,
-  )
-  return piece.bends.flatMap((bend) => {
-    const onFlat = nearestFailure(feasibility, 0, bend)
-    if (onFlat === undefined || bend.hem !== null) return onFlat ? [asReason(bend, onFlat)] : []
+/**
+ * Bends that cannot be made even with nothing but the hems done before them, each with its reason.
+ * `explain` looks for overlaps and contacts too.
+ */
+export const flatSheetReasons = (ground: BlockedGround, explain: boolean): PlanReason[] => {
+  const { bends } = ground.piece
+  const overlaps = explain ? { below: Infinity } : null
+  const hems = bends.reduce((set, bend) => (bend.hem === null ? set : set | (1 << bend.index)), 0)
+  return bends.flatMap((bend) => {
+    const onFlat = findBlockedFold(ground, 0, bend, overlaps)
     // Where hems go first, a plain bend's flat sheet has its hems.
-    const onHems = hems === 0 ? onFlat : nearestFailure(feasibility, hems, bend)
-    return onHems === undefined ? [] : [asReason(bend, onHems)]
+    const fold =
+      onFlat === undefined || bend.hem !== null || hems === 0
+        ? onFlat
+        : findBlockedFold(ground, hems, bend, overlaps)
+    return fold === undefined ? [] : [asReason(ground, fold, explain)]
   })
 }
 
-/** No order works: the blocked last bends of the dead end nearest to the flat sheet, each with its reason. */
-export const deadEndReasons = (
-  piece: Workpiece,
-  feasibility: Feasibility,
-  deadEnd: number,
-): PlanReason[] => [
-  { code: 'noOrder', bend: null, found: null, limit: null },
-  ...piece.bends.flatMap((bend) => {
+/** The last bends that a dead end does not allow. */
+const blockedLastBends = (ground: BlockedGround, deadEnd: number): BlockedFold[] =>
+  ground.piece.bends.flatMap((bend) => {
     const bit = 1 << bend.index
     if ((deadEnd & bit) === 0) return []
-    const failure = nearestFailure(feasibility, deadEnd & ~bit, bend)
-    return failure === undefined ? [] : [asReason(bend, failure)]
-  }),
-]
+    return findBlockedFold(ground, deadEnd & ~bit, bend, null) ?? []
+  })
+
+/**
+ * No order works: the blocked folds of a dead end, each with its reason. With `explain` of the dead end
+ * that comes nearest to bending, least overlap first; else of the one that the search came upon.
+ */
+export const deadEndReasons = (
+  ground: BlockedGround,
+  deadEnd: number,
+  explain: boolean,
+): PlanReason[] => {
+  const folds = explain ? nearestDeadEnd(ground) : blockedLastBends(ground, deadEnd)
+  return [pieceReason('noOrder'), ...folds.map((fold) => asReason(ground, fold, explain))]
+}

@@ -10,6 +10,8 @@ export interface PlanRequest {
   readonly brake: Brake
   readonly pieceLength: Inches
   readonly paintedSide: ColorSide
+  /** Overlaps and contacts in the reasons of a piece that cannot be bent; not unless asked for. */
+  readonly explain?: boolean
   readonly limits?: {
     /** Folds tested, in the worst case, before the planner answers with the best so far. */
     readonly nodes?: number

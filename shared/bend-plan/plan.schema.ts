@@ -1,5 +1,7 @@
 import { z } from 'zod'
 import { foldSchema } from '#shared/strip/strip.schema'
+import { contactSchema } from './explain/contact.schema'
+import { cureEditSchema } from './explain/cure-edit.schema'
 
 /** The tests of one fold, in the order in which they are made. */
 export const PLAN_CHECKS = [
@@ -73,21 +75,42 @@ export const planReasonSchema = z.strictObject({
   /** What was found and the limit it breaks, in the unit of the check (inches or degrees). */
   found: z.number().nullable(),
   limit: z.number().nullable(),
+  /**
+   * Inches to cut off the outer end of the chain that is in the way, at `edge`, so that this test
+   * passes (later ones may not); as found. Null where less would not help or was not looked for.
+   */
+  overlap: z.number().positive().nullable(),
+  /** The edge on the side that is in the way or too short; null where no side is. */
+  edge: z.enum(['A', 'B']).nullable(),
+  /** The picture at first contact; null for a check that is not about contact. */
+  contact: contactSchema.nullable(),
 })
 
-/** A change that was planned again and bends; offered, never applied by itself. */
+/**
+ * A single change after which the piece was planned again and bends; offered, never applied by itself.
+ *
+ * `value` is the new length of the leg or hem (of a section, its planning length), the new signed turn,
+ * the gap of an opened hem, or the length of the pieces; null where the code says it all.
+ */
 export const planCureSchema = z.strictObject({
   code: z.enum([
     'lengthenLeg',
     'shortenLeg',
     'openAngle',
     'changeHem',
+    'openHem',
+    'closeHem',
     'dropHem',
     'shortenPiece',
     'anotherBrake',
   ]),
+  /** The fold concerned; null where a leg or the whole piece is. */
   bend: foldSchema.nullable(),
+  /** The leg concerned, from 1 at edge A. */
+  leg: z.int().positive().nullable(),
   value: z.number().nullable(),
+  /** For `applyEdit` on the profile that was planned; null where no edit of a profile does it. */
+  edit: cureEditSchema.nullable(),
 })
 
 /** Centre-line legs to sharp corners and signed turns, as the planner sees the piece. */

@@ -1,50 +1,35 @@
-import { createFeasibility } from './feasibility'
 import { firstOfEquals } from './first-of-equals'
-import { foldGroundOf } from './fold-setup'
 import { FOLD_TESTS } from './fold-tests/fold-tests'
-import { createLowerBound } from './lower-bound'
-import { operationCost } from './operation-cost'
 import { orientOrder } from './orient-order'
 import { unpackCost } from './packed-cost'
 import type { Plan, PlanReason } from './plan.schema'
-import { deadEndReasons, flatSheetReasons, hopelessReasons, pieceReasons } from './plan-reasons'
+import {
+  deadEndReasons,
+  flatSheetReasons,
+  hopelessReasons,
+  pieceReason,
+  pieceReasons,
+} from './plan-reasons'
 import type { PlanRequest } from './plan-request'
 import { planSteps } from './plan-steps'
-import type { SearchGround } from './search-ground'
+import { searchGroundOf } from './search-ground-of'
 import { searchSequence } from './sequence-search'
 import { searchSets } from './set-search'
 import { secondsOf } from './step-seconds'
 
 export type { PlanRequest } from './plan-request'
 
-/** Enough for panels of twenty bends; a search that reaches it answers with the best so far. */
-const DEFAULT_NODES = 100_000
-
-const searchGround = (request: PlanRequest): SearchGround => {
-  const { section, sheet, brake, pieceLength, limits } = request
-  const ground = foldGroundOf(section, sheet, brake)
-  const cost = operationCost(ground, pieceLength)
-  return {
-    ...ground,
-    cost,
-    feasibility: createFeasibility(ground),
-    lowerBound: createLowerBound(ground, cost),
-    nodes: limits?.nodes ?? DEFAULT_NODES,
-    isOver: limits?.isOver ?? (() => false),
-  }
-}
-
 /**
  * The cheapest order and orientation in which the section bends on the brake, or the reasons why
  * there is none. Exact under the tests named in `checks`: `proven` says that no cheaper sequence (or,
  * if infeasible, no sequence at all) exists. At the limit on nodes the best so far comes back with
  * `proven: false` and the lower bound; with none found, `feasible: false` and the reason `limit`.
- * The same request gives the same answer to the byte.
+ * The same request gives the same answer to the byte. Cures are for `planProfile` and `planSection`.
  *
  * Throws RangeError where turns and legs of the section do not match or there are too many bends.
  */
 export const planBends = (request: PlanRequest): Plan => {
-  const { section } = request
+  const { section, explain = false } = request
   const checks = FOLD_TESTS.map((test) => test.check)
   const infeasible = (reasons: PlanReason[]): Plan => ({
     feasible: false,
@@ -59,27 +44,19 @@ export const planBends = (request: PlanRequest): Plan => {
     checks,
   })
 
-  const ground = searchGround(request)
+  const ground = searchGroundOf(request)
   const whole = pieceReasons(request)
   if (whole.length > 0) return infeasible(whole)
-  const hopeless = hopelessReasons(ground.piece, ground.feasibility)
+  const hopeless = hopelessReasons(ground)
   if (hopeless.length > 0) return infeasible(hopeless)
 
   const sets = searchSets(ground)
   if (sets.outcome === 'none') {
-    const flat = flatSheetReasons(ground.piece, ground.feasibility)
-    return infeasible(
-      flat.length > 0 ? flat : deadEndReasons(ground.piece, ground.feasibility, sets.deadEnd),
-    )
+    const flat = flatSheetReasons(ground, explain)
+    return infeasible(flat.length > 0 ? flat : deadEndReasons(ground, sets.deadEnd, explain))
   }
   if (sets.outcome === 'limit') {
-    const limit: PlanReason = {
-      code: 'limit',
-      bend: null,
-      found: null,
-      limit: ground.nodes,
-    }
-    return { ...infeasible([limit]), proven: false }
+    return { ...infeasible([pieceReason('limit', null, ground.nodes)]), proven: false }
   }
 
   const known = orientOrder(ground, sets.order)

@@ -17,7 +17,7 @@ export function usePlanWords() {
   const inches = (value: number) => printSize(value, units, 32)
 
   function reason(given: PlanReason): string {
-    const { key, unit } = reasonText(given)
+    const { key, unit, overlap } = reasonText(given)
     const print = (value: number | null) =>
       value === null || unit === null
         ? ''
@@ -28,6 +28,8 @@ export function usePlanWords() {
       bend: given.bend === null ? '' : fold(given.bend),
       found: print(given.found),
       limit: print(given.limit),
+      overlap: overlap === null ? '' : inches(overlap),
+      edge: given.edge ?? '',
     })
   }
 
@@ -37,9 +39,10 @@ export function usePlanWords() {
 
   const reasons = ({ reasons: given }: Plan): string[] => given.map(reason)
 
-  const cure = ({ code, bend, value }: PlanCure): string =>
+  const cure = ({ code, bend, leg, value }: PlanCure): string =>
     t(`cure.${code}`, {
-      bend: bend === null ? '' : code.endsWith('Leg') ? bend : fold(bend),
+      bend: bend === null ? '' : fold(bend),
+      leg: leg ?? '',
       value:
         value === null
           ? ''

@@ -35,6 +35,8 @@ describe('capacity', () => {
   })
 })
 
+const bare = { overlap: null, edge: null, contact: null }
+
 describe('reasons', () => {
   const plain = section([3, 3], [90])
 
@@ -43,15 +45,15 @@ describe('reasons', () => {
     const plan = planBends(request(plain, upOnly, { sheet, pieceLength: 130 }))
     expect(plan).toMatchObject({ feasible: false, proven: true, cost: null, steps: [] })
     expect(plan.reasons).toEqual([
-      { code: 'length', bend: null, found: 130, limit: 126 },
-      { code: 'thickness', bend: null, found: 0.06, limit: 0.04 },
+      { code: 'length', bend: null, found: 130, limit: 126, ...bare },
+      { code: 'thickness', bend: null, found: 0.06, limit: 0.04, ...bare },
     ])
   })
 
   test('a metal the brake does not bend', () => {
     const sheet = { ...STEEL_24, metal: 'stainless' as const }
     const { reasons } = planBends(request(plain, site, { sheet }))
-    expect(reasons).toEqual([{ code: 'metal', bend: null, found: null, limit: null }])
+    expect(reasons).toEqual([{ code: 'metal', bend: null, found: null, limit: null, ...bare }])
   })
 
   test('limits are inclusive', () => {
@@ -61,23 +63,29 @@ describe('reasons', () => {
 
   test('a bend beyond the largest fold, springback included', () => {
     const { reasons } = planBends(request(section([3, 3], [138]), upOnly))
-    expect(reasons).toEqual([{ code: 'angle', bend: 1, found: 138 * (1 + 2 / 90), limit: 140 }])
+    expect(reasons).toEqual([
+      { code: 'angle', bend: 1, found: 138 * (1 + 2 / 90), limit: 140, ...bare },
+    ])
   })
 
   test('a flange too short on either side', () => {
     const { reasons } = planBends(request(section([0.25, 3, 0.25], [90, 90]), upOnly))
     // Turned about, the short flange would have to be clamped: that orientation got further.
-    expect(reasons.map(({ code, bend, found, limit }) => [code, bend, found, limit])).toEqual([
-      ['clamp', 1, 0.25, 0.5],
-      ['clamp', 2, 0.25, 0.5],
+    expect(
+      reasons.map(({ code, bend, found, limit, edge }) => [code, bend, found, limit, edge]),
+    ).toEqual([
+      ['clamp', 1, 0.25, 0.5, 'A'],
+      ['clamp', 2, 0.25, 0.5, 'B'],
     ])
   })
 
   test('a hem lip outside the hems of the brake', () => {
     const short = planBends(request(section([3], [], { A: hem(1, 0.25) }), upOnly))
-    expect(short.reasons).toEqual([{ code: 'angle', bend: 'hemA', found: 0.25, limit: 0.375 }])
+    expect(short.reasons).toEqual([
+      { code: 'angle', bend: 'hemA', found: 0.25, limit: 0.375, ...bare },
+    ])
     const long = planBends(request(section([3], [], { B: hem(1, 1.25) }), upOnly))
-    expect(long.reasons).toEqual([{ code: 'angle', bend: 'hemB', found: 1.25, limit: 1 }])
+    expect(long.reasons).toEqual([{ code: 'angle', bend: 'hemB', found: 1.25, limit: 1, ...bare }])
   })
 
   test('no order: each bend alone can be made, the last one never', () => {
@@ -86,7 +94,13 @@ describe('reasons', () => {
     const plan = planBends(request(section([3, 0.3, 3], [90, 90]), upOnly))
     expect(plan.feasible).toBe(false)
     expect(plan.proven).toBe(true)
-    expect(plan.reasons[0]).toEqual({ code: 'noOrder', bend: null, found: null, limit: null })
+    expect(plan.reasons[0]).toEqual({
+      code: 'noOrder',
+      bend: null,
+      found: null,
+      limit: null,
+      ...bare,
+    })
     expect(plan.reasons.slice(1).map(({ bend }) => bend)).toEqual([1, 2])
   })
 })

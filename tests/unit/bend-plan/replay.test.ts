@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest'
 import { DEMO_BRAKE } from '#shared/bend-plan/demo-brakes'
 import type { Plan } from '#shared/bend-plan/plan.schema'
+import { pieceReason } from '#shared/bend-plan/plan-reasons'
 import { planBends } from '#shared/bend-plan/planner'
 import { replayPlan } from '#shared/bend-plan/replay'
 import { hem, request, section } from '../../support/bend-plan-cases'
@@ -44,7 +45,7 @@ describe('replay', () => {
     const { problems } = replayPlan(plan, { ...asked, pieceLength: 200 })
     expect(problems).toContainEqual({
       code: 'piece',
-      reason: { code: 'length', bend: null, found: 200, limit: 126 },
+      reason: pieceReason('length', 200, 126),
     })
   })
 })
