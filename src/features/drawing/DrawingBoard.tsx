@@ -7,11 +7,13 @@ import { BoardCanvas } from './canvas/BoardCanvas'
 import { partsOfProblem } from './check/check-drawing'
 import { useFigureColors, useFigureLabels } from './figure/useFigureLook'
 import { shownDocument, type Board, type BoardEvent } from './model/board'
+import { editProfile } from './model/board-document'
 import { AnswerBar } from './panels/AnswerBar'
 import { LegTable } from './panels/LegTable'
 import { PartPanel } from './panels/PartPanel'
 import { StripPanel } from './panels/StripPanel'
 import { Toolbar } from './panels/Toolbar'
+import { BrakeAnswers } from './plan/BrakeAnswers'
 import { useAnswer } from './usePlans'
 
 interface Props {
@@ -39,7 +41,8 @@ export function DrawingBoard({
   finish,
 }: Props) {
   const [snapping, setSnapping] = useState(true)
-  const [tabled, setTabled] = useState(false)
+  const [view, setView] = useState<'part' | 'table' | 'brakes'>('part')
+  const tabled = view === 'table'
   const colors = useFigureColors(stock.painted ? stock.colorHex : null)
   const labels = useFigureLabels()
   const { profile } = shownDocument(board)
@@ -84,23 +87,48 @@ export function DrawingBoard({
           snapping={snapping}
           setSnapping={setSnapping}
           tabled={tabled}
-          setTabled={setTabled}
+          setTabled={(on) => setView(on ? 'table' : 'part')}
         />
-        <AnswerBar check={check} plans={plans} pieceLength={pieceLength} confirmed={confirmed} />
+        <AnswerBar
+          check={check}
+          plans={plans}
+          pieceLength={pieceLength}
+          confirmed={confirmed}
+          brakesOpen={view === 'brakes'}
+          onBrakes={() => setView(view === 'brakes' ? 'part' : 'brakes')}
+        />
       </div>
       <aside className="max-h-[46dvh] shrink-0 overflow-y-auto border-t border-rule bg-sheet px-(--gutter) pb-3 lg:max-h-none lg:w-104 lg:overflow-y-auto lg:border-t-0 lg:border-l">
-        <div className={tabled ? 'hidden lg:block' : ''}>
-          <PartPanel
-            board={board}
-            dispatch={dispatch}
-            check={check}
-            pitchRise={pitchRise}
-            finish={finish}
+        {view === 'brakes' && profile ? (
+          <BrakeAnswers
+            plans={plans}
+            brakes={brakes}
+            profile={profile}
+            stock={stock}
+            pieceLength={pieceLength}
+            confirmed={confirmed}
+            onCure={({ edit }) => {
+              if (edit)
+                dispatch({ type: 'change', document: editProfile(board.history.present, edit) })
+            }}
+            onClose={() => setView('part')}
           />
-        </div>
-        <div className={tabled ? 'pt-3' : 'hidden pt-4 lg:block'}>
-          <LegTable board={board} dispatch={dispatch} />
-        </div>
+        ) : (
+          <>
+            <div className={tabled ? 'hidden lg:block' : ''}>
+              <PartPanel
+                board={board}
+                dispatch={dispatch}
+                check={check}
+                pitchRise={pitchRise}
+                finish={finish}
+              />
+            </div>
+            <div className={tabled ? 'pt-3' : 'hidden pt-4 lg:block'}>
+              <LegTable board={board} dispatch={dispatch} />
+            </div>
+          </>
+        )}
       </aside>
     </div>
   )

@@ -15,6 +15,9 @@ import {
 /** How long a drawing rests before the server is asked to confirm it, milliseconds. */
 const REST = 600
 
+/** No explanations, and a search that ends early: the answer of a moment, worked out in a frame. */
+const WHILE_DRAGGING = { explain: false, nodes: 4000 } as const
+
 export interface Answer {
   readonly check: DrawingCheck | null
   readonly plans: readonly CheckedPlan[]
@@ -39,7 +42,8 @@ export function useAnswer(
   const makeable = check?.strip ? profile : null
   const deferred = useDeferredValue(makeable)
   const own = useMemo(
-    () => (deferred === null ? [] : planOnBrakes(deferred, stock, pieceLength, brakes)),
+    () =>
+      deferred === null ? [] : planOnBrakes(deferred, stock, pieceLength, brakes, WHILE_DRAGGING),
     [deferred, stock, pieceLength, brakes],
   )
 
@@ -52,7 +56,13 @@ export function useAnswer(
   })
   const confirmed =
     rested !== null && rested === makeable && server.isSuccess && !server.isPlaceholderData
-  const plans = makeable === null ? [] : confirmed ? server.data.brakes : own
+  // Without signal the reasons and cures are worked out here, once the drawing rests.
+  const alone = server.isError && rested === makeable ? rested : null
+  const explained = useMemo(
+    () => (alone === null ? null : planOnBrakes(alone, stock, pieceLength, brakes)),
+    [alone, stock, pieceLength, brakes],
+  )
+  const plans = makeable === null ? [] : confirmed ? server.data.brakes : (explained ?? own)
   return { check, plans, confirmed }
 }
 

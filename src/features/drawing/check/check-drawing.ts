@@ -1,5 +1,5 @@
 import type { Plan } from '#shared/bend-plan/plan.schema'
-import { planProfile } from '#shared/bend-plan/plan-profile'
+import { planProfile, type PlanOptions } from '#shared/bend-plan/plan-profile'
 import type { ShopBrake } from '#shared/brakes/brakes.contract'
 import { hasErrors, type ProfileProblem } from '#shared/profile/problem'
 import type { Part } from '#shared/drawing/display-list'
@@ -38,11 +38,12 @@ export const planOnBrakes = (
   stock: Stock,
   pieceLength: Inches,
   brakes: readonly ShopBrake[],
+  options: PlanOptions = {},
 ): CheckedPlan[] =>
   brakes.map(({ id, brake }) => ({
     brakeId: id,
     brakeName: brake.name,
-    plan: planProfile(profile, stock.sheet, brake, pieceLength),
+    plan: planProfile(profile, stock.sheet, brake, pieceLength, options),
   }))
 
 /** The parts of the figure that a problem speaks of. */

@@ -12,10 +12,13 @@ interface Props {
   readonly pieceLength: Inches
   /** Whether the server has said the same: figures are worked out here first. */
   readonly confirmed: boolean
+  /** Whether what each brake says is open beside the drawing. */
+  readonly brakesOpen: boolean
+  readonly onBrakes: () => void
 }
 
 /** The live figures under a drawing: what it takes, what it weighs, and where it bends. */
-export function AnswerBar({ check, plans, pieceLength, confirmed }: Props) {
+export function AnswerBar({ check, plans, pieceLength, confirmed, brakesOpen, onBrakes }: Props) {
   const { t } = useTranslation('drawing')
   const { units } = usePerson()
   const strip = check?.strip ?? null
@@ -45,7 +48,21 @@ export function AnswerBar({ check, plans, pieceLength, confirmed }: Props) {
           </div>
         ))}
       </dl>
-      <BendsOn check={check} plans={plans} />
+      <div className="flex items-center border-t border-rule">
+        <div className="min-w-0 flex-1">
+          <BendsOn check={check} plans={plans} />
+        </div>
+        {plans.length > 0 && (
+          <button
+            type="button"
+            aria-expanded={brakesOpen}
+            onClick={onBrakes}
+            className="min-h-target shrink-0 px-3 text-dye underline hover:bg-ink/5"
+          >
+            {t(plans.some(({ plan }) => plan.feasible) ? 'why:open' : 'why:openWhy')}
+          </button>
+        )}
+      </div>
     </section>
   )
 }

@@ -60,10 +60,7 @@ const TONES = { good: 'text-oxide', bad: 'text-chalk', plain: 'text-scribe' } as
 
 function Line({ tone, children }: { tone: keyof typeof TONES; children: React.ReactNode }) {
   return (
-    <div
-      role="status"
-      className={`flex items-start gap-2 border-t border-rule px-3 py-1.5 ${TONES[tone]}`}
-    >
+    <div role="status" className={`flex items-start gap-2 px-3 py-1.5 ${TONES[tone]}`}>
       {tone !== 'plain' && (
         <Icon name={tone === 'good' ? 'done' : 'warn'} className="mt-0.5 size-5" />
       )}
