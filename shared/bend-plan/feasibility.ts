@@ -4,6 +4,7 @@ import { foldSetup } from './fold-setup'
 import type { FoldGround } from './fold-setup'
 import type { FoldFailure, FoldTest } from './fold-tests/fold-test'
 import { FOLD_TESTS } from './fold-tests/fold-tests'
+import { isEverOpen } from './open-orientation'
 import { ORIENTATIONS, directionOf, frontSide, getOrientation, rearSide } from './orientation'
 import type { PlanCheck } from './plan.schema'
 import { hasSameToolsBothWays } from './tool-sets'
@@ -16,6 +17,8 @@ export interface FailedCheck extends FoldFailure {
 export interface Feasibility {
   /** May this fold be made, all tests taken together? Remembers what it has been asked. */
   readonly passes: (made: number, bend: PieceBend, orientation: number) => boolean
+  /** False where no bends made before could let the fold pass in this orientation. */
+  readonly isEverOpen: (bend: PieceBend, orientation: number) => boolean
   /** The orientations, by number, that can give different answers for a bend; none where none passes. */
   readonly orientationsToTry: (bend: PieceBend) => readonly number[]
   /** The first test, in their order, that this fold fails; of all tests or of those named. */
@@ -36,7 +39,7 @@ interface Group {
 
 /** One bend in one orientation. */
 interface Slot {
-  /** What does not depend on the bends made. */
+  /** False where no bends made before could let it pass. */
   readonly isOpen: boolean
   readonly groups: readonly Group[]
   /** Slots with equal answers carry equal numbers. */
@@ -56,10 +59,10 @@ export const createFeasibility = (
   const sharesTools = hasSameToolsBothWays(brake)
   const testsOf = (sees: FoldTest['sees']) => tests.filter((test) => test.sees === sees)
   const testsByPart = {
-    bend: testsOf('bend'),
     hems: testsOf('hems'),
     front: testsOf('front'),
     rear: testsOf('rear'),
+    piece: testsOf('piece'),
     all: testsOf('all'),
   }
 
@@ -77,27 +80,33 @@ export const createFeasibility = (
     return group(of, bits, (made) => (made >>> shift) & mask)
   }
 
-  const groupsOf = (bend: PieceBend, orientation: number): readonly Group[] => {
+  const wholeGroup = (of: readonly FoldTest[]) => group(of, count, (made) => made)
+
+  const groupsOf = (
+    bend: PieceBend,
+    orientation: number,
+    inEvery: readonly Group[],
+  ): readonly Group[] => {
     const o = getOrientation(orientation)
     return [
       // Hems are the outermost bends.
       ...group(testsByPart.hems, 2, (made) => (made & 1) + 2 * ((made >>> (count - 1)) & 1)),
       ...sideGroup(testsByPart.front, bend, frontSide(o)),
       ...sideGroup(testsByPart.rear, bend, rearSide(o)),
-      ...group(testsByPart.all, count, (made) => made),
+      ...inEvery,
+      ...wholeGroup(testsByPart.all),
     ]
   }
 
   const slots: Slot[][] = piece.bends.map((bend) => {
     const shared = new Map<number, readonly Group[]>()
+    const inEvery = wholeGroup(testsByPart.piece)
     return ORIENTATIONS.map((o, orientation) => {
-      const setup = foldSetup(ground, 0, bend, o)
       const way = sharesTools || directionOf(bend, o) === 'up' ? 0 : 1
       const answersLike = way * 2 + (o.aBack ? 1 : 0)
-      const groups = shared.get(answersLike) ?? groupsOf(bend, orientation)
+      const groups = shared.get(answersLike) ?? groupsOf(bend, orientation, inEvery)
       shared.set(answersLike, groups)
-      const isOpen = testsByPart.bend.every((test) => test.find(setup) === undefined)
-      return { isOpen, groups, answersLike }
+      return { isOpen: isEverOpen(ground, bend, o, tests), groups, answersLike }
     })
   })
 
@@ -141,6 +150,7 @@ export const createFeasibility = (
 
   return {
     passes,
+    isEverOpen: (bend, orientation) => slots[bend.index]?.[orientation]?.isOpen ?? false,
     orientationsToTry: (bend) => tries[bend.index] ?? [],
     firstFailure,
   }

@@ -61,36 +61,49 @@ export const foldGroundOf = (section: Section, sheet: Sheet, brake: Brake): Fold
 export const swingOf = (bend: PieceBend, sheet: Sheet, brake: Brake): Degrees =>
   bend.hem === null ? Math.abs(bend.turn) * (1 + sheet.springbackPer90 / 90) : brake.hemAngle
 
-/** A side's shape is built when a test first looks at it: many tests do not. */
+/** Sides and tools are looked up when a test first asks: many tests do not. */
+class LazyFoldSetup implements FoldSetup {
+  readonly piece: Workpiece
+  readonly brake: Brake
+  readonly clearance: Inches
+  readonly direction: Direction
+  readonly swing: Degrees
+  private madeFront: SideShape | undefined
+  private madeRear: SideShape | undefined
+
+  constructor(
+    private readonly ground: FoldGround,
+    readonly made: number,
+    readonly bend: PieceBend,
+    readonly orientation: Orientation,
+  ) {
+    this.piece = ground.piece
+    this.brake = ground.brake
+    this.clearance = ground.clearance
+    this.direction = directionOf(bend, orientation)
+    this.swing = swingOf(bend, ground.sheet, ground.brake)
+  }
+
+  get tools(): OpenTools {
+    const tools = this.ground.openTools[this.direction]
+    if (tools === null) throw new RangeError(`${this.brake.name} does not fold ${this.direction}.`)
+    return tools
+  }
+
+  get front(): SideShape {
+    const { ground, bend, orientation, made } = this
+    return (this.madeFront ??= ground.sideShapes(bend, frontSide(orientation), made, 'front'))
+  }
+
+  get rear(): SideShape {
+    const { ground, bend, orientation, made } = this
+    return (this.madeRear ??= ground.sideShapes(bend, rearSide(orientation), made, 'rear'))
+  }
+}
+
 export const foldSetup = (
   ground: FoldGround,
   made: number,
   bend: PieceBend,
   orientation: Orientation,
-): FoldSetup => {
-  const { piece, sheet, brake, clearance } = ground
-  const direction = directionOf(bend, orientation)
-  let front: SideShape | undefined
-  let rear: SideShape | undefined
-  return {
-    piece,
-    brake,
-    clearance,
-    made,
-    bend,
-    orientation,
-    direction,
-    swing: swingOf(bend, sheet, brake),
-    get tools() {
-      const tools = ground.openTools[direction]
-      if (tools === null) throw new RangeError(`${brake.name} does not fold ${direction}.`)
-      return tools
-    },
-    get front() {
-      return (front ??= ground.sideShapes(bend, frontSide(orientation), made, 'front'))
-    },
-    get rear() {
-      return (rear ??= ground.sideShapes(bend, rearSide(orientation), made, 'rear'))
-    },
-  }
-}
+): FoldSetup => new LazyFoldSetup(ground, made, bend, orientation)

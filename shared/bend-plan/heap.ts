@@ -5,54 +5,64 @@ export interface Heap {
   readonly leastKey: () => number | undefined
 }
 
-export const createHeap = (): Heap => {
-  const entries: number[] = []
-  const keys: number[] = []
+const FIRST_ROOM = 256
 
-  const isBefore = (a: number, b: number): boolean => {
-    const difference = (keys[a] ?? Infinity) - (keys[b] ?? Infinity)
-    return difference === 0 ? (entries[a] ?? Infinity) < (entries[b] ?? Infinity) : difference < 0
+export const createHeap = (): Heap => {
+  let entries = new Int32Array(FIRST_ROOM)
+  let keys = new Float64Array(FIRST_ROOM)
+  let count = 0
+
+  const grow = () => {
+    const [moreEntries, moreKeys] = [new Int32Array(2 * count), new Float64Array(2 * count)]
+    moreEntries.set(entries)
+    moreKeys.set(keys)
+    entries = moreEntries
+    keys = moreKeys
   }
-  const swap = (a: number, b: number) => {
-    const [entryA, entryB, keyA, keyB] = [entries[a], entries[b], keys[a], keys[b]]
-    if (entryA === undefined || entryB === undefined || keyA === undefined || keyB === undefined) {
-      throw new RangeError('Heap places out of range.')
-    }
-    entries[a] = entryB
-    entries[b] = entryA
-    keys[a] = keyB
-    keys[b] = keyA
+  const isBefore = (entry: number, key: number, place: number): boolean => {
+    const other = keys[place] ?? Infinity
+    return key < other || (key === other && entry < (entries[place] ?? Infinity))
+  }
+  const put = (place: number, entry: number, key: number) => {
+    entries[place] = entry
+    keys[place] = key
+  }
+  const move = (from: number, to: number) => {
+    put(to, entries[from] ?? NaN, keys[from] ?? NaN)
   }
 
   return {
     push: (entry, key) => {
-      let at = entries.length
-      entries.push(entry)
-      keys.push(key)
+      if (count === entries.length) grow()
+      let at = count++
       while (at > 0) {
         const parent = (at - 1) >> 1
-        if (!isBefore(at, parent)) break
-        swap(at, parent)
+        if (!isBefore(entry, key, parent)) break
+        move(parent, at)
         at = parent
       }
+      put(at, entry, key)
     },
     pop: () => {
+      if (count === 0) return undefined
       const top = entries[0]
-      if (top === undefined) return undefined
-      const last = entries.length - 1
-      if (last > 0) swap(0, last)
-      entries.pop()
-      keys.pop()
-      for (let at = 0; ;) {
-        let least = at
-        for (const child of [2 * at + 1, 2 * at + 2]) {
-          if (child < entries.length && isBefore(child, least)) least = child
-        }
-        if (least === at) return top
-        swap(at, least)
+      count--
+      const entry = entries[count] ?? NaN
+      const key = keys[count] ?? NaN
+      let at = 0
+      for (let child = 1; child < count; child = 2 * at + 1) {
+        const other = child + 1
+        const least =
+          other < count && isBefore(entries[other] ?? NaN, keys[other] ?? NaN, child)
+            ? other
+            : child
+        if (isBefore(entry, key, least)) break
+        move(least, at)
         at = least
       }
+      put(at, entry, key)
+      return top
     },
-    leastKey: () => keys[0],
+    leastKey: () => (count === 0 ? undefined : keys[0]),
   }
 }

@@ -62,26 +62,25 @@ export const operationCost = (ground: FoldGround, pieceLength: Inches): Operatio
     if (front <= rear + WIDER) return 0
     return front > brake.bigFront + TOLERANCE ? WIDE_FRONT + handling(table.bigFront) : WIDE_FRONT
   }
-  const moves = ORIENTATIONS.map((from) =>
-    ORIENTATIONS.map((to) => handling(table.moves[moveBetween(from, to)])),
+  const moves = Float64Array.from(
+    ORIENTATIONS.flatMap((from) =>
+      ORIENTATIONS.map((to) => handling(table.moves[moveBetween(from, to)])),
+    ),
   )
-  const fixed = piece.bends.map((bend) => ORIENTATIONS.map((o) => fixedOf(bend, o)))
-  const behind = piece.bends.map((bend) =>
-    ORIENTATIONS.map((o) => bendsBeside(piece, bend, rearSide(o))),
+  const fixed = Float64Array.from(
+    piece.bends.flatMap((bend) => ORIENTATIONS.map((o) => fixedOf(bend, o))),
+  )
+  const behind = Int32Array.from(
+    piece.bends.flatMap((bend) => ORIENTATIONS.map((o) => bendsBeside(piece, bend, rearSide(o)))),
   )
   const closedHems = closedHemsOf(piece)
-  const get = (rows: readonly (readonly number[])[], row: number, column: number): number => {
-    const value = rows[row]?.[column]
-    if (value === undefined) throw new RangeError(`No cost at ${row}, ${column}.`)
-    return value
-  }
+  const isGauged = brake.gauge !== null
   return {
-    move: (from, to) => get(moves, from, to),
-    fixed: (bend, orientation) => get(fixed, bend.index, orientation),
-    gauge: (made, bend, orientation) => {
-      if (brake.gauge === null) return 0
-      const bent = made & get(behind, bend.index, orientation)
-      return isFormedFace(bent, closedHems) ? FACE_GAUGE : 0
-    },
+    move: (from, to) => moves[from * 4 + to] ?? NaN,
+    fixed: (bend, orientation) => fixed[bend.index * 4 + orientation] ?? NaN,
+    gauge: (made, bend, orientation) =>
+      isGauged && isFormedFace(made & (behind[bend.index * 4 + orientation] ?? NaN), closedHems)
+        ? FACE_GAUGE
+        : 0,
   }
 }

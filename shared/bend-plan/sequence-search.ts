@@ -2,10 +2,10 @@ import { bitCount } from './bit-count'
 import { createHeap } from './heap'
 import { createNumberTable } from './number-table'
 import type { Sequence } from './orient-order'
-import { ORIENTATIONS, isOrientationOpen } from './orientation'
+import { ORIENTATIONS } from './orientation'
+import { createSearchEntries } from './search-entries'
 import type { Operation, SearchGround } from './search-ground'
 import { allBends } from './workpiece'
-import type { PieceBend } from './workpiece'
 
 export interface SequenceSearch {
   readonly best: Sequence
@@ -37,24 +37,23 @@ const DEPTH = 32
  * equals can be made. `known` is a sequence found before: nothing dearer is looked at.
  */
 export const searchSequence = (ground: SearchGround, known: Sequence): SequenceSearch => {
-  const { piece, brake, feasibility, cost, lowerBound, nodes, isOver } = ground
+  const { piece, feasibility, cost, lowerBound, nodes, isOver } = ground
   const full = allBends(piece)
   const queue = createHeap()
-  const entries: {
-    made: number
-    orientation: number
-    bend: PieceBend
-    g: number
-    next: number
-  }[] = []
+  const entries = createSearchEntries()
   /** The entry that closed a state. */
   const closed = createNumberTable(4 * (full + 1))
   const stateOf = (made: number, orientation: number) => made * 4 + orientation
   const open = piece.bends.map((bend) =>
-    ORIENTATIONS.flatMap((o, number) => (isOrientationOpen(bend, o, brake) ? [number] : [])),
+    [...ORIENTATIONS.keys()].filter((orientation) => feasibility.isEverOpen(bend, orientation)),
   )
 
-  const expand = (made: number, from: { orientation: number; g: number; entry: number } | null) => {
+  /** `after` is the orientation of the fold made next, and what it costs from there; null at the end. */
+  const expand = (
+    made: number,
+    next: number,
+    after: { readonly orientation: number; readonly cost: number } | null,
+  ) => {
     for (const bend of piece.bends) {
       const bit = 1 << bend.index
       if ((made & bit) === 0) continue
@@ -62,53 +61,57 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
       for (const orientation of open[bend.index] ?? []) {
         if (closed.find(stateOf(rest, orientation)) !== undefined) continue
         const g =
-          (from === null ? 0 : from.g + cost.move(orientation, from.orientation)) +
+          (after === null ? 0 : after.cost + cost.move(orientation, after.orientation)) +
           cost.fixed(bend, orientation) +
           cost.gauge(rest, bend, orientation)
         const f = g + lowerBound(rest, orientation)
         if (f > known.cost) continue
-        const next = from === null ? -1 : from.entry
-        entries.push({ made: rest, orientation, bend, g, next })
-        queue.push(entries.length - 1, f * DEPTH + bitCount(rest))
+        queue.push(entries.add(rest, bend.index, orientation, g, next), f * DEPTH + bitCount(rest))
       }
     }
   }
 
   const operationsFrom = (entry: number): Operation[] => {
     const operations: Operation[] = []
-    for (let at = entries[entry]; at !== undefined; at = entries[at.next]) {
-      operations.push({ bend: at.bend.index, orientation: at.orientation })
+    for (let at = entry; at !== -1;) {
+      const { bend, orientation, next } = entries.get(at)
+      operations.push({ bend, orientation })
+      at = next
     }
     return operations
   }
 
-  const findRest = (made: number, orientation: number) =>
-    entries[closed.find(stateOf(made, orientation)) ?? -1]?.g
+  const findRest = (made: number, orientation: number) => {
+    const entry = closed.find(stateOf(made, orientation))
+    return entry === undefined ? undefined : entries.get(entry).cost
+  }
 
   if (full === 0) return { best: known, lowerBound: known.cost, proven: true, findRest }
-  expand(full, null)
+  expand(full, -1, null)
   let best: Sequence | undefined
   const mostQueued = nodes * QUEUED_PER_NODE
   let most = mostQueued
   for (;;) {
     const key = queue.leastKey()
     const index = queue.pop()
-    const entry = index === undefined ? undefined : entries[index]
-    if (key === undefined || index === undefined || entry === undefined) break
+    if (key === undefined || index === undefined) break
     const f = Math.floor(key / DEPTH)
     if (best !== undefined && f > best.cost) break
-    if (entries.length > most || isOver()) {
+    if (entries.count() > most || isOver()) {
       if (best !== undefined) return { best, lowerBound: best.cost, proven: true, findRest: null }
       return { best: known, lowerBound: f, proven: false, findRest: null }
     }
-    const { made, orientation, bend, g } = entry
+    const entry = entries.get(index)
+    const { made, orientation } = entry
+    const bend = piece.bends[entry.bend]
     const state = stateOf(made, orientation)
-    if (closed.find(state) !== undefined || !feasibility.passes(made, bend, orientation)) continue
+    if (bend === undefined || closed.find(state) !== undefined) continue
+    if (!feasibility.passes(made, bend, orientation)) continue
     closed.set(state, index)
-    if (made !== 0) expand(made, { orientation, g, entry: index })
+    if (made !== 0) expand(made, index, entry)
     else if (best === undefined) {
-      best = { cost: g, operations: operationsFrom(index) }
-      most = Math.min(mostQueued, entries.length + EQUALS)
+      best = { cost: entry.cost, operations: operationsFrom(index) }
+      most = Math.min(mostQueued, entries.count() + EQUALS)
     }
   }
   if (best === undefined)

@@ -14,6 +14,26 @@ export interface SideShape {
   readonly pastNose: Outline | undefined
 }
 
+class LazySideShape implements SideShape {
+  readonly outline: Outline
+  private madePastNose: { readonly outline: Outline | undefined } | undefined
+
+  constructor(
+    readonly chain: Chain,
+    private readonly noseZone: Inches,
+  ) {
+    this.outline = sheetOutline(chain.points)
+  }
+
+  get pastNose(): Outline | undefined {
+    if (this.madePastNose === undefined) {
+      const points = cutStart(this.chain.points, this.noseZone)
+      this.madePastNose = { outline: points && sheetOutline(points) }
+    }
+    return this.madePastNose.outline
+  }
+}
+
 export type SideShapes = (
   bend: PieceBend,
   side: Side,
@@ -22,7 +42,7 @@ export type SideShapes = (
 ) => SideShape
 
 /** Shapes kept at a time; beyond, all are forgotten and built again as they are asked for. */
-const MOST_SHAPES = 8192
+const MOST_SHAPES = 16_384
 
 /** The sides of a piece by the bends made on them, kept for the many made sets that share one. */
 export const createSideShapes = (piece: Workpiece, noseZone: Inches): SideShapes => {
@@ -33,19 +53,7 @@ export const createSideShapes = (piece: Workpiece, noseZone: Inches): SideShapes
       ((bits * 32 + bend.index) * 2 + (side === 'A' ? 0 : 1)) * 2 + (place === 'front' ? 0 : 1)
     const found = known.get(key)
     if (found !== undefined) return found
-    const chain = chainOf(piece, bend, side, bits, place)
-    let pastNose: { readonly outline: Outline | undefined } | undefined
-    const shape: SideShape = {
-      chain,
-      outline: sheetOutline(chain.points),
-      get pastNose() {
-        if (pastNose === undefined) {
-          const points = cutStart(chain.points, noseZone)
-          pastNose = { outline: points && sheetOutline(points) }
-        }
-        return pastNose.outline
-      },
-    }
+    const shape = new LazySideShape(chainOf(piece, bend, side, bits, place), noseZone)
     if (known.size >= MOST_SHAPES) known.clear()
     known.set(key, shape)
     return shape

@@ -32,8 +32,8 @@ export class Outline {
 
   /** Throws RangeError where there are no two points. */
   constructor(
-    readonly xs: Float64Array,
-    readonly ys: Float64Array,
+    readonly xs: readonly number[],
+    readonly ys: readonly number[],
     readonly isSolid: boolean,
   ) {
     const count = xs.length
@@ -52,7 +52,7 @@ export class Outline {
   }
 
   get points(): readonly Vector[] {
-    return (this.madePoints ??= Array.from(this.xs, (x, i) => vector(x, this.ys[i] ?? NaN)))
+    return (this.madePoints ??= this.xs.map((x, i) => vector(x, this.ys[i] ?? NaN)))
   }
 
   get sides(): readonly OutlineSide[] {
@@ -83,15 +83,12 @@ export class Outline {
   }
 }
 
-const outlineOf = (points: readonly Vector[], isSolid: boolean): Outline => {
-  const xs = new Float64Array(points.length)
-  const ys = new Float64Array(points.length)
-  points.forEach(({ x, y }, i) => {
-    xs[i] = x
-    ys[i] = y
-  })
-  return new Outline(xs, ys, isSolid)
-}
+const outlineOf = (points: readonly Vector[], isSolid: boolean): Outline =>
+  new Outline(
+    points.map(({ x }) => x),
+    points.map(({ y }) => y),
+    isSolid,
+  )
 
 export const sheetOutline = (points: readonly Vector[]): Outline => outlineOf(points, false)
 

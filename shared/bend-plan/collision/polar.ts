@@ -3,47 +3,39 @@ import { pointSquare } from './segment-distance'
 /** An outline seen from the bend line at the origin: inches and radians, by number of point or side. */
 export interface Polar {
   /** Of points: distance and direction. */
-  readonly radius: Float64Array
-  readonly towards: Float64Array
+  readonly radius: readonly number[]
+  readonly towards: readonly number[]
   /** Of sides: the nearest and the furthest distance. */
-  readonly near: Float64Array
-  readonly far: Float64Array
+  readonly near: readonly number[]
+  readonly far: readonly number[]
   /** Of sides: direction of the normal, and the distance of the side's line along it. */
-  readonly normal: Float64Array
-  readonly offset: Float64Array
+  readonly normal: readonly number[]
+  readonly offset: readonly number[]
   /** Of sides: the middle of the directions in which it is seen, and half their spread. */
-  readonly middle: Float64Array
-  readonly spread: Float64Array
+  readonly middle: readonly number[]
+  readonly spread: readonly number[]
 }
 
 /** An angle less whole turns, from -π to π. */
 export const withinHalfTurn = (angle: number): number =>
   angle - 2 * Math.PI * Math.round(angle / (2 * Math.PI))
 
-export const polarOf = (xs: Float64Array, ys: Float64Array, isSolid: boolean): Polar => {
-  const count = xs.length
-  const sides = isSolid ? count : count - 1
-  const all = new Float64Array(2 * count + 6 * sides)
-  let taken = 0
-  const take = (length: number) => all.subarray(taken, (taken += length))
-  const polar: Polar = {
-    radius: take(count),
-    towards: take(count),
-    near: take(sides),
-    far: take(sides),
-    normal: take(sides),
-    offset: take(sides),
-    middle: take(sides),
-    spread: take(sides),
-  }
-  const { radius, towards } = polar
-  for (let i = 0; i < count; i++) {
-    const x = xs[i] ?? NaN
+export const polarOf = (xs: readonly number[], ys: readonly number[], isSolid: boolean): Polar => {
+  const radius: number[] = []
+  const towards: number[] = []
+  xs.forEach((x, i) => {
     const y = ys[i] ?? NaN
-    radius[i] = Math.sqrt(x * x + y * y)
-    towards[i] = Math.atan2(y, x)
-  }
-  for (let i = 0; i < sides; i++) {
+    radius.push(Math.sqrt(x * x + y * y))
+    towards.push(Math.atan2(y, x))
+  })
+  const near: number[] = []
+  const far: number[] = []
+  const normal: number[] = []
+  const offset: number[] = []
+  const middle: number[] = []
+  const spread: number[] = []
+  const count = xs.length
+  for (let i = 0; i < (isSolid ? count : count - 1); i++) {
     const j = i + 1 === count ? 0 : i + 1
     const ax = xs[i] ?? NaN
     const ay = ys[i] ?? NaN
@@ -53,12 +45,12 @@ export const polarOf = (xs: Float64Array, ys: Float64Array, isSolid: boolean): P
     const normalX = (ay - by) / length
     const normalY = (bx - ax) / length
     const turned = withinHalfTurn((towards[j] ?? NaN) - (towards[i] ?? NaN))
-    polar.near[i] = Math.sqrt(pointSquare(0, 0, ax, ay, bx, by))
-    polar.far[i] = Math.max(radius[i] ?? NaN, radius[j] ?? NaN)
-    polar.normal[i] = Math.atan2(normalY, normalX)
-    polar.offset[i] = normalX * ax + normalY * ay
-    polar.middle[i] = (towards[i] ?? NaN) + turned / 2
-    polar.spread[i] = Math.abs(turned) / 2
+    near.push(Math.sqrt(pointSquare(0, 0, ax, ay, bx, by)))
+    far.push(Math.max(radius[i] ?? NaN, radius[j] ?? NaN))
+    normal.push(Math.atan2(normalY, normalX))
+    offset.push(normalX * ax + normalY * ay)
+    middle.push((towards[i] ?? NaN) + turned / 2)
+    spread.push(Math.abs(turned) / 2)
   }
-  return polar
+  return { radius, towards, near, far, normal, offset, middle, spread }
 }
