@@ -7,7 +7,8 @@ const fromRoot = (path: string) => fileURLToPath(new URL(path, import.meta.url))
 
 /**
  * Two builds from one file. Without `--ssr` it builds the client into dist/client; with `--ssr` it
- * bundles the web server and the database command into dist/server (packages stay external).
+ * bundles the web server, its planning thread and the database command into dist/server (packages
+ * stay external).
  */
 export default defineConfig(({ isSsrBuild }) => ({
   plugins: isSsrBuild ? [] : [react(), tailwindcss()],
@@ -20,7 +21,11 @@ export default defineConfig(({ isSsrBuild }) => ({
         target: 'node20',
         sourcemap: true,
         rolldownOptions: {
-          input: { index: fromRoot('./server/index.ts'), cli: fromRoot('./server/db/cli.ts') },
+          input: {
+            index: fromRoot('./server/index.ts'),
+            cli: fromRoot('./server/db/cli.ts'),
+            'plan-worker': fromRoot('./server/planning/plan-worker.ts'),
+          },
         },
       }
     : { outDir: 'dist/client', emptyOutDir: true, sourcemap: false },

@@ -8,7 +8,10 @@ import { handOffRoutes } from '#server/features/hand-off/hand-off.routes'
 import { createHandOffService } from '#server/features/hand-off/hand-off.service'
 import { createJobsServiceOn } from '#server/features/jobs/create-jobs-service'
 import { jobsRoutes } from '#server/features/jobs/jobs.routes'
-import { createOrdersServiceOn } from '#server/features/orders/create-orders-service'
+import {
+  createOrderPlanningOn,
+  createOrdersServiceOn,
+} from '#server/features/orders/create-orders-service'
 import { ordersRoutes } from '#server/features/orders/orders.routes'
 import { createPeopleService } from '#server/features/people/people.service'
 import { peopleRoutes } from '#server/features/people/people.routes'
@@ -19,6 +22,7 @@ import { newCode } from '#server/features/pieces/new-code'
 import { piecesRoutes } from '#server/features/pieces/pieces.routes'
 import { createPiecesService } from '#server/features/pieces/pieces.service'
 import { createPlansServiceOn } from '#server/features/plans/create-plans-service'
+import { planLimit } from '#server/features/plans/plan-limit'
 import { plansRoutes } from '#server/features/plans/plans.routes'
 import { runsRoutes } from '#server/features/runs/runs.routes'
 import { createRunsService } from '#server/features/runs/runs.service'
@@ -36,6 +40,7 @@ export interface Ports {
   readonly planner: Planner
   /** IANA name. */
   readonly shopTimeZone: string
+  readonly onError: (message: string, error: unknown) => void
 }
 
 export interface Composition {
@@ -44,7 +49,8 @@ export interface Composition {
 }
 
 /** The only place that knows every feature: each service is built anew on the handle it is given. */
-export function compose({ db: pool, clock, planner, shopTimeZone }: Ports): Composition {
+export function compose(ports: Ports): Composition {
+  const { db: pool, clock, planner, shopTimeZone, onError } = ports
   const signIn = createSignIn(pool)
   const making = { clock, drawCode: newCode }
   return {
@@ -56,8 +62,16 @@ export function compose({ db: pool, clock, planner, shopTimeZone }: Ports): Comp
       ...shelfRoutes((db) => createShelfServiceOn(db, clock)),
       ...stocksRoutes(createStocksQueries),
       ...brakesRoutes(createBrakesQueries),
-      ...plansRoutes((db) => createPlansServiceOn(db, planner)),
-      ...ordersRoutes((db) => createOrdersServiceOn(db, { clock, planner, shopTimeZone })),
+      ...plansRoutes(
+        (db) => createPlansServiceOn(db, { planner, onError }),
+        planLimit(pool, clock),
+      ),
+      ...ordersRoutes({
+        planner,
+        makeService: (db, known) =>
+          createOrdersServiceOn(db, { clock, planner: known, shopTimeZone }),
+        makePlanning: createOrderPlanningOn,
+      }),
       ...piecesRoutes((db) => createPiecesService(db, making)),
       ...runsRoutes((db) => createRunsService(db, making)),
       ...bundlesRoutes((db) => createBundlesService(db, making)),

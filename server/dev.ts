@@ -5,6 +5,8 @@ import { systemClock } from '#server/adapters/clock'
 import { readConfig } from '#server/config'
 import { exitOnConfigError } from '#server/exit-on-config-error'
 import { endGracefully } from '#server/graceful-end'
+import { sourceWorker } from '#server/planning/source-worker'
+import { startPlanning } from '#server/planning/start-planning'
 import { startServer } from '#server/running-server'
 
 /** The client's sources, compiled as they are asked for, on the same port as the API. */
@@ -25,6 +27,7 @@ const server = await startServer({
   clock: systemClock,
   client: viteClient,
   contentSecurityPolicy: false,
+  planning: (deps) => startPlanning({ program: sourceWorker }, deps),
 })
 endGracefully(server, logger)
 logger.info({ url: server.url }, 'listening')

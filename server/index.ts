@@ -4,7 +4,11 @@ import { readConfig } from '#server/config'
 import { endGracefully } from '#server/graceful-end'
 import { serveClient } from '#server/http/serve-client'
 import { exitOnConfigError } from '#server/exit-on-config-error'
+import { startPlanning } from '#server/planning/start-planning'
 import { startServer } from '#server/running-server'
+
+/** Bundled beside this file. */
+const builtWorker = { file: new URL('./plan-worker.js', import.meta.url) }
 
 const config = exitOnConfigError(readConfig)
 const logger = pino({ level: config.logLevel })
@@ -14,6 +18,7 @@ const server = await startServer({
   clock: systemClock,
   client: () => Promise.resolve(serveClient(config.clientDir)),
   contentSecurityPolicy: true,
+  planning: (deps) => startPlanning({ program: builtWorker }, deps),
 })
 endGracefully(server, logger)
 logger.info({ url: server.url }, 'listening')

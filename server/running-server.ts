@@ -13,7 +13,7 @@ import { createDatabase } from '#server/db/knex'
 import { createSessions } from '#server/http/session'
 import { startHousekeeping } from '#server/jobs/housekeeping'
 import { LiveHub } from '#server/live/live-hub'
-import { createLocalPlanner } from '#server/planning/local-planner'
+import type { Planning, PlanningDeps } from '#server/planning/start-planning'
 
 const SESSION_CONNECTIONS = 4
 /** Below the ten seconds after which a supervisor kills. */
@@ -27,6 +27,7 @@ export interface ServerOptions {
   /** What answers everything outside /api. */
   readonly client: (server: Server) => Promise<RequestHandler>
   readonly contentSecurityPolicy: boolean
+  readonly planning: (deps: PlanningDeps) => Planning
 }
 
 export interface RunningServer {
@@ -34,7 +35,7 @@ export interface RunningServer {
   readonly url: string
   readonly db: Knex
   readonly hub: LiveHub
-  /** Lets open requests finish, ends the streams and closes the database. */
+  /** Lets open requests finish, ends the streams and the planning, and closes the database. */
   readonly close: () => Promise<void>
 }
 
@@ -52,11 +53,13 @@ export async function startServer(options: ServerOptions): Promise<RunningServer
     onError,
   })
   const hub = new LiveHub({ db, databaseUrl: config.databaseUrl, onError })
+  const planning = options.planning({ db, clock, onError })
   const { routes, signIn } = compose({
     db,
     clock,
-    planner: createLocalPlanner(),
+    planner: planning.planner,
     shopTimeZone: config.shopTimeZone,
+    onError,
   })
 
   const server = createServer()
@@ -84,6 +87,7 @@ export async function startServer(options: ServerOptions): Promise<RunningServer
     await hub.stop()
     await closed
     sessions.close()
+    await planning.close()
     await Promise.all([db.destroy(), sessionPool.end()])
   }
   return { url: originOf(address), db, hub, close }

@@ -64,5 +64,5 @@ export const withdraw =
 
 export const release: Act = async ({ shop, getOrder }) => {
   const { id, version } = await getOrder()
-  await shop.orders.releaseOrder(id, { version }, ines)
+  await shop.orders.releaseOrder(id, { version, overrides: [] }, ines)
 }

@@ -12,7 +12,7 @@ export function createDemoReleaseStore(db: Db, random: DemoRandom, clock: Clock)
 
     createRuns: async (orderId, runs) => {
       await db(RUNS).insert(
-        runs.map(({ id, lines: [first], stock, strip, brake, plan }) => ({
+        runs.map(({ id, lines: [first], stock, strip, brake, plan, override }) => ({
           id,
           code: random.drawCode('run'),
           order_id: orderId,
@@ -23,6 +23,7 @@ export function createDemoReleaseStore(db: Db, random: DemoRandom, clock: Clock)
           strip: JSON.stringify(strip),
           brake: JSON.stringify(brake.brake),
           plan: JSON.stringify(plan),
+          override: override && JSON.stringify(override),
           created_at: clock.now(),
         })),
       )

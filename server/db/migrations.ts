@@ -7,6 +7,8 @@ import * as orders from '#migrations/0005_orders'
 import * as runsAndBundles from '#migrations/0006_runs_and_bundles'
 import * as pieces from '#migrations/0007_pieces'
 import * as orderStates from '#migrations/0008_order_states'
+import * as planCache from '#migrations/0009_plan_cache'
+import * as overrides from '#migrations/0010_overrides'
 
 interface NamedMigration {
   readonly name: string
@@ -26,6 +28,8 @@ const MIGRATIONS: readonly NamedMigration[] = [
   { name: '0006_runs_and_bundles', migration: runsAndBundles },
   { name: '0007_pieces', migration: pieces },
   { name: '0008_order_states', migration: orderStates },
+  { name: '0009_plan_cache', migration: planCache },
+  { name: '0010_overrides', migration: overrides },
 ]
 
 export const migrationSource: Knex.MigrationSource<NamedMigration> = {

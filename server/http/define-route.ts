@@ -12,8 +12,10 @@ export interface RouteInput<E extends Endpoint> {
   readonly query: QueryOf<E>
   readonly body: BodyOf<E>
   readonly person: SignedIn
-  /** The pool for a GET, the request's own transaction for everything else. */
+  /** The request's own transaction where the endpoint changes something, the pool otherwise. */
   readonly db: Db
+  /** Aborts with `AskerGone` when nobody is left to be answered. A change is carried out all the same. */
+  readonly signal: AbortSignal
   /** For the session routes only. */
   readonly request: Request
 }
@@ -22,6 +24,13 @@ export interface PublicRouteInput<E extends Endpoint> extends Omit<RouteInput<E>
   readonly person: SignedIn | null
   /** Always the pool: who is not signed in yet holds no transaction. */
   readonly db: Db
+}
+
+/** What a route is given before its transaction begins. */
+export interface Asked {
+  readonly request: Request
+  readonly signal: AbortSignal
+  readonly pool: Db
 }
 
 /** Runs on the pool or in a transaction; may run twice when the database asks for a retry. */
@@ -33,8 +42,11 @@ export interface Route {
   readonly transaction: boolean
   /** Runs before the input is parsed. */
   readonly before: readonly RequestHandler[]
-  /** Parses the input (throws `invalid-input`) and gives what remains to be done. */
-  readonly prepare: (request: Request) => Act
+  /**
+   * Parses the input (throws `invalid-input`), does what takes too long for a transaction, and gives
+   * what remains to be done.
+   */
+  readonly prepare: (asked: Asked) => Promise<Act>
 }
 
 /**
@@ -43,22 +55,44 @@ export interface Route {
  *
  *     defineRoute(getJob, ({ params, person, db }) => make(db).getJob(params.jobId, person))
  */
-export function defineRoute<E extends Endpoint>(
+export const defineRoute = <E extends Endpoint>(
   endpoint: E,
   handle: (input: RouteInput<E>) => Promise<AnswerOf<E>>,
+  before: readonly RequestHandler[] = [],
+): Route => ({
+  ...defineRouteAhead(endpoint, { ahead: () => Promise.resolve(undefined), handle }),
+  before,
+})
+
+export interface AheadHandlers<E extends Endpoint, Ahead> {
+  /**
+   * Runs on the pool, before the transaction, and again when the transaction finds it outdated. It
+   * refuses nothing: a request sent again under its key must come to its first answer.
+   */
+  readonly ahead: (input: RouteInput<E>) => Promise<Ahead>
+  /** Throws `AheadOutdated` where what was done ahead does not fit what it finds. */
+  readonly handle: (input: RouteInput<E> & { readonly ahead: Ahead }) => Promise<AnswerOf<E>>
+}
+
+/** Like `defineRoute`, for handlers that need something slow, which no transaction waits for. */
+export function defineRouteAhead<E extends Endpoint, Ahead>(
+  endpoint: E,
+  { ahead, handle }: AheadHandlers<E, Ahead>,
 ): Route {
   if (endpoint.permission === 'public') {
     throw new Error(`${endpoint.method} ${endpoint.path} is public: use definePublicRoute.`)
   }
   return {
     endpoint,
-    transaction: endpoint.method !== 'GET',
+    transaction: endpoint.changes,
     before: [],
-    prepare: (request) => {
-      const input = parseInput(endpoint, request)
+    prepare: async ({ request, signal, pool }) => {
+      const parsed = parseInput(endpoint, request)
       const person = request.user
       if (!person) throw notSignedIn()
-      return (db) => handle({ ...input, person, db, request })
+      const input = { ...parsed, person, signal, request }
+      const done = await ahead({ ...input, db: pool })
+      return (db) => handle({ ...input, db, ahead: done })
     },
   }
 }
@@ -73,9 +107,10 @@ export function definePublicRoute<E extends Endpoint>(
     endpoint,
     transaction: false,
     before,
-    prepare: (request) => {
+    // eslint-disable-next-line @typescript-eslint/require-await -- what it throws must reject
+    prepare: async ({ request, signal }) => {
       const input = parseInput(endpoint, request)
-      return (db) => handle({ ...input, person: request.user ?? null, db, request })
+      return (db) => handle({ ...input, person: request.user ?? null, db, signal, request })
     },
   }
 }

@@ -22,6 +22,8 @@ export interface ProblemExtra {
   readonly errors?: readonly FieldError[]
   /** What is there now, for a conflict. */
   readonly current?: unknown
+  /** Seconds after which it is worth trying again. */
+  readonly retryAfter?: number
 }
 
 /** A request refused by code. `detail` is for a person and says what cures it. */
@@ -30,6 +32,7 @@ export class ProblemError extends Error {
   readonly title: string
   readonly errors: readonly FieldError[] | undefined
   readonly current: unknown
+  readonly retryAfter: number | undefined
 
   constructor(
     readonly code: ProblemCode,
@@ -43,6 +46,7 @@ export class ProblemError extends Error {
     this.title = TITLES[code]
     this.errors = extra.errors
     this.current = extra.current
+    this.retryAfter = extra.retryAfter
   }
 }
 

@@ -2,6 +2,8 @@ import type { Request, RequestHandler, Response, Router } from 'express'
 import { z } from 'zod'
 import type { Db } from '#server/db/knex'
 import { inTransaction } from '#server/db/transaction'
+import { AheadOutdated } from '#server/http/ahead-outdated'
+import { signalOfAsker } from '#server/http/asker-gone'
 import { csrfSynchronisedProtection } from '#server/http/csrf'
 import type { Route } from '#server/http/define-route'
 import { once, readKeyedRequest, type Outcome } from '#server/http/idempotency'
@@ -16,9 +18,11 @@ const VERBS = {
   DELETE: 'delete',
 } as const satisfies Record<Method, string>
 
+const MOST_TRIES = 4
+
 /**
  * Mounts every route with the same steps: permission, CSRF token, the route's own limits, input,
- * idempotency, handler in one transaction, answer. A session was read before.
+ * work ahead, idempotency, handler in one transaction, answer. A session was read before.
  */
 export function mountRoutes(router: Router, routes: readonly Route[], db: Db): void {
   for (const route of routes) {
@@ -36,12 +40,27 @@ export function mountRoutes(router: Router, routes: readonly Route[], db: Db): v
 function answerWith(route: Route, db: Db): RequestHandler {
   const { endpoint } = route
   return async (request, response) => {
-    const act = route.prepare(request)
-    const work = async (handle: Db) => ({
-      status: endpoint.success,
-      answer: checkAnswer(endpoint, await act(handle)),
-    })
-    send(response, await runOnce(route, request, db, work))
+    const signal = signalOfAsker(response)
+    const answerOnce = async () => {
+      const act = await route.prepare({ request, signal, pool: db })
+      const work = async (handle: Db) => ({
+        status: endpoint.success,
+        answer: checkAnswer(endpoint, await act(handle)),
+      })
+      return runOnce(route, request, db, work)
+    }
+    send(response, await againWhileOutdated(answerOnce))
+  }
+}
+
+/** Prepared and run anew when somebody changed something between the two, within reason. */
+async function againWhileOutdated<T>(answer: () => Promise<T>): Promise<T> {
+  for (let tries = 1; ; tries += 1) {
+    try {
+      return await answer()
+    } catch (error) {
+      if (!(error instanceof AheadOutdated) || tries === MOST_TRIES) throw error
+    }
   }
 }
 

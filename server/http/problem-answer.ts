@@ -1,6 +1,7 @@
 import type { ErrorRequestHandler, RequestHandler, Response } from 'express'
 import { isHttpError } from '#server/http/http-error'
 import { findDatabaseProblem } from '#server/db/constraint-errors'
+import { AskerGone } from '#server/http/asker-gone'
 import { invalidCsrfTokenError } from '#server/http/csrf'
 import { notFound, ProblemError } from '#server/http/errors'
 import { REQUEST_ID_HEADER } from '#server/http/request-log'
@@ -13,6 +14,10 @@ export const unknownPath: RequestHandler = (request) => {
 
 /** The last handler: every failure leaves as RFC 9457 problem details. */
 export const answerProblem: ErrorRequestHandler = (error: unknown, request, response, next) => {
+  if (error instanceof AskerGone) {
+    request.log.info('who asked has gone')
+    return
+  }
   const problem = problemOf(error)
   if (problem.status >= 500) request.log.error({ err: error }, 'request failed')
   if (response.headersSent) {
@@ -33,6 +38,7 @@ export function sendProblem(response: Response, problem: ProblemError): void {
     ...(problem.errors && { errors: [...problem.errors] }),
     ...(problem.current !== undefined && { current: problem.current }),
   }
+  if (problem.retryAfter !== undefined) response.set('Retry-After', String(problem.retryAfter))
   response
     .status(problem.status)
     .set('Cache-Control', 'no-store')

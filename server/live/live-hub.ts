@@ -1,10 +1,10 @@
 import type { Request, Response } from 'express'
-import { createSession, type Session } from 'better-sse'
+import { createEventBuffer, createSession, type Session } from 'better-sse'
 import type { Db } from '#server/db/knex'
 import { notSignedIn } from '#server/http/errors'
 import { findLatestEventId, listEventsSince, type CatchUp } from '#server/live/live-events.queries'
 import { LiveListener } from '#server/live/live-listener'
-import type { LiveMessage } from '#server/live/live-message'
+import type { LiveMessage, PersonalMessage } from '#server/live/live-message'
 import { listOpenSessions } from '#server/live/open-sessions.queries'
 import { mayFollow, type Viewer } from '#server/live/may-follow'
 import type { LiveEvent } from '#shared/live/live'
@@ -18,6 +18,7 @@ interface Stream {
   readonly sse: Session
   readonly response: Response
   readonly sid: string
+  readonly personId: string
   viewer: Viewer
 }
 
@@ -29,7 +30,8 @@ export interface LiveHubOptions {
 
 /**
  * The event streams of this process. Events: `message` (a LiveEvent), `ready` (first connection:
- * only the id to catch up from) and `reset` (too much was missed: read everything anew).
+ * only the id to catch up from), `reset` (too much was missed: read everything anew) and `plan` (a
+ * LivePlan, for one person, without an id since it is not kept).
  */
 export class LiveHub {
   private readonly streams = new Set<Stream>()
@@ -41,7 +43,8 @@ export class LiveHub {
   constructor(private readonly options: LiveHubOptions) {
     this.listener = new LiveListener({
       databaseUrl: options.databaseUrl,
-      onMessage: (message) => this.receive(message),
+      onMessage: (message) =>
+        'personId' in message ? this.tellPerson(message) : this.receive(message),
       onReconnect: () => this.catchUpAll(),
       onError: options.onError,
     })
@@ -64,7 +67,7 @@ export class LiveHub {
     const { user: person, sessionID: sid } = request
     if (!person) throw notSignedIn()
     const sse = await createSession(request, response, { keepAlive: HEARTBEAT_MS })
-    const stream: Stream = { sse, response, sid, viewer: person }
+    const stream: Stream = { sse, response, sid, personId: person.id, viewer: person }
     this.streams.add(stream)
     sse.once('disconnected', () => this.streams.delete(stream))
     try {
@@ -120,12 +123,31 @@ export class LiveHub {
     for (const stream of streams) push(stream, {}, 'reset', latest)
   }
 
+  private tellPerson({ personId, plan }: PersonalMessage): void {
+    for (const stream of this.streams) {
+      if (stream.personId === personId) pushUnkept(stream, plan, 'plan', this.options.onError)
+    }
+  }
+
   private tell(streams: Iterable<Stream>, { id, topic, entityId, ...message }: LiveMessage): void {
     const event: LiveEvent = { topic, entityId }
     for (const stream of streams) {
       if (mayFollow(stream.viewer, message)) push(stream, event, 'message', id)
     }
   }
+}
+
+/** An event without an id: where the client catches up from stays as it was. */
+function pushUnkept(
+  { sse, response }: Stream,
+  data: object,
+  name: string,
+  onError: LiveHubOptions['onError'],
+): void {
+  if (!sse.isConnected || response.writableLength > MOST_UNREAD_BYTES) return
+  sse
+    .batch(createEventBuffer().event(name).data(data).dispatch())
+    .catch((error: unknown) => onError('a live event could not be sent', error))
 }
 
 function push({ sse, response }: Stream, data: object, name: string, id: number): void {

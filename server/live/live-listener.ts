@@ -1,13 +1,18 @@
 import { setTimeout as delay } from 'node:timers/promises'
 import pg from 'pg'
-import { LIVE_CHANNEL, liveMessageSchema, type LiveMessage } from '#server/live/live-message'
+import {
+  channelMessageSchema,
+  LIVE_CHANNEL,
+  type LiveMessage,
+  type PersonalMessage,
+} from '#server/live/live-message'
 
 const FIRST_RETRY_MS = 100
 const LONGEST_RETRY_MS = 5_000
 
 export interface LiveListenerOptions {
   readonly databaseUrl: string
-  readonly onMessage: (message: LiveMessage) => void
+  readonly onMessage: (message: LiveMessage | PersonalMessage) => void
   /** Called after the connection was lost and made again: messages may have been missed. */
   readonly onReconnect: () => Promise<void>
   readonly onError: (message: string, error: unknown) => void
@@ -93,7 +98,7 @@ export class LiveListener {
 
   private receive(payload: string | undefined): void {
     try {
-      this.options.onMessage(liveMessageSchema.parse(JSON.parse(payload ?? '')))
+      this.options.onMessage(channelMessageSchema.parse(JSON.parse(payload ?? '')))
     } catch (error) {
       this.options.onError('a live message could not be read', error)
     }

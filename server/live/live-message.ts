@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { liveEventSchema } from '#shared/live/live'
+import { liveEventSchema, livePlanSchema } from '#shared/live/live'
 
 /** The channel of NOTIFY. */
 export const LIVE_CHANNEL = 'live'
@@ -11,4 +11,11 @@ export const liveMessageSchema = liveEventSchema.extend({
   audience: z.enum(['shop', 'company', 'all']),
 })
 
+/** For the streams of one person; kept nowhere. */
+export const personalMessageSchema = z.strictObject({ personId: z.uuid(), plan: livePlanSchema })
+
+/** What comes through the channel. */
+export const channelMessageSchema = z.union([liveMessageSchema, personalMessageSchema])
+
+export type PersonalMessage = z.infer<typeof personalMessageSchema>
 export type LiveMessage = z.infer<typeof liveMessageSchema>

@@ -4,17 +4,20 @@ export class KeptValues<Value extends object> {
 
   constructor(private readonly most: number) {}
 
-  getOrMake(key: string, make: () => Value): Value {
-    const value = this.#values.get(key) ?? make()
+  find(key: string): Value | undefined {
+    const value = this.#values.get(key)
+    if (value !== undefined) this.keep(key, value)
+    return value
+  }
+
+  keep(key: string, value: Value): void {
     // A Map walks in the order of insertion: what is asked for moves to the end.
     this.#values.delete(key)
     this.#values.set(key, value)
-    if (this.#values.size > this.most) {
-      for (const oldest of this.#values.keys()) {
-        this.#values.delete(oldest)
-        break
-      }
+    if (this.#values.size <= this.most) return
+    for (const oldest of this.#values.keys()) {
+      this.#values.delete(oldest)
+      break
     }
-    return value
   }
 }

@@ -10,16 +10,34 @@ export interface PlannedBrake {
   readonly brake: Brake
 }
 
-/** Where bend plans come from: a port, so that planning can leave the request's thread. */
+/** How far plans under way have come. */
+export interface PlanningProgress {
+  /** Folds looked at so far, over all brakes. */
+  readonly nodes: number
+  /** Milliseconds since they were asked for. */
+  readonly elapsed: number
+}
+
+export interface PlanningOptions {
+  /** Ends the wait of this asker; what nobody else waits for is given up. */
+  readonly signal?: AbortSignal
+  /** Called now and then where planning takes long; not at all where it does not. */
+  readonly onProgress?: (progress: PlanningProgress) => void
+}
+
+/** Where bend plans come from: a port. */
 export interface Planner {
   /**
    * One plan a brake, in the order of `brakes`. The profile must be free of errors
-   * (`profileProblems`); the planner's RangeError passes through otherwise.
+   * (`profileProblems`); the kernel's RangeError passes through otherwise.
+   *
+   * @throws not-ready where too much waits already or the time is over; the signal's reason
    */
   readonly planOnAll: (
     profile: Profile,
     sheet: Sheet,
     pieceLength: Inches,
     brakes: readonly PlannedBrake[],
+    options?: PlanningOptions,
   ) => Promise<BrakePlan[]>
 }

@@ -23,6 +23,8 @@ export interface Endpoint<
   readonly body: Body
   readonly answer: Answer
   readonly success: 200 | 201 | 204
+  /** False for what only reads; the server opens no transaction for it. Every GET, and a POST that asks. */
+  readonly changes: boolean
   /** True when the request makes or moves something and must carry an `Idempotency-Key`. */
   readonly idempotent: boolean
 }
@@ -42,10 +44,11 @@ interface Definition<Params, Query, Body, Answer> {
   readonly body?: Body
   readonly answer: Answer
   readonly success?: 200 | 201 | 204
+  readonly changes?: boolean
   readonly idempotent?: boolean
 }
 
-/** Fills in what an endpoint does not name: no parameters, no query, no body, 200. */
+/** Fills in what an endpoint does not name: no parameters, no query, no body, 200; a GET changes nothing. */
 export function endpoint<
   Answer extends z.ZodType,
   Params extends z.ZodType = Nothing,
@@ -54,6 +57,7 @@ export function endpoint<
 >(definition: Definition<Params, Query, Body, Answer>): Endpoint<Params, Query, Body, Answer> {
   return {
     success: 200,
+    changes: definition.method !== 'GET',
     idempotent: false,
     ...definition,
     params: (definition.params ?? nothing) as Params,

@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { daySchema, momentSchema, optionalText, textField } from '#shared/http/fields'
 import { pitchRiseSchema } from '#shared/jobs/jobs.contract'
+import { overrideSchema } from '#shared/orders/override.schema'
 import { companySchema } from '#shared/people/people.contract'
 import { pieceStateSchema } from '#shared/pieces/piece-state'
 import { pieceLengthSchema } from '#shared/plans/plans.contract'
@@ -84,6 +85,8 @@ export const orderLineSchema = z.strictObject({
   pieceWeight: z.number(),
   /** Names of the brakes that bend it under the checks made; the chosen one after release. */
   bendsOn: z.array(z.string()),
+  /** Set at release where no brake bends it and somebody answers for it; then `bendsOn` names that brake. */
+  override: overrideSchema.nullable(),
   /** Empty before release. */
   pieces: z.array(pieceSummarySchema),
 })

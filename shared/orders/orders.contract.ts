@@ -8,6 +8,7 @@ import {
   orderStateSchema,
   orderSummarySchema,
 } from '#shared/orders/order.schema'
+import { overrideInputSchema } from '#shared/orders/override.schema'
 
 const params = idParams('orderId')
 /** The version the person saw; an older one is answered with `changed-meanwhile`. */
@@ -96,7 +97,11 @@ export const releaseOrder = endpoint({
   permission: 'orders.release',
   summary: 'Release an order: its pieces and runs come into being, frozen as drawn.',
   params,
-  body: z.strictObject({ version }),
+  body: z.strictObject({
+    version,
+    /** For lines that no brake bends, and only for them: the brake all the same, and why. */
+    overrides: z.array(overrideInputSchema).max(50).default([]),
+  }),
   answer: orderSchema,
   idempotent: true,
 })

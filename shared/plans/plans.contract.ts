@@ -21,10 +21,13 @@ export const planDrawing = endpoint({
   path: '/plans',
   permission: 'plans.make',
   summary: 'Strip and bend plans of a drawing that need not be saved, for every brake of the shop.',
+  changes: false,
   body: z.strictObject({
     profile: profileSchema,
     stockId: z.uuid(),
     pieceLength: pieceLengthSchema,
+    /** Names this request in the live events that tell how far it is; absent: none are sent. */
+    progressKey: z.string().min(1).max(80).optional(),
   }),
   answer: z.strictObject({
     strip: stripSchema,

@@ -4,6 +4,7 @@ import { brakeSchema } from '#shared/bend-plan/brake.schema'
 import { endpoint } from '#shared/http/endpoint'
 import { daySchema, idParams, momentSchema } from '#shared/http/fields'
 import { progressSchema } from '#shared/orders/order.schema'
+import { overrideSchema } from '#shared/orders/override.schema'
 import { pieceStateSchema } from '#shared/pieces/piece-state'
 import { profileSchema } from '#shared/profile/profile.schema'
 import { stockSchema } from '#shared/stock/stock.schema'
@@ -30,6 +31,8 @@ export const runSummarySchema = z.strictObject({
   neededBy: daySchema,
   lengths: z.array(lengthCountSchema),
   progress: progressSchema,
+  /** Set where the plan has no steps and somebody released it all the same. */
+  override: overrideSchema.nullable(),
   /** Who bends it now; null when nobody took it. */
   claimedBy: z.strictObject({ id: z.uuid(), name: z.string(), at: momentSchema }).nullable(),
 })

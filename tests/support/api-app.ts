@@ -4,6 +4,8 @@ import { inject } from 'vitest'
 import { systemClock, type Clock } from '#server/adapters/clock'
 import { readConfig } from '#server/config'
 import { createDatabase } from '#server/db/knex'
+import { sourceWorker } from '#server/planning/source-worker'
+import { startPlanning, type Planning, type PlanningDeps } from '#server/planning/start-planning'
 import { startServer, type RunningServer } from '#server/running-server'
 import type { Role } from '#shared/access/permissions'
 import { ApiAgent } from './api-agent'
@@ -16,6 +18,8 @@ export interface ApiOptions {
   readonly log?: DestinationStream
   /** Settings as the environment would give them. */
   readonly environment?: Record<string, string>
+  /** Where plans come from; threads from the sources by default. */
+  readonly planning?: (deps: PlanningDeps) => Planning
   /** Shares the database of another one, as a second process behind a balancer does. */
   readonly sharing?: Api
 }
@@ -49,6 +53,7 @@ export async function startApi(options: ApiOptions = {}): Promise<Api> {
     clock: options.clock ?? systemClock,
     client: () => Promise.resolve((_request, response) => void response.sendStatus(404)),
     contentSecurityPolicy: true,
+    planning: options.planning ?? ((deps) => startPlanning({ program: sourceWorker }, deps)),
   })
   const make = createFactories(server.db)
   const newAgent = () => new ApiAgent(server.url)

@@ -23,6 +23,7 @@ import type {
   PieceRow,
   PieceUpdate,
 } from './pieces'
+import type { PlanCacheInsert, PlanCacheRow, PlanCacheUpdate } from './plan-cache'
 import type { RateLimitRow } from './rate-limits'
 import type { RunInsert, RunRow, RunUpdate } from './runs'
 import type { SessionRow } from './sessions'
@@ -56,5 +57,6 @@ declare module 'knex/types/tables' {
     pieces: Knex.CompositeTableType<PieceRow, PieceInsert, PieceUpdate>
     piece_events: Knex.CompositeTableType<PieceEventRow, PieceEventInsert>
     piece_moves: PieceMoveRow
+    plan_cache: Knex.CompositeTableType<PlanCacheRow, PlanCacheInsert, PlanCacheUpdate>
   }
 }

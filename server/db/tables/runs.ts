@@ -13,6 +13,8 @@ export interface RunRow {
   strip: unknown
   brake: unknown
   plan: unknown
+  /** An Override; null where the brake bends the pieces. */
+  override: unknown
   claimed_by: string | null
   claimed_at: Date | null
   created_at: Date
@@ -29,6 +31,7 @@ export interface RunInsert {
   strip: string
   brake: string
   plan: string
+  override?: string | null
   claimed_by?: string | null
   claimed_at?: Date | null
   created_at?: Date

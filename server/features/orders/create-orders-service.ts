@@ -3,6 +3,7 @@ import type { Db } from '#server/db/knex'
 import { createBrakesQueries } from '#server/features/brakes/brakes.queries'
 import { createJobsQueries } from '#server/features/jobs/jobs.queries'
 import { createOrderPiecesQueries } from '#server/features/orders/order-pieces.queries'
+import { createOrderPlanning, type OrderPlanning } from '#server/features/orders/order-planning'
 import { createOrderReader } from '#server/features/orders/order-reader'
 import { createOrdersQueries } from '#server/features/orders/orders.queries'
 import { createOrdersService, type OrdersService } from '#server/features/orders/orders.service'
@@ -15,6 +16,7 @@ import type { Planner } from '#server/planning/planner'
 
 export interface OrdersPorts {
   readonly clock: Clock
+  /** In a transaction one that only knows what was planned ahead. */
   readonly planner: Planner
   /** IANA name of the shop's time zone. */
   readonly shopTimeZone: string
@@ -43,3 +45,12 @@ export function createOrdersServiceOn(db: Db, ports: OrdersPorts): OrdersService
     announce: (announcement) => announce(db, announcement),
   })
 }
+
+export const createOrderPlanningOn = (pool: Db, planner: Planner): OrderPlanning =>
+  createOrderPlanning({
+    queries: createOrdersQueries(pool),
+    jobs: createJobsQueries(pool),
+    stocks: createStocksQueries(pool),
+    brakes: createBrakesQueries(pool),
+    planner,
+  })

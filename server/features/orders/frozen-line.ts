@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { planSchema } from '#shared/bend-plan/plan.schema'
+import { overrideSchema } from '#shared/orders/override.schema'
 import { stockSchema } from '#shared/stock/stock.schema'
 import { stripSchema } from '#shared/strip/strip.schema'
 
@@ -17,6 +18,8 @@ export const frozenLineSchema = z.strictObject({
   /** The plan of the run that the line's pieces belong to. */
   plan: planSchema,
   kernelVersion: z.int(),
+  /** Lines released before overrides were known have none. */
+  override: overrideSchema.nullable().default(null),
 })
 
 export type FrozenLine = z.infer<typeof frozenLineSchema>

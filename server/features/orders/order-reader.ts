@@ -1,9 +1,9 @@
 import type { BrakesQueries } from '#server/features/brakes/brakes.queries'
+import { planLine } from '#server/features/orders/plan-line'
 import type { OrderPiecesQueries } from '#server/features/orders/order-pieces.queries'
 import type { OrdersQueries, StoredLine } from '#server/features/orders/orders.queries'
 import type { StocksQueries } from '#server/features/stocks/stocks.queries'
 import type { PlannedBrake, Planner } from '#server/planning/planner'
-import { profileErrors } from '#server/planning/profile-errors'
 import type { Order, OrderLine } from '#shared/orders/order.schema'
 import type { Stock } from '#shared/stock/stock.schema'
 import { flatStrip } from '#shared/strip/flat-strip'
@@ -17,7 +17,7 @@ export interface OrderReaderDeps {
   readonly planner: Planner
 }
 
-type MadeOf = Pick<OrderLine, 'stock' | 'strip' | 'pieceWeight' | 'bendsOn'>
+type MadeOf = Pick<OrderLine, 'stock' | 'strip' | 'pieceWeight' | 'bendsOn' | 'override'>
 
 /** Reads an order as its page shows it: frozen values once it is released, the kernel's before. */
 export const createOrderReader = (deps: OrderReaderDeps) => {
@@ -28,17 +28,21 @@ export const createOrderReader = (deps: OrderReaderDeps) => {
     line: StoredLine,
     stock: Stock,
     shopBrakes: readonly PlannedBrake[],
+    signal: AbortSignal | undefined,
   ): Promise<MadeOf> {
     const strip = flatStrip(line.profile, stock.sheet)
-    const madeOf = { stock, strip, pieceWeight: pieceWeight(strip, stock.sheet, line.length) }
-    // The stock may have changed since the order was submitted.
-    if (profileErrors(line.profile, stock, '').length > 0) return { ...madeOf, bendsOn: [] }
-    const plans = await planner.planOnAll(line.profile, stock.sheet, line.length, shopBrakes)
+    const plans = await planLine({ line, stock, brakes: shopBrakes, planner, signal })
     const feasible = plans.filter(({ plan }) => plan.feasible)
-    return { ...madeOf, bendsOn: feasible.map(({ brakeName }) => brakeName) }
+    return {
+      stock,
+      strip,
+      pieceWeight: pieceWeight(strip, stock.sheet, line.length),
+      bendsOn: feasible.map(({ brakeName }) => brakeName),
+      override: null,
+    }
   }
 
-  async function readLines(orderId: string): Promise<OrderLine[]> {
+  async function readLines(orderId: string, signal: AbortSignal | undefined): Promise<OrderLine[]> {
     const lines = await queries.listLines(orderId)
     const piecesByLine = await pieces.mapPieces(orderId)
     const open = lines.filter(({ frozen }) => frozen === null)
@@ -53,8 +57,9 @@ export const createOrderReader = (deps: OrderReaderDeps) => {
             strip: frozen.strip,
             pieceWeight: frozen.pieceWeight,
             bendsOn: [frozen.brakeName],
+            override: frozen.override,
           }
-        : await computeLine(line, getStock(stockById, stockId), shopBrakes)
+        : await computeLine(line, getStock(stockById, stockId), shopBrakes, signal)
       answers.push({ ...written, ...madeOf, pieces: piecesByLine.get(line.id) ?? [] })
     }
     return answers
@@ -63,12 +68,16 @@ export const createOrderReader = (deps: OrderReaderDeps) => {
   return {
     /**
      * The version is read before the lines, so that a change in between is met as a conflict later
-     * and never saved over.
+     * and never saved over. `signal` ends the planning of lines that are not released.
      */
-    async findOrder(id: string, scope: string | null): Promise<Order | undefined> {
+    async findOrder(
+      id: string,
+      scope: string | null,
+      signal?: AbortSignal,
+    ): Promise<Order | undefined> {
       const order = await queries.findOrder(id, scope)
       if (!order) return undefined
-      return { ...order, lines: await readLines(id), events: await queries.listEvents(id) }
+      return { ...order, lines: await readLines(id, signal), events: await queries.listEvents(id) }
     },
   }
 }

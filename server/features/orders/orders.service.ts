@@ -46,14 +46,15 @@ interface Change {
   readonly text?: string
   /** Why an order in this state does not take the change; null when it does. */
   readonly refuse?: (state: Order['state']) => string | null
-  readonly act?: (standing: Standing) => Promise<void>
+  /** Gives what the event says where that is not known before. */
+  readonly act?: (standing: Standing) => Promise<string | void>
 }
 
 export const createOrdersService = (deps: OrdersDeps) => {
   const { queries, reader, store, jobs, stocks, release, clock, shopTimeZone, announce } = deps
 
-  const getOrder = async (id: string, person: SignedIn): Promise<Order> => {
-    const order = await reader.findOrder(id, companyScope(person))
+  const getOrder = async (id: string, person: SignedIn, signal?: AbortSignal): Promise<Order> => {
+    const order = await reader.findOrder(id, companyScope(person), signal)
     if (!order) throw notFound('order')
     return order
   }
@@ -90,8 +91,8 @@ export const createOrdersService = (deps: OrdersDeps) => {
     // that is rolled back.
     if (refusal) throw wrongState(refusal, await getOrder(id, person))
     if (!(await store.takeOrder(id, version))) throw orderConflict(await getOrder(id, person))
-    await act?.(standing)
-    await store.addEvent({ order_id: id, kind, person_id: person.id, text })
+    const told = (await act?.(standing)) ?? text
+    await store.addEvent({ order_id: id, kind, person_id: person.id, text: told })
     await tell('orders', id, standing.company.id)
     return getOrder(id, person)
   }
@@ -163,7 +164,10 @@ export const createOrdersService = (deps: OrdersDeps) => {
         refuse: (state) => (state === 'question' ? null : 'No question is open on this order.'),
       }),
 
-    /** @throws wrong-state, changed-meanwhile, cannot-bend, profile-problem; nothing is released then */
+    /**
+     * @throws wrong-state, changed-meanwhile, cannot-bend, profile-problem, invalid-input for an
+     *   override; nothing is released then
+     */
     releaseOrder: (
       id: string,
       body: BodyOf<typeof releaseOrder>,
@@ -176,10 +180,12 @@ export const createOrdersService = (deps: OrdersDeps) => {
             ? 'A question to the crew is open. Release the order once it is answered.'
             : null,
         act: async ({ company }) => {
-          await release(id, person)
-          await store.updateOrder(id, { released_at: clock.now() })
+          const at = clock.now()
+          const told = await release(id, { person, at, overrides: body.overrides })
+          await store.updateOrder(id, { released_at: at })
           await tell('pieces', null, company.id)
           await announce({ topic: 'runs', entityId: null, companyId: null, audience: 'shop' })
+          return told
         },
       }),
 

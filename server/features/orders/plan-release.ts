@@ -1,73 +1,123 @@
+import {
+  gatherRuns,
+  runKind,
+  type PlannedLine,
+  type PlannedRun,
+} from '#server/features/orders/gather-runs'
 import type { StoredLine } from '#server/features/orders/orders.queries'
-import { cannotBend, profileProblem } from '#server/http/errors'
-import { bendingShape } from '#server/planning/bending-shape'
-import { findCheapestPlan } from '#server/planning/cheapest-plan'
+import { overridePath, overridesByLine } from '#server/features/orders/release-overrides'
+import { cannotBend, invalidInput, profileProblem } from '#server/http/errors'
+import { findFreest, listCheapest, type BrakeLoad } from '#server/planning/choose-brake'
 import { planReasonText } from '#server/planning/plan-reason-text'
 import type { Planner } from '#server/planning/planner'
 import { profileErrors } from '#server/planning/profile-errors'
 import type { ShopBrake } from '#shared/brakes/brakes.contract'
 import type { FieldError } from '#shared/http/problem'
+import type { OverrideInput } from '#shared/orders/override.schema'
 import type { BrakePlan } from '#shared/plans/plans.contract'
 import type { Stock } from '#shared/stock/stock.schema'
-import { flatStrip } from '#shared/strip/flat-strip'
-import type { Strip } from '#shared/strip/strip.schema'
 
-/** Lines that are bent one after another: one shape of one stock on one brake. */
-export interface PlannedRun {
-  /** The lines in the order's order; at least one. */
-  readonly lines: readonly [StoredLine, ...StoredLine[]]
-  readonly stock: Stock
-  readonly strip: Strip
-  readonly brake: ShopBrake
-  /** Made for the longest of the lines: what turns the longest piece turns the shorter ones. */
-  readonly plan: BrakePlan['plan']
+export interface ReleaseInput {
+  readonly lines: readonly StoredLine[]
+  readonly stocks: ReadonlyMap<string, Stock>
+  /** In the shop's order. */
+  readonly brakes: readonly ShopBrake[]
+  readonly loads: ReadonlyMap<string, BrakeLoad>
+  readonly overrides: readonly OverrideInput[]
+  /** Who answers for the overrides. */
+  readonly by: string
+  readonly at: Date
+  readonly planner: Planner
 }
 
-interface PlannedLine {
+interface LineMadeOf {
   readonly line: StoredLine
   readonly stock: Stock
-  readonly chosen: BrakePlan
+  readonly plans: readonly BrakePlan[]
 }
 
 /**
- * Chooses a brake for every line (the cheapest plan, then the shop's order of brakes) and gathers
- * the lines into runs.
+ * Chooses a brake for every line and gathers the lines into runs. Of the brakes whose plan costs
+ * least a line goes to the one that a line of its run went to already, then to a free one before a
+ * busy one, then to the one with the least to bend, what this release brings included, then to the
+ * shop's first.
  *
  * @throws profile-problem where a stock has changed so that a line cannot be made of it any more
+ * @throws invalid-input for an override that names nothing, or a line that bends
  * @throws cannot-bend naming every line that bends nowhere, with each brake's reasons
  */
-export async function planRelease(
-  lines: readonly StoredLine[],
-  stocks: ReadonlyMap<string, Stock>,
-  brakes: readonly ShopBrake[],
-  planner: Planner,
-): Promise<PlannedRun[]> {
+export async function planRelease(input: ReleaseInput): Promise<PlannedRun[]> {
+  const { lines, brakes, overrides } = input
+  const overrideOf = overridesByLine(overrides, lines, brakes)
+  const madeOf = await planLines(input)
+  checkOverrides(madeOf, overrides)
+  checkAllBend(
+    madeOf.filter(({ line }) => !overrideOf.has(line.id)),
+    lines,
+  )
+
+  const brakeById = new Map(brakes.map((brake) => [brake.id, brake]))
+  const loads = new Map(input.loads)
+  const brakeOfKind = new Map<string, string>()
+  const planned = madeOf.map(({ line, stock, plans }): PlannedLine => {
+    const given = overrideOf.get(line.id)
+    const kind = runKind(line)
+    const chosen = given
+      ? plans.find(({ brakeId }) => brakeId === given.brakeId)
+      : chooseBrake(plans, loads, brakeOfKind.get(kind))
+    if (!chosen) throw new Error(`Line ${line.id} has no plan to be released by.`)
+    const { brakeId, plan } = chosen
+    if (!given) brakeOfKind.set(kind, brakeId)
+    const { busy, queued } = loads.get(brakeId) ?? { busy: false, queued: 0 }
+    loads.set(brakeId, { busy, queued: queued + line.quantity })
+    const override = given && { by: input.by, at: input.at.toISOString(), reason: given.reason }
+    return { line, stock, brake: getById(brakeById, brakeId), plan, override: override ?? null }
+  })
+  return gatherRuns(planned)
+}
+
+async function planLines({ lines, stocks, brakes, planner }: ReleaseInput): Promise<LineMadeOf[]> {
   const madeOf = lines.map((line) => ({ line, stock: getById(stocks, line.stockId) }))
   const problems = madeOf.flatMap(({ line, stock }, index) =>
     profileErrors(line.profile, stock, `lines.${index}.profile`),
   )
   if (problems.length > 0) throw profileProblem(problems)
-
-  const planned: PlannedLine[] = []
-  const refused: FieldError[] = []
-  const refusedMarks: string[] = []
-  for (const [index, { line, stock }] of madeOf.entries()) {
+  const planned: LineMadeOf[] = []
+  for (const { line, stock } of madeOf) {
     const plans = await planner.planOnAll(line.profile, stock.sheet, line.length, brakes)
-    const chosen = findCheapestPlan(plans)
-    if (chosen) {
-      planned.push({ line, stock, chosen })
-    } else {
-      refusedMarks.push(line.mark)
-      refused.push(...reasonErrors(plans, `lines.${index}`))
-    }
+    planned.push({ line, stock, plans })
   }
-  if (refusedMarks.length > 0) {
-    throw cannotBend(
-      `No brake of the shop bends line ${refusedMarks.join(', ')} under the checks made. Nothing was released.`,
-      refused,
-    )
-  }
-  return gatherRuns(planned, new Map(brakes.map((brake) => [brake.id, brake])))
+  return planned
+}
+
+function chooseBrake(
+  plans: readonly BrakePlan[],
+  loads: ReadonlyMap<string, BrakeLoad>,
+  ofItsRun: string | undefined,
+): BrakePlan | undefined {
+  const cheapest = listCheapest(plans)
+  return cheapest.find(({ brakeId }) => brakeId === ofItsRun) ?? findFreest(cheapest, loads)
+}
+
+/** An override stands for what is not known to bend; where a brake bends it there is nothing to answer for. */
+function checkOverrides(madeOf: readonly LineMadeOf[], overrides: readonly OverrideInput[]): void {
+  const errors = madeOf.flatMap(({ line, plans }) => {
+    const [best] = listCheapest(plans)
+    if (!best || !overrides.some(({ lineId }) => lineId === line.id)) return []
+    const message = `Line ${line.mark} bends on ${best.brakeName}. Release it without an override.`
+    return [{ path: overridePath(overrides, line.id), message }]
+  })
+  if (errors.length > 0) throw invalidInput(errors)
+}
+
+function checkAllBend(madeOf: readonly LineMadeOf[], lines: readonly StoredLine[]): void {
+  const stuck = madeOf.filter(({ plans }) => listCheapest(plans).length === 0)
+  if (stuck.length === 0) return
+  const marks = stuck.map(({ line }) => line.mark).join(', ')
+  throw cannotBend(
+    `No brake of the shop bends line ${marks} under the checks made. Nothing was released.`,
+    stuck.flatMap(({ line, plans }) => reasonErrors(plans, `lines.${lines.indexOf(line)}`)),
+  )
 }
 
 const reasonErrors = (plans: readonly BrakePlan[], path: string): FieldError[] =>
@@ -80,33 +130,6 @@ const reasonErrors = (plans: readonly BrakePlan[], path: string): FieldError[] =
           code: reason.code,
         })),
       )
-
-function gatherRuns(
-  planned: readonly PlannedLine[],
-  brakes: ReadonlyMap<string, ShopBrake>,
-): PlannedRun[] {
-  const groups = new Map<string, [PlannedLine, ...PlannedLine[]]>()
-  for (const item of planned) {
-    const { line, chosen } = item
-    const key = JSON.stringify([bendingShape(line.profile), line.stockId, chosen.brakeId])
-    const group = groups.get(key)
-    if (group) group.push(item)
-    else groups.set(key, [item])
-  }
-  return [...groups.values()].map(([first, ...rest]) => {
-    const longest = rest.reduce(
-      (most, item) => (item.line.length > most.line.length ? item : most),
-      first,
-    )
-    return {
-      lines: [first.line, ...rest.map(({ line }) => line)],
-      stock: first.stock,
-      strip: flatStrip(first.line.profile, first.stock.sheet),
-      brake: getById(brakes, first.chosen.brakeId),
-      plan: longest.chosen.plan,
-    }
-  })
-}
 
 function getById<Value>(values: ReadonlyMap<string, Value>, id: string): Value {
   const value = values.get(id)

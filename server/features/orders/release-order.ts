@@ -1,13 +1,15 @@
 import { randomUUID } from 'node:crypto'
 import type { BrakesQueries } from '#server/features/brakes/brakes.queries'
 import type { FrozenLine } from '#server/features/orders/frozen-line'
+import type { PlannedRun } from '#server/features/orders/gather-runs'
 import type { OrdersQueries } from '#server/features/orders/orders.queries'
-import { planRelease, type PlannedRun } from '#server/features/orders/plan-release'
+import { planRelease } from '#server/features/orders/plan-release'
 import type { NewPiece, ReleaseStore } from '#server/features/orders/release.store'
 import type { StocksQueries } from '#server/features/stocks/stocks.queries'
 import type { SignedIn } from '#server/http/define-route'
 import { KERNEL_VERSION } from '#server/planning/kernel-version'
 import type { Planner } from '#server/planning/planner'
+import type { OverrideInput } from '#shared/orders/override.schema'
 import { pieceWeight } from '#shared/strip/weight'
 
 export interface ReleaseDeps {
@@ -18,27 +20,44 @@ export interface ReleaseDeps {
   readonly planner: Planner
 }
 
+export interface Release {
+  readonly person: Pick<SignedIn, 'id' | 'name'>
+  readonly at: Date
+  readonly overrides: readonly OverrideInput[]
+}
+
 /**
  * Freezes the lines of an order that this transaction has taken and brings its runs and pieces into
  * being. Afterwards the caller marks the order released; from then on the database refuses to
- * change a line.
+ * change a line. Gives what the order's event says of overrides: a line each with mark, brake and
+ * reason; empty without any.
  */
-export type ReleaseOrder = (orderId: string, person: Pick<SignedIn, 'id'>) => Promise<void>
+export type ReleaseOrder = (orderId: string, release: Release) => Promise<string>
 
 export const createReleaseOrder =
   ({ queries, store, stocks, brakes, planner }: ReleaseDeps): ReleaseOrder =>
-  async (orderId, person) => {
+  async (orderId, { person, at, overrides }) => {
     const lines = await queries.listLines(orderId)
-    const stockById = await stocks.mapStocks(lines.map(({ stockId }) => stockId))
-    const runs = await planRelease(lines, stockById, await brakes.listBrakes(), planner)
+    const runs = await planRelease({
+      lines,
+      stocks: await stocks.mapStocks(lines.map(({ stockId }) => stockId)),
+      brakes: await brakes.listBrakes(),
+      loads: await store.mapBrakeLoads(),
+      overrides,
+      by: person.name,
+      at,
+      planner,
+    })
     const named = runs.map((run) => ({ ...run, id: randomUUID() }))
     await store.freezeLines(new Map(runs.flatMap(frozenLines)))
     await store.createRuns(orderId, named)
     await store.createPieces(orderId, named.flatMap(newPieces), person.id)
+    return runs.flatMap(overrideTexts).join('\n')
   }
 
-const frozenLines = ({ lines, stock, strip, brake, plan }: PlannedRun): [string, FrozenLine][] =>
-  lines.map((line) => [
+const frozenLines = (run: PlannedRun): [string, FrozenLine][] => {
+  const { lines, stock, strip, brake, plan, override } = run
+  return lines.map((line) => [
     line.id,
     {
       stock,
@@ -48,10 +67,16 @@ const frozenLines = ({ lines, stock, strip, brake, plan }: PlannedRun): [string,
       brakeName: brake.brake.name,
       plan,
       kernelVersion: KERNEL_VERSION,
+      override,
     },
   ])
+}
 
 const newPieces = ({ lines, id: runId }: PlannedRun & { id: string }): NewPiece[] =>
   lines.flatMap(({ id: lineId, quantity }) =>
     Array.from({ length: quantity }, (_, index) => ({ lineId, runId, sequence: index + 1 })),
   )
+
+/** Read in every language. */
+const overrideTexts = ({ lines, brake, override }: PlannedRun): string[] =>
+  override ? lines.map(({ mark }) => `${mark} → ${brake.brake.name}: ${override.reason}`) : []

@@ -1,10 +1,13 @@
 import { randomUUID } from 'node:crypto'
+import { z } from 'zod'
 import type { Db } from '#server/db/knex'
+import { readRows } from '#server/db/read-rows'
 import { PIECES, type PieceInsert } from '#server/db/tables/pieces'
 import { RUNS, type RunInsert } from '#server/db/tables/runs'
 import type { FrozenLine } from '#server/features/orders/frozen-line'
-import type { PlannedRun } from '#server/features/orders/plan-release'
+import type { PlannedRun } from '#server/features/orders/gather-runs'
 import { newCode } from '#server/features/pieces/new-code'
+import type { BrakeLoad } from '#server/planning/choose-brake'
 import type { CodeKind } from '#shared/pieces/codes'
 
 export interface NewPiece {
@@ -18,7 +21,21 @@ const CHUNK = 1000
 /** A code is taken once in a thousand pieces at worst: five draws in a row mean a fault. */
 const MOST_DRAWS = 5
 
+const loadSchema = z.object({ brakeId: z.uuid(), busy: z.boolean(), queued: z.int() })
+
 export const createReleaseStore = (db: Db) => ({
+  /** What is still to be bent, by brake; brakes without work are left out. */
+  async mapBrakeLoads(): Promise<Map<string, BrakeLoad>> {
+    const rows = await readRows(
+      db,
+      loadSchema,
+      `select r.brake_id as "brakeId", bool_or(r.claimed_by is not null) as busy, count(*) as queued
+       from pieces p join runs r on r.id = p.run_id
+       where p.state = 'queued' group by r.brake_id`,
+    )
+    return new Map(rows.map(({ brakeId, busy, queued }) => [brakeId, { busy, queued }]))
+  },
+
   async freezeLines(frozen: ReadonlyMap<string, FrozenLine>): Promise<void> {
     await db.raw(
       `update order_lines set frozen = given.value
@@ -32,7 +49,7 @@ export const createReleaseStore = (db: Db) => ({
     orderId: string,
     runs: readonly (PlannedRun & { readonly id: string })[],
   ): Promise<void> {
-    const rows = runs.map(({ id, lines: [first], stock, strip, brake, plan }) => ({
+    const rows = runs.map(({ id, lines: [first], stock, strip, brake, plan, override }) => ({
       id,
       order_id: orderId,
       brake_id: brake.id,
@@ -42,6 +59,7 @@ export const createReleaseStore = (db: Db) => ({
       strip: JSON.stringify(strip),
       brake: JSON.stringify(brake.brake),
       plan: JSON.stringify(plan),
+      override: override && JSON.stringify(override),
     }))
     await insertWithCodes('run', rows, (coded: RunInsert[]) =>
       db(RUNS).insert(coded).onConflict('code').ignore().returning('id'),

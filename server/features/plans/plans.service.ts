@@ -1,6 +1,8 @@
 import type { BrakesQueries } from '#server/features/brakes/brakes.queries'
 import type { StocksQueries } from '#server/features/stocks/stocks.queries'
 import { invalidField, profileProblem } from '#server/http/errors'
+import type { SignedIn } from '#server/http/signed-in'
+import type { PersonalMessage } from '#server/live/live-message'
 import type { Planner } from '#server/planning/planner'
 import { profileErrors } from '#server/planning/profile-errors'
 import type { AnswerOf, BodyOf } from '#shared/http/endpoint'
@@ -12,26 +14,35 @@ export interface PlansDeps {
   readonly stocks: StocksQueries
   readonly brakes: BrakesQueries
   readonly planner: Planner
+  readonly tellProgress: (message: PersonalMessage) => void
 }
 
-export const createPlansService = ({ stocks, brakes, planner }: PlansDeps) => ({
-  /** @throws invalid-input for an unknown stock, profile-problem */
-  async planDrawing({
-    profile,
-    stockId,
-    pieceLength,
-  }: BodyOf<typeof planDrawing>): Promise<AnswerOf<typeof planDrawing>> {
+export const createPlansService = ({ stocks, brakes, planner, tellProgress }: PlansDeps) => ({
+  /** @throws invalid-input for an unknown stock, profile-problem, not-ready; the signal's reason */
+  async planDrawing(
+    { profile, stockId, pieceLength, progressKey }: BodyOf<typeof planDrawing>,
+    person: Pick<SignedIn, 'id'>,
+    signal: AbortSignal,
+  ): Promise<AnswerOf<typeof planDrawing>> {
     const stock = await stocks.findStock(stockId)
     if (!stock) throw invalidField('stockId', 'There is no such stock. Choose one of the list.')
     const errors = profileErrors(profile, stock, 'profile')
     if (errors.length > 0) throw profileProblem(errors)
     const strip = flatStrip(profile, stock.sheet)
-    const shopBrakes = await brakes.listBrakes()
-    return {
-      strip,
-      weight: pieceWeight(strip, stock.sheet, pieceLength),
-      brakes: await planner.planOnAll(profile, stock.sheet, pieceLength, shopBrakes),
-    }
+    const plans = await planner.planOnAll(
+      profile,
+      stock.sheet,
+      pieceLength,
+      await brakes.listBrakes(),
+      {
+        signal,
+        ...(progressKey !== undefined && {
+          onProgress: (progress) =>
+            tellProgress({ personId: person.id, plan: { key: progressKey, ...progress } }),
+        }),
+      },
+    )
+    return { strip, weight: pieceWeight(strip, stock.sheet, pieceLength), brakes: plans }
   },
 })
 

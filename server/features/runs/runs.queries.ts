@@ -3,6 +3,7 @@ import type { Db } from '#server/db/knex'
 import { findRow, readRows } from '#server/db/read-rows'
 import { notFound } from '#server/http/errors'
 import type { Progress } from '#shared/orders/order.schema'
+import { overrideSchema } from '#shared/orders/override.schema'
 import { pieceStateSchema } from '#shared/pieces/piece-state'
 import { profileSchema } from '#shared/profile/profile.schema'
 import {
@@ -32,6 +33,7 @@ const summaryRowSchema = z.object({
   neededBy: z.string(),
   lengths: runSummarySchema.shape.lengths,
   counts: z.partialRecord(pieceStateSchema, z.int()),
+  override: overrideSchema.nullable(),
   claimerId: z.uuid().nullable(),
   claimerName: z.string().nullable(),
   claimedAt: z.date().nullable(),
@@ -42,7 +44,7 @@ const SUMMARY = `
   select r.id, r.number, r.code, r.name, r.profile, r.stock, r.strip, r.brake_id as "brakeId",
     r.brake ->> 'name' as "brakeName", c.name as company, j.name as job,
     o.number as "orderNumber", o.needed_by as "neededBy",
-    r.claimed_by as "claimerId", claimer.name as "claimerName", r.claimed_at as "claimedAt",
+    r.override, r.claimed_by as "claimerId", claimer.name as "claimerName", r.claimed_at as "claimedAt",
     counted.counts, measured.lengths
   from runs r
   join orders o on o.id = r.order_id
@@ -147,6 +149,7 @@ const toSummary = (row: z.infer<typeof summaryRowSchema>): RunSummary => ({
   neededBy: row.neededBy,
   lengths: row.lengths,
   progress: toProgress(row.counts),
+  override: row.override,
   claimedBy: toClaim(row),
 })
 

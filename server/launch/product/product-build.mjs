@@ -5,7 +5,12 @@ import { hashSources } from './source-hash.mjs'
 
 /** Written last, so that a build cut short counts as none. */
 const RECORD = inRoot('dist/.inputs')
-const OUTPUTS = ['dist/client/index.html', 'dist/server/index.js', 'dist/server/cli.js']
+const OUTPUTS = [
+  'dist/client/index.html',
+  'dist/server/index.js',
+  'dist/server/plan-worker.js',
+  'dist/server/cli.js',
+]
 
 /**
  * @param {string} hash of the sources as they are now

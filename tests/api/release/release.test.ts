@@ -110,8 +110,6 @@ describe('Releasing an order', () => {
   it.each([
     ['eaveDrip', [4, 0, 4], 'Two-way folder'],
     ['ridge', [12, 8, 6], 'Site brake'],
-    // Equal in everything: the shop's first brake.
-    ['sidewall', [0, 0, 0], 'Ten-six folder'],
   ] as const)('chooses the brake whose plan costs least: %s', async (key, handling, brake) => {
     const { profile } = getStarter(key)
     const asked = await shop.counter.call(planDrawing, {

@@ -111,6 +111,7 @@ export const lineOf = (mark: string, more: Partial<OrderLine> = {}): OrderLine =
   strip: flatStrip(PROFILE, STOCK.sheet),
   pieceWeight: 5.6,
   bendsOn: ['Long folder'],
+  override: null,
   pieces: [],
   ...more,
 })

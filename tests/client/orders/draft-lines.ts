@@ -64,6 +64,7 @@ const orderLine = (change: Partial<OrderLine> = {}): OrderLine => ({
   strip: { girth: 8.75, stripWidth: 8.65, creases: [] },
   pieceWeight: 8.1,
   bendsOn: [],
+  override: null,
   pieces: [],
   ...change,
 })

@@ -1,42 +1,30 @@
 import { describe, expect, it } from 'vitest'
 import { KeptValues } from '#server/planning/kept-values'
 
-function keep(most: number) {
-  const kept = new KeptValues<{ readonly key: string }>(most)
-  const made: string[] = []
-  const ask = (key: string) =>
-    kept.getOrMake(key, () => {
-      made.push(key)
-      return { key }
-    })
-  return { ask, made }
-}
+const value = (name: string) => ({ name })
 
 describe('Kept values', () => {
-  it('are made once for as long as they are kept', () => {
-    const { ask, made } = keep(2)
-    expect(ask('a')).toBe(ask('a'))
-    expect(made).toEqual(['a'])
+  it('are found as they were kept, and nothing else is', () => {
+    const kept = new KeptValues<{ readonly name: string }>(2)
+    const first = value('first')
+    kept.keep('a', first)
+    expect(kept.find('a')).toBe(first)
+    expect(kept.find('b')).toBeUndefined()
+  })
+
+  it('give way to a newer one of the same key', () => {
+    const kept = new KeptValues<{ readonly name: string }>(2)
+    kept.keep('a', value('old'))
+    kept.keep('a', value('new'))
+    expect(kept.find('a')).toEqual(value('new'))
   })
 
   it('give way in the order in which they were last asked for', () => {
-    const { ask, made } = keep(2)
-    ask('a')
-    ask('b')
-    ask('a')
-    ask('c')
-    ask('a')
-    ask('b')
-    expect(made).toEqual(['a', 'b', 'c', 'b'])
-  })
-
-  it('do not keep what could not be made', () => {
-    const kept = new KeptValues(2)
-    const fail = () => {
-      throw new RangeError('no')
-    }
-    expect(() => kept.getOrMake('a', fail)).toThrow(RangeError)
-    const made = {}
-    expect(kept.getOrMake('a', () => made)).toBe(made)
+    const kept = new KeptValues<{ readonly name: string }>(2)
+    kept.keep('a', value('a'))
+    kept.keep('b', value('b'))
+    kept.find('a')
+    kept.keep('c', value('c'))
+    expect(['a', 'b', 'c'].map((key) => kept.find(key)?.name)).toEqual(['a', undefined, 'c'])
   })
 })
