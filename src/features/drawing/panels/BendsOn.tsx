@@ -3,7 +3,6 @@ import { problemMessage } from '#shared/profile/problem-message'
 import { Icon } from '@/components/Icon'
 import { usePerson } from '@/features/people/person-context'
 import type { CheckedPlan, DrawingCheck } from '../check/check-drawing'
-import { usePlanWords } from '../usePlanWords'
 import { ChecksMade } from './ChecksMade'
 
 interface Props {
@@ -16,7 +15,6 @@ export function BendsOn({ check, plans }: Props) {
   const { t } = useTranslation('drawing')
   const { t: say } = useTranslation('profile')
   const { units } = usePerson()
-  const words = usePlanWords()
   const error = check?.problems.find(({ severity }) => severity === 'error')
   const warning = check?.problems.find(({ severity }) => severity === 'warning')
   const bending = plans.filter(({ plan }) => plan.feasible)
@@ -31,15 +29,7 @@ export function BendsOn({ check, plans }: Props) {
     )
   }
   if (plans.length === 0) return <Line tone="plain">{t('answer.planning')}</Line>
-  if (bending.length === 0) {
-    const first = plans[0]
-    return (
-      <Line tone="bad">
-        {t('answer.bendsNowhere')}{' '}
-        {first && `${first.brakeName}: ${words.reasons(first.plan).join(' ')}`}
-      </Line>
-    )
-  }
+  if (bending.length === 0) return <Line tone="bad">{t('answer.bendsNowhere')}</Line>
   return (
     <Line tone="good">
       {bending.length === plans.length
