@@ -19,7 +19,8 @@ interface Props {
   /** Reasons with their pictures and cures come with the server's word. */
   readonly confirmed: boolean
   readonly onCure?: (cure: PlanCure) => void
-  readonly onClose: () => void
+  /** Given where the answers stand in place of something else. */
+  readonly onClose?: () => void
 }
 
 /** Every brake of the shop: how it bends the piece, at what cost and in what time, or why it does not. */
@@ -40,12 +41,14 @@ export function BrakeAnswers({
   const ordered = plans.toSorted((a, b) => Number(b.plan.feasible) - Number(a.plan.feasible))
   return (
     <section aria-label={t('brakesTitle')} className="flex flex-col divide-y divide-rule">
-      <div className="flex items-center justify-between gap-3">
-        <h2 className="text-lead font-bold">{t('brakesTitle')}</h2>
-        <Button variant="quiet" onClick={onClose}>
-          {t('close')}
-        </Button>
-      </div>
+      {onClose && (
+        <div className="flex items-center justify-between gap-3">
+          <h2 className="text-lead font-bold">{t('brakesTitle')}</h2>
+          <Button variant="quiet" onClick={onClose}>
+            {t('close')}
+          </Button>
+        </div>
+      )}
       {!confirmed && <p className="py-2 text-small text-scribe">{t('waiting')}</p>}
       {ordered.map(({ brakeId, brakeName, plan }) => {
         const brake = brakes.find(({ id }) => id === brakeId)?.brake

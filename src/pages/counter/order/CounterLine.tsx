@@ -2,6 +2,7 @@ import { useId } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { OrderLine } from '#shared/orders/order.schema'
 import { paths } from '@/app/paths'
+import { PlanDetails } from '@/features/drawing/plan/PlanDetails'
 import { BendsLine } from '@/features/orders/components/LineBends'
 import { LineFacts } from '@/features/orders/components/LineFacts'
 import { LineFigure } from '@/features/orders/components/LineFigure'
@@ -46,6 +47,9 @@ export function CounterLine({ line }: { readonly line: OrderLine }) {
               </div>
             )}
           </BendsLine>
+          {pieces.length === 0 && (
+            <PlanDetails profile={line.profile} stock={stock} pieceLength={line.length} />
+          )}
         </div>
       </div>
       {pieces.length > 0 && (
