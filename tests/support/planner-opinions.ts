@@ -1,6 +1,5 @@
 import { foldGroundOf, foldSetup } from '#shared/bend-plan/fold-setup'
 import { FOLD_TESTS } from '#shared/bend-plan/fold-tests/fold-tests'
-import { restsOn } from '#shared/bend-plan/gauge-stop'
 import type { Orientation } from '#shared/bend-plan/orientation'
 import type { PlanRequest } from '#shared/bend-plan/planner'
 import type { PieceBend } from '#shared/bend-plan/workpiece'
@@ -50,13 +49,23 @@ const openGround = (request: PlanRequest) => {
     const [front, rear] = o.aBack ? [towardsB, towardsA] : [towardsA, towardsB]
     const isWide = front > rear + 1e-6
     const big = isWide && front > brake.bigFront + 1e-9 ? (isShort ? 2 : 4) * crew : 0
-    const rest = brake.gauge && restsOn(ground.piece, bend, o.aBack ? 'A' : 'B', bits(made))
-    return [big, isWide ? 1 : 0, rest === 'formedFace' ? 1 : 0]
+    const behind = bends.filter(
+      ({ index }) => made.has(index) && (o.aBack ? index < bend.index : index > bend.index),
+    )
+    // A closed hem alone is no face.
+    const [only] = behind
+    const isFlat = only === undefined || (behind.length === 1 && only.hem?.open === false)
+    return [big, isWide ? 1 : 0, brake.gauge === null || isFlat ? 0 : 1]
   }
 
+  const known = new Map<string, boolean>()
   const mayFold = (made: ReadonlySet<number>, bend: PieceBend, o: Orientation): boolean => {
-    const setup = foldSetup(ground, bits(made), bend, o)
-    return FOLD_TESTS.every((test) => test.find(setup) === undefined)
+    const key = `${bits(made)} ${bend.index} ${o.leftUp} ${o.aBack}`
+    const answer =
+      known.get(key) ??
+      FOLD_TESTS.every((test) => test.find(foldSetup(ground, bits(made), bend, o)) === undefined)
+    known.set(key, answer)
+    return answer
   }
 
   return { bends, moving, folding, mayFold }
