@@ -127,7 +127,8 @@ export function RunScreen({ run }: { readonly run: Run }) {
             <Button onClick={() => setAsking('trouble')}>{t('trouble.open')}</Button>
           </>
         )}
-        <div className="ml-auto flex gap-3">
+        {/* A run released against the checks has no hits to page through. */}
+        <div className={last === 0 ? 'hidden' : 'ml-auto flex gap-3'}>
           <Button disabled={card === 0} onClick={() => setCard(card - 1)}>
             {card <= 1 ? t('toStrip') : t('toStep', { number: card - 1 })}
           </Button>

@@ -1,5 +1,6 @@
 import { act, configure, screen, waitFor, within } from '@testing-library/react'
 import { beforeAll, beforeEach, describe, expect, it, vi } from 'vitest'
+import { DEMO_BRAKES } from '#shared/bend-plan/demo-brakes'
 import type { Order } from '#shared/orders/order.schema'
 import { holdCsrfToken } from '@/lib/api/csrf-token'
 import { fakeApi, json, personOf, problem } from '../../support/fake-api'
@@ -7,6 +8,7 @@ import { renderApp } from '../../support/render-app'
 import { lineOf, ORDER_ID, orderOf, pieceCode } from './counter-data'
 
 const ORDER = `GET /api/orders/${ORDER_ID}`
+const BRAKE_ID = '7a1e5c52-0d7f-4c39-9f0e-2b1d7a3c5e01'
 const RELEASE = `POST /api/orders/${ORDER_ID}/release`
 
 async function open(order: Order = orderOf()) {
@@ -14,6 +16,8 @@ async function open(order: Order = orderOf()) {
     'GET /api/session': () => json({ person: personOf('counter'), csrfToken: 'inside' }),
     'GET /api/orders': () => json({ items: [], next: null }),
     [ORDER]: () => json(order),
+    'GET /api/brakes': () =>
+      json({ items: [{ id: BRAKE_ID, position: 1, brake: DEMO_BRAKES[0] }] }),
     'POST /api/plans': () => problem('internal'),
   })
   const app = renderApp(`/counter/orders/${ORDER_ID}`)
@@ -80,6 +84,24 @@ describe('releasing an order', () => {
     await open(orderOf({ lines: [lineOf('A'), lineOf('C', { bendsOn: [] })] }))
     expect(await releaseButton()).toBeDisabled()
     expect(screen.getByRole('alert')).toHaveTextContent('No brake of the shop bends C as drawn')
+  })
+
+  it('against the checks needs a brake and a reason, and sends both', async () => {
+    const nowhere = lineOf('C', { bendsOn: [] })
+    const { api, user } = await open(orderOf({ lines: [lineOf('A'), nowhere] }))
+    api.on(RELEASE, () => json(released()))
+    await user.click(screen.getByText('Release it all the same'))
+    await screen.findByRole('option', { name: DEMO_BRAKES[0]?.name ?? '' })
+    await user.selectOptions(await screen.findByLabelText('On which brake'), BRAKE_ID)
+    expect(await releaseButton()).toBeDisabled()
+    await user.type(screen.getByLabelText('Why it can be made'), 'In two stages')
+    await user.click(await screen.findByRole('button', { name: 'Release against the checks' }))
+    await waitFor(() =>
+      expect(api.seen(RELEASE)[0]?.body).toEqual({
+        version: 3,
+        overrides: [{ lineId: nowhere.id, brakeId: BRAKE_ID, reason: 'In two stages' }],
+      }),
+    )
   })
 
   it('that is refused names the lines and the reasons', async () => {

@@ -2,6 +2,7 @@ import { useId } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { OrderLine } from '#shared/orders/order.schema'
 import { BendsLine } from './LineBends'
+import { OverrideNote } from './OverrideNote'
 import { LineFacts } from './LineFacts'
 import { LineFigure } from './LineFigure'
 import { LineHead } from './LineHead'
@@ -47,6 +48,7 @@ export function OrderLineCard({ line, unreleased, piecePath }: Props) {
                 : drawing('answer.bendsNowhere')
             }
           />
+          {line.override && <OverrideNote override={line.override} />}
           {unreleased && <p className="text-small text-scribe">{t('line.noPieces')}</p>}
           {pieces.length > 0 && (
             <LinePieces pieces={pieces} quantity={quantity} piecePath={piecePath} />

@@ -3,6 +3,7 @@ import type { Run } from '#shared/runs/runs.contract'
 import { useElementSize } from '@/features/drawing/canvas/useElementSize'
 import { ProfilePair } from '@/features/drawing/figure/ProfilePair'
 import { ChecksMade } from '@/features/drawing/panels/ChecksMade'
+import { OverrideNote } from '@/features/orders/components/OverrideNote'
 import { useUnits } from '@/features/people/useUnits'
 import { useFormats } from '@/lib/format/useFormats'
 import { StandFigure } from './StandFigure'
@@ -49,6 +50,12 @@ export function StripCard({ run }: { readonly run: Run }) {
           {run.plan.seconds !== null && ` ${t('strip.time', { time: duration(run.plan.seconds) })}`}
         </p>
         <ChecksMade plan={run.plan} />
+        {run.override && (
+          <>
+            <OverrideNote override={run.override} />
+            <p className="text-small">{t('override:noSteps')}</p>
+          </>
+        )}
         <p className="mt-auto border-t border-rule pt-3 text-small text-scribe">
           {t('strip.caution', { weight: weight(heaviest) })}
         </p>

@@ -7,6 +7,7 @@ import { BendsLine } from '@/features/orders/components/LineBends'
 import { LineFacts } from '@/features/orders/components/LineFacts'
 import { LineFigure } from '@/features/orders/components/LineFigure'
 import { LineHead } from '@/features/orders/components/LineHead'
+import { OverrideNote } from '@/features/orders/components/OverrideNote'
 import { PieceCodes } from '@/features/orders/components/PieceCodes'
 import { LineReasons } from '@/features/orders/components/RefusedLines'
 import { StockName } from '@/features/orders/components/StockName'
@@ -47,6 +48,7 @@ export function CounterLine({ line }: { readonly line: OrderLine }) {
               </div>
             )}
           </BendsLine>
+          {line.override && <OverrideNote override={line.override} />}
           {pieces.length === 0 && (
             <PlanDetails profile={line.profile} stock={stock} pieceLength={line.length} />
           )}

@@ -1,6 +1,7 @@
 import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
 import { orderNumber, type Order } from '#shared/orders/order.schema'
+import type { OverrideInput } from '#shared/orders/override.schema'
 import { paths } from '@/app/paths'
 import { Button } from '@/components/Button'
 import { ButtonLink } from '@/components/ButtonLink'
@@ -18,6 +19,8 @@ import { AskDialog } from './AskDialog'
 import { CounterLine } from './CounterLine'
 import { OrderPast } from './OrderPast'
 import { OrderSummaryPanel } from './OrderSummaryPanel'
+import { isComplete } from './override-complete'
+import { OverrideForm } from './OverrideForm'
 import { ReleaseRefusal } from './ReleaseRefusal'
 
 const ANSWER_FORM = 'answer'
@@ -33,7 +36,10 @@ export function OrderScreen({ order }: { readonly order: Order }) {
   const asked = order.state === 'question'
   const nowhere = order.lines.filter(({ bendsOn }) => bendsOn.length === 0)
   const incoming = isIncoming(order)
-  const mayRelease = nowhere.length === 0 && unseen === null
+  const [overrides, setOverrides] = useState<readonly OverrideInput[]>([])
+  const mayRelease = isComplete(nowhere, overrides) && unseen === null
+  // Only of lines that need one: a line amended meanwhile may bend now.
+  const needed = overrides.filter(({ lineId }) => nowhere.some(({ id }) => id === lineId))
 
   const buttons = (
     <>
@@ -52,9 +58,14 @@ export function OrderScreen({ order }: { readonly order: Order }) {
           variant="primary"
           disabled={!mayRelease}
           pending={release.isPending}
-          onClick={() => release.mutate({ version: order.version })}
+          onClick={() =>
+            release.mutate({
+              version: order.version,
+              ...(needed.length > 0 ? { overrides: [...needed] } : {}),
+            })
+          }
         >
-          {t('order.release')}
+          {nowhere.length > 0 && mayRelease ? t('override:release') : t('order.release')}
         </Button>
       )}
     </>
@@ -112,6 +123,9 @@ export function OrderScreen({ order }: { readonly order: Order }) {
               ))}
             </ul>
           </Notice>
+        )}
+        {incoming && nowhere.length > 0 && (
+          <OverrideForm lines={nowhere} overrides={overrides} onChange={setOverrides} />
         )}
         <ReleaseRefusal error={release.error} order={order} />
         {asked && (
