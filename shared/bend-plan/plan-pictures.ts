@@ -1,6 +1,6 @@
 import { rotate, vector } from '#shared/geometry/vector'
 import type { Vector } from '#shared/geometry/vector'
-import type { Inches } from '#shared/units/brands'
+import type { Degrees, Inches } from '#shared/units/brands'
 import { chainOf } from './fold-frame'
 import { directionOf, frontSide, rearSide } from './orientation'
 import { isPaintedUp } from './painted-side'
@@ -22,6 +22,10 @@ export interface StepPicture {
   /** From the bend line to the front, before and after the hit. */
   readonly frontBefore: readonly Vector[]
   readonly frontAfter: readonly Vector[]
+  /** The front on its way, in order; of a hem how its first hit leaves it, before it is flattened. */
+  readonly swings: readonly (readonly Vector[])[]
+  /** Degrees that the apron swings in the picture: those of the bend, of a hem its first hit. */
+  readonly swung: Degrees
   readonly edgeAtFront: Side
   readonly edgeAtBack: Side
   /** Whether the painted side of the clamped sheet faces up; null with both sides or none painted. */
@@ -35,6 +39,9 @@ const withHemsDrawn = (piece: Workpiece): Workpiece => ({
     bend.hem === null ? bend : { ...bend, hem: { ...bend.hem, open: true } },
   ),
 })
+
+/** Where the front is shown on its way, in parts of the swing. */
+const ON_THE_WAY = [1 / 3, 2 / 3]
 
 /** A finished hem: over the fold and back along the sheet. */
 const foldedLip = ({ lip, gap }: PieceHem, thickness: Inches): readonly Vector[] => {
@@ -58,6 +65,8 @@ export const stepPictures = (plan: Plan, request: PlanRequest): readonly StepPic
       bend.hem === null
         ? front.map((point) => rotate(point, Math.abs(bend.turn)))
         : foldedLip(bend.hem, piece.thickness)
+    const swung = bend.hem === null ? Math.abs(bend.turn) : request.brake.hemAngle
+    const swings = bend.hem === null ? ON_THE_WAY.map((part) => part * swung) : [swung]
     made |= 1 << bend.index
     const seen =
       directionOf(bend, step) === 'up' ? (points: readonly Vector[]) => points : upsideDown
@@ -65,6 +74,8 @@ export const stepPictures = (plan: Plan, request: PlanRequest): readonly StepPic
       clamped: seen(rear),
       frontBefore: seen(front),
       frontAfter: seen(after),
+      swings: swings.map((angle) => seen(front.map((point) => rotate(point, angle)))),
+      swung,
       edgeAtFront: frontSide(step),
       edgeAtBack: rearSide(step),
       paintedUp: isPaintedUp(request.paintedSide, step.leftUp),

@@ -39,9 +39,17 @@ const MARGIN = 0.09
 const reachOf = (points: readonly Vector[]): number =>
   Math.max(0, ...points.map((point) => Math.hypot(point.x, point.y)))
 
-/** What must be seen: both fronts, and the rear as far as it helps. */
+/** The front where the apron leaves it: a hem is flattened after that. */
+const swungFront = (picture: StepPicture, direction: 'up' | 'down'): readonly Vector[] => {
+  const { frontBefore, frontAfter, swings, swung } = picture
+  if (swings.length === 0) return frontAfter
+  return frontBefore.map((point) => rotate(point, direction === 'up' ? swung : 0 - swung))
+}
+
+/** What must be seen: all fronts, and the rear as far as it helps. */
 const boundsToShow = (picture: StepPicture): Bounds => {
-  const fronts = [vector(0, 0), ...picture.frontBefore, ...picture.frontAfter]
+  const { frontBefore, frontAfter, swings } = picture
+  const fronts = [vector(0, 0), ...frontBefore, ...frontAfter, ...swings.flat()]
   const depth = Math.max(LEAST_REAR, REAR_SHARE * reachOf(fronts))
   const rear = picture.clamped.filter((point) => point.x >= 0 - depth)
   const isCut = rear.length < picture.clamped.length
@@ -81,8 +89,8 @@ const viewOf = (picture: StepPicture, options: StepOptions): StepView => {
 /**
  * One step in the brake, seen from the end: bend line in the middle, front to the right. The
  * clamped rear and the front as it will be are metal with the color on its side, the front as it
- * is now is dashed. Hems are opened as in `drawnSection`. Tools are cut by the frame; they are
- * drawn closed on the sheet.
+ * is now is dashed, its places on the way are thin, and the apron stands where its swing ends. Hems
+ * are opened as in `drawnSection`. Tools are cut by the frame; they are drawn closed on the sheet.
  */
 export const stepFigure = (picture: StepPicture, options: StepOptions): DisplayList => {
   const view = viewOf(picture, options)
@@ -96,9 +104,16 @@ export const stepFigure = (picture: StepPicture, options: StepOptions): DisplayL
   const before = openHems(toPixels(picture.frontBefore), hemRoom)
   const items = [
     ...drawTools(picture, options, view),
+    ...picture.swings.flatMap((front) => drawOnTheWay(openHems(toPixels(front), hemRoom), view)),
     ...drawGhost(before, view),
     ...drawSheet(after, picture.paintedUp, view),
-    ...swingArrow(before, toPixels(picture.frontAfter), options.direction, pen, view),
+    ...swingArrow(
+      before,
+      toPixels(swungFront(picture, options.direction)),
+      options.direction,
+      pen,
+      view,
+    ),
     ...drawLetters(after, picture, view),
     ...drawMark(options.mark, view),
   ]
@@ -124,14 +139,12 @@ const drawTools = (picture: StepPicture, options: StepOptions, view: StepView): 
   if (tools === null) return []
   const { pen, scale, frame } = view
   const half = halfWeight(pen)
-  const first = picture.frontAfter[1]
-  const swing = first ? Math.abs((Math.atan2(first.y, first.x) * 180) / Math.PI) : 0
   const upright = (polygon: ToolSet['inner'], lift: number) =>
     polygon.map(([x, y]) => vector(x * scale, y * scale + lift))
   const polygons = [
     upright(tools.inner, half),
     upright(tools.outer, 0 - half),
-    upright(tools.apron, 0 - half).map((point) => rotate(point, swing)),
+    upright(tools.apron, 0 - half).map((point) => rotate(point, picture.swung)),
   ]
   return polygons.flatMap((polygon) => {
     const seen = polygon
@@ -174,6 +187,9 @@ const drawGhost = (before: readonly Vector[], view: StepView): DisplayItem[] => 
     dash: [width * 2.2, width * 1.6],
   }))
 }
+
+const drawOnTheWay = (front: readonly Vector[], view: StepView): DisplayItem[] =>
+  inFrame(drawn(front, 0, view), view.frame, 1).map((run) => path('ghost', run, 1.5))
 
 const drawSheet = (
   chain: readonly Vector[],

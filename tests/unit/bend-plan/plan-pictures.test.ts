@@ -33,6 +33,26 @@ describe('pictures of the steps', () => {
     expect(picture).toMatchObject({ edgeAtFront: 'B', edgeAtBack: 'A', paintedUp: true })
   })
 
+  test('on its way the front is shown at the thirds of its swing', () => {
+    const asked = request(section([3, 2], [-90]), DEMO_BRAKE.upAndDown)
+    const [picture] = stepPictures(planBends(asked), asked)
+    const tips = picture?.swings.map((front) => front.at(-1))
+    expect(rounded(tips?.flatMap((tip) => tip ?? []))).toEqual([
+      [1.732051, -1],
+      [1, -1.732051],
+    ])
+    expect(picture?.swung).toBe(90)
+  })
+
+  test('of a hem the first hit is shown, to the hem angle', () => {
+    const asked = request(section([4], [], { B: hem(1) }), DEMO_BRAKE.site)
+    const [picture] = stepPictures(planBends(asked), asked)
+    expect(picture?.swings).toHaveLength(1)
+    const [, tip] = picture?.swings[0] ?? []
+    expect((Math.atan2(tip?.y ?? NaN, tip?.x ?? NaN) * 180) / Math.PI).toBeCloseTo(145, 9)
+    expect(picture?.swung).toBe(145)
+  })
+
   test('a bend down truly swings down, paint up', () => {
     const asked = request(section([3, 2], [-90]), DEMO_BRAKE.upAndDown)
     const [picture] = stepPictures(planBends(asked), asked)

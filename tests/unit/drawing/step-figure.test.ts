@@ -69,6 +69,27 @@ describe.each(['gable', 'box eave', 'Z closure', 'box gutter', 'W valley'])(
       }
     })
 
+    it('show the front on its way thinner than where it starts', () => {
+      for (const { step, picture, tools } of steps) {
+        const display = stepFigure(picture, {
+          width: 520,
+          height: 360,
+          direction: step.direction,
+          tools,
+        })
+        const ghosts = display.items.flatMap((item) =>
+          item.role === 'ghost' && item.kind === 'path' ? [item] : [],
+        )
+        const [thin, dashed] = [
+          ghosts.filter(({ dash }) => !dash),
+          ghosts.filter(({ dash }) => dash),
+        ]
+        expect(thin.length).toBeGreaterThanOrEqual(step.hits === 1 ? 2 : 1)
+        const [start] = dashed
+        expect(thin.every(({ width }) => width < (start?.width ?? 0))).toBe(true)
+      }
+    })
+
     it('show the finished front above the bend line when it swings up, below when down', () => {
       for (const { step, picture } of steps.filter(({ step: { hits } }) => hits === 1)) {
         const [, first] = picture.frontAfter

@@ -33,6 +33,8 @@ export function ContactPicture({ contact, brake, colorSide, paintHex }: Props) {
         clamped: points(contact.rear),
         frontBefore: front,
         frontAfter: front,
+        swings: [],
+        swung: contact.swung,
         edgeAtFront: contact.aBack ? 'B' : 'A',
         edgeAtBack: contact.aBack ? 'A' : 'B',
         paintedUp,
