@@ -46,7 +46,7 @@ const asReason = (ground: BlockedGround, fold: BlockedFold, explain: boolean): P
     limit: failure.limit,
     overlap: overlap?.length ?? null,
     edge: edgeOf(fold),
-    contact: explain ? contactOf(setupOf(ground, fold), failure.check, overlap) : null,
+    contact: explain ? contactOf(setupOf(ground, fold), failure.check) : null,
   }
 }
 

@@ -4,6 +4,7 @@ import type { BenchShop } from './bench-shop'
 import { openBenchShop } from './bench-shop'
 import { tableLines } from './bench-table'
 import { benchDrawing } from './drawing.bench'
+import { benchExplain } from './explain.bench'
 import { benchMoves, movesTitle } from './moves.bench'
 import { benchOrders, ordersTitle } from './orders.bench'
 import { benchPlan } from './plan.bench'
@@ -27,6 +28,7 @@ async function machineLine({ db }: BenchShop): Promise<string> {
 const kernel = [
   { title: 'Strip, in this process', rows: benchStrip() },
   { title: 'Bend plan, in this process', rows: benchPlan() },
+  { title: 'Why not and what would cure it, in this process', rows: benchExplain() },
   { title: 'Drawing, in this process', rows: benchDrawing() },
 ]
 

@@ -1,17 +1,19 @@
 import { rotate, vector } from '#shared/geometry/vector'
 import type { Vector } from '#shared/geometry/vector'
-import type { Degrees } from '#shared/units/brands'
+import type { Degrees, Inches } from '#shared/units/brands'
 import { sheetOutline } from '../collision/outline'
 import type { Outline } from '../collision/outline'
+import { meetsStill } from '../collision/still'
 import { meetsSwinging } from '../collision/swing'
 import type { FoldSetup } from '../fold-setup'
 import type { PlanCheck } from '../plan.schema'
 import type { Contact } from './contact.schema'
-import { cutSetup } from './cut-setup'
+import { cutSetup, runLength } from './cut-setup'
+import type { Place } from './cut-setup'
 import { findCaught } from './draw-out-contact'
 import { firstContact, swungOutline } from './first-contact'
 import { nearestPoints } from './nearest-points'
-import type { Overlap } from './overlap'
+import { LEAST, bisect } from './overlap'
 
 /** In the fold frame, where every front swings up. */
 interface Met {
@@ -30,63 +32,90 @@ const swungFront = ({ front }: FoldSetup, swung: Degrees): readonly Vector[] =>
  * Sheet that is in the way before anything swings may lie deep inside a tool. Cut off where it just
  * clears, its end is the first place, walking out from the bend line, that meets.
  */
-const justClear = (setup: FoldSetup, overlap: Overlap | null): FoldSetup =>
-  overlap === null ? setup : cutSetup(setup, overlap.place, overlap.length)
+const justClear = (
+  setup: FoldSetup,
+  place: Place,
+  meets: (setup: FoldSetup) => boolean,
+): FoldSetup => {
+  const most = runLength(setup[place].chain.points) - LEAST
+  const isFree = (cut: Inches): boolean => !meets(cutSetup(setup, place, cut))
+  return isFree(most) ? cutSetup(setup, place, bisect(0, most, isFree)) : setup
+}
 
-const rearAtTool = (setup: FoldSetup, overlap: Overlap | null): Met => {
-  const { rear } = justClear(setup, overlap)
-  const inner = nearestPoints(rear.outline, setup.tools.inner)
-  const outer = nearestPoints(rear.outline, setup.tools.outer)
+const rearAtTool = (setup: FoldSetup): Met => {
+  const { inner, outer } = setup.tools
+  const { rear } = justClear(setup, 'rear', (cut) =>
+    [inner, outer].some((tool) => meetsStill(cut.rear.outline, tool, setup.clearance)),
+  )
+  const toInner = nearestPoints(rear.outline, inner)
+  const toOuter = nearestPoints(rear.outline, outer)
+  const isInner = toInner.distance <= toOuter.distance
   return {
     front: swungFront(setup, 0),
     swung: 0,
-    at: inner.distance <= outer.distance ? inner.at : outer.at,
-    against: inner.distance <= outer.distance ? 'inner' : 'outer',
+    at: isInner ? toInner.at : toOuter.at,
+    against: isInner ? 'inner' : 'outer',
   }
 }
 
-const frontAtTool = (setup: FoldSetup, overlap: Overlap | null): Met | undefined => {
+const frontAtTool = (setup: FoldSetup): Met | undefined => {
   const { pastNose } = setup.front
   if (pastNose === undefined) return undefined
-  let first: { readonly swung: Degrees; readonly against: (typeof TOOLS)[number] } | undefined
-  for (const against of TOOLS) {
-    const tool = setup.tools[against]
+  const met = TOOLS.flatMap((against) => {
     const swung = firstContact(
-      (swing) => meetsSwinging(pastNose, tool, swing, setup.clearance),
+      (swing) => meetsSwinging(pastNose, setup.tools[against], swing, setup.clearance),
       setup.swing,
     )
-    if (swung !== undefined && (first === undefined || swung < first.swung)) {
-      first = { swung, against }
-    }
-  }
-  if (first === undefined) return undefined
-  const { swung, against } = first
-  const shown = (swung === 0 && justClear(setup, overlap).front.pastNose) || pastNose
-  const { at } = nearestPoints(swungOutline(shown, swung), setup.tools[against])
+    return swung === undefined ? [] : [{ against, swung }]
+  })
+  if (met.length === 0) return undefined
+  const swung = Math.min(...met.map((each) => each.swung))
+  const first = met.filter((each) => each.swung === swung)
+  const clear =
+    swung > 0
+      ? setup
+      : justClear(setup, 'front', ({ front: { pastNose: left } }) =>
+          first.some(
+            ({ against }) =>
+              left !== undefined && meetsStill(left, setup.tools[against], setup.clearance),
+          ),
+        )
+  const shown = swungOutline(clear.front.pastNose ?? pastNose, swung)
+  const { against, at } = first
+    .map((each) => ({ ...each, ...nearestPoints(shown, setup.tools[each.against]) }))
+    .reduce((best, each) => (each.distance < best.distance ? each : best))
   return { front: swungFront(setup, swung), swung, at, against }
 }
 
-const pieceAtItself = (setup: FoldSetup, overlap: Overlap | null): Met | undefined => {
+const pieceAtItself = (setup: FoldSetup): Met | undefined => {
+  const { thickness } = setup.piece
+  const { rear } = setup
   const swung = firstContact(
-    (swing) =>
-      meetsSwinging(setup.front.outline, setup.rear.outline, swing, setup.piece.thickness, true),
+    (swing) => meetsSwinging(setup.front.outline, rear.outline, swing, thickness, true),
     setup.swing,
   )
   if (swung === undefined) return undefined
-  const shown = swung === 0 ? justClear(setup, overlap) : setup
-  const front = swungOutline(shown.front.outline, swung)
-  const { at } = nearestPoints(front, shown.rear.outline, true)
+  const { front } =
+    swung > 0
+      ? setup
+      : justClear(setup, 'front', (cut) =>
+          meetsStill(cut.front.outline, rear.outline, thickness, true),
+        )
+  const { at } = nearestPoints(swungOutline(front.outline, swung), rear.outline, true)
   return { front: swungFront(setup, swung), swung, at, against: 'piece' }
 }
 
-const apronAtRear = (setup: FoldSetup, overlap: Overlap | null): Met | undefined => {
+const apronAtRear = (setup: FoldSetup): Met | undefined => {
   const { apron } = setup.tools
   const swung = firstContact(
     (swing) => meetsSwinging(apron, setup.rear.outline, swing, setup.clearance),
     setup.swing,
   )
   if (swung === undefined) return undefined
-  const { rear } = swung === 0 ? justClear(setup, overlap) : setup
+  const { rear } =
+    swung > 0
+      ? setup
+      : justClear(setup, 'rear', (cut) => meetsStill(cut.rear.outline, apron, setup.clearance))
   const { at } = nearestPoints(rear.outline, swungOutline(apron, swung))
   return { front: swungFront(setup, swung), swung, at, against: 'apron' }
 }
@@ -118,16 +147,16 @@ const caughtInside = (setup: FoldSetup, isFolded: boolean): Met | undefined => {
   return caught && { front: shown, swung, ...caught }
 }
 
-const metBy = (check: PlanCheck, setup: FoldSetup, overlap: Overlap | null): Met | undefined => {
+const metBy = (check: PlanCheck, setup: FoldSetup): Met | undefined => {
   switch (check) {
     case 'rearMeetsTool':
-      return rearAtTool(setup, overlap)
+      return rearAtTool(setup)
     case 'frontMeetsTool':
-      return frontAtTool(setup, overlap)
+      return frontAtTool(setup)
     case 'meetsItself':
-      return pieceAtItself(setup, overlap)
+      return pieceAtItself(setup)
     case 'apronMeetsRear':
-      return apronAtRear(setup, overlap)
+      return apronAtRear(setup)
     case 'cannotLoad':
       return caughtInside(setup, false)
     case 'trapped':
@@ -142,12 +171,8 @@ const metBy = (check: PlanCheck, setup: FoldSetup, overlap: Overlap | null): Met
  * distance at contact is the clearance (between sheet and sheet a thickness) from the opened tools,
  * except where the sheet lies in a tool from the start or is caught on its way out.
  */
-export const contactOf = (
-  setup: FoldSetup,
-  check: PlanCheck,
-  overlap: Overlap | null,
-): Contact | null => {
-  const met = metBy(check, setup, overlap)
+export const contactOf = (setup: FoldSetup, check: PlanCheck): Contact | null => {
+  const met = metBy(check, setup)
   if (met === undefined) return null
   const { direction, orientation, rear } = setup
   const way = direction === 'up' ? 1 : -1

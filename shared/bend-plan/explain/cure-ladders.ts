@@ -20,6 +20,9 @@ const EIGHTH: Inches = 1 / 8
 const SHORTER = [0, 1, 2, 4, 8]
 const LONGER = [0, 1, 2, 4]
 
+/** Eighths tried before what the reason asks for: turned about, a leg may need less. */
+const LONGER_BEFORE = [0, 1, 2]
+
 const OPENINGS: readonly Degrees[] = [5, 10, 15]
 
 /** Opening an angle by this much counts as an inch of leg: 5 degrees as an eighth. */
@@ -55,8 +58,11 @@ const legLadder = (
   const values =
     code === 'shortenLeg'
       ? SHORTER.map((more) => nextDown(length, by) - more * EIGHTH)
-      : LONGER.map((more) => nextUp(length, by) + more * EIGHTH)
-  return values
+      : [
+          ...LONGER_BEFORE.map((more) => nextUp(length, 0) + more * EIGHTH),
+          ...LONGER.map((more) => nextUp(length, by) + more * EIGHTH),
+        ]
+  return [...new Set(values)]
     .filter((value) => value > 0)
     .map((value) => ({
       code,

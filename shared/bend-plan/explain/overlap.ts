@@ -27,7 +27,7 @@ const PLACES: Readonly<Partial<Record<PlanCheck, readonly Place[]>>> = {
 const MAY_FAIL_AGAIN: ReadonlySet<PlanCheck> = new Set(['gauge', 'cannotLoad', 'trapped'])
 
 /** What is always left of a chain. */
-const LEAST: Inches = 1e-6
+export const LEAST: Inches = 1e-6
 
 /** The overlap is known to this. */
 const FINENESS: Inches = 1e-8
@@ -36,7 +36,7 @@ const FINENESS: Inches = 1e-8
 const STEP: Inches = 1 / 8
 
 /** The end of [fails, passes] where the test begins to pass; the test passes there. */
-const bisect = (fails: Inches, passes: Inches, isFree: (cut: Inches) => boolean): Inches => {
+export const bisect = (fails: Inches, passes: Inches, isFree: (cut: Inches) => boolean): Inches => {
   let [low, high] = [fails, passes]
   while (high - low > FINENESS) {
     const middle = (low + high) / 2
