@@ -46,7 +46,7 @@ export function DrawingBoard({
   const colors = useFigureColors(stock.painted ? stock.colorHex : null)
   const labels = useFigureLabels()
   const { profile } = shownDocument(board)
-  const { check, plans, confirmed } = useAnswer(profile, stock, pieceLength, brakes)
+  const { check, plans, confirmed, lookedAt } = useAnswer(profile, stock, pieceLength, brakes)
   const problems = useMemo(
     () =>
       (check?.problems ?? [])
@@ -94,6 +94,7 @@ export function DrawingBoard({
           plans={plans}
           pieceLength={pieceLength}
           confirmed={confirmed}
+          lookedAt={lookedAt}
           brakesOpen={view === 'brakes'}
           onBrakes={() => setView(view === 'brakes' ? 'part' : 'brakes')}
         />

@@ -5,6 +5,8 @@ import type { Profile } from '#shared/profile/profile.schema'
 import type { Stock } from '#shared/stock/stock.schema'
 import type { Inches } from '#shared/units/brands'
 import { planQuery } from '@/features/plans/api/plans.queries'
+import { newKey } from '@/lib/api/idempotency'
+import { usePlanProgress } from '@/lib/live/plan-progress'
 import {
   checkDrawing,
   planOnBrakes,
@@ -23,6 +25,8 @@ export interface Answer {
   readonly plans: readonly CheckedPlan[]
   /** The server has worked out the same drawing and these are its plans. */
   readonly confirmed: boolean
+  /** Folds the server has looked at so far, while a plan takes long; otherwise null. */
+  readonly lookedAt: number | null
 }
 
 /**
@@ -48,8 +52,10 @@ export function useAnswer(
   )
 
   const rested = useRested(makeable, REST)
+  const [progressKey] = useState(newKey)
+  const progress = usePlanProgress(progressKey)
   const server = useQuery({
-    ...planQuery({ profile: rested ?? EMPTY, stockId: stock.id, pieceLength }),
+    ...planQuery({ profile: rested ?? EMPTY, stockId: stock.id, pieceLength }, progressKey),
     enabled: rested !== null,
     placeholderData: keepPreviousData,
     retry: false,
@@ -63,7 +69,7 @@ export function useAnswer(
     [alone, stock, pieceLength, brakes],
   )
   const plans = makeable === null ? [] : confirmed ? server.data.brakes : (explained ?? own)
-  return { check, plans, confirmed }
+  return { check, plans, confirmed, lookedAt: confirmed ? null : (progress?.nodes ?? null) }
 }
 
 const EMPTY: Profile = {

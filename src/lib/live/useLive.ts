@@ -1,6 +1,7 @@
 import { useQueryClient, type QueryClient } from '@tanstack/react-query'
 import { useEffect, useState } from 'react'
 import { liveEventSchema, type LiveEvent } from '#shared/live/live'
+import { hearPlanProgress } from '@/lib/live/plan-progress'
 import { reportAnswering } from '@/lib/api/reachability'
 import { STALE_ROOTS } from '@/lib/live/live-topics'
 
@@ -50,6 +51,9 @@ export function useLive(follow: boolean): LiveState {
       }
       source.onmessage = (message) => void refresh(client, message.data)
       source.addEventListener('reset', () => void client.invalidateQueries())
+      source.addEventListener('plan', (message: MessageEvent<string>) =>
+        hearPlanProgress(message.data),
+      )
       source.onerror = () => {
         setConnected(false)
         if (source.readyState !== EventSource.CLOSED) return

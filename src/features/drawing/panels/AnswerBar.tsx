@@ -3,6 +3,7 @@ import type { Inches } from '#shared/units/brands'
 import { printRun, printSize } from '#shared/units/print-length'
 import { printWeight } from '#shared/units/weight'
 import { usePerson } from '@/features/people/person-context'
+import { useFormats } from '@/lib/format/useFormats'
 import type { CheckedPlan, DrawingCheck } from '../check/check-drawing'
 import { BendsOn } from './BendsOn'
 
@@ -12,6 +13,8 @@ interface Props {
   readonly pieceLength: Inches
   /** Whether the server has said the same: figures are worked out here first. */
   readonly confirmed: boolean
+  /** Folds looked at by a search that takes long. */
+  readonly lookedAt: number | null
   /** Whether what each brake says is open beside the drawing. */
   readonly brakesOpen: boolean
   readonly onBrakes: () => void
@@ -21,6 +24,7 @@ interface Props {
 export function AnswerBar({ check, plans, pieceLength, confirmed, brakesOpen, onBrakes }: Props) {
   const { t } = useTranslation('drawing')
   const { units } = usePerson()
+  const { count } = useFormats()
   const strip = check?.strip ?? null
   const hits = plans
     .find(({ plan }) => plan.feasible)
@@ -51,6 +55,11 @@ export function AnswerBar({ check, plans, pieceLength, confirmed, brakesOpen, on
       <div className="flex items-center border-t border-rule">
         <div className="min-w-0 flex-1">
           <BendsOn check={check} plans={plans} />
+          {lookedAt !== null && (
+            <p role="status" className="px-3 pb-1 text-small text-scribe">
+              {t('answer.lookedAt', { shown: count(lookedAt) })}
+            </p>
+          )}
         </div>
         {plans.length > 0 && (
           <button
