@@ -8,6 +8,7 @@ import { benchExplain } from './explain.bench'
 import { benchMoves, movesTitle } from './moves.bench'
 import { benchOrders, ordersTitle } from './orders.bench'
 import { benchPlan } from './plan.bench'
+import { benchPlanning, planningTitle } from './planning.bench'
 import { benchStrip } from './strip.bench'
 
 const versionSchema = z.object({ rows: z.tuple([z.object({ server_version: z.string() })]) })
@@ -36,6 +37,7 @@ const shop = await openBenchShop()
 try {
   const groups = [
     ...kernel,
+    { title: planningTitle, rows: await benchPlanning(shop) },
     { title: ordersTitle, rows: await benchOrders(shop) },
     { title: movesTitle, rows: await benchMoves(shop) },
   ]
