@@ -9,9 +9,10 @@ import type { CureSubject } from './cure-subject'
 
 const MOST_CURES = 6
 
-/** Changed pieces that are planned again, and the folds each may ask about. */
+/** Changed pieces that are planned again, the folds each may ask about, and all of them together. */
 const MOST_TRIES = 60
 const NODES = 600
+const MOST_FOLDS = 10_000
 
 /** Reasons whose changes are tried: those nearest to bending come first. */
 const MOST_REASONS = 4
@@ -28,10 +29,17 @@ const distinctLadders = (ladders: readonly Ladder[]): Ladder[] => {
   return [...known.values()]
 }
 
-const limited = (request: PlanRequest): PlanRequest => ({
-  ...request,
-  limits: { ...request.limits, nodes: NODES },
-})
+/** Searches of this request end at the limits of one try and of all tries together. */
+const limited = (request: PlanRequest): PlanRequest => {
+  let folds = 0
+  return {
+    ...request,
+    limits: {
+      nodes: NODES,
+      isOver: () => (folds += 1) > MOST_FOLDS || request.limits?.isOver?.() === true,
+    },
+  }
+}
 
 /** The piece is too long and nothing else: pieces as long as the brake. */
 const shorterPieces = (request: PlanRequest): PlanCure[] => {
@@ -65,6 +73,7 @@ export const findCures = (
   const steps = ladders
     .flatMap((ladder, place) => ladder.map((step) => ({ step, place })))
     .sort((a, b) => a.step.size - b.step.size || a.place - b.place)
+  const asked = limited(request)
   const done = new Set<number>()
   const cures: PlanCure[] = []
   let tries = 0
@@ -74,7 +83,7 @@ export const findCures = (
     const section = subject.findSection(applyEdit(subject.profile, step.edit))
     if (section === undefined) continue
     tries += 1
-    if (!canBend({ ...limited(request), section })) continue
+    if (!canBend({ ...asked, section })) continue
     done.add(place)
     const { code, bend, leg, value, edit } = step
     cures.push({ code, bend, leg, value, edit: subject.hasEdits ? edit : null })
