@@ -21,7 +21,15 @@ interface Props {
 }
 
 /** The live figures under a drawing: what it takes, what it weighs, and where it bends. */
-export function AnswerBar({ check, plans, pieceLength, confirmed, brakesOpen, onBrakes }: Props) {
+export function AnswerBar({
+  check,
+  plans,
+  pieceLength,
+  confirmed,
+  lookedAt,
+  brakesOpen,
+  onBrakes,
+}: Props) {
   const { t } = useTranslation('drawing')
   const { units } = usePerson()
   const { count } = useFormats()
