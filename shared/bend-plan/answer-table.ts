@@ -5,7 +5,7 @@ export interface AnswerTable {
 }
 
 /** Above this, asked keys are far fewer than possible ones and a map takes less room. */
-const LARGEST_ARRAY = 2 ** 21
+const LARGEST_ARRAY = 2 ** 22
 
 /** A table for keys from 0 below `size`, filled as questions come. */
 export const createAnswerTable = (size: number): AnswerTable => {
@@ -18,15 +18,19 @@ export const createAnswerTable = (size: number): AnswerTable => {
       },
     }
   }
-  let answers: Uint8Array | undefined
+  // Two bits an answer: 0 not asked, 1 yes, 2 no. Small tables spare the collector of garbage.
+  let answers: Uint32Array | undefined
   return {
     find: (key) => {
-      const answer = answers?.[key] ?? 0
+      if (answers === undefined) return undefined
+      const answer = ((answers[key >>> 4] ?? 0) >>> (2 * (key & 15))) & 3
       return answer === 0 ? undefined : answer === 1
     },
     set: (key, answer) => {
-      answers ??= new Uint8Array(size)
-      answers[key] = answer ? 1 : 2
+      answers ??= new Uint32Array(Math.ceil(size / 16))
+      const shift = 2 * (key & 15)
+      const word = answers[key >>> 4] ?? 0
+      answers[key >>> 4] = (word & ~(3 << shift)) | ((answer ? 1 : 2) << shift)
     },
   }
 }

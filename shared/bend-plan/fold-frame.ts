@@ -1,4 +1,4 @@
-import { ORIGIN, add, heading, scale } from '#shared/geometry/vector'
+import { radians, vector } from '#shared/geometry/vector'
 import type { Vector } from '#shared/geometry/vector'
 import type { Degrees, Inches } from '#shared/units/brands'
 import type { PieceBend, Side, Workpiece } from './workpiece'
@@ -16,42 +16,12 @@ export interface Chain {
   readonly developed: Inches
 }
 
-interface Turn {
-  /** Degrees in the walk from A to B. */
-  readonly turn: Degrees
-  /** The straight run that follows it. */
-  readonly run: Inches
-}
-
-/** The runs outwards from a bend line: the first, then each with the turn that leads into it. */
-const runsOf = (piece: Workpiece, bend: PieceBend, side: Side, made: number) => {
-  const step = side === 'B' ? 1 : -1
-  const legAt = (bendIndex: number): Inches =>
-    piece.legs[side === 'B' ? bendIndex + 1 : bendIndex] ?? 0
-  let firstRun = legAt(bend.index)
-  let developed = firstRun
-  const turns: Turn[] = []
-  const extend = (run: Inches) => {
-    const last = turns.pop()
-    if (last === undefined) firstRun += run
-    else turns.push({ turn: last.turn, run: last.run + run })
-  }
-  for (let i = bend.index + step; ; i += step) {
-    const next = piece.bends[i]
-    if (next === undefined) break
-    const leg = legAt(i)
-    developed += leg
-    if ((made & (1 << i)) === 0) extend(leg)
-    else if (next.hem === null) turns.push({ turn: next.turn, run: leg })
-    else if (next.hem.open) {
-      const quarter = next.turn / 2
-      turns.push(
-        { turn: quarter, run: next.hem.gap + piece.thickness },
-        { turn: quarter, run: leg },
-      )
-    }
-  }
-  return { firstRun, developed, turns }
+/** A chain as rows of numbers, which a search makes by the thousands. */
+export interface ChainNumbers {
+  readonly xs: readonly number[]
+  readonly ys: readonly number[]
+  readonly firstRun: Inches
+  readonly developed: Inches
 }
 
 /**
@@ -59,6 +29,58 @@ const runsOf = (piece: Workpiece, bend: PieceBend, side: Side, made: number) => 
  * With u = turn of a made bend x sign of this bend's turn, a front heading gains u and a rear heading
  * loses u. A closed hem ends the chain at its fold once made; an open one is gap + T and its lip.
  */
+export const chainNumbers = (
+  { bends, legs, thickness }: Workpiece,
+  bend: PieceBend,
+  side: Side,
+  made: number,
+  place: 'front' | 'rear',
+): ChainNumbers => {
+  const step = side === 'B' ? 1 : -1
+  const sign = Math.sign(bend.turn) * (place === 'front' ? 1 : -1)
+  const xs = [0]
+  const ys = [0]
+  let [x, y] = [0, 0]
+  let angle: Degrees = place === 'front' ? 0 : 180
+  let firstRun: Inches = -1
+  let developed: Inches = 0
+  let run: Inches = 0
+  let isEnded = false
+  const endRun = () => {
+    if (firstRun < 0) {
+      // Exactly along the sheet, whatever a sine of 180 degrees rounds to.
+      firstRun = run
+      x = place === 'front' ? run : 0 - run
+    } else {
+      x += run * Math.cos(radians(angle))
+      y += run * Math.sin(radians(angle))
+    }
+    xs.push(x)
+    ys.push(y)
+    run = 0
+  }
+  for (let i = bend.index; ; i += step) {
+    const leg = legs[side === 'B' ? i + 1 : i] ?? 0
+    developed += leg
+    if (!isEnded) run += leg
+    const next = bends[i + step]
+    if (next === undefined) break
+    if ((made & (1 << next.index)) === 0) continue
+    if (isEnded) continue
+    endRun()
+    if (next.hem === null) angle += next.turn * sign
+    else if (next.hem.open) {
+      angle += (next.turn / 2) * sign
+      run = next.hem.gap + thickness
+      endRun()
+      angle += (next.turn / 2) * sign
+    } else isEnded = true
+  }
+  if (!isEnded) endRun()
+  return { xs, ys, firstRun, developed }
+}
+
+/** The chain of `chainNumbers` with its points. */
 export const chainOf = (
   piece: Workpiece,
   bend: PieceBend,
@@ -66,15 +88,6 @@ export const chainOf = (
   made: number,
   place: 'front' | 'rear',
 ): Chain => {
-  const { firstRun, developed, turns } = runsOf(piece, bend, side, made)
-  const sign = Math.sign(bend.turn) * (place === 'front' ? 1 : -1)
-  let angle = place === 'front' ? 0 : 180
-  let point = place === 'front' ? { x: firstRun, y: 0 } : { x: 0 - firstRun, y: 0 }
-  const points: Vector[] = [ORIGIN, point]
-  for (const { turn, run } of turns) {
-    angle += turn * sign
-    point = add(point, scale(heading(angle), run))
-    points.push(point)
-  }
-  return { points, firstRun, developed }
+  const { xs, ys, firstRun, developed } = chainNumbers(piece, bend, side, made, place)
+  return { points: xs.map((x, i) => vector(x, ys[i] ?? NaN)), firstRun, developed }
 }

@@ -29,19 +29,19 @@ const clipToStop = (a: Vector, b: Vector): readonly [Vector, Vector] | undefined
 /** The greatest x of a run of points within the stop's height; 0 where none is further. */
 export const stopReach = (points: readonly Vector[]): Inches => {
   let most = 0
-  points.forEach((to, i) => {
-    const from = points[i - 1]
-    if (from === undefined) return
+  for (let i = 1; i < points.length; i++) {
+    const [from, to] = [points[i - 1], points[i]]
+    if (from === undefined || to === undefined || (from.x <= most && to.x <= most)) continue
     clipToStop(from, to)?.forEach(({ x }) => {
       most = Math.max(most, x)
     })
-  })
+  }
   return most
 }
 
 /** The rearmost point of the rear chain within half an inch of the sheet's plane: inches behind the bend. */
-export const gaugeDistance = (rear: Chain): Inches =>
-  stopReach(rear.points.map(({ x, y }) => vector(0 - x, y)))
+export const gaugeDistance = ({ points, firstRun }: Chain): Inches =>
+  points.length === 2 ? firstRun : stopReach(points.map(({ x, y }) => vector(0 - x, y)))
 
 /** Whether the bends made behind are more than a single closed hem. */
 export const isFormedFace = (bentBehind: number, closedHems: number): boolean =>

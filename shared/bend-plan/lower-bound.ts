@@ -18,13 +18,15 @@ const cheapestWalk = (visit: number, end: number, move: OperationCost['move']): 
   return best
 }
 
-const BYTE = 256
+/** Bends are taken four at a time: small tables, few look-ups. */
+const CHUNK = 4
+const CHUNK_SETS = 2 ** CHUNK
 
 /** What a choice among some orientations costs at least. */
 interface Choice {
   readonly walk: number
-  /** Sums of the least fixed costs, by byte of the bend set, so that a bound is a few look-ups. */
-  readonly sums: readonly Float64Array[]
+  /** Sums of the least fixed costs, by chunk of the bend set and the bends in it. */
+  readonly sums: readonly (readonly number[])[]
   /** Bends whose least fixed cost has edge A (or B) at the back, closed hems left out. */
   readonly onA: number
   readonly onB: number
@@ -74,12 +76,12 @@ const choicesByEnd = (ground: FoldGround, cost: OperationCost): readonly (readon
     const onB = fixed.map((each) => leastOf(each, ({ aBack }) => !aBack))
     const setOf = (one: readonly number[], other: readonly number[]) =>
       one.reduce((set, least, i) => (least < (other[i] ?? NaN) ? set | (1 << i) : set), 0)
-    const sums = Array.from({ length: Math.ceil(bends.length / 8) }, (_, chunk) => {
-      const table = new Float64Array(BYTE)
-      for (let bits = 1; bits < BYTE; bits++) {
-        const bend = chunk * 8 + 31 - Math.clz32(bits & -bits)
-        const least = bend < bends.length ? Math.min(onA[bend] ?? NaN, onB[bend] ?? NaN) : 0
-        table[bits] = (table[bits & (bits - 1)] ?? NaN) + least
+    const least = onA.map((cost, i) => Math.min(cost, onB[i] ?? NaN))
+    const sums = Array.from({ length: Math.ceil(bends.length / CHUNK) }, (_, chunk) => {
+      const table = [0]
+      for (let bits = 1; bits < CHUNK_SETS; bits++) {
+        const bend = chunk * CHUNK + 31 - Math.clz32(bits & -bits)
+        table.push((table[bits & (bits - 1)] ?? NaN) + (least[bend] ?? 0))
       }
       return table
     })
@@ -99,7 +101,7 @@ const choicesByEnd = (ground: FoldGround, cost: OperationCost): readonly (readon
 }
 
 /** Bounds kept at a time, each in the place of its key's last bits: a power of 2. */
-const MOST_KEPT = 2 ** 16
+const MOST_KEPT = 2 ** 14
 
 /**
  * A lower bound on what the bends of a set still cost before a given orientation is reached, packed.
@@ -129,7 +131,7 @@ export const createLowerBound = (ground: FoldGround, cost: OperationCost) => {
       if (walk >= best) break
       let sum = walk
       for (let chunk = 0; chunk < sums.length; chunk++) {
-        sum += sums[chunk]?.[(bits >>> (chunk * 8)) & (BYTE - 1)] ?? NaN
+        sum += sums[chunk]?.[(bits >>> (chunk * CHUNK)) & (CHUNK_SETS - 1)] ?? NaN
       }
       if (sum < best) sum += leastFaces(bits & onA, bits & onB)
       if (sum < best) best = sum

@@ -1,8 +1,8 @@
+import type { Vector } from '#shared/geometry/vector'
 import type { Inches } from '#shared/units/brands'
-import { cutStart, sheetOutline } from './collision/outline'
-import type { Outline } from './collision/outline'
-import { chainOf } from './fold-frame'
-import type { Chain } from './fold-frame'
+import { Outline } from './collision/outline'
+import { chainNumbers } from './fold-frame'
+import type { Chain, ChainNumbers } from './fold-frame'
 import { bendsBeside } from './workpiece'
 import type { PieceBend, Side, Workpiece } from './workpiece'
 
@@ -14,23 +14,38 @@ export interface SideShape {
   readonly pastNose: Outline | undefined
 }
 
+class OutlineChain implements Chain {
+  constructor(
+    private readonly outline: Outline,
+    readonly firstRun: Inches,
+    readonly developed: Inches,
+  ) {}
+
+  get points(): readonly Vector[] {
+    return this.outline.points
+  }
+}
+
 class LazySideShape implements SideShape {
   readonly outline: Outline
-  private madePastNose: { readonly outline: Outline | undefined } | undefined
+  readonly chain: Chain
+  private madePastNose: Outline | undefined
+  private isPastNoseMade = false
 
   constructor(
-    readonly chain: Chain,
+    { xs, ys, firstRun, developed }: ChainNumbers,
     private readonly noseZone: Inches,
   ) {
-    this.outline = sheetOutline(chain.points)
+    this.outline = new Outline(xs, ys, false)
+    this.chain = new OutlineChain(this.outline, firstRun, developed)
   }
 
   get pastNose(): Outline | undefined {
-    if (this.madePastNose === undefined) {
-      const points = cutStart(this.chain.points, this.noseZone)
-      this.madePastNose = { outline: points && sheetOutline(points) }
+    if (!this.isPastNoseMade) {
+      this.isPastNoseMade = true
+      this.madePastNose = this.outline.withoutStart(this.noseZone)
     }
-    return this.madePastNose.outline
+    return this.madePastNose
   }
 }
 
@@ -42,7 +57,7 @@ export type SideShapes = (
 ) => SideShape
 
 /** Shapes kept at a time; beyond, all are forgotten and built again as they are asked for. */
-const MOST_SHAPES = 16_384
+const MOST_SHAPES = 8192
 
 /** The sides of a piece by the bends made on them, kept for the many made sets that share one. */
 export const createSideShapes = (piece: Workpiece, noseZone: Inches): SideShapes => {
@@ -53,7 +68,7 @@ export const createSideShapes = (piece: Workpiece, noseZone: Inches): SideShapes
       ((bits * 32 + bend.index) * 2 + (side === 'A' ? 0 : 1)) * 2 + (place === 'front' ? 0 : 1)
     const found = known.get(key)
     if (found !== undefined) return found
-    const shape = new LazySideShape(chainOf(piece, bend, side, bits, place), noseZone)
+    const shape = new LazySideShape(chainNumbers(piece, bend, side, bits, place), noseZone)
     if (known.size >= MOST_SHAPES) known.clear()
     known.set(key, shape)
     return shape

@@ -31,7 +31,8 @@ const slidesOut = (
   clearance: Inches,
 ): number => {
   let free = 0
-  for (const [i, slide] of SLIDES.entries()) {
+  for (let i = 0; i < SLIDES.length; i++) {
+    const slide = SLIDES[i] ?? NaN
     const isStuck =
       meetsSliding(part, inner, slide, 0, clearance) ||
       meetsSliding(part, outer, slide, 0, clearance)

@@ -1,4 +1,4 @@
-import { distance, vector } from '#shared/geometry/vector'
+import { vector } from '#shared/geometry/vector'
 import type { Vector } from '#shared/geometry/vector'
 import type { Inches } from '#shared/units/brands'
 import { polarOf } from './polar'
@@ -38,7 +38,10 @@ export class Outline {
   ) {
     const count = xs.length
     if (count < 2) throw new RangeError(`An outline has two points or more, not ${count}.`)
-    let [left, right, bottom, top] = [Infinity, -Infinity, Infinity, -Infinity]
+    let left = Infinity
+    let right = -Infinity
+    let bottom = Infinity
+    let top = -Infinity
     for (let i = 0; i < count; i++) {
       const x = xs[i] ?? NaN
       const y = ys[i] ?? NaN
@@ -65,6 +68,25 @@ export class Outline {
   /** Points and sides seen from the bend line at the origin. */
   get polar(): Polar {
     return (this.madePolar ??= polarOf(this.xs, this.ys, this.isSolid))
+  }
+
+  /** A run of sheet less its first inches; undefined when nothing is left. */
+  withoutStart(length: Inches): Outline | undefined {
+    const { xs, ys } = this
+    let rest = length
+    for (let i = 1; i < xs.length; i++) {
+      const x = xs[i - 1] ?? NaN
+      const y = ys[i - 1] ?? NaN
+      const dx = (xs[i] ?? NaN) - x
+      const dy = (ys[i] ?? NaN) - y
+      const run = Math.sqrt(dx * dx + dy * dy)
+      if (rest < run) {
+        const t = rest / run
+        return new Outline([x + dx * t, ...xs.slice(i)], [y + dy * t, ...ys.slice(i)], this.isSolid)
+      }
+      rest -= run
+    }
+    return undefined
   }
 
   /** Turned counter-clockwise about the bend line, radians; the last answer is kept. */
@@ -107,17 +129,4 @@ export const movedOutline = ({ xs, ys, isSolid }: Outline, dx: Inches, dy: Inche
 export const cutStart = (
   points: readonly Vector[],
   length: Inches,
-): readonly Vector[] | undefined => {
-  let rest = length
-  for (let i = 1; i < points.length; i++) {
-    const [a, b] = [points[i - 1], points[i]]
-    if (a === undefined || b === undefined) break
-    const run = distance(a, b)
-    if (rest < run) {
-      const t = rest / run
-      return [vector(a.x + (b.x - a.x) * t, a.y + (b.y - a.y) * t), ...points.slice(i)]
-    }
-    rest -= run
-  }
-  return undefined
-}
+): readonly Vector[] | undefined => sheetOutline(points).withoutStart(length)?.points

@@ -10,16 +10,16 @@ const FULL_TURN = 2 * Math.PI
 /** Far above the rounding of a sum of angles; only ever keeps a side in the running. */
 const ANGLE_SLACK = 1e-9
 
-/** The angles of one swing at which something changes, kept in order. One list serves many swings. */
-interface Angles {
-  count: number
-  readonly values: Float64Array
-}
-
 /** The start, the end, two for each of two circles and two lines. */
 const MOST_ANGLES = 10
 
-const insert = (angles: Angles, angle: number): void => {
+/**
+ * The angles of one swing at which something changes, kept in order. One list serves all swings, which
+ * never overlap in time: a search makes hundreds of thousands, and lists of their own would be garbage.
+ */
+const angles = { count: 0, values: new Float64Array(MOST_ANGLES) }
+
+const insert = (angle: number): void => {
   let at = angles.count++
   for (; at > 0; at--) {
     const before = angles.values[at - 1] ?? 0
@@ -30,15 +30,15 @@ const insert = (angles: Angles, angle: number): void => {
 }
 
 /** Adds the angles of swing above 0 and below `swing` where cos(angle - towards) is `cosine`. */
-const insertCrossings = (angles: Angles, swing: number, towards: number, cosine: number): void => {
+const insertCrossings = (swing: number, towards: number, cosine: number): void => {
   if (!(cosine >= -1 && cosine <= 1)) return
   const half = Math.acos(cosine)
   const first = towards - half
   const second = towards + half
   const one = first - FULL_TURN * Math.floor(first / FULL_TURN)
   const two = second - FULL_TURN * Math.floor(second / FULL_TURN)
-  if (one < swing) insert(angles, one)
-  if (two < swing) insert(angles, two)
+  if (one < swing) insert(one)
+  if (two < swing) insert(two)
 }
 
 /** Cosine of the angle, seen from the origin, between a circle's center and its points at a radius. */
@@ -60,22 +60,21 @@ const arcEnters = (
   sides: Outline,
   side: number,
   clearance: Inches,
-  angles: Angles,
 ): boolean => {
   const { xs, ys, polar } = sides
   const next = side + 1 === xs.length ? 0 : side + 1
   angles.count = 0
-  insert(angles, 0)
-  insert(angles, swing)
+  insert(0)
+  insert(swing)
   // An end at the origin is the bend line itself: a cosine without a value, and no angle added.
   const toA = way * ((polar.towards[side] ?? NaN) - towards)
   const toB = way * ((polar.towards[next] ?? NaN) - towards)
   const square = way * ((polar.normal[side] ?? NaN) - towards)
   const offset = polar.offset[side] ?? NaN
-  insertCrossings(angles, swing, toA, circleCosine(radius, polar.radius[side] ?? NaN, clearance))
-  insertCrossings(angles, swing, toB, circleCosine(radius, polar.radius[next] ?? NaN, clearance))
-  insertCrossings(angles, swing, square, (offset - clearance) / radius)
-  insertCrossings(angles, swing, square, (offset + clearance) / radius)
+  insertCrossings(swing, toA, circleCosine(radius, polar.radius[side] ?? NaN, clearance))
+  insertCrossings(swing, toB, circleCosine(radius, polar.radius[next] ?? NaN, clearance))
+  insertCrossings(swing, square, (offset - clearance) / radius)
+  insertCrossings(swing, square, (offset + clearance) / radius)
   const near = clearance - TOLERANCE
   const ax = xs[side] ?? NaN
   const ay = ys[side] ?? NaN
@@ -100,7 +99,6 @@ const pointsEnter = (
   clearance: Inches,
   skipFirst: boolean,
 ): boolean => {
-  const angles: Angles = { count: 0, values: new Float64Array(MOST_ANGLES) }
   const from = points.polar
   const to = sides.polar
   for (let i = 0; i < points.xs.length; i++) {
@@ -118,7 +116,7 @@ const pointsEnter = (
       if (radius > (to.far[j] ?? NaN) + clearance) continue
       const apart = Math.abs(withinHalfTurn((to.middle[j] ?? NaN) - middle))
       if (apart > half + (to.spread[j] ?? NaN)) continue
-      if (arcEnters(radius, towards, swing, way, sides, j, clearance, angles)) return true
+      if (arcEnters(radius, towards, swing, way, sides, j, clearance)) return true
     }
   }
   return false
