@@ -1,5 +1,6 @@
 import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
+import { pieceMark } from '#shared/pieces/piece-mark'
 import type { CodeFault } from '#shared/pieces/codes'
 import type { Run } from '#shared/runs/runs.contract'
 import type { BandAnswer } from '@/components/Band'
@@ -38,7 +39,7 @@ export function useMarking(run: Run) {
           tell(
             {
               kind: 'done',
-              mark: `${piece.mark}${piece.sequence}`,
+              mark: pieceMark(piece),
               title: t('told.bent'),
               detail: piece.code,
             },
@@ -68,7 +69,7 @@ export function useMarking(run: Run) {
         onSuccess: ({ piece, remake }) =>
           tell({
             kind: 'warn',
-            mark: `${piece.mark}${piece.sequence}`,
+            mark: pieceMark(piece),
             title: t('told.scrapped'),
             detail: t('told.remake', { code: remake.code }),
           }),

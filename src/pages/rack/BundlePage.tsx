@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query'
 import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Link, useParams } from 'react-router-dom'
+import { pieceMark } from '#shared/pieces/piece-mark'
 import { rackPlaceSchema, type Bundle } from '#shared/bundles/bundles.contract'
 import { orderNumber } from '#shared/orders/order.schema'
 import { paths } from '@/app/paths'
@@ -97,7 +98,7 @@ function OneBundle({ bundle }: { readonly bundle: Bundle }) {
         <ul className="divide-y divide-rule border-y border-rule">
           {bundle.pieces.map((piece) => (
             <li key={piece.code} className="flex flex-wrap items-center gap-x-5 py-2">
-              <span className="w-14 font-figure font-bold">{`${piece.mark}${piece.sequence}`}</span>
+              <span className="w-20 font-figure font-bold">{pieceMark(piece)}</span>
               <Link
                 to={paths.piece('rack', piece.code)}
                 className="inline-flex min-h-target items-center font-figure text-dye underline"

@@ -1,5 +1,6 @@
 import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
+import { pieceMark } from '#shared/pieces/piece-mark'
 import { rackPlaceSchema, type Bundle, type BundleWork } from '#shared/bundles/bundles.contract'
 import { orderNumber } from '#shared/orders/order.schema'
 import { paths } from '@/app/paths'
@@ -49,7 +50,7 @@ export function BundlingScreen({ work, bundles, scanned }: Props) {
         detail: t('notLoose.detail'),
       })
     ticks.tick(code)
-    tell({ kind: 'done', mark: `${piece.mark}${piece.sequence}`, title: t('ticked'), detail: code })
+    tell({ kind: 'done', mark: pieceMark(piece), title: t('ticked'), detail: code })
   }
 
   function strap() {
@@ -122,7 +123,7 @@ export function BundlingScreen({ work, bundles, scanned }: Props) {
                     checked={ticks.isTicked(piece.code)}
                     onChange={() => ticks.toggle(piece.code)}
                   />
-                  <span className="w-14 font-figure font-bold">{`${piece.mark}${piece.sequence}`}</span>
+                  <span className="w-20 font-figure font-bold">{pieceMark(piece)}</span>
                   <span className="w-28 font-figure">{piece.code}</span>
                   <span className="min-w-0 flex-1">{piece.name}</span>
                   <span className="pr-2 font-figure">{length(piece.length)}</span>

@@ -1,5 +1,6 @@
 import { useTranslation } from 'react-i18next'
 import { Link } from 'react-router-dom'
+import { pieceMark } from '#shared/pieces/piece-mark'
 import type { RunPiece } from '#shared/runs/runs.contract'
 import { paths } from '@/app/paths'
 import { StateGlyph } from '@/features/drawing/figure/StateGlyph'
@@ -25,7 +26,7 @@ export function PieceMarks({ pieces }: Props) {
           <Link
             to={paths.piece('brake', piece.code)}
             aria-label={t('markState', {
-              mark: `${piece.mark}${piece.sequence}`,
+              mark: pieceMark(piece),
               code: piece.code,
               state: say(`state.${piece.state}`),
             })}
@@ -33,7 +34,7 @@ export function PieceMarks({ pieces }: Props) {
           >
             <StateGlyph state={piece.state} size={28} />
             <span className="font-figure text-small">
-              <b>{`${piece.mark}${piece.sequence}`}</b> {piece.code}
+              <b>{pieceMark(piece)}</b> {piece.code}
             </span>
           </Link>
         </li>

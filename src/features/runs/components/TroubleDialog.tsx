@@ -1,5 +1,6 @@
 import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
+import { pieceMark } from '#shared/pieces/piece-mark'
 import type { Run } from '#shared/runs/runs.contract'
 import { Dialog } from '@/components/Dialog'
 import { Select } from '@/components/Select'
@@ -39,7 +40,7 @@ export function TroubleDialog({ run, open, pending, onCancel, onConfirm }: Props
         value={code}
         options={inHand.map((each) => ({
           value: each.code,
-          label: `${each.mark}${each.sequence} · ${each.code} · ${piece(`state.${each.state}`)}`,
+          label: `${pieceMark(each)} · ${each.code} · ${piece(`state.${each.state}`)}`,
         }))}
         onChange={(event) => setWanted(event.target.value)}
       />
