@@ -15,9 +15,8 @@ export const createPlansServiceOn = (db: Db, { planner, onError }: PlansPorts): 
     stocks: createStocksQueries(db),
     brakes: createBrakesQueries(db),
     planner,
-    tellProgress: (message) => {
+    tellProgress: (message) =>
       announcePlan(db, message).catch((error: unknown) =>
         onError('the progress of a plan could not be told', error),
-      )
-    },
+      ),
   })

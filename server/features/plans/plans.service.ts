@@ -14,7 +14,8 @@ export interface PlansDeps {
   readonly stocks: StocksQueries
   readonly brakes: BrakesQueries
   readonly planner: Planner
-  readonly tellProgress: (message: PersonalMessage) => void
+  /** Never rejects: a plan does not fail for want of news. */
+  readonly tellProgress: (message: PersonalMessage) => Promise<void>
 }
 
 export const createPlansService = ({ stocks, brakes, planner, tellProgress }: PlansDeps) => ({
@@ -29,21 +30,34 @@ export const createPlansService = ({ stocks, brakes, planner, tellProgress }: Pl
     const errors = profileErrors(profile, stock, 'profile')
     if (errors.length > 0) throw profileProblem(errors)
     const strip = flatStrip(profile, stock.sheet)
-    const plans = await planner.planOnAll(
-      profile,
-      stock.sheet,
-      pieceLength,
-      await brakes.listBrakes(),
-      {
+    const shopBrakes = await brakes.listBrakes()
+    const progress = oneAtATime(tellProgress)
+    try {
+      const plans = await planner.planOnAll(profile, stock.sheet, pieceLength, shopBrakes, {
         signal,
         ...(progressKey !== undefined && {
-          onProgress: (progress) =>
-            tellProgress({ personId: person.id, plan: { key: progressKey, ...progress } }),
+          onProgress: (done) =>
+            progress.tell({ personId: person.id, plan: { key: progressKey, ...done } }),
         }),
-      },
-    )
-    return { strip, weight: pieceWeight(strip, stock.sheet, pieceLength), brakes: plans }
+      })
+      return { strip, weight: pieceWeight(strip, stock.sheet, pieceLength), brakes: plans }
+    } finally {
+      await progress.told()
+    }
   },
 })
+
+/** What comes while one message is on its way would be out of date before it could be sent. */
+function oneAtATime(tell: PlansDeps['tellProgress']) {
+  let underWay: Promise<void> | undefined
+  return {
+    tell: (message: PersonalMessage) => {
+      underWay ??= tell(message).finally(() => {
+        underWay = undefined
+      })
+    },
+    told: async () => underWay,
+  }
+}
 
 export type PlansService = ReturnType<typeof createPlansService>
