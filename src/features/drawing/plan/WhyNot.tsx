@@ -15,6 +15,9 @@ interface Props {
   readonly onCure?: (cure: PlanCure) => void
 }
 
+/** The nearest misses help; a leg that would have to lose half its width does not. */
+const MOST_REASONS = 4
+
 /** Why a brake does not bend a piece: in words, in a picture, and what would cure it. */
 export function WhyNot({ plan, brake, colorSide, paintHex, onCure }: Props) {
   const { t } = useTranslation('why')
@@ -23,7 +26,7 @@ export function WhyNot({ plan, brake, colorSide, paintHex, onCure }: Props) {
   return (
     <div className="flex flex-col gap-3">
       <ul className="flex list-disc flex-col gap-1 pl-5">
-        {plan.reasons.map((reason, index) => (
+        {plan.reasons.slice(0, MOST_REASONS).map((reason, index) => (
           <li key={index}>{words.reason(reason)}</li>
         ))}
       </ul>

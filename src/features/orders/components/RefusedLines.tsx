@@ -42,7 +42,10 @@ interface ReasonsProps {
   readonly told?: readonly FieldError[]
 }
 
-/** Why no brake bends a line: the plans are asked for again, to be told in the person's language. */
+/**
+ * Why no brake bends a line, in short: the plans are asked for again, to be told in the person's
+ * language. All reasons with their pictures stand in PlanDetails.
+ */
 export function LineReasons({ line, told = [] }: ReasonsProps) {
   const { t } = useTranslation('counter')
   const words = usePlanWords()
@@ -64,8 +67,8 @@ export function LineReasons({ line, told = [] }: ReasonsProps) {
     <ul className="text-small">
       {standing.map(({ brakeId, brakeName, plan }) => (
         <li key={brakeId}>
-          {brakeName}: {words.reasons(plan).join(' ')}
-          {plan.cures.length > 0 && ` ${plan.cures.map(words.cure).join('. ')}.`}
+          {brakeName}: {words.reasons(plan).slice(0, 2).join(' ')}
+          {plan.cures.length > 0 && ` ${plan.cures.slice(0, 2).map(words.cure).join('. ')}.`}
         </li>
       ))}
     </ul>
