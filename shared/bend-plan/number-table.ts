@@ -5,7 +5,7 @@ export interface NumberTable {
 }
 
 /** Above this, set keys are far fewer than possible ones and a map takes less room. */
-const LARGEST_ARRAY = 2 ** 20
+const LARGEST_ARRAY = 2 ** 22
 
 export const createNumberTable = (size: number): NumberTable => {
   if (size > LARGEST_ARRAY) {

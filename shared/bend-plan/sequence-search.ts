@@ -1,3 +1,4 @@
+import { findGoodSequence } from './beam-search'
 import { bitCount } from './bit-count'
 import { createHeap } from './heap'
 import { createNumberTable } from './number-table'
@@ -25,6 +26,9 @@ const QUEUED_PER_NODE = 8
 /** Folds put into the queue to know all sequences as cheap as the best one. */
 const EQUALS = 100_000
 
+/** Folds put into the queue from which on a search counts as long. */
+const LONG = 50_000
+
 /** Room for the number of bends left beside the cost in one sort key: the deeper node goes first. */
 const DEPTH = 32
 
@@ -34,11 +38,14 @@ const DEPTH = 32
  * bound is consistent, so the first way into a state whose fold passes is its cheapest.
  *
  * It goes on through all states that cost no more than the best sequence, so that the choice among
- * equals can be made. `known` is a sequence found before: nothing dearer is looked at.
+ * equals can be made. `first` is a sequence found before: nothing dearer is looked at. A search that
+ * turns out long is given a better one.
  */
-export const searchSequence = (ground: SearchGround, known: Sequence): SequenceSearch => {
+export const searchSequence = (ground: SearchGround, first: Sequence): SequenceSearch => {
   const { piece, feasibility, cost, lowerBound, nodes, isOver } = ground
   const full = allBends(piece)
+  let known = first
+  let isLong = false
   const queue = createHeap()
   const entries = createSearchEntries()
   /** The entry that closed a state. */
@@ -100,6 +107,10 @@ export const searchSequence = (ground: SearchGround, known: Sequence): SequenceS
     if (entries.count() > most || isOver()) {
       if (best !== undefined) return { best, lowerBound: best.cost, proven: true, findRest: null }
       return { best: known, lowerBound: f, proven: false, findRest: null }
+    }
+    if (!isLong && entries.count() > LONG) {
+      isLong = true
+      known = findGoodSequence(ground, known.cost) ?? known
     }
     const entry = entries.get(index)
     const { made, orientation } = entry
