@@ -107,17 +107,17 @@ const setDown = (row: Row, thickness: number, { made, bend, leftUp, aBack }: Sta
 const lengthOf = (a: Point | undefined, b: Point | undefined): number =>
   Math.hypot((b?.x ?? NaN) - (a?.x ?? NaN), (b?.y ?? NaN) - (a?.y ?? NaN))
 
+const SLACK = 1e-9
+
 /** The line without its first inches; undefined where nothing is left. */
 const without = (line: Line, inches: number): Line | undefined => {
   const [a, b, ...more] = line
   if (a === undefined || b === undefined) return undefined
   const run = lengthOf(a, b)
-  if (run <= inches) return without([b, ...more], inches - run)
+  if (run <= inches + SLACK) return without([b, ...more], inches - run)
   const part = inches / run
   return [{ x: a.x + (b.x - a.x) * part, y: a.y + (b.y - a.y) * part }, b, ...more]
 }
-
-const SLACK = 1e-9
 
 const within = (value: number, least: number, most: number): Verdict =>
   value >= least - SLACK && value <= most + SLACK ? 'clear' : 'meets'

@@ -1,3 +1,4 @@
+import { isLess } from '#shared/geometry/tolerance'
 import { vector } from '#shared/geometry/vector'
 import type { Vector } from '#shared/geometry/vector'
 import type { Inches } from '#shared/units/brands'
@@ -80,7 +81,8 @@ export class Outline {
       const dx = (xs[i] ?? NaN) - x
       const dy = (ys[i] ?? NaN) - y
       const run = Math.sqrt(dx * dx + dy * dy)
-      if (rest < run) {
+      // What is left shorter than the tolerance is nothing: a lip as long as the nose zone has no rest.
+      if (isLess(rest, run)) {
         const t = rest / run
         return new Outline([x + dx * t, ...xs.slice(i)], [y + dy * t, ...ys.slice(i)], this.isSolid)
       }
