@@ -11,6 +11,7 @@ import { editProfile } from './model/board-document'
 import { AnswerBar } from './panels/AnswerBar'
 import { LegTable } from './panels/LegTable'
 import { PartPanel } from './panels/PartPanel'
+import { STRIP_HEIGHT } from './panels/strip-height'
 import { StripPanel } from './panels/StripPanel'
 import { Toolbar } from './panels/Toolbar'
 import { BrakeAnswers } from './plan/BrakeAnswers'
@@ -71,16 +72,19 @@ export function DrawingBoard({
           />
           <div className="absolute top-2 right-2">{stockSelect}</div>
         </div>
-        {profile && check?.strip && (
-          <StripPanel
-            profile={profile}
-            strip={check.strip}
-            selected={board.selection}
-            dispatch={dispatch}
-            colors={colors}
-            labels={labels}
-          />
-        )}
+        {/* Its room is kept from the start: the sheet must not shrink under the finger. */}
+        <div style={{ minHeight: STRIP_HEIGHT }} className="shrink-0">
+          {profile && check?.strip && (
+            <StripPanel
+              profile={profile}
+              strip={check.strip}
+              selected={board.selection}
+              dispatch={dispatch}
+              colors={colors}
+              labels={labels}
+            />
+          )}
+        </div>
         <Toolbar
           board={board}
           dispatch={dispatch}
@@ -99,7 +103,7 @@ export function DrawingBoard({
           onBrakes={() => setView(view === 'brakes' ? 'part' : 'brakes')}
         />
       </div>
-      <aside className="max-h-[46dvh] shrink-0 overflow-y-auto border-t border-rule bg-sheet px-(--gutter) pb-3 lg:max-h-none lg:w-104 lg:overflow-y-auto lg:border-t-0 lg:border-l">
+      <aside className="max-h-[46dvh] min-h-46 shrink-0 overflow-y-auto border-t border-rule bg-sheet px-(--gutter) pb-3 lg:max-h-none lg:w-104 lg:overflow-y-auto lg:border-t-0 lg:border-l">
         {view === 'brakes' && profile ? (
           <BrakeAnswers
             plans={plans}

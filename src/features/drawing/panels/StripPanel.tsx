@@ -9,6 +9,7 @@ import type { Strip } from '#shared/strip/strip.schema'
 import { useElementSize } from '../canvas/useElementSize'
 import { SvgFigure } from '../figure/SvgFigure'
 import type { BoardEvent } from '../model/board'
+import { STRIP_HEIGHT } from './strip-height'
 
 interface Props {
   readonly profile: Profile
@@ -19,9 +20,6 @@ interface Props {
   readonly labels: FigureLabels
 }
 
-/** Low enough to leave the section its room on a phone. */
-const HEIGHT = 72
-
 /** The same piece laid flat: edge A left, edge B right. A touch lights up the part in the section. */
 export function StripPanel({ profile, strip, selected, dispatch, colors, labels }: Props) {
   const { t } = useTranslation('drawing')
@@ -30,12 +28,18 @@ export function StripPanel({ profile, strip, selected, dispatch, colors, labels 
   const figure = useMemo(
     () =>
       width > 0
-        ? stripFigure(profile, strip, { width, height: HEIGHT, labels, selected, targets: true })
+        ? stripFigure(profile, strip, {
+            width,
+            height: STRIP_HEIGHT,
+            labels,
+            selected,
+            targets: true,
+          })
         : null,
     [profile, strip, width, labels, selected],
   )
   return (
-    <div ref={ref} className="shrink-0" style={{ height: HEIGHT }}>
+    <div ref={ref} className="shrink-0" style={{ height: STRIP_HEIGHT }}>
       {figure && (
         <SvgFigure
           display={figure.display}
