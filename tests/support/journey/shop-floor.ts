@@ -11,7 +11,7 @@ export const bentCount = (page: Page, words: string): Locator =>
 
 /** Codes of the pieces of the run on screen, as they stand under their pictures, by mark. */
 export async function readCodes(page: Page): Promise<string[]> {
-  const marks = page.getByRole('link', { name: /^\w+, P[0-9A-Z]{7}: / })
+  const marks = page.getByRole('link', { name: /^[\w-]+, P[0-9A-Z]{7}: / })
   await marks.first().waitFor()
   const labels = await marks.evaluateAll((links) =>
     links.map((link) => link.getAttribute('aria-label') ?? ''),
