@@ -16,7 +16,7 @@ export async function readCodes(page: Page): Promise<string[]> {
   const labels = await marks.evaluateAll((links) =>
     links.map((link) => link.getAttribute('aria-label') ?? ''),
   )
-  return labels.toSorted().map((label) => label.replace(/^\w+, (P[0-9A-Z]{7}): .*$/, '$1'))
+  return labels.toSorted().map((label) => label.replace(/^[\w-]+, (P[0-9A-Z]{7}): .*$/, '$1'))
 }
 
 /** Types a code where the scanner would, and ends it as a scanner does. */
