@@ -102,7 +102,7 @@ export function RunScreen({ run }: { readonly run: Run }) {
           <b className="text-lead" data-testid="bent-count">
             {t('bentCount', { done, count: living })}
           </b>
-          <span className="ml-3 text-small text-scribe">
+          <span className="ml-3 text-small text-scribe max-md:hidden">
             {queued === 0 ? t('allBent') : t('scanHint')}
           </span>
         </p>

@@ -38,8 +38,8 @@ export function BendStep({ run, step, picture, number }: Props) {
   const fold = words.fold(step.bend)
 
   return (
-    <div className="flex min-h-0 flex-1 max-lg:flex-col">
-      <div className="relative min-h-64 min-w-0 flex-1">
+    <div className="flex min-h-0 flex-1 max-lg:flex-col max-lg:overflow-y-auto">
+      <div className="relative min-h-64 min-w-0 flex-1 max-lg:min-h-80 max-lg:shrink-0">
         <div ref={ref} className="absolute inset-0 overflow-hidden">
           {display && (
             <SvgFigure display={display} colors={colors} title={t('step.picture', { fold })} />

@@ -17,10 +17,10 @@ export function StripCard({ run }: { readonly run: Run }) {
   const heaviest = Math.max(...run.pieces.map((piece) => piece.weight))
 
   return (
-    <div className="flex min-h-0 flex-1 max-lg:flex-col">
+    <div className="flex min-h-0 flex-1 max-lg:flex-col max-lg:overflow-y-auto">
       <div
         ref={ref}
-        className="flex min-h-80 min-w-0 flex-1 items-center justify-center overflow-hidden"
+        className="flex min-h-80 min-w-0 flex-1 items-center max-lg:shrink-0 justify-center overflow-hidden"
       >
         {room && room.height > 0 && (
           <ProfilePair
