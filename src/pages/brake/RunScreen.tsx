@@ -51,12 +51,14 @@ export function RunScreen({ run }: { readonly run: Run }) {
       subtitle={
         <span className="flex flex-wrap items-baseline gap-x-6">
           <span>{run.name}</span>
-          <ColorChip
-            hex={run.stock.colorHex}
-            name={run.stock.colorName}
-            detail={run.stock.thicknessName}
-          />
-          <span className="font-figure">
+          <span className="max-md:hidden">
+            <ColorChip
+              hex={run.stock.colorHex}
+              name={run.stock.colorName}
+              detail={run.stock.thicknessName}
+            />
+          </span>
+          <span className="font-figure max-md:hidden">
             {run.lengths
               .map(({ length: inches, count }) => `${count} × ${length(inches)}`)
               .join(', ')}

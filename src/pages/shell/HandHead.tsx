@@ -10,7 +10,9 @@ export function HandHead({ title, subtitle, back, nav, search, actions }: HeadPr
     <div className="flex flex-wrap items-center gap-x-3 border-b border-rule px-[max(0.25rem,calc(var(--gutter)-1rem))] py-1.5">
       {back === undefined ? <HomeLink /> : <BackLink {...back} />}
       <div className="min-w-0 flex-1 sm:flex sm:items-baseline sm:gap-6">
-        <h1 className="truncate text-lead leading-tight font-bold sm:text-title">{title}</h1>
+        <h1 className="truncate text-lead leading-tight font-bold sm:max-w-[60%] sm:shrink-0 sm:text-title">
+          {title}
+        </h1>
         {subtitle !== undefined && (
           <div className="truncate text-small text-scribe">{subtitle}</div>
         )}
