@@ -4,41 +4,18 @@ import type { Db } from '#server/db/knex'
 import { findRow, readRows } from '#server/db/read-rows'
 import { notFound } from '#server/http/errors'
 import type { SignedIn } from '#server/http/signed-in'
-import { pieceStateSchema, stationSchema } from '#shared/pieces/piece-state'
-import type { Piece, PieceEvent } from '#shared/pieces/pieces.contract'
+import {
+  pieceEventSchema,
+  pieceSchema,
+  type Piece,
+  type PieceEvent,
+} from '#shared/pieces/pieces.contract'
 
-const pieceRowSchema = z.object({
-  id: z.uuid(),
-  code: z.string(),
-  state: pieceStateSchema,
-  sequence: z.int(),
-  quantity: z.int(),
-  mark: z.string(),
-  name: z.string(),
-  length: z.number(),
-  orderId: z.uuid(),
-  orderNumber: z.int(),
-  company: z.string(),
-  job: z.string(),
-  runId: z.uuid(),
-  runNumber: z.int(),
-  bundleCode: z.string().nullable(),
-  rackPlace: z.string().nullable(),
-  remakeOf: z.string().nullable(),
-  remadeAs: z.string().nullable(),
-})
+/** The contract's piece without its events, which are read beside it. */
+const pieceRowSchema = z.object({ id: z.uuid(), ...pieceSchema.omit({ events: true }).shape })
 
-const eventRowSchema = z.object({
-  pieceId: z.uuid(),
-  id: z.int(),
-  from: pieceStateSchema.nullable(),
-  to: pieceStateSchema,
-  at: z.date(),
-  by: z.string(),
-  station: stationSchema,
-  reason: z.string().nullable(),
-  undoes: z.int().nullable(),
-})
+/** The database gives a Date where the contract has text. */
+const eventRowSchema = z.object({ ...pieceEventSchema.shape, pieceId: z.uuid(), at: z.date() })
 
 type Viewer = Pick<SignedIn, 'id' | 'role' | 'companyId'>
 

@@ -3,9 +3,7 @@ import type { Db } from '#server/db/knex'
 import { findRow, readRows } from '#server/db/read-rows'
 import { notFound } from '#server/http/errors'
 import type { Progress } from '#shared/orders/order.schema'
-import { overrideSchema } from '#shared/orders/override.schema'
 import { pieceStateSchema } from '#shared/pieces/piece-state'
-import { profileSchema } from '#shared/profile/profile.schema'
 import {
   runSummarySchema,
   type Run,
@@ -14,26 +12,11 @@ import {
 } from '#shared/runs/runs.contract'
 import { brakeSchema } from '#shared/bend-plan/brake.schema'
 import { planSchema } from '#shared/bend-plan/plan.schema'
-import { stockSchema } from '#shared/stock/stock.schema'
-import { stripSchema } from '#shared/strip/strip.schema'
 
+/** The contract's summary, with its pieces counted by state and who took it as columns. */
 const summaryRowSchema = z.object({
-  id: z.uuid(),
-  number: z.int(),
-  code: z.string(),
-  name: z.string(),
-  profile: profileSchema,
-  stock: stockSchema,
-  strip: stripSchema,
-  brakeId: z.uuid(),
-  brakeName: z.string(),
-  company: z.string(),
-  job: z.string(),
-  orderNumber: z.int(),
-  neededBy: z.string(),
-  lengths: runSummarySchema.shape.lengths,
+  ...runSummarySchema.omit({ progress: true, claimedBy: true }).shape,
   counts: z.partialRecord(pieceStateSchema, z.int()),
-  override: overrideSchema.nullable(),
   claimerId: z.uuid().nullable(),
   claimerName: z.string().nullable(),
   claimedAt: z.date().nullable(),
