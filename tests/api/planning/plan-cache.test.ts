@@ -14,10 +14,12 @@ import { FakeClock } from '../../support/fake-clock'
 import { zProfile } from '../../support/shop-factories'
 
 const DAY = 24 * 60 * 60 * 1000
+const NOW = new Date('2026-03-02T15:00:00Z')
 
 let api: Api
 beforeAll(async () => {
-  api = await startApi()
+  // The clean-up at its start must not take the plans of this file for old ones.
+  api = await startApi({ clock: new FakeClock(NOW) })
 })
 afterAll(() => api.close())
 beforeEach(() => api.db(PLAN_CACHE).delete())
@@ -34,7 +36,7 @@ const expected = brakes.map(({ id, brake }) => ({
 }))
 
 /** A process of the product: what it keeps in memory is its own, the database is everybody's. */
-function openProcess(clock = new FakeClock(new Date('2026-03-02T15:00:00Z')), cutShort = false) {
+function openProcess(clock = new FakeClock(NOW), cutShort = false) {
   const made: PlanTask[] = []
   const errors: string[] = []
   const onError = (message: string) => errors.push(message)
