@@ -1,9 +1,14 @@
 import { planVerb } from './plan-verb'
+import { roofRunVerb } from './roof-run-verb'
 import { stripVerb } from './strip-verb'
 import type { ExitCode, Verb, VerbAnswer } from './verb'
 import { badInput } from './verb'
 
-const VERBS: Readonly<Record<string, Verb>> = { strip: stripVerb, plan: planVerb }
+const VERBS: Readonly<Record<string, Verb>> = {
+  strip: stripVerb,
+  plan: planVerb,
+  'roof-run': roofRunVerb,
+}
 
 /** Bad input outranks what cannot be made; either outranks an answer. */
 const worstExit = (answers: readonly VerbAnswer[]): ExitCode => {
