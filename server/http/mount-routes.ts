@@ -1,4 +1,4 @@
-import type { Request, RequestHandler, Response, Router } from 'express'
+import type { Request, RequestHandler, Router } from 'express'
 import { z } from 'zod'
 import type { Db } from '#server/db/knex'
 import { inTransaction } from '#server/db/transaction'
@@ -8,6 +8,7 @@ import { csrfSynchronisedProtection } from '#server/http/csrf'
 import type { Route } from '#server/http/define-route'
 import { once, readKeyedRequest, type Outcome } from '#server/http/idempotency'
 import { requirePermission } from '#server/http/permission'
+import { sendAnswer } from '#server/http/send-answer'
 import type { Endpoint, Method } from '#shared/http/endpoint'
 
 const VERBS = {
@@ -49,7 +50,7 @@ function answerWith(route: Route, db: Db): RequestHandler {
       })
       return runOnce(route, request, db, work)
     }
-    send(response, await againWhileOutdated(answerOnce))
+    sendAnswer(response, endpoint, await againWhileOutdated(answerOnce))
   }
 }
 
@@ -83,11 +84,4 @@ function checkAnswer(endpoint: Endpoint, answer: unknown): unknown {
   throw new Error(
     `The answer of ${endpoint.method} ${endpoint.path} does not fit the contract:\n${z.prettifyError(parsed.error)}`,
   )
-}
-
-function send(response: Response, { status, answer, replayed }: Outcome): void {
-  response.status(status).set('Cache-Control', 'no-store')
-  if (replayed) response.set('Idempotency-Replayed', 'true')
-  if (status === 204) response.end()
-  else response.json(answer)
 }

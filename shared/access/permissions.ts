@@ -18,6 +18,9 @@ export const PERMISSIONS = {
   'shelf.read': ['crewLead', 'counter', 'manager'],
   'shelf.write': ['crewLead', 'counter', 'manager'],
   'stocks.read': ['crewLead', 'bender', 'counter', 'manager'],
+  /** Measuring is the bender's; what is cut by it is the manager's decision. */
+  'stocks.test': ['bender', 'manager'],
+  'stocks.calibrate': ['manager'],
   'brakes.read': ['crewLead', 'bender', 'counter', 'manager'],
   'plans.make': ['crewLead', 'bender', 'counter', 'manager'],
   'orders.read': ['crewLead', 'counter', 'manager'],
@@ -29,6 +32,7 @@ export const PERMISSIONS = {
   'pieces.read': ['crewLead', 'bender', 'counter', 'manager'],
   'pieces.bend': ['bender', 'manager'],
   'pieces.scrap': ['bender', 'manager'],
+  'labels.print': ['bender', 'counter', 'manager'],
   'runs.read': ['bender', 'counter', 'manager'],
   'runs.claim': ['bender', 'manager'],
   'rack.read': ['bender', 'counter', 'manager'],

@@ -1,6 +1,14 @@
 import { z } from 'zod'
 import type { Permission } from '#shared/access/permissions'
 
+export const MEDIA_TYPES = [
+  'application/json',
+  'application/pdf',
+  'image/svg+xml',
+  'image/vnd.dxf',
+] as const
+export type MediaType = (typeof MEDIA_TYPES)[number]
+
 export type Method = 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE'
 
 /**
@@ -23,6 +31,8 @@ export interface Endpoint<
   readonly body: Body
   readonly answer: Answer
   readonly success: 200 | 201 | 204
+  /** What the answer is sent as; anything but JSON is a `FileAnswer`, opened or kept by the person. */
+  readonly produces: MediaType
   /** False for what only reads; the server opens no transaction for it. Every GET, and a POST that asks. */
   readonly changes: boolean
   /** True when the request makes or moves something and must carry an `Idempotency-Key`. */
@@ -46,6 +56,7 @@ interface Definition<Params, Query, Body, Answer> {
   readonly success?: 200 | 201 | 204
   readonly changes?: boolean
   readonly idempotent?: boolean
+  readonly produces?: MediaType
 }
 
 /** Fills in what an endpoint does not name: no parameters, no query, no body, 200; a GET changes nothing. */
@@ -57,6 +68,7 @@ export function endpoint<
 >(definition: Definition<Params, Query, Body, Answer>): Endpoint<Params, Query, Body, Answer> {
   return {
     success: 200,
+    produces: 'application/json',
     changes: definition.method !== 'GET',
     idempotent: false,
     ...definition,
@@ -65,6 +77,22 @@ export function endpoint<
     body: (definition.body ?? noBody) as Body,
   }
 }
+
+/** A file as a handler gives it; `name` is what it is kept under, with its ending. */
+export const fileAnswerSchema = z.strictObject({
+  name: z.string().regex(/^[\w.-]+$/),
+  bytes: z.instanceof(Uint8Array),
+})
+export type FileAnswer = z.infer<typeof fileAnswerSchema>
+
+/** An endpoint that is read with a link and answers with a file. Permissions and rows as everywhere. */
+export const fileEndpoint = <Params extends z.ZodType = Nothing, Query extends z.ZodType = Nothing>(
+  definition: Omit<
+    Definition<Params, Query, NoBody, typeof fileAnswerSchema>,
+    'method' | 'answer' | 'body' | 'success' | 'changes' | 'idempotent'
+  > & { readonly produces: Exclude<MediaType, 'application/json'> },
+): Endpoint<Params, Query, NoBody, typeof fileAnswerSchema> =>
+  endpoint({ method: 'GET', answer: fileAnswerSchema, ...definition })
 
 /** An answer without content. */
 export const noContent = z.undefined()

@@ -41,7 +41,7 @@ export interface ApiDocument {
 
 const INTRODUCTION = `JSON over HTTP. Lengths are inches, angles degrees, weights pounds, money integer
 cents, times ISO 8601 in UTC. GET /session gives the CSRF token that every change sends back as
-X-CSRF-Token. Requests that make or move something carry an Idempotency-Key; sent again under the
+X-CSRF-Token. A few endpoints answer with a file instead of JSON. Requests that make or move something carry an Idempotency-Key; sent again under the
 same key they get the first answer. Every failure is an RFC 9457 problem. GET /live streams what
 changes as server-sent events.`
 
@@ -53,6 +53,14 @@ const jsonSchema = (schema: z.ZodType, io: 'input' | 'output'): JsonSchema => {
 }
 
 const json = (schema: JsonSchema, type = 'application/json') => ({ [type]: { schema } })
+
+const answerOf = ({ answer, produces }: Endpoint): Content => {
+  if (isNothing(answer)) return { description: 'Done.' }
+  if (produces === 'application/json') {
+    return { description: 'Done.', content: json(jsonSchema(answer, 'output')) }
+  }
+  return { description: 'A file.', content: json({ type: 'string', format: 'binary' }, produces) }
+}
 
 function parametersOf(place: 'path' | 'query', schema: z.ZodType): Parameter[] {
   const { properties = {}, required = [] } = jsonSchema(schema, 'input')
@@ -91,7 +99,7 @@ const nameOf = ({ method, path }: Endpoint): string =>
     .replace(/-(\w)/g, (_, letter: string) => letter.toUpperCase())
 
 function operationOf(endpoint: Endpoint): Operation {
-  const { body, answer, success } = endpoint
+  const { body, success } = endpoint
   return {
     operationId: nameOf(endpoint),
     summary: endpoint.summary,
@@ -107,9 +115,7 @@ function operationOf(endpoint: Endpoint): Operation {
       requestBody: { required: true, content: json(jsonSchema(body, 'input')) },
     }),
     responses: {
-      [success]: isNothing(answer)
-        ? { description: 'Done.' }
-        : { description: 'Done.', content: json(jsonSchema(answer, 'output')) },
+      [success]: answerOf(endpoint),
       default: {
         description: 'Refused or failed.',
         content: json({ $ref: '#/components/schemas/Problem' }, 'application/problem+json'),

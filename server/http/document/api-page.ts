@@ -35,8 +35,12 @@ function section(path: string, method: string, operation: Operation): string {
     `<p>${escape(operation.summary)} ${escape(operation.description)}</p>`,
     parameterTable(operation),
     schemaBlock('Body', body),
-    ...answers.map(([status, answer]) =>
-      schemaBlock(`Answer ${status}`, answer.content?.['application/json']?.schema),
+    ...answers.flatMap(([status, { content = {} }]) =>
+      Object.entries(content).map(([type, { schema }]) =>
+        type === 'application/json'
+          ? schemaBlock(`Answer ${status}`, schema)
+          : `<p>Answer ${status}: a file, <code>${escape(type)}</code>.</p>`,
+      ),
     ),
     '</section>',
   ].join('\n')
