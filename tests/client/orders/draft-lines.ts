@@ -1,7 +1,12 @@
 import type { Order, OrderLine } from '#shared/orders/order.schema'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Stock } from '#shared/stock/stock.schema'
-import { emptyDraft, type DraftLine, type OrderDraft } from '@/features/orders/draft/order-draft'
+import {
+  emptyDraft,
+  PLAIN_LINE,
+  type DraftLine,
+  type OrderDraft,
+} from '@/features/orders/draft/order-draft'
 
 export const RAKE: Profile = {
   version: 1,
@@ -28,12 +33,17 @@ export const STOCK: Stock = {
     density: 0.2836,
     springbackPer90: 0.9,
   },
+  kSource: 'handbookHard',
+  paintTBend: null,
+  alloy: null,
+  calibrations: [],
 }
 
 export const ORDER_ID = '7c4b1f0e-2f6d-4c52-9a0c-0d5be1f7b001'
 export const JOB_ID = '7c4b1f0e-2f6d-4c52-9a0c-0d5be1f7c001'
 
 export const line = (change: Partial<DraftLine> = {}): DraftLine => ({
+  ...PLAIN_LINE,
   key: 'line-a',
   mark: 'A',
   name: 'North rake',
@@ -61,6 +71,9 @@ const orderLine = (change: Partial<OrderLine> = {}): OrderLine => ({
   stock: STOCK,
   quantity: 6,
   length: 120,
+  ends: null,
+  hands: null,
+  statedGirth: null,
   strip: { girth: 8.75, stripWidth: 8.65, creases: [] },
   pieceWeight: 8.1,
   bendsOn: [],
@@ -84,6 +97,7 @@ export const order = (change: Partial<Order> = {}): Order => ({
   version: 1,
   notes: '',
   lines: [orderLine()],
+  goods: [],
   events: [],
   ...change,
 })

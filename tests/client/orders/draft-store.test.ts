@@ -46,7 +46,7 @@ describe('a slot', () => {
     const { draft, kept } = readSlot(slot)
     expect(kept).toBe(true)
     expect(JSON.parse(window.localStorage.getItem(PREFIX + slot) ?? '')).toEqual({
-      version: 1,
+      version: 2,
       draft,
     })
   })

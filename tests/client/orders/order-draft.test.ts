@@ -1,14 +1,49 @@
 import { describe, expect, test } from 'vitest'
 import {
   emptyDraft,
+  type DraftGood,
   isBlank,
   nextMark,
+  withGoods,
   withLine,
   withLinePatch,
   withoutLine,
 } from '@/features/orders/draft/order-draft'
 import { readDraft, writeDraft } from '@/features/orders/draft/draft-text'
-import { draft, line } from './draft-lines'
+import { draft, line, RAKE, STOCK } from './draft-lines'
+
+const SCREWS: DraftGood = {
+  key: 'screws',
+  kind: 'fasteners',
+  quantity: 250,
+  unit: 'each',
+  stockId: null,
+  note: '',
+}
+
+/** As a device kept it before pieces had ends and orders small goods. */
+const FIRST_VERSION = JSON.stringify({
+  version: 1,
+  draft: {
+    key: 'key-of-the-draft',
+    poNumber: '',
+    neededBy: '2026-12-20',
+    notes: 'Call first',
+    lines: [
+      {
+        key: 'line-a',
+        mark: 'A',
+        name: 'North rake',
+        profile: RAKE,
+        stockId: STOCK.id,
+        quantity: 6,
+        length: 120,
+      },
+    ],
+    sending: false,
+    amends: null,
+  },
+})
 
 const marked = (...marks: string[]) => ({
   lines: marks.map((mark) => line({ key: mark, mark })),
@@ -62,6 +97,7 @@ describe('the lines of a draft', () => {
     expect(withLine(sent, line({ key: 'b' })).sending).toBe(false)
     expect(withLinePatch(sent, 'line-a', { length: 96 }).sending).toBe(false)
     expect(withoutLine(sent, 'line-a').sending).toBe(false)
+    expect(withGoods(sent, [SCREWS])).toMatchObject({ sending: false, goods: [SCREWS] })
   })
 
   test('the key stays with the draft through every change', () => {
@@ -73,6 +109,7 @@ test('a draft is blank until something is written into it', () => {
   expect(isBlank(emptyDraft('a-key-of-its-own'))).toBe(true)
   expect(isBlank({ ...emptyDraft('a-key-of-its-own'), notes: 'Call first' })).toBe(false)
   expect(isBlank(draft())).toBe(false)
+  expect(isBlank(withGoods(emptyDraft('a-key-of-its-own'), [SCREWS]))).toBe(false)
 })
 
 describe('a kept draft', () => {
@@ -81,9 +118,47 @@ describe('a kept draft', () => {
     expect(readDraft(writeDraft(kept))).toEqual({ ok: true, draft: kept })
   })
 
+  test('keeps ends and hands in which measures are still missing', () => {
+    const kept = draft({
+      lines: [
+        line({
+          ends: {
+            left: { kind: 'lap', side: 'under', length: null, tabs: [{ leg: 2, length: null }] },
+            right: {
+              kind: 'miter',
+              plane: { corner: { slopeIn: 0, slopeOut: null, plan: -90 } },
+              lay: null,
+              legs: [{ leg: 1, plane: { plumb: null } }],
+              tabs: [],
+            },
+            lowEnd: 'left',
+          },
+          hands: { drawn: 'left', left: 3, right: null },
+          quantity: null,
+        }),
+      ],
+      goods: [{ ...SCREWS, quantity: null }],
+    })
+    expect(readDraft(writeDraft(kept))).toEqual({ ok: true, draft: kept })
+  })
+
+  test('of the first version is read: its pieces are square and it takes no small goods', () => {
+    expect(readDraft(FIRST_VERSION)).toEqual({
+      ok: true,
+      draft: draft({ notes: 'Call first', lines: [line({ quantity: 6 })], goods: [] }),
+    })
+  })
+
+  test('of the first version is written as the second from then on', () => {
+    const read = readDraft(FIRST_VERSION)
+    if (!read.ok) throw new Error('The draft was not read.')
+    expect(JSON.parse(writeDraft(read.draft))).toMatchObject({ version: 2 })
+    expect(readDraft(writeDraft(read.draft))).toEqual(read)
+  })
+
   test.each([
     ['not JSON', '{"version":1,'],
-    ['another version', writeDraft(draft()).replace('"version":1', '"version":2')],
+    ['a version to come', writeDraft(draft()).replace('"version":2', '"version":3')],
     ['a field that is not known', writeDraft(draft()).replace('"notes"', '"remarks"')],
     ['a leg that is no number', writeDraft(draft()).replace('[4,4,0.75]', '[4,"4",0.75]')],
   ])('that cannot be read comes back as its text: %s', (_, text) => {

@@ -1,5 +1,7 @@
 import { z } from 'zod'
 import { profileSchema } from '#shared/profile/profile.schema'
+import { GOOD_KINDS, GOOD_UNITS } from '#shared/roof-line/goods.schema'
+import { draftEndsSchema, draftHandsSchema } from '@/features/ends/model/draft-end'
 
 /** A line that is being written: what is not filled in yet is null. Inches. */
 export const draftLineSchema = z.strictObject({
@@ -10,6 +12,27 @@ export const draftLineSchema = z.strictObject({
   stockId: z.uuid().nullable(),
   quantity: z.number().nullable(),
   length: z.number().nullable(),
+  /** Null: both ends square, the piece level. */
+  ends: draftEndsSchema.nullable(),
+  /** Null: the pieces have no hand. */
+  hands: draftHandsSchema.nullable(),
+  /** The girth the crew expects; null where none is stated. */
+  statedGirth: z.number().nullable(),
+  /**
+   * The line on the roof that its pieces cover together with those of other lines of the same key;
+   * known on this device alone, for counting small goods. Null where it was not made of one.
+   */
+  covers: z.strictObject({ roofLine: z.string(), lap: z.number() }).nullable(),
+})
+
+/** Small goods that are being written. */
+export const draftGoodSchema = z.strictObject({
+  key: z.string().min(1),
+  kind: z.enum(GOOD_KINDS),
+  quantity: z.number().nullable(),
+  unit: z.enum(GOOD_UNITS),
+  stockId: z.uuid().nullable(),
+  note: z.string(),
 })
 
 export const orderDraftSchema = z.strictObject({
@@ -23,6 +46,7 @@ export const orderDraftSchema = z.strictObject({
   neededBy: z.string(),
   notes: z.string(),
   lines: z.array(draftLineSchema),
+  goods: z.array(draftGoodSchema),
   /** True from the press of "submit" until the server has answered, over reloads too. */
   sending: z.boolean(),
   /** The order being amended and the version it was read at; null for a new order. */
@@ -38,8 +62,9 @@ export const orderDraftSchema = z.strictObject({
 })
 
 export type DraftLine = z.infer<typeof draftLineSchema>
+export type DraftGood = z.infer<typeof draftGoodSchema>
 export type OrderDraft = z.infer<typeof orderDraftSchema>
-export type DraftFields = Partial<Omit<OrderDraft, 'key' | 'lines'>>
+export type DraftFields = Partial<Omit<OrderDraft, 'key' | 'lines' | 'goods'>>
 export type LinePatch = Partial<Omit<DraftLine, 'key'>>
 
 export const emptyDraft = (key: string): OrderDraft => ({
@@ -48,13 +73,24 @@ export const emptyDraft = (key: string): OrderDraft => ({
   neededBy: '',
   notes: '',
   lines: [],
+  goods: [],
   sending: false,
   amends: null,
 })
 
+/** What a line says beside its drawing when nothing was written yet. */
+export const PLAIN_LINE = {
+  quantity: 1,
+  ends: null,
+  hands: null,
+  statedGirth: null,
+  covers: null,
+} as const satisfies Partial<DraftLine>
+
 /** True when nothing has been written into it yet. */
 export const isBlank = (draft: OrderDraft): boolean =>
   draft.lines.length === 0 &&
+  draft.goods.length === 0 &&
   draft.poNumber === '' &&
   draft.neededBy === '' &&
   draft.notes === '' &&
@@ -93,4 +129,11 @@ export const withoutLine = (draft: OrderDraft, key: string): OrderDraft => ({
   ...draft,
   sending: false,
   lines: draft.lines.filter((line) => line.key !== key),
+})
+
+/** The goods as they are to be from now on. */
+export const withGoods = (draft: OrderDraft, goods: readonly DraftGood[]): OrderDraft => ({
+  ...draft,
+  sending: false,
+  goods: [...goods],
 })

@@ -12,10 +12,12 @@ import {
   type Slot,
 } from './draft-store'
 import {
+  withGoods,
   withLine,
   withLinePatch,
   withoutLine,
   type DraftFields,
+  type DraftGood,
   type DraftLine,
   type LinePatch,
   type OrderDraft,
@@ -27,6 +29,7 @@ export interface OrderDraftHandle extends KeptDraft {
   readonly addLine: (line: DraftLine, at?: number) => void
   readonly updateLine: (key: string, patch: LinePatch) => void
   readonly removeLine: (key: string) => void
+  readonly setGoods: (goods: readonly DraftGood[]) => void
   readonly setFields: (patch: DraftFields) => void
   readonly replace: (draft: OrderDraft) => void
   readonly clear: () => void
@@ -43,6 +46,7 @@ export function useDraftSlot(slot: Slot): OrderDraftHandle {
       addLine: (line, at) => changeSlot(slot, (draft) => withLine(draft, line, at)),
       updateLine: (key, patch) => changeSlot(slot, (draft) => withLinePatch(draft, key, patch)),
       removeLine: (key) => changeSlot(slot, (draft) => withoutLine(draft, key)),
+      setGoods: (goods) => changeSlot(slot, (draft) => withGoods(draft, goods)),
       setFields: (patch) => changeSlot(slot, (draft) => ({ ...draft, ...patch })),
       replace: (next) => changeSlot(slot, () => next),
       clear: () => clearSlot(slot),
@@ -57,7 +61,7 @@ export function useDraftSlot(slot: Slot): OrderDraftHandle {
  * loses nothing. With `orderId` it is the amendment of that order instead.
  *
  *     const { draft, addLine } = useOrderDraft(jobId)
- *     addLine({ key: newKey(), mark: nextMark(draft), name, profile, stockId, quantity: 1, length: 120 })
+ *     addLine({ ...PLAIN_LINE, key: newKey(), mark: nextMark(draft), name, profile, stockId, length: 120 })
  */
 export function useOrderDraft(jobId: string, orderId: string | null = null): OrderDraftHandle {
   const { id } = usePerson()

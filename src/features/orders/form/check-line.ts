@@ -9,6 +9,7 @@ import {
   type CheckedPlan,
   type DrawingCheck,
 } from '@/features/drawing/check/check-drawing'
+import { checkEnds, type EndsCheck } from '@/features/ends/model/check-ends'
 import type { DraftLine } from '../draft/order-draft'
 
 /** Figures of a line whose length is still to be entered are those of a 10 ft piece. */
@@ -32,6 +33,8 @@ export interface LineCheck {
   /** Null where the shop has no stock at all. */
   readonly check: DrawingCheck | null
   readonly plans: readonly CheckedPlan[]
+  /** Null while the drawing cannot be made. */
+  readonly ends: EndsCheck | null
 }
 
 interface Remembered {
@@ -62,8 +65,12 @@ function answerFor(
   return answer
 }
 
-/** The same answer as on the drawing board, for one line of an order. */
-export function checkLine({ profile, stockId, length }: DraftLine, ground: LineGround): LineCheck {
+/** What of a line its drawing and its ends are checked by. */
+export type CheckedLine = Pick<DraftLine, 'profile' | 'stockId' | 'length' | 'ends'>
+
+/** The same answer as on the drawing board, for one line of an order, and how its ends are cut. */
+export function checkLine(line: CheckedLine, ground: LineGround): LineCheck {
+  const { profile, stockId, length } = line
   const stock = ground.stocks.find(({ id }) => id === stockId) ?? null
   const drawnIn = stock ?? ground.stocks[0] ?? null
   if (!drawnIn) {
@@ -73,11 +80,18 @@ export function checkLine({ profile, stockId, length }: DraftLine, ground: LineG
       drawnIn,
       check: null,
       plans: [],
+      ends: null,
     }
   }
-  return { stock, drawnIn, ...answerFor(profile, drawnIn, length ?? UNTIL_ENTERED, ground) }
+  const pieceLength = length ?? UNTIL_ENTERED
+  const answer = answerFor(profile, drawnIn, pieceLength, ground)
+  // Without a strip there is nothing to cut ends on; the drawing says why.
+  const ends = answer.check?.strip
+    ? checkEnds(line.ends, answer.profile, drawnIn.sheet, pieceLength)
+    : null
+  return { stock, drawnIn, ...answer, ends }
 }
 
 /** True when the drawing can be made but no brake of the shop bends it. */
-export const bendsNowhere = ({ plans }: LineCheck): boolean =>
+export const bendsNowhere = ({ plans }: Pick<LineCheck, 'plans'>): boolean =>
   plans.length > 0 && plans.every(({ plan }) => !plan.feasible)

@@ -2,19 +2,13 @@ import { orderInputSchema, type Order, type OrderInput } from '#shared/orders/or
 import type { OrderDraft } from '../draft/order-draft'
 
 /** The draft as the API takes it. Throws ZodError while a field is missing: see `draftFaults`. */
-export const orderBody = ({ poNumber, neededBy, notes, lines }: OrderDraft): OrderInput =>
+export const orderBody = ({ poNumber, neededBy, notes, lines, goods }: OrderDraft): OrderInput =>
   orderInputSchema.parse({
     poNumber,
     neededBy,
     notes,
-    lines: lines.map(({ mark, name, profile, stockId, quantity, length }) => ({
-      mark,
-      name,
-      profile,
-      stockId,
-      quantity,
-      length,
-    })),
+    lines: lines.map(({ key: _key, covers: _covers, ...line }) => line),
+    goods: goods.map(({ key: _key, ...good }) => good),
   })
 
 /** An order that came in, as a draft to amend it with. Lines keep their ids as keys. */
@@ -25,13 +19,18 @@ export const draftOfOrder = (order: Order, key: string): OrderDraft => ({
   notes: order.notes,
   sending: false,
   amends: { orderId: order.id, number: order.number, version: order.version, answer: '' },
-  lines: order.lines.map(({ id, mark, name, profile, stock, quantity, length }) => ({
-    key: id,
-    mark,
-    name,
-    profile,
-    stockId: stock.id,
-    quantity,
-    length,
+  lines: order.lines.map((line) => ({
+    key: line.id,
+    mark: line.mark,
+    name: line.name,
+    profile: line.profile,
+    stockId: line.stock.id,
+    quantity: line.quantity,
+    length: line.length,
+    ends: line.ends,
+    hands: line.hands,
+    statedGirth: line.statedGirth,
+    covers: null,
   })),
+  goods: order.goods.map((good, index) => ({ ...good, key: `${order.id} ${index}` })),
 })

@@ -10,7 +10,7 @@ import { EmptyState } from '@/components/EmptyState'
 import { ActionButton } from '@/features/drawing/panels/ActionButton'
 import { DrawingBoard } from '@/features/drawing/DrawingBoard'
 import { useBoard } from '@/features/drawing/useBoard'
-import { nextMark } from '@/features/orders/draft/order-draft'
+import { nextMark, PLAIN_LINE } from '@/features/orders/draft/order-draft'
 import type { OrderDraftHandle } from '@/features/orders/draft/useOrderDraft'
 import { StockSelect } from '@/features/stocks/StockSelect'
 import { newKey } from '@/lib/api/idempotency'
@@ -122,7 +122,7 @@ function useDrawnLine({ start, draft, profile, stockId, name }: DrawnLine) {
       draft.updateLine(key, { profile, stockId })
     } else {
       const mark = nextMark(draft.draft)
-      draft.addLine({ key, mark, name, profile, stockId, quantity: 1, length: USUAL_LENGTH })
+      draft.addLine({ ...PLAIN_LINE, key, mark, name, profile, stockId, length: USUAL_LENGTH })
     }
     if (search.get('line') !== key) {
       const next = new URLSearchParams(search)

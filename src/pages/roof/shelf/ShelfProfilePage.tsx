@@ -69,15 +69,7 @@ function Figure({ item, name }: { readonly item: ShelfProfile; readonly name: st
     ground.stocks.find(({ id }) => id === stockId) ?? ground.stocks[0]
   if (!stock) return <EmptyState title={t('noStock')} />
   const { profile, check, plans } = checkLine(
-    {
-      key: item.id,
-      mark: '',
-      name,
-      profile: item.profile,
-      stockId: stock.id,
-      quantity: 1,
-      length: null,
-    },
+    { profile: item.profile, stockId: stock.id, length: null, ends: null },
     { ...ground, pitchRise: STARTER_PITCH },
   )
   return (
