@@ -1,3 +1,4 @@
+import type { OrderLineInput } from '#shared/orders/order.schema'
 import { DEMO_JOBS } from './jobs'
 import { DEMO_PEOPLE, type DemoPerson } from './people'
 import { DEMO_PROFILES } from './profiles'
@@ -6,13 +7,16 @@ import { DEMO_STOCKS } from './stocks'
 
 const { ines } = DEMO_PEOPLE
 
-const inputOf = ([mark, name, profile, stock, quantity, length]: LineOfStory) => ({
+const inputOf = ([mark, name, profile, stock, quantity, length]: LineOfStory): OrderLineInput => ({
   mark,
   name,
   profile: DEMO_PROFILES[profile],
   stockId: DEMO_STOCKS[stock].id,
   quantity,
   length,
+  ends: null,
+  hands: null,
+  statedGirth: null,
 })
 
 export const submit: Act = async ({ shop, story, setOrder }) => {
@@ -23,6 +27,7 @@ export const submit: Act = async ({ shop, story, setOrder }) => {
       neededBy: shop.calendar.day(story.neededIn),
       notes: story.notes,
       lines: story.lines.map(inputOf),
+      goods: [],
     },
     DEMO_PEOPLE[story.by],
   )
@@ -47,11 +52,11 @@ export const answer =
 export const amendFirst =
   (quantity: number): Act =>
   async ({ shop, story, getOrder }) => {
-    const { id, version, poNumber, neededBy, notes } = await getOrder()
+    const { id, version, poNumber, neededBy, notes, goods } = await getOrder()
     const lines = story.lines
       .map(inputOf)
       .map((line, index) => (index === 0 ? { ...line, quantity } : line))
-    const amended = { version, poNumber, neededBy, notes, lines }
+    const amended = { version, poNumber, neededBy, notes, lines, goods }
     await shop.orders.amendOrder(id, amended, DEMO_PEOPLE[story.by])
   }
 

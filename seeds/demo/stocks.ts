@@ -15,6 +15,8 @@ import type { StockInsert } from '#server/db/tables/stocks'
  *
  * Widths are those of 48 in. coil and 36 in. copper sheet, lengths what the shop's brakes take:
  * common practice, no source.
+ *
+ * The T-bend ratings of the paints are invented for the demo, as the paints are.
  */
 const STEEL = {
   metal: 'steel',
@@ -25,12 +27,16 @@ const STEEL = {
   springback_per_90: 0.9,
   widest_strip: 48,
   longest_piece: 126,
+  k_source: 'handbookHard',
+  paint_t_bend: 2,
+  alloy: null,
 } as const
 
 const ALUMINUM = {
   ...STEEL,
   metal: 'aluminum',
   density: 0.098,
+  alloy: '3105-H24',
 } as const
 
 const steel24 = { ...STEEL, thickness_name: '24 ga', thickness: 0.0276 }
@@ -94,6 +100,9 @@ export const DEMO_STOCKS = {
     springback_per_90: 1.84,
     widest_strip: 36,
     longest_piece: 120,
+    k_source: 'handbookHard',
+    paint_t_bend: null,
+    alloy: 'C110',
   },
 } as const satisfies Record<string, StockInsert>
 

@@ -9,6 +9,8 @@ import * as pieces from '#migrations/0007_pieces'
 import * as orderStates from '#migrations/0008_order_states'
 import * as planCache from '#migrations/0009_plan_cache'
 import * as overrides from '#migrations/0010_overrides'
+import * as endsAndGoods from '#migrations/0011_ends_and_goods'
+import * as testBends from '#migrations/0012_test_bends'
 
 interface NamedMigration {
   readonly name: string
@@ -30,6 +32,8 @@ const MIGRATIONS: readonly NamedMigration[] = [
   { name: '0008_order_states', migration: orderStates },
   { name: '0009_plan_cache', migration: planCache },
   { name: '0010_overrides', migration: overrides },
+  { name: '0011_ends_and_goods', migration: endsAndGoods },
+  { name: '0012_test_bends', migration: testBends },
 ]
 
 export const migrationSource: Knex.MigrationSource<NamedMigration> = {

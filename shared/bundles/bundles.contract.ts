@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { sideSchema } from '#shared/ends/end.schema'
 import { endpoint } from '#shared/http/endpoint'
 import { daySchema, idParams, momentSchema, textField } from '#shared/http/fields'
 import { pieceStateSchema } from '#shared/pieces/piece-state'
@@ -15,6 +16,8 @@ export const bundlePieceSchema = z.strictObject({
   mark: z.string(),
   name: z.string(),
   sequence: z.int(),
+  /** L or R; null where the line has no hands. */
+  hand: sideSchema.nullable(),
   length: z.number(),
   weight: z.number(),
   state: pieceStateSchema,

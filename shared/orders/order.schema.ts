@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { handsSchema, pieceEndsSchema, sideSchema } from '#shared/ends/end.schema'
 import { daySchema, momentSchema, optionalText, textField } from '#shared/http/fields'
 import { pitchRiseSchema } from '#shared/jobs/jobs.contract'
 import { overrideSchema } from '#shared/orders/override.schema'
@@ -6,6 +7,7 @@ import { companySchema } from '#shared/people/people.contract'
 import { pieceStateSchema } from '#shared/pieces/piece-state'
 import { pieceLengthSchema } from '#shared/plans/plans.contract'
 import { profileSchema } from '#shared/profile/profile.schema'
+import { goodSchema } from '#shared/roof-line/goods.schema'
 import { stockSchema } from '#shared/stock/stock.schema'
 import { stripSchema } from '#shared/strip/strip.schema'
 
@@ -36,8 +38,8 @@ export const progressSchema = z.strictObject({
   withdrawn: z.int(),
 })
 
-/** A line as a person writes it. */
-export const orderLineInputSchema = z.strictObject({
+/** A line as a person writes it, before its parts are held against each other. */
+const lineInputShape = z.strictObject({
   /** The crew's mark on the drawing and the label: A, B, north rake… */
   mark: textField(20),
   name: textField(80),
@@ -47,20 +49,37 @@ export const orderLineInputSchema = z.strictObject({
     .int('Count whole pieces.')
     .min(1, 'At least one piece.')
     .max(500, 'At most 500 pieces a line.'),
+  /** Of the finished piece from tip to tip, laps included; tabs come on top. */
   length: pieceLengthSchema,
+  /** Null: both ends square, the piece level. */
+  ends: pieceEndsSchema.nullable().default(null),
+  /** Null: the pieces have no hand. */
+  hands: handsSchema.nullable().default(null),
+  /** The girth the crew expects; a difference is shown, never mended. */
+  statedGirth: z.number().positive().max(120).nullable().default(null),
 })
+
+/** A line as a person writes it. */
+export const orderLineInputSchema = lineInputShape.refine(
+  ({ hands, quantity }) => hands === null || hands.left + hands.right === quantity,
+  { path: ['hands'], error: 'Left and right together must be the quantity.' },
+)
 
 export const orderInputSchema = z.strictObject({
   poNumber: optionalText(40),
   neededBy: daySchema,
   notes: optionalText(1000),
   lines: z.array(orderLineInputSchema).min(1, 'An order needs at least one line.').max(50),
+  /** Small goods that go with the trim. */
+  goods: z.array(goodSchema).max(40).default([]),
 })
 
 export const pieceSummarySchema = z.strictObject({
   code: z.string(),
   /** 1…quantity within the line; a remake keeps the number of the piece it replaces. */
   sequence: z.int(),
+  /** L or R where the line has hands: its first pieces are the left ones. */
+  hand: sideSchema.nullable(),
   state: pieceStateSchema,
   /** When it came into its state, and by whom. */
   since: momentSchema,
@@ -80,6 +99,9 @@ export const orderLineSchema = z.strictObject({
   stock: stockSchema,
   quantity: z.int(),
   length: z.number(),
+  ends: pieceEndsSchema.nullable(),
+  hands: handsSchema.nullable(),
+  statedGirth: z.number().nullable(),
   strip: stripSchema,
   /** Pounds of one piece. */
   pieceWeight: z.number(),
@@ -101,6 +123,8 @@ export const orderEventSchema = z.strictObject({
     'released',
     'withdrawn',
     'handedOff',
+    /** The job's pitch changed and the lines that follow it were drawn anew. */
+    'redrawn',
   ]),
   at: momentSchema,
   by: z.string(),
@@ -128,6 +152,7 @@ export const orderSchema = z.strictObject({
   ...orderSummarySchema.shape,
   notes: z.string(),
   lines: z.array(orderLineSchema),
+  goods: z.array(goodSchema),
   events: z.array(orderEventSchema),
 })
 

@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { sideSchema } from '#shared/ends/end.schema'
 import { endpoint } from '#shared/http/endpoint'
 import { momentSchema, textField } from '#shared/http/fields'
 import { pieceStateSchema, stationSchema } from '#shared/pieces/piece-state'
@@ -21,6 +22,10 @@ export const pieceSchema = z.strictObject({
   state: pieceStateSchema,
   sequence: z.int(),
   quantity: z.int(),
+  /** L or R; null where the line has no hands. */
+  hand: sideSchema.nullable(),
+  /** The end that lies lower on the roof, by this piece's own hand; null where it runs level. */
+  lowEnd: sideSchema.nullable(),
   mark: z.string(),
   name: z.string(),
   length: z.number(),

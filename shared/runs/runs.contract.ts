@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { planSchema } from '#shared/bend-plan/plan.schema'
 import { brakeSchema } from '#shared/bend-plan/brake.schema'
+import { handsSchema, pieceEndsSchema, sideSchema } from '#shared/ends/end.schema'
 import { endpoint } from '#shared/http/endpoint'
 import { daySchema, idParams, momentSchema } from '#shared/http/fields'
 import { progressSchema } from '#shared/orders/order.schema'
@@ -39,7 +40,10 @@ export const runSummarySchema = z.strictObject({
 
 export const runPieceSchema = z.strictObject({
   code: z.string(),
+  lineId: z.uuid(),
   mark: z.string(),
+  hand: sideSchema.nullable(),
+  lowEnd: sideSchema.nullable(),
   sequence: z.int(),
   quantity: z.int(),
   length: z.number(),
@@ -50,10 +54,22 @@ export const runPieceSchema = z.strictObject({
   lastEventId: z.int(),
 })
 
+/** A line of the order as the brake needs it: whose strips look alike. */
+export const runLineSchema = z.strictObject({
+  id: z.uuid(),
+  mark: z.string(),
+  name: z.string(),
+  length: z.number(),
+  quantity: z.int(),
+  ends: pieceEndsSchema.nullable(),
+  hands: handsSchema.nullable(),
+})
+
 export const runSchema = z.strictObject({
   ...runSummarySchema.shape,
   plan: planSchema,
   brake: brakeSchema,
+  lines: z.array(runLineSchema),
   pieces: z.array(runPieceSchema),
 })
 
@@ -116,4 +132,5 @@ export const bendCount = endpoint({
 
 export type RunSummary = z.infer<typeof runSummarySchema>
 export type RunPiece = z.infer<typeof runPieceSchema>
+export type RunLine = z.infer<typeof runLineSchema>
 export type Run = z.infer<typeof runSchema>

@@ -39,6 +39,7 @@ export async function createStock(db: Db, given: Partial<StockInsert> = {}): Pro
         springback_per_90: 2,
         widest_strip: 48,
         longest_piece: 126,
+        k_source: 'handbookHard',
         ...given,
       })
       .returning('id'),
@@ -106,10 +107,20 @@ export const lineInput = (
   stockId,
   quantity: 3,
   length: 120,
+  ends: null,
+  hands: null,
+  statedGirth: null,
   ...given,
 })
 
 export const orderInput = (
   lines: readonly OrderLineInput[],
   given: Partial<OrderInput> = {},
-): OrderInput => ({ poNumber: '', neededBy: FAR_DAY, notes: '', lines: [...lines], ...given })
+): OrderInput => ({
+  poNumber: '',
+  neededBy: FAR_DAY,
+  notes: '',
+  lines: [...lines],
+  goods: [],
+  ...given,
+})

@@ -11,6 +11,8 @@ export interface OrderRow {
   needed_by: string
   notes: string
   pitch_rise: number
+  /** Small goods; parsed with goodSchema when read. */
+  goods: unknown
   submitted_at: Date
   released_at: Date | null
   withdrawn_at: Date | null
@@ -20,5 +22,8 @@ export type OrderInsert = Pick<
   OrderRow,
   'company_id' | 'job_id' | 'ordered_by' | 'needed_by' | 'pitch_rise'
 > &
-  Partial<OrderRow>
-export type OrderUpdate = Partial<Omit<OrderRow, 'id' | 'number' | 'company_id'>>
+  Partial<Omit<OrderRow, 'goods'>> & { goods?: string }
+/** JSON columns are written as text. */
+export type OrderUpdate = Partial<Omit<OrderRow, 'id' | 'number' | 'company_id' | 'goods'>> & {
+  goods?: string
+}

@@ -1,6 +1,7 @@
 import type { Knex } from 'knex'
 import type { BrakeInsert, BrakeRow, BrakeUpdate } from './brakes'
 import type { BundleInsert, BundleRow, BundleUpdate } from './bundles'
+import type { CalibrationInsert, CalibrationRow } from './calibrations'
 import type { CompanyInsert, CompanyRow, CompanyUpdate } from './companies'
 import type { HandOffInsert, HandOffRow } from './hand-offs'
 import type {
@@ -29,6 +30,7 @@ import type { RunInsert, RunRow, RunUpdate } from './runs'
 import type { SessionRow } from './sessions'
 import type { ShelfProfileInsert, ShelfProfileRow, ShelfProfileUpdate } from './shelf-profiles'
 import type { StockInsert, StockRow, StockUpdate } from './stocks'
+import type { TestBendInsert, TestBendRow, TestBendUpdate } from './test-bends'
 
 /** Knex itself checks table and column names against these types. */
 declare module 'knex/types/tables' {
@@ -44,6 +46,8 @@ declare module 'knex/types/tables' {
     >
     live_events: Knex.CompositeTableType<LiveEventRow, LiveEventInsert>
     stocks: Knex.CompositeTableType<StockRow, StockInsert, StockUpdate>
+    test_bends: Knex.CompositeTableType<TestBendRow, TestBendInsert, TestBendUpdate>
+    calibrations: Knex.CompositeTableType<CalibrationRow, CalibrationInsert>
     brakes: Knex.CompositeTableType<BrakeRow, BrakeInsert, BrakeUpdate>
     jobs: Knex.CompositeTableType<JobRow, JobInsert, JobUpdate>
     shelf_profiles: Knex.CompositeTableType<ShelfProfileRow, ShelfProfileInsert, ShelfProfileUpdate>

@@ -1,4 +1,4 @@
-import type { Metal } from '#shared/stock/stock.schema'
+import type { KSource, Metal } from '#shared/stock/stock.schema'
 
 export const STOCKS = 'stocks'
 
@@ -17,6 +17,11 @@ export interface StockRow {
   springback_per_90: number
   widest_strip: number
   longest_piece: number
+  k_source: KSource
+  /** How many thicknesses round which the paint bends unbroken; null unknown. */
+  paint_t_bend: number | null
+  alloy: string | null
 }
-export type StockInsert = Omit<StockRow, 'id'> & Partial<Pick<StockRow, 'id'>>
+export type StockInsert = Omit<StockRow, 'id' | 'paint_t_bend' | 'alloy'> &
+  Partial<Pick<StockRow, 'id' | 'paint_t_bend' | 'alloy'>>
 export type StockUpdate = Partial<Omit<StockRow, 'id'>>

@@ -1,10 +1,11 @@
 import { z } from 'zod'
 import type { Db } from '#server/db/knex'
 import { readRows } from '#server/db/read-rows'
+import { lineLaySchema, pieceLay } from '#server/features/pieces/piece-lay'
 import type { BundlePiece } from '#shared/bundles/bundles.contract'
 import { pieceStateSchema } from '#shared/pieces/piece-state'
 
-const pieceRowSchema = z.object({
+const pieceRowSchema = lineLaySchema.extend({
   owner: z.uuid(),
   code: z.string(),
   mark: z.string(),
@@ -33,6 +34,7 @@ export async function mapBundlePieces(
     db,
     pieceRowSchema,
     `select ${owner} as owner, p.code, l.mark, l.name, p.sequence, l.length, p.state,
+       l.ends, l.hands,
        cast(l.frozen ->> 'pieceWeight' as double precision) as weight
      from pieces p join order_lines l on l.id = p.line_id
      where ${where}
@@ -40,6 +42,9 @@ export async function mapBundlePieces(
     { ids },
   )
   const byOwner = new Map<string, BundlePiece[]>(ids.map((id) => [id, []]))
-  for (const { owner: id, ...piece } of rows) byOwner.get(id)?.push(piece)
+  for (const { owner: id, ends, hands, ...piece } of rows) {
+    const { hand } = pieceLay({ ends, hands }, piece.sequence)
+    byOwner.get(id)?.push({ ...piece, hand })
+  }
   return byOwner
 }

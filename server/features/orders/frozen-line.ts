@@ -1,7 +1,8 @@
 import { z } from 'zod'
+import { frozenStockSchema } from '#server/features/stocks/frozen-stock'
 import { planSchema } from '#shared/bend-plan/plan.schema'
+import { handsSchema, pieceEndsSchema } from '#shared/ends/end.schema'
 import { overrideSchema } from '#shared/orders/override.schema'
-import { stockSchema } from '#shared/stock/stock.schema'
 import { stripSchema } from '#shared/strip/strip.schema'
 
 /**
@@ -9,7 +10,7 @@ import { stripSchema } from '#shared/strip/strip.schema'
  * A later change of stock, brake or kernel does not reach them.
  */
 export const frozenLineSchema = z.strictObject({
-  stock: stockSchema,
+  stock: frozenStockSchema,
   strip: stripSchema,
   /** Pounds. */
   pieceWeight: z.number(),
@@ -20,6 +21,9 @@ export const frozenLineSchema = z.strictObject({
   kernelVersion: z.int(),
   /** Lines released before overrides were known have none. */
   override: overrideSchema.nullable().default(null),
+  /** Lines released before ends were known have square ones. */
+  ends: pieceEndsSchema.nullable().default(null),
+  hands: handsSchema.nullable().default(null),
 })
 
 export type FrozenLine = z.infer<typeof frozenLineSchema>

@@ -1,4 +1,5 @@
 import type { Db } from '#server/db/knex'
+import { lineLaySchema, pieceLay } from '#server/features/pieces/piece-lay'
 import type { PieceSummary } from '#shared/orders/order.schema'
 import type { PieceState } from '#shared/pieces/piece-state'
 
@@ -13,12 +14,15 @@ interface OrderPieceRow {
   bundle_code: string | null
   rack_place: string | null
   remake_of: string | null
+  ends: unknown
+  hands: unknown
 }
 
 export const createOrderPiecesQueries = (db: Db) => ({
   /** The pieces of an order by line, each with the event that made its state; remakes come last. */
   async mapPieces(orderId: string): Promise<Map<string, PieceSummary[]>> {
     const rows = await db('pieces as x')
+      .join('order_lines as l', 'l.id', 'x.line_id')
       .join('runs as r', 'r.id', 'x.run_id')
       .joinRaw(
         `cross join lateral (
@@ -42,6 +46,8 @@ export const createOrderPiecesQueries = (db: Db) => ({
         'b.code as bundle_code',
         'b.rack_place',
         'spoiled.code as remake_of',
+        'l.ends',
+        'l.hands',
       )
     const byLine = new Map<string, PieceSummary[]>()
     for (const row of rows) {
@@ -56,6 +62,7 @@ export const createOrderPiecesQueries = (db: Db) => ({
 const toPieceSummary = (row: OrderPieceRow): PieceSummary => ({
   code: row.code,
   sequence: row.sequence,
+  hand: pieceLay(lineLaySchema.parse(row), row.sequence).hand,
   state: row.state,
   since: row.at.toISOString(),
   by: row.by,

@@ -13,6 +13,7 @@ interface OrderSummaryRow {
   po_number: string
   needed_by: string
   notes: string
+  goods: unknown
   submitted_at: Date
   version: number
   state: OrderState
@@ -49,6 +50,7 @@ export function selectOrderSummaries(db: Db, scope: string | null) {
       'o.po_number',
       'o.needed_by',
       'o.notes',
+      'o.goods',
       'o.submitted_at',
       'o.version',
       's.state',

@@ -7,10 +7,12 @@ import { frozenLineSchema, type FrozenLine } from '#server/features/orders/froze
 import { searchOrders } from '#server/features/orders/order-search'
 import { selectOrderSummaries, toOrderSummary } from '#server/features/orders/order-summary'
 import { decodeCursor, toPage } from '#server/http/cursor'
+import { handsSchema, pieceEndsSchema } from '#shared/ends/end.schema'
 import type { AnswerOf, QueryOf } from '#shared/http/endpoint'
 import type { OrderEvent, OrderLineInput, OrderSummary } from '#shared/orders/order.schema'
 import type { listOrders } from '#shared/orders/orders.contract'
 import { profileSchema } from '#shared/profile/profile.schema'
+import { goodSchema, type Good } from '#shared/roof-line/goods.schema'
 
 /** A line as written, with what was frozen at release. */
 export interface StoredLine extends OrderLineInput {
@@ -30,6 +32,9 @@ const toStoredLine = (row: OrderLineRow): StoredLine => ({
   stockId: row.stock_id,
   quantity: row.quantity,
   length: row.length,
+  ends: pieceEndsSchema.nullable().parse(row.ends),
+  hands: handsSchema.nullable().parse(row.hands),
+  statedGirth: row.stated_girth,
   frozen: frozenLineSchema.nullable().parse(row.frozen),
 })
 
@@ -59,9 +64,14 @@ export const createOrdersQueries = (db: Db) => ({
   async findOrder(
     id: string,
     scope: string | null,
-  ): Promise<(OrderSummary & { notes: string }) | undefined> {
+  ): Promise<(OrderSummary & { notes: string; goods: Good[] }) | undefined> {
     const row = await selectOrderSummaries(db, scope).where('o.id', id).first()
-    return row && { ...toOrderSummary(row), notes: row.notes }
+    if (!row) return undefined
+    return {
+      ...toOrderSummary(row),
+      notes: row.notes,
+      goods: z.array(goodSchema).parse(row.goods),
+    }
   },
 
   async listLines(orderId: string): Promise<StoredLine[]> {

@@ -115,6 +115,7 @@ export const createOrdersService = (deps: OrdersDeps) => {
         po_number: body.poNumber,
         needed_by: body.neededBy,
         notes: body.notes,
+        goods: JSON.stringify(body.goods),
         pitch_rise: job.pitchRise,
         submitted_at: clock.now(),
       })
@@ -141,6 +142,7 @@ export const createOrdersService = (deps: OrdersDeps) => {
             po_number: body.poNumber,
             needed_by: body.neededBy,
             notes: body.notes,
+            goods: JSON.stringify(body.goods),
             pitch_rise: current.pitchRise,
           })
         },

@@ -41,6 +41,9 @@ export const createOrdersStore = (db: Db) => ({
         stock_id: line.stockId,
         quantity: line.quantity,
         length: line.length,
+        ends: line.ends && JSON.stringify(line.ends),
+        hands: line.hands && JSON.stringify(line.hands),
+        stated_girth: line.statedGirth,
       })),
     )
   },

@@ -68,6 +68,8 @@ const frozenLines = (run: PlannedRun): [string, FrozenLine][] => {
       plan,
       kernelVersion: KERNEL_VERSION,
       override,
+      ends: line.ends,
+      hands: line.hands,
     },
   ])
 }

@@ -4,6 +4,7 @@ import type { Db } from '#server/db/knex'
 import { findRow, readRows } from '#server/db/read-rows'
 import { notFound } from '#server/http/errors'
 import type { SignedIn } from '#server/http/signed-in'
+import { lineLaySchema, pieceLay } from './piece-lay'
 import {
   pieceEventSchema,
   pieceSchema,
@@ -11,8 +12,11 @@ import {
   type PieceEvent,
 } from '#shared/pieces/pieces.contract'
 
-/** The contract's piece without its events, which are read beside it. */
-const pieceRowSchema = z.object({ id: z.uuid(), ...pieceSchema.omit({ events: true }).shape })
+/** The contract's piece without its events, which are read beside it; its hand follows from the line. */
+const pieceRowSchema = lineLaySchema.extend({
+  id: z.uuid(),
+  ...pieceSchema.omit({ events: true, hand: true, lowEnd: true }).shape,
+})
 
 /** The database gives a Date where the contract has text. */
 const eventRowSchema = z.object({ ...pieceEventSchema.shape, pieceId: z.uuid(), at: z.date() })
@@ -32,6 +36,7 @@ export async function getPieces(
     db,
     pieceRowSchema,
     `select p.id, p.code, p.state, p.sequence, l.quantity, l.mark, l.name, l.length,
+       l.ends, l.hands,
        o.id as "orderId", o.number as "orderNumber", c.name as company, j.name as job,
        r.id as "runId", r.number as "runNumber", b.code as "bundleCode",
        case when p.state = 'bundled' then b.rack_place end as "rackPlace",
@@ -56,8 +61,9 @@ export async function getPieces(
   return codes.map((code) => {
     const row = rows.find((candidate) => candidate.code === code)
     if (!row) throw notFound('piece')
-    const { id, ...piece } = row
-    return { ...piece, events: events.get(id) ?? [] }
+    const { id, ends, hands, ...piece } = row
+    const lay = pieceLay({ ends, hands }, piece.sequence)
+    return { ...piece, ...lay, events: events.get(id) ?? [] }
   })
 }
 

@@ -1,12 +1,16 @@
 import { z } from 'zod'
 import type { Db } from '#server/db/knex'
 import { findRow, readRows } from '#server/db/read-rows'
+import { lineLaySchema, pieceLay } from '#server/features/pieces/piece-lay'
+import { frozenStockSchema } from '#server/features/stocks/frozen-stock'
 import { notFound } from '#server/http/errors'
 import type { Progress } from '#shared/orders/order.schema'
 import { pieceStateSchema } from '#shared/pieces/piece-state'
 import {
+  runLineSchema,
   runSummarySchema,
   type Run,
+  type RunLine,
   type RunPiece,
   type RunSummary,
 } from '#shared/runs/runs.contract'
@@ -16,6 +20,7 @@ import { planSchema } from '#shared/bend-plan/plan.schema'
 /** The contract's summary, with its pieces counted by state and who took it as columns. */
 const summaryRowSchema = z.object({
   ...runSummarySchema.omit({ progress: true, claimedBy: true }).shape,
+  stock: frozenStockSchema,
   counts: z.partialRecord(pieceStateSchema, z.int()),
   claimerId: z.uuid().nullable(),
   claimerName: z.string().nullable(),
@@ -78,11 +83,29 @@ export async function getRun(db: Db, id: string): Promise<Run> {
     { id },
   )
   if (!row) throw notFound('run')
-  return { ...toSummary(row), plan: row.plan, brake: row.brake, pieces: await listPieces(db, id) }
+  return {
+    ...toSummary(row),
+    plan: row.plan,
+    brake: row.brake,
+    lines: await listLines(db, id),
+    pieces: await listPieces(db, id),
+  }
 }
 
-const pieceRowSchema = z.object({
+/** The lines whose pieces the run bends, in the order's order. */
+const listLines = (db: Db, runId: string): Promise<RunLine[]> =>
+  readRows(
+    db,
+    runLineSchema,
+    `select id, mark, name, length, quantity, ends, hands from order_lines
+     where id in (select line_id from pieces where run_id = :runId)
+     order by position`,
+    { runId },
+  )
+
+const pieceRowSchema = lineLaySchema.extend({
   code: z.string(),
+  lineId: z.uuid(),
   mark: z.string(),
   sequence: z.int(),
   quantity: z.int(),
@@ -99,7 +122,7 @@ async function listPieces(db: Db, runId: string): Promise<RunPiece[]> {
   const rows = await readRows(
     db,
     pieceRowSchema,
-    `select p.code, l.mark, p.sequence, l.quantity, l.length,
+    `select p.code, p.line_id as "lineId", l.mark, l.ends, l.hands, p.sequence, l.quantity, l.length,
        cast(l.frozen ->> 'pieceWeight' as double precision) as weight,
        p.state, e.at, person.name as by, e.id as "lastEventId"
      from pieces p
@@ -113,7 +136,11 @@ async function listPieces(db: Db, runId: string): Promise<RunPiece[]> {
      order by l.position, p.sequence, events.first_id`,
     { runId },
   )
-  return rows.map(({ at, ...piece }) => ({ ...piece, since: at.toISOString() }))
+  return rows.map(({ at, ends, hands, ...piece }) => ({
+    ...piece,
+    ...pieceLay({ ends, hands }, piece.sequence),
+    since: at.toISOString(),
+  }))
 }
 
 const toSummary = (row: z.infer<typeof summaryRowSchema>): RunSummary => ({

@@ -22,6 +22,8 @@ describe('Stocks and brakes', () => {
       painted: false,
       thickness: 0.0216,
       density: 0.322,
+      k_source: 'handbookSoft',
+      alloy: 'C110',
     })
     const { items } = await shop.crew.agent.call(listStocks)
     expect(items.map(({ id }) => id)).toEqual([first, shop.stockId])
@@ -41,6 +43,10 @@ describe('Stocks and brakes', () => {
         density: 0.322,
         springbackPer90: 2,
       },
+      kSource: 'handbookSoft',
+      paintTBend: null,
+      alloy: 'C110',
+      calibrations: [],
     })
   })
 

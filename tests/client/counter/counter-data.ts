@@ -52,6 +52,7 @@ export const bundleOf = (number: number, more: Partial<Bundle> = {}): Bundle => 
     mark: 'A',
     name: 'Gable trim',
     sequence,
+    hand: null,
     length: 120,
     weight: 8,
     state: 'bundled',
@@ -88,6 +89,10 @@ const STOCK: Stock = {
     density: 0.2836,
     springbackPer90: 0.9,
   },
+  kSource: 'handbookHard',
+  paintTBend: null,
+  alloy: null,
+  calibrations: [],
 }
 
 const PROFILE: Profile = {
@@ -108,6 +113,9 @@ export const lineOf = (mark: string, more: Partial<OrderLine> = {}): OrderLine =
   stock: STOCK,
   quantity: 3,
   length: 120,
+  ends: null,
+  hands: null,
+  statedGirth: null,
   strip: flatStrip(PROFILE, STOCK.sheet),
   pieceWeight: 5.6,
   bendsOn: ['Long folder'],
@@ -121,6 +129,7 @@ export const orderOf = (more: Partial<Order> = {}): Order => ({
   ...orderSummaryOf({ state: 'submitted', progress: NO_PIECES }),
   notes: '',
   lines: [lineOf('A'), lineOf('C')],
+  goods: [],
   events: [
     { id: 1, kind: 'submitted', at: '2026-03-02T14:00:00.000Z', by: 'Pell Aster', text: '' },
   ],

@@ -36,6 +36,7 @@ const released = (): Order =>
         pieces: [1, 2, 3].map((sequence) => ({
           code: pieceCode(sequence),
           sequence,
+          hand: null,
           state: 'queued',
           since: '2026-03-02T15:00:00.000Z',
           by: 'Ines Calder',
