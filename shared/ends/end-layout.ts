@@ -29,7 +29,7 @@ export interface Slit {
   readonly to: StripPoint
 }
 
-/** A closed hem that is opened again from the end, so that the next piece can enter. */
+/** A hem that is opened from the end, so that the next piece can enter. */
 export interface HemOpening {
   readonly edge: 'A' | 'B'
   /** From the end into the piece. */
@@ -42,8 +42,9 @@ export interface HemOpening {
 export interface EndLayout {
   readonly side: Side
   /**
-   * The cut from edge A to edge B. Two marks share an `at` where the cut steps. The least `along`
-   * of cut and tabs is 0.
+   * The cut from edge A to edge B, one mark for each edge and crease; under a tab the line it is
+   * folded on. Reliefs of a lap are cut-aways and no part of it. The least `along` of cut and tabs
+   * is 0.
    */
   readonly marks: readonly Mark[]
   readonly tabs: readonly TabLayout[]
@@ -66,6 +67,7 @@ export interface StripLayout {
 
 /** Everything that can be wrong with an end. The texts live in the locales, namespace `ends`. */
 export const END_PROBLEM_CODES = [
+  'profileFaulty',
   'noSuchLeg',
   'legNamedTwice',
   'notFinite',
@@ -78,7 +80,18 @@ export const END_PROBLEM_CODES = [
 
 export type EndProblemCode = (typeof END_PROBLEM_CODES)[number]
 
-/** Why an end cannot be cut. `found` and `limit` are inches or degrees as the code says. */
+/**
+ * Why an end cannot be cut; what `found` and `limit` are, and their unit:
+ *
+ * - `profileFaulty`: the profile has no strip to lay out; `profileProblems` says why. None.
+ * - `noSuchLeg`, `legNamedTwice`: the leg's number; the number of legs, of times it may stand (1).
+ * - `notFinite`: the value, which is no number; null. Of a length also one that is not above its
+ *   limit, 0.
+ * - `planeAlongPiece`: degrees between the plane and the piece; the least there may be.
+ * - `cornerTurnsBack`: degrees that the run turns in the corner; the most.
+ * - `lapLongerThanPiece`, `tabLongerThanPiece`: inches; the piece's length.
+ * - `endsMeet`: inches that both cuts together take off the blank at one place; the blank's length.
+ */
 export interface EndProblem {
   readonly code: EndProblemCode
   readonly end: Side

@@ -87,6 +87,7 @@ export const handsSchema = z.strictObject({
 })
 
 export type CutPlane = z.infer<typeof cutPlaneSchema>
+export type Corner = Extract<CutPlane, { readonly corner: unknown }>['corner']
 export type Tab = z.infer<typeof tabSchema>
 export type LegPlane = z.infer<typeof legPlaneSchema>
 export type End = z.infer<typeof endSchema>

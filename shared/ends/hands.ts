@@ -2,6 +2,9 @@ import type { CutPlane, End, Hands, PieceEnds, Side } from '#shared/ends/end.sch
 
 const otherSide = (side: Side): Side => (side === 'left' ? 'right' : 'left')
 
+/** Subtracted, so that 0 stays 0 and never becomes -0. */
+const opposite = (value: number): number => 0 - value
+
 /** The plane with its sign along the piece changed: u and v stay, t counts the other way. */
 const mirrorPlane = (plane: CutPlane): CutPlane => {
   if ('plumb' in plane) return { plumb: 0 - plane.plumb }
@@ -38,7 +41,7 @@ export const mirrorEnds = ({ left, right, lowEnd }: PieceEnds): PieceEnds => ({
  */
 export const handOf = (hands: Hands | null, sequence: number): Side | null => {
   if (hands === null) return null
-  if (sequence < 1 || sequence > hands.left + hands.right) {
+  if (!(sequence >= 1 && sequence <= hands.left + hands.right)) {
     throw new RangeError(`There is no piece ${sequence} of ${hands.left + hands.right}.`)
   }
   return sequence <= hands.left ? 'left' : 'right'

@@ -1,0 +1,69 @@
+import type { EndProblem } from '#shared/ends/end-layout'
+import type { FoundProblem } from '#shared/ends/one-end-problems'
+import { foundProblem, oneEndProblems } from '#shared/ends/one-end-problems'
+import type { PieceToLay, StripBorders } from '#shared/ends/strip-borders'
+import { markPlaces, SQUARE_ENDS, stripBorders } from '#shared/ends/strip-borders'
+import { narrowest } from '#shared/ends/strip-polygon'
+import { isLess } from '#shared/geometry/tolerance'
+import { hasErrors } from '#shared/profile/problem'
+import type { Profile } from '#shared/profile/profile.schema'
+import { valueProblems } from '#shared/profile/value-problems'
+import type { FoldingSheet } from '#shared/strip/flat-parts'
+import { flatParts } from '#shared/strip/flat-parts'
+import { flatStrip } from '#shared/strip/flat-strip'
+
+/** Without a strip there is nothing to cut: no sense in the values, or legs their bends use up. */
+const hasStrip = (profile: Profile, sheet: FoldingSheet): boolean => {
+  if (hasErrors(valueProblems(profile))) return false
+  if (flatParts(profile, sheet).runs.some(({ straight }) => !(straight >= 0))) return false
+  const places = markPlaces(flatStrip(profile, sheet))
+  return places.every((place, index) => index === 0 || isLess(places[index - 1] ?? NaN, place))
+}
+
+const ofEnd =
+  (end: EndProblem['end']) =>
+  (found: FoundProblem): EndProblem => ({ ...found, end })
+
+/** The two cuts leave nothing of the piece somewhere across the strip. */
+const meetingProblems = ({ at, left, right, blankLength }: StripBorders): EndProblem[] => {
+  const { at: place, taken } = narrowest(left.border, right.border)
+  if (isLess(taken, blankLength)) return []
+  const run = at.findIndex((_, index) => place <= (at[index + 1] ?? Infinity))
+  return [ofEnd('right')(foundProblem('endsMeet', { leg: run, found: taken, limit: blankLength }))]
+}
+
+export type ExaminedEnds =
+  | { readonly ok: true; readonly borders: StripBorders }
+  | { readonly ok: false; readonly problems: readonly EndProblem[] }
+
+/** The borders of a piece's ends, or what is wrong with them. Never throws. */
+export const examineEnds = (piece: PieceToLay): ExaminedEnds => {
+  const { profile, sheet, pieceLength } = piece
+  const ends = piece.ends ?? SQUARE_ENDS
+  if (!hasStrip(profile, sheet)) {
+    return { ok: false, problems: [ofEnd('left')(foundProblem('profileFaulty'))] }
+  }
+  if (!(pieceLength > 0 && Number.isFinite(pieceLength))) {
+    const found = foundProblem('notFinite', { found: pieceLength, limit: 0 })
+    return { ok: false, problems: [ofEnd('left')(found)] }
+  }
+  const legs = profile.legs.length
+  const apart = (['left', 'right'] as const).flatMap((side) =>
+    oneEndProblems(ends[side], side, legs, pieceLength).map(ofEnd(side)),
+  )
+  if (apart.length > 0) return { ok: false, problems: apart }
+  const borders = stripBorders(piece)
+  const meeting = meetingProblems(borders)
+  return meeting.length > 0 ? { ok: false, problems: meeting } : { ok: true, borders }
+}
+
+/**
+ * Everything that keeps a piece's ends from being cut, each with its end, leg and values; none
+ * where the strip can be laid out. A fault of the profile or the piece's length stands at the left
+ * end. `endsMeet` stands at the right end. Never throws on a value of the right shape, NaN and
+ * infinity included, and never mends anything by itself.
+ */
+export const endProblems = (piece: PieceToLay): readonly EndProblem[] => {
+  const examined = examineEnds(piece)
+  return examined.ok ? [] : examined.problems
+}
