@@ -1,9 +1,8 @@
-import { TOLERANCE } from '#shared/geometry/tolerance'
 import type { ProfileProblem } from '#shared/profile/problem'
 import type { Inches } from '#shared/units/brands'
 import type { LengthUnits } from '#shared/units/length-units'
-import { MM_PER_INCH } from '#shared/units/length-units'
 import { printSize } from '#shared/units/print-length'
+import { tapeStep } from '#shared/units/tape-step'
 
 /** What a translated text of a problem is filled with; keys are those of the namespace `profile`. */
 export interface ProblemMessage {
@@ -21,9 +20,6 @@ export interface ProblemMessage {
   }
 }
 
-/** Steps in which a limit is told, in inches; a person reads it off a tape. */
-const STEP: Record<LengthUnits, Inches> = { fraction: 1 / 16, decimal: 0.01, mm: 0.5 / MM_PER_INCH }
-
 /** `limit` is the most that is allowed; for all others the least. */
 const AT_MOST: readonly ProfileProblem['code'][] = [
   'hemTooLong',
@@ -35,12 +31,8 @@ const AT_MOST: readonly ProfileProblem['code'][] = [
 const OF_THE_SHEET: readonly ProfileProblem['code'][] = ['radiusTight', 'gapTight']
 
 /** The limit on the next step that still keeps it: following the text must cure the problem. */
-const tapeLimit = ({ code, limit }: ProfileProblem, units: LengthUnits): Inches | null => {
-  if (limit === null) return null
-  const steps = limit / STEP[units]
-  const kept = AT_MOST.includes(code) ? Math.floor(steps + TOLERANCE) : Math.ceil(steps - TOLERANCE)
-  return kept * STEP[units]
-}
+const tapeLimit = ({ code, limit }: ProfileProblem, units: LengthUnits): Inches | null =>
+  limit === null ? null : tapeStep(limit, AT_MOST.includes(code) ? 'down' : 'up', units)
 
 const printInches = (inches: Inches | null, units: LengthUnits): string => {
   if (inches === null) return ''

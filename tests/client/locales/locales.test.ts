@@ -13,6 +13,7 @@ const SRC = join(import.meta.dirname, '../../../src')
 const FROM_CODES: readonly string[] = [
   'plan:', // reasons and cures of the planner
   'profile:', // problems and cures of a profile
+  'roof-line:', // problems, cures and notes of a roof line
   'starters:', // keys of the shop's starter profiles
 ]
 
