@@ -2,10 +2,10 @@ import type { CutPlane, End, Hands, PieceEnds, Side } from '#shared/ends/end.sch
 
 const otherSide = (side: Side): Side => (side === 'left' ? 'right' : 'left')
 
-/** Subtracted, so that 0 stays 0 and never becomes -0. */
-const opposite = (value: number): number => 0 - value
-
-/** The plane with its sign along the piece changed: u and v stay, t counts the other way. */
+/**
+ * The plane with its sign along the piece changed: u and v stay, t counts the other way. Signs are
+ * changed by subtracting, so that 0 stays 0 and never becomes -0.
+ */
 const mirrorPlane = (plane: CutPlane): CutPlane => {
   if ('plumb' in plane) return { plumb: 0 - plane.plumb }
   if ('normal' in plane) {
