@@ -10,6 +10,7 @@ export function BrakeNav() {
       items={[
         { to: paths.brake.queue(), label: t('nav.queue'), end: true },
         { to: paths.brake.done(), label: t('nav.done') },
+        { to: paths.brake.testBends(), label: t('nav.testBends') },
       ]}
     />
   )

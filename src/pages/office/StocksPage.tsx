@@ -3,6 +3,7 @@ import { useMemo } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { Stock } from '#shared/stock/stock.schema'
 import { printSize } from '#shared/units/print-length'
+import { paths } from '@/app/paths'
 import { ColorChip } from '@/components/ColorChip'
 import { EmptyState } from '@/components/EmptyState'
 import { DataTable } from '@/components/table/DataTable'
@@ -51,6 +52,13 @@ export function StocksPage() {
         header: t('stocks.kFactor'),
         meta: figure,
       }),
+      column.accessor(
+        ({ kSource, calibrations }) =>
+          calibrations.length > 0
+            ? t('stocks.shopBends', { count: calibrations.length })
+            : t(`stocks:kSource.${kSource}`),
+        { id: 'kSource', header: t('stocks.kSource') },
+      ),
       column.accessor(({ sheet }) => `${sheet.springbackPer90}°`, {
         id: 'springback',
         header: t('stocks.springback'),
@@ -76,6 +84,7 @@ export function StocksPage() {
         rows={data?.items}
         columns={columns}
         rowId={({ id }) => id}
+        rowLink={({ id }) => paths.office.stock(id)}
         error={error}
         onRetry={() => void refetch()}
         empty={<EmptyState title={t('stocks.empty')} hint={t('stocks.emptyHint')} />}

@@ -4,6 +4,7 @@ import { lazyPage } from '@/app/lazy-page'
 export const routes: RouteObject[] = [
   { index: true, ...lazyPage(async () => (await import('./OverviewPage')).OverviewPage) },
   { path: 'stocks', ...lazyPage(async () => (await import('./StocksPage')).StocksPage) },
+  { path: 'stocks/:stockId', ...lazyPage(async () => (await import('./StockPage')).StockPage) },
   { path: 'brakes', ...lazyPage(async () => (await import('./BrakesPage')).BrakesPage) },
   { path: 'people', ...lazyPage(async () => (await import('./PeoplePage')).PeoplePage) },
 ]

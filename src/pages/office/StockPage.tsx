@@ -1,0 +1,53 @@
+import { useQuery } from '@tanstack/react-query'
+import { useTranslation } from 'react-i18next'
+import { useParams } from 'react-router-dom'
+import { paths } from '@/app/paths'
+import { EmptyState } from '@/components/EmptyState'
+import { ErrorState } from '@/components/ErrorState'
+import { LoadingState } from '@/components/LoadingState'
+import { StockName } from '@/features/orders/components/StockName'
+import { stocksQuery } from '@/features/stocks/api/stocks.queries'
+import { StockFacts } from '@/features/stocks/components/StockFacts'
+import { TestBends } from '@/features/stocks/components/TestBends'
+import { PlaceFrame } from '@/pages/shell/PlaceFrame'
+import { OfficeNav } from './OfficeNav'
+
+/** One stock: what is reckoned with, where it comes from, and the bends that were measured. */
+export function StockPage() {
+  const { t } = useTranslation('stocks')
+  const { t: officeText } = useTranslation('office')
+  const { stockId = '' } = useParams()
+  const { data, error, refetch } = useQuery(stocksQuery())
+  const stock = data?.items.find(({ id }) => id === stockId)
+  const title = stock
+    ? t('line', {
+        color: stock.colorName,
+        thickness: stock.thicknessName,
+        metal: t(`metal.${stock.sheet.metal}`),
+      })
+    : officeText('stocks.title')
+  return (
+    <PlaceFrame
+      title={title}
+      subtitle={officeText('stocks.open')}
+      nav={<OfficeNav />}
+      back={{ to: paths.office.stocks(), label: officeText('stocks.title') }}
+    >
+      {!data &&
+        (error ? <ErrorState error={error} onRetry={() => void refetch()} /> : <LoadingState />)}
+      {data && !stock && (
+        <EmptyState title={officeText('stocks.gone')} hint={officeText('stocks.goneHint')} />
+      )}
+      {stock && (
+        <div className="flex flex-col gap-8">
+          <section className="flex flex-col gap-3">
+            <h2 className="text-title font-bold">{t('facts.title')}</h2>
+            <StockName stock={stock} />
+            <StockFacts stock={stock} />
+          </section>
+          <TestBends stockId={stock.id} />
+        </div>
+      )}
+    </PlaceFrame>
+  )
+}
