@@ -1,3 +1,5 @@
+import type { CutEdge, LegClosing } from '#shared/ends/closing-edges'
+import { closeEdges } from '#shared/ends/closing-edges'
 import { endCut } from '#shared/ends/end-cut'
 import type { EndProblem } from '#shared/ends/end-layout'
 import type { Corner, CutPlane, End } from '#shared/ends/end.schema'
@@ -5,33 +7,19 @@ import type { EndOfPiece } from '#shared/ends/folded-end'
 import { oneEndProblems } from '#shared/ends/one-end-problems'
 import type { RunFrame } from '#shared/ends/run-frame'
 import { cornerFrames } from '#shared/ends/run-frame'
-import { isAtMost, isEqual } from '#shared/geometry/tolerance'
+import { isEqual } from '#shared/geometry/tolerance'
 import type { Vector3 } from '#shared/geometry/vector3'
-import { add3, distance3, scale3 } from '#shared/geometry/vector3'
-import type { Inches } from '#shared/units/brands'
-
-/**
- * Cut edges this near or nearer close. Our figure, no source: half of the 1/16 in. that marks are
- * laid out to, which a bead of sealant fills unseen.
- */
-export const CLOSING_GAP: Inches = 1 / 32
-
-/** How a leg's cut edge meets the other piece. */
-export interface LegClosing {
-  /** From 1 at edge A. */
-  readonly leg: number
-  /** The leg of the other piece whose cut edge lies nearest. */
-  readonly nearest: number
-  /** The same leg where the two close, else null. */
-  readonly closesOn: number | null
-  /** The greater of the distances between the two edges' corresponding ends. */
-  readonly gap: Inches
-}
+import { add3, scale3 } from '#shared/geometry/vector3'
 
 export type ClosedEnds =
   | {
       readonly ok: true
       readonly corner: Corner
+      /**
+       * How far the second piece is moved in the world (`cornerFrames`) from where its corner's
+       * point lies on the first one's; none, unless more of the cut closes elsewhere.
+       */
+      readonly shift: Vector3
       /** Legs of the first piece and of the second, each from edge A. */
       readonly a: readonly LegClosing[]
       readonly b: readonly LegClosing[]
@@ -48,12 +36,6 @@ export type ClosedEnds =
       readonly code: 'sameSide' | 'noCorner' | 'cornersDiffer' | 'endFaulty'
       readonly problems: readonly EndProblem[]
     }
-
-interface CutEdge {
-  readonly leg: number
-  readonly from: Vector3
-  readonly to: Vector3
-}
 
 const planesOf = (end: End): readonly CutPlane[] =>
   end.kind === 'miter' ? [end.plane, ...end.legs.map(({ plane }) => plane)] : []
@@ -81,21 +63,6 @@ const cutEdges = ({ profile, sheet, end, side }: EndOfPiece, frame: RunFrame): C
     typeof of === 'number' ? [{ leg: of, from: inWorld(from, frame), to: inWorld(to, frame) }] : [],
   )
 
-const gapBetween = (a: CutEdge, b: CutEdge): Inches =>
-  Math.max(distance3(a.from, b.from), distance3(a.to, b.to))
-
-const closingOf = (edge: CutEdge, others: readonly CutEdge[]): LegClosing => {
-  const gaps = others.map((other) => gapBetween(edge, other))
-  const gap = Math.min(...gaps)
-  const nearest = others[gaps.indexOf(gap)]?.leg ?? NaN
-  return {
-    leg: edge.leg,
-    nearest,
-    closesOn: isAtMost(gap, CLOSING_GAP) ? nearest : null,
-    gap,
-  }
-}
-
 const faultsOf = ({ profile, end, side }: EndOfPiece): EndProblem[] =>
   oneEndProblems(end, side, profile.legs.length, Infinity).map((found) => ({ ...found, end: side }))
 
@@ -106,13 +73,14 @@ const refused = (
 
 /**
  * Places two folded pieces in the corner where they meet and says of each leg's cut edge on which
- * leg of the other piece it closes, and how wide the gap is where it does not. One piece comes with
- * its right end (it enters), the other leaves with its left end; edges are compared on the middle
- * of the sheets' thickness, lips left out. Both pieces lie with their corner's point (see
- * `endCut`) on each other. Inches.
+ * leg of the other piece it closes (`CLOSING_GAP` apart or nearer), and how wide the gap is where
+ * it does not. One piece comes with its right end (it enters), the other leaves with its left end.
+ * Edges are compared on the middle of the sheets' thickness, lips left out. Inches.
  *
- * The corner is the one that the planes name; two plumb cuts make one without a turn. What cannot
- * be placed is refused by code. The profiles are taken as sound: ask `profileProblems` first.
+ * The pieces lie with their corner's points (see `endCut`) on each other, or where more of the cut
+ * closes, see `shift`. The corner is the one that the planes name; two plumb cuts make one without
+ * a turn. What cannot be placed is refused by code. The profiles are taken as sound: ask
+ * `profileProblems` first.
  */
 export const closeEnds = (a: EndOfPiece, b: EndOfPiece): ClosedEnds => {
   if (a.side === b.side) return refused('sameSide')
@@ -124,10 +92,7 @@ export const closeEnds = (a: EndOfPiece, b: EndOfPiece): ClosedEnds => {
   if (corner === undefined) return refused('noCorner')
   if (!others.every((other) => sameCorner(corner, other))) return refused('cornersDiffer')
   const frames = cornerFrames(corner)
-  const edgesA = cutEdges(a, frames[a.side])
-  const edgesB = cutEdges(b, frames[b.side])
-  const closingsA = edgesA.map((edge) => closingOf(edge, edgesB))
-  const closingsB = edgesB.map((edge) => closingOf(edge, edgesA))
-  const closes = [...closingsA, ...closingsB].every(({ closesOn }) => closesOn !== null)
-  return { ok: true, corner, a: closingsA, b: closingsB, closes }
+  const closed = closeEdges(cutEdges(a, frames[a.side]), cutEdges(b, frames[b.side]))
+  const closes = [...closed.a, ...closed.b].every(({ closesOn }) => closesOn !== null)
+  return { ok: true, corner, ...closed, closes }
 }

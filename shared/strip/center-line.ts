@@ -25,13 +25,14 @@ const isHem = ({ fold }: FlatFold): boolean => typeof fold !== 'number'
  * How far a line on the middle of the thickness goes on beyond its straight part: to the sharp
  * corner, (R + T/2) tan(|turn| / 2); to the outermost point of a hem's fold, R + T/2.
  */
-export const centerReach = (fold: FlatFold | undefined): Inches => {
+const centerReach = (fold: FlatFold | undefined): Inches => {
   if (fold === undefined) return 0
   const radius = fold.insideRadius + fold.thickness / 2
   return isHem(fold) ? radius : radius * Math.tan(radians(Math.abs(fold.turn) / 2))
 }
 
-const lengthsOf = ({ runs, folds }: FlatParts): Inches[] =>
+/** The lengths of lips and legs on the middle of the thickness to sharp corners, from edge A. */
+export const centerLengths = ({ runs, folds }: FlatParts): Inches[] =>
   runs.map(
     ({ straight }, index) => straight + centerReach(folds[index - 1]) + centerReach(folds[index]),
   )
@@ -52,7 +53,7 @@ const acrossHem = (fold: FlatFold, along: Vector): Vector =>
 export const centerLine = (profile: Profile, sheet: FoldingSheet, lay: Degrees = 0): CenterLine => {
   const parts = flatParts(profile, sheet)
   const { folds } = parts
-  const lengths = lengthsOf(parts)
+  const lengths = centerLengths(parts)
   const runs: CenterRun[] = []
   const folded: Vector[] = []
   let at: Vector = { x: 0, y: 0 }
