@@ -21,7 +21,7 @@ const MOST_DEGREES: Degrees = 360
  */
 export const parseAngle = (text: string): AngleResult => {
   const plain = plainText(text)
-  const refused = findRefusal(plain)
+  const refused = findRefusal(plain, (cure) => parseAngle(cure).ok)
   if (refused) return refused
   const [, minus, numberText] = ANGLE.exec(plain) ?? []
   const number = parsePlainNumber(numberText ?? '')

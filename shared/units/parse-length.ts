@@ -40,7 +40,7 @@ const parseFeet = (feetText: string, inchText: string): LengthResult => {
  */
 export const parseLength = (text: string, assumed: AssumedUnit): LengthResult => {
   const plain = plainText(text)
-  const refused = findRefusal(plain)
+  const refused = findRefusal(plain, (cure) => parseLength(cure, assumed).ok)
   if (refused) return refused
   if (plain.startsWith('-')) return refusal('negative')
 

@@ -65,15 +65,22 @@ export const plainText = (text: string): string =>
     .trim()
     .toLowerCase()
 
-/** Refusals that hold for any measure, or null when the text deserves to be read. */
-export const findRefusal = (plain: string): TypedRefusal | null => {
+/**
+ * Refusals that hold for any measure, or null when the text deserves to be read. `reads` tells
+ * whether a text would be read: a cure that would be refused itself is none.
+ */
+export const findRefusal = (
+  plain: string,
+  reads: (text: string) => boolean,
+): TypedRefusal | null => {
   if (plain === '') return refusal('empty')
   if (plain.length > LONGEST_TEXT) return refusal('malformed')
   if (!plain.includes(',')) return null
   // A comma is a decimal sign to one half of the world and a thousands sign to the other.
   if (!/^[^,]*\d,\d[^,]*$/.test(plain)) return refusal('malformed')
   const thousands = /\d,\d{3}(?!\d)/.test(plain) ? [plain.replace(',', '')] : []
-  return refusal('comma', [plain.replace(',', '.'), ...thousands])
+  const cures = [plain.replace(',', '.'), ...thousands].filter(reads)
+  return cures.length > 0 ? refusal('comma', cures) : refusal('malformed')
 }
 
 const DECIMAL = /^(?:\d+\.?\d*|\.\d+)$/

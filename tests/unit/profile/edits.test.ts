@@ -4,6 +4,7 @@ import { distance, rotate, vector } from '#shared/geometry/vector'
 import { profileCorners, profileFromCorners } from '#shared/profile/corners'
 import { applyEdit } from '#shared/profile/edits'
 import { mirrorProfile, reverseProfile } from '#shared/profile/flips'
+import { profileProblems } from '#shared/profile/problems'
 import { profileSchema } from '#shared/profile/profile.schema'
 import { flatStrip } from '#shared/strip/flat-strip'
 import { closedHem, profileArbitrary, profileOf, STEEL } from '../../support/arbitrary-profile'
@@ -232,6 +233,45 @@ describe('reverse and mirror', () => {
           expect(distance(back[index] ?? first, backFirst)).toBeCloseTo(distance(corner, first), 9)
         })
       }),
+    )
+  })
+})
+
+describe('edits with any numbers', () => {
+  it('give a profile whose faults can be named, or are refused as a place that is not there', () => {
+    const value = fc.oneof(
+      fc.double(),
+      fc.constantFrom(NaN, Infinity, -Infinity, 1e308, -1e308, 5e-324, 0, -0, 2, 90),
+    )
+    const place = fc.oneof(fc.integer({ min: -1, max: 12 }), value)
+    const edge = fc.constantFrom('A' as const, 'B' as const)
+    const kind = <Kind extends string>(name: Kind) => fc.constant(name)
+    const edit = fc.oneof(
+      fc.record({ kind: kind('setLeg'), leg: place, length: value }),
+      fc.record({ kind: kind('setTurn'), bend: place, turn: value }),
+      fc.record({ kind: kind('addLeg'), edge, length: value, turn: value }),
+      fc.record({ kind: kind('splitLeg'), leg: place, at: value, turn: value }),
+      fc.record({ kind: kind('removeCorner'), corner: place }),
+      fc.record({ kind: kind('moveCorner'), corner: place, to: fc.record({ x: value, y: value }) }),
+    )
+    fc.assert(
+      fc.property(profileArbitrary, edit, (profile, one) => {
+        const edited = (() => {
+          try {
+            return applyEdit(profile, one)
+          } catch (error) {
+            expect(error).toBeInstanceOf(RangeError)
+            expect(String(error)).toMatch(/There is no (leg|bend|corner)|The last leg/)
+            return null
+          }
+        })()
+        if (edited === null) return
+        expect(edited.bends).toHaveLength(edited.legs.length - 1)
+        const isSound = edited.legs.every((leg) => Number.isFinite(leg) && leg > 0)
+        const named = profileProblems(edited, STEEL).some(({ leg }) => leg !== null)
+        if (!isSound) expect(named).toBe(true)
+      }),
+      { numRuns: 1000 },
     )
   })
 })

@@ -48,4 +48,34 @@ describe('K from a test bend', () => {
   it('does not change with the side the bend turns to', () => {
     expect(kFactorFromTestBend({ ...testBend, turn: -90 })).toEqual(kFactorFromTestBend(testBend))
   })
+
+  it('answers any numbers at all: with a K inside the sheet, or a refusal that names its field', () => {
+    const value = fc.oneof(
+      fc.double(),
+      fc.double({ min: 0, max: 5, noNaN: true }),
+      fc.constantFrom(NaN, Infinity, -Infinity, 1e308, -1e308, 5e-324, 0, -0, 180),
+    )
+    const garbage = fc.record({
+      stripWidth: value,
+      legA: value,
+      legB: value,
+      turn: value,
+      insideRadius: value,
+      thickness: value,
+    })
+    fc.assert(
+      fc.property(garbage, (bend) => {
+        const result = kFactorFromTestBend(bend)
+        if (result.ok) {
+          expect(result.kFactor).toBeGreaterThan(0)
+          expect(result.kFactor).toBeLessThanOrEqual(1)
+        } else if (result.field !== 'kFactor') {
+          expect(result.found).toBe(bend[result.field])
+        } else {
+          expect(result.found > 0 && result.found <= 1).toBe(false)
+        }
+      }),
+      { numRuns: 2000 },
+    )
+  })
 })

@@ -41,6 +41,25 @@ describe('parseAngle', () => {
     expect(parseAngle(text)).toMatchObject({ ok: false, code })
   })
 
+  it('answers anything at all, and only with angles of at most a whole turn', () => {
+    const signs = fc.string({
+      unit: fc.constantFrom(...`0123456789 ./-,°º½degrado\u2212e+`),
+      maxLength: 12,
+    })
+    fc.assert(
+      fc.property(fc.oneof(signs, fc.string()), (text) => {
+        const result = parseAngle(text)
+        if (result.ok) {
+          expect(Math.abs(result.degrees)).toBeLessThanOrEqual(360)
+        } else {
+          for (const cure of result.cures) expect(parseAngle(cure).ok).toBe(true)
+          expect(result.code).not.toBe('')
+        }
+      }),
+      { numRuns: 2000 },
+    )
+  })
+
   it('reads back what is printed as the rounded value', () => {
     fc.assert(
       fc.property(fc.double({ min: -360, max: 360, noNaN: true }), (angle) => {

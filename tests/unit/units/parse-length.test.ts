@@ -74,6 +74,8 @@ describe('parseLength', () => {
     ['14,6 cm', 'comma', ['14.6 cm']],
     ['1,250', 'comma', ['1.250', '1250']],
     ['1,250,000', 'malformed', []],
+    ['5,5-', 'malformed', []],
+    ['90,000,5', 'malformed', []],
     ['', 'empty', []],
     ['   ', 'empty', []],
     ['-5', 'negative', []],
@@ -132,6 +134,7 @@ describe('parseLength', () => {
           expect(result.inches).toBeLessThanOrEqual(100_000)
         } else {
           expect(result.code).not.toBe('')
+          for (const cure of result.cures) expect(parseLength(cure, 'inches').ok).toBe(true)
         }
       }),
       { numRuns: 2000 },
