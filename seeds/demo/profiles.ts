@@ -18,7 +18,7 @@ export const DEMO_PROFILES = {
   ridge: from('ridge'),
   slimRidge: from('ridge', leg(2, 5.25), leg(3, 5.25)),
   valley: from('valley'),
-  wideValley: from('valley', leg(1, 10.5), leg(4, 10.5)),
+  wideValley: from('valley', leg(1, 11.5), leg(2, 11.5)),
   headwall: from('headwall'),
   sidewall: from('sidewall', leg(2, 6)),
   peak: from('highSidePeak'),

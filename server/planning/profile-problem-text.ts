@@ -9,6 +9,8 @@ const PROBLEMS: Record<ProfileProblemCode, string> = {
   legNotPositive: '{part} is {found} long and must be longer than zero.',
   turnOutOfRange: '{part} turns {found}; a bend turns more than 0° and less than 180°.',
   followsIncomplete: '{part} joins two slopes and only one is given.',
+  pitchOutOfRange:
+    '{part} follows a slope of {found}; a roof slopes at least 0° and less than 90°.',
   hemNotPositive: '{part} is {found} long and must be longer than zero.',
   gapNotPositive: '{part} is open and its gap of {found} must be more than zero.',
   legEatenByBends: '{part} is {found} long, and its bends alone take {limit}.',
@@ -18,6 +20,10 @@ const PROBLEMS: Record<ProfileProblemCode, string> = {
   stripTooWide: 'The strip is {found} wide; the widest that can be bent is {limit}.',
   stripWiderThanStock: 'The strip is {found} wide; this stock gives at most {limit}.',
   radiusTight: 'The inside radius of {found} is less than half the thickness ({limit}).',
+  radiusBelowMetal: 'The inside radius of {found} is less than this metal bears ({limit}).',
+  radiusBelowPaint:
+    '{part} stretches the paint round a radius of {found}; it is rated for {limit}.',
+  hemBelowPaint: '{part} folds the paint round a radius of {found}; it is rated for {limit}.',
   gapTight: '{part} has a gap of {found}, less than the thickness ({limit}).',
 }
 
@@ -28,6 +34,7 @@ const CURES: Record<ProfileCureCode, string> = {
   lengthenLeg: 'Lengthen the leg.',
   turnWithinRange: 'Change the turn, or send a hem.',
   enterSecondPitch: 'Send the second slope.',
+  enterPitch: 'Send the slope in degrees, or leave "follows" out.',
   lengthenHem: 'Lengthen the hem or leave it out.',
   enterGap: 'Send a gap, or close the hem.',
   shortenHem: 'Shorten the hem or lengthen its leg.',
@@ -35,6 +42,9 @@ const CURES: Record<ProfileCureCode, string> = {
   narrowProfile: 'Shorten legs, or make it in two pieces.',
   widerStock: 'Choose a wider stock, or shorten legs.',
   softerRadius: 'Bend to a larger radius.',
+  softerMetal: 'Bend to a larger radius, or choose a softer alloy.',
+  softerPaint: 'Bend to a larger radius, or choose a more flexible paint.',
+  openHem: 'Open the hem, or choose a more flexible paint.',
   closeHem: 'Close the hem, or open its gap.',
 }
 

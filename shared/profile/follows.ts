@@ -1,38 +1,44 @@
 import type { Bend, Follows, Profile } from '#shared/profile/profile.schema'
+import { angleBetweenPlanes } from '#shared/roof-line/roof-slopes'
 import { pitchAngle, turnOfIncluded } from '#shared/units/angle'
 import type { Degrees } from '#shared/units/brands'
+
+/** Roofs slope from level to short of plumb. */
+export const isSlope = (slope: Degrees): boolean => slope >= 0 && slope < 90
 
 /**
  * The included angle that the roof gives a bend, in degrees, a being the slope and a2 the second
  * one. Plane geometry of slopes, plumb faces and square cuts:
  *
  *     ridge            180 - a - a2   (a2 = a where no second slope is given)
+ *     hip, valley      180 - acos(cos a cos a2), of planes at a square corner   (a2 likewise)
  *     high-side peak   90 - a
  *     eave             90 + a with a plumb fascia, 90 square-cut
  *     gable, sidewall  90
  *     headwall         90 + a
  *     transition       180 - |a - a2|
  *
- * Null where the slope is the job's and the job's is not known, or a transition lacks its second.
+ * Null where the slope is the job's and the job's is not known, where a transition lacks its
+ * second, and where a slope is none (`isSlope`).
  */
 export const includedFromRoof = (follows: Follows, jobSlope: Degrees | null): Degrees | null => {
+  const { rule, second } = follows
+  if (rule === 'eaveSquare' || rule === 'gable' || rule === 'sidewall') return 90
   const slope = follows.pitch === 'job' ? jobSlope : follows.pitch
-  switch (follows.rule) {
-    case 'eaveSquare':
-    case 'gable':
-    case 'sidewall':
-      return 90
+  if (slope === null || !isSlope(slope) || !isSlope(second ?? slope)) return null
+  switch (rule) {
     case 'ridge':
-      return slope === null ? null : 180 - slope - (follows.second ?? slope)
+      return 180 - slope - (second ?? slope)
+    case 'hip':
+    case 'valley':
+      return angleBetweenPlanes({ slope, otherSlope: second ?? slope, planTurn: 90 })
     case 'highSidePeak':
-      return slope === null ? null : 90 - slope
+      return 90 - slope
     case 'eave':
     case 'headwall':
-      return slope === null ? null : 90 + slope
+      return 90 + slope
     case 'transition':
-      return slope === null || follows.second === undefined
-        ? null
-        : 180 - Math.abs(slope - follows.second)
+      return second === undefined ? null : 180 - Math.abs(slope - second)
   }
 }
 

@@ -28,7 +28,13 @@ const AT_MOST: readonly ProfileProblem['code'][] = [
 ]
 
 /** Measures of the sheet itself, which nobody reads in fractions. */
-const OF_THE_SHEET: readonly ProfileProblem['code'][] = ['radiusTight', 'gapTight']
+const OF_THE_SHEET: readonly ProfileProblem['code'][] = [
+  'radiusTight',
+  'radiusBelowMetal',
+  'radiusBelowPaint',
+  'hemBelowPaint',
+  'gapTight',
+]
 
 /** The limit on the next step that still keeps it: following the text must cure the problem. */
 const tapeLimit = ({ code, limit }: ProfileProblem, units: LengthUnits): Inches | null =>

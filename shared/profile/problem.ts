@@ -6,6 +6,7 @@ export const PROFILE_PROBLEM_CODES = [
   'legNotPositive',
   'turnOutOfRange',
   'followsIncomplete',
+  'pitchOutOfRange',
   'hemNotPositive',
   'gapNotPositive',
   'legEatenByBends',
@@ -15,6 +16,9 @@ export const PROFILE_PROBLEM_CODES = [
   'stripTooWide',
   'stripWiderThanStock',
   'radiusTight',
+  'radiusBelowMetal',
+  'radiusBelowPaint',
+  'hemBelowPaint',
   'gapTight',
 ] as const
 
@@ -26,6 +30,7 @@ export const PROFILE_CURE_CODES = [
   'lengthenLeg',
   'turnWithinRange',
   'enterSecondPitch',
+  'enterPitch',
   'lengthenHem',
   'enterGap',
   'shortenHem',
@@ -33,6 +38,9 @@ export const PROFILE_CURE_CODES = [
   'narrowProfile',
   'widerStock',
   'softerRadius',
+  'softerMetal',
+  'softerPaint',
+  'openHem',
   'closeHem',
 ] as const
 

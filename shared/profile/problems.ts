@@ -3,6 +3,7 @@ import { findCrossing } from '#shared/profile/crossing'
 import type { ProfileProblem } from '#shared/profile/problem'
 import { hasErrors, profileProblem } from '#shared/profile/problem'
 import type { Profile } from '#shared/profile/profile.schema'
+import { sheetWarnings } from '#shared/profile/sheet-warnings'
 import { valueProblems } from '#shared/profile/value-problems'
 import type { FlatParts, FlatRun, FoldingSheet } from '#shared/strip/flat-parts'
 import { flatParts } from '#shared/strip/flat-parts'
@@ -12,9 +13,14 @@ import type { Inches } from '#shared/units/brands'
 /** No coil, sheet or brake of this trade takes more. */
 export const WIDEST_STRIP: Inches = 60
 
+/** What the stock in hand allows; `stockLimits` reads it off a stock. */
 export interface ProfileLimits {
   /** The widest strip that can be cut of the stock. */
   readonly widestStrip?: Inches
+  /** The smallest inside radius that its alloy bears, where the alloy is known. */
+  readonly metalRadius?: Inches
+  /** The smallest inside radius that its paint bears on the outside, where it is rated. */
+  readonly paintRadius?: Inches
 }
 
 /**
@@ -109,49 +115,13 @@ const widthProblems = (width: Inches, limits: ProfileLimits): ProfileProblem[] =
     : []
 }
 
-/** Shop guides for sheet: inside radius at least T/2, the gap of an open hem at least T. */
-const sheetWarnings = (profile: Profile, sheet: FoldingSheet): ProfileProblem[] => {
-  const { thickness, insideRadius } = sheet
-  const gapWarning = (hem: 'A' | 'B') => {
-    const lip = hem === 'A' ? profile.hemA : profile.hemB
-    return lip?.style === 'open' && isLess(lip.gap, thickness)
-      ? [
-          profileProblem({
-            code: 'gapTight',
-            severity: 'warning',
-            cure: 'closeHem',
-            hem,
-            found: lip.gap,
-            limit: thickness,
-          }),
-        ]
-      : []
-  }
-  return [
-    ...(profile.bends.length > 0 && isLess(insideRadius, thickness / 2)
-      ? [
-          profileProblem({
-            code: 'radiusTight',
-            severity: 'warning',
-            cure: 'softerRadius',
-            found: insideRadius,
-            limit: thickness / 2,
-          }),
-        ]
-      : []),
-    ...gapWarning('A'),
-    ...gapWarning('B'),
-  ]
-}
-
 /**
  * Everything that is wrong with a profile, worst first: values that mean nothing, then what the
  * bends do not leave room for, then what is too wide, then warnings. Without a sheet only what no
  * sheet could do is reported. Never throws on a value of the profile's shape, NaN and infinity
  * included, and never mends anything by itself.
  *
- * Source of the radius and gap rules: shop guides ("metal-stamping-die news 400", "Open hem sheet
- * metal"). The widest strip and the number of bends are this product's own bounds.
+ * The widest strip and the number of bends are this product's own bounds.
  */
 export const profileProblems = (
   profile: Profile,
@@ -180,6 +150,6 @@ export const profileProblems = (
     ...longHems,
     ...(foldable ? crossingProblems(profile, parts) : []),
     ...width,
-    ...(sheet ? sheetWarnings(profile, sheet) : []),
+    ...(sheet ? sheetWarnings(profile, sheet, limits) : []),
   ]
 }

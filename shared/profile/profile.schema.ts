@@ -4,6 +4,8 @@ import { z } from 'zod'
 export const followsSchema = z.strictObject({
   rule: z.enum([
     'ridge',
+    'hip',
+    'valley',
     'highSidePeak',
     'eave',
     'eaveSquare',
@@ -12,7 +14,7 @@ export const followsSchema = z.strictObject({
     'sidewall',
     'transition',
   ]),
-  /** `job`, or degrees of slope. */
+  /** `job`, or degrees of slope, from 0 to less than 90. */
   pitch: z.union([z.literal('job'), z.number()]),
   /** The second slope in degrees, where the rule takes two. */
   second: z.number().optional(),

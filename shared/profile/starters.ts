@@ -87,10 +87,10 @@ export const STARTERS: readonly Starter[] = [
     bends: [roofBend(RIGHT, 'highSidePeak'), bend(40)],
     hemB: closedHem(RIGHT),
   }),
-  // Two wings with a standing rib between them and hems that turn water back.
+  // Two wings with hems that turn water back.
   starter('valley', 'valley', {
-    legs: [9, 1.25, 1.25, 9],
-    bends: [bend(60), bend(-80), bend(60)],
+    legs: [10, 10],
+    bends: [roofBend(LEFT, 'valley')],
     hemA: closedHem(LEFT),
     hemB: closedHem(LEFT),
   }),

@@ -1,4 +1,5 @@
-import { TOLERANCE } from '#shared/geometry/tolerance'
+import { isLess, TOLERANCE } from '#shared/geometry/tolerance'
+import { isSlope } from '#shared/profile/follows'
 import type { ProfileProblem } from '#shared/profile/problem'
 import { profileProblem } from '#shared/profile/problem'
 import type { Bend, Hem, Profile } from '#shared/profile/profile.schema'
@@ -33,7 +34,7 @@ const legProblems = (length: number, leg: number): ProfileProblem[] => {
   if (!Number.isFinite(length)) {
     return [profileProblem({ code: 'notFinite', cure: 'enterNumber', leg, found: length })]
   }
-  return length > 0
+  return isLess(0, length)
     ? []
     : [
         profileProblem({
@@ -71,6 +72,19 @@ const bendProblems = ({ turn, follows }: Bend, bend: number): ProfileProblem[] =
           }),
         ]
       : []),
+    ...pitches
+      .filter((pitch) => !isSlope(pitch))
+      .slice(0, 1)
+      .map((pitch) =>
+        profileProblem({
+          code: 'pitchOutOfRange',
+          cure: 'enterPitch',
+          bend,
+          found: pitch,
+          limit: pitch < 0 ? 0 : 90,
+          unit,
+        }),
+      ),
     ...(follows?.rule === 'transition' && follows.second === undefined
       ? [profileProblem({ code: 'followsIncomplete', cure: 'enterSecondPitch', bend, unit })]
       : []),
@@ -84,7 +98,7 @@ const hemProblems = (hem: Hem, edge: 'A' | 'B'): ProfileProblem[] => {
     return [profileProblem({ code: 'notFinite', cure: 'enterNumber', hem: edge, found: notFinite })]
   }
   return [
-    ...(hem.length > 0
+    ...(isLess(0, hem.length)
       ? []
       : [
           profileProblem({
@@ -95,7 +109,7 @@ const hemProblems = (hem: Hem, edge: 'A' | 'B'): ProfileProblem[] => {
             limit: 0,
           }),
         ]),
-    ...(hem.style === 'closed' || hem.gap > 0
+    ...(hem.style === 'closed' || isLess(0, hem.gap)
       ? []
       : [
           profileProblem({

@@ -1,15 +1,25 @@
+import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { includedFromRoof, resolveFollows } from '#shared/profile/follows'
+import { isAtMost } from '#shared/geometry/tolerance'
+import { includedFromRoof, isSlope, resolveFollows } from '#shared/profile/follows'
 import { profileProblems } from '#shared/profile/problems'
 import type { Follows } from '#shared/profile/profile.schema'
+import { pitchAngle } from '#shared/units/angle'
 import { profileOf } from '../../support/arbitrary-profile'
+import { expectPrinted, publishedRows } from '../../support/published-values'
 
 const slope6 = (Math.atan(6 / 12) * 180) / Math.PI
+
+const acos = (cosine: number) => (Math.acos(cosine) * 180) / Math.PI
 
 describe('the angle the roof gives', () => {
   it.each<[Follows, number]>([
     [{ rule: 'ridge', pitch: 'job' }, 180 - 2 * slope6],
     [{ rule: 'ridge', pitch: 'job', second: 10 }, 170 - slope6],
+    [{ rule: 'hip', pitch: 'job' }, 180 - acos(0.8)],
+    [{ rule: 'valley', pitch: 'job' }, 180 - acos(0.8)],
+    [{ rule: 'valley', pitch: 'job', second: 0 }, 180 - slope6],
+    [{ rule: 'hip', pitch: 45, second: 60 }, 180 - acos(Math.SQRT1_2 / 2)],
     [{ rule: 'highSidePeak', pitch: 'job' }, 90 - slope6],
     [{ rule: 'eave', pitch: 'job' }, 90 + slope6],
     [{ rule: 'eaveSquare', pitch: 'job' }, 90],
@@ -21,6 +31,38 @@ describe('the angle the roof gives', () => {
     [{ rule: 'transition', pitch: 15, second: 40 }, 155],
   ])('%o at 6 in 12 is %s', (follows, included) => {
     expect(includedFromRoof(follows, slope6)).toBeCloseTo(included, 12)
+  })
+
+  const rafters = publishedRows('rafters.csv')
+
+  it.each(rafters.map((row) => ({ rise: row.number('rise_per_12'), row })))(
+    'along a hip or valley at $rise in 12 is that of the rafter tables',
+    ({ rise, row }) => {
+      for (const rule of ['hip', 'valley'] as const) {
+        const included = includedFromRoof({ rule, pitch: 'job' }, pitchAngle(rise)) ?? NaN
+        expectPrinted(included, row.text('hip_dihedral_deg'))
+        expectPrinted(180 - included, row.text('valley_flat_bend_deg'))
+      }
+    },
+  )
+
+  it('along a hip lies between the slopes of its two planes and their sum', () => {
+    const slopes = fc.double({ min: 0, max: 89.9, noNaN: true })
+    fc.assert(
+      fc.property(slopes, slopes, (slope, second) => {
+        const turn = 180 - (includedFromRoof({ rule: 'hip', pitch: slope, second }, null) ?? NaN)
+        expect(isAtMost(Math.max(slope, second), turn)).toBe(true)
+        expect(isAtMost(turn, slope + second)).toBe(true)
+      }),
+    )
+  })
+
+  it.each([-1, 90, 200, NaN, Infinity])('is not known for a slope of %s degrees', (slope) => {
+    for (const rule of ['ridge', 'hip', 'highSidePeak', 'eave', 'headwall'] as const) {
+      expect(includedFromRoof({ rule, pitch: slope }, slope6)).toBeNull()
+    }
+    expect(includedFromRoof({ rule: 'valley', pitch: 'job', second: slope }, slope6)).toBeNull()
+    expect(includedFromRoof({ rule: 'gable', pitch: slope }, slope6)).toBe(90)
   })
 
   it('is not known where the pitch of the job is not', () => {
