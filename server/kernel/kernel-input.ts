@@ -3,7 +3,7 @@ import { brakeSchema } from '#shared/bend-plan/brake.schema'
 import { DEMO_BRAKES, findDemoBrake } from '#shared/bend-plan/demo-brakes'
 import { sectionSchema } from '#shared/bend-plan/plan.schema'
 import { MAX_BENDS, profileSchema } from '#shared/profile/profile.schema'
-import { sheetSchema } from '#shared/stock/stock.schema'
+import { sheetSchema, stockSchema } from '#shared/stock/stock.schema'
 import { K_HALF_HARD } from '#shared/strip/bend-allowance'
 
 /**
@@ -46,6 +46,12 @@ export const stockInput = z.object({
   metal: sheetSchema.shape.metal.default('steel'),
   kFactor: sheetSchema.shape.kFactor.default(K_HALF_HARD),
 })
+
+/** What a stock may say of its alloy and paint, for warnings of radii below what they bear. */
+export const limitsInput = {
+  alloy: stockSchema.shape.alloy.optional(),
+  paintTBend: stockSchema.shape.paintTBend.optional(),
+}
 
 const brakeObject = z.object(brakeSchema.shape)
 

@@ -3,8 +3,10 @@ import { planProfile, planSection } from '#shared/bend-plan/plan-profile'
 import { hasErrors } from '#shared/profile/problem'
 import { profileProblems } from '#shared/profile/problems'
 import { colorSideSchema } from '#shared/profile/profile.schema'
+import { stockLimits } from '#shared/profile/stock-limits'
 import {
   brakeInput,
+  limitsInput,
   pieceLengthInput,
   profileInput,
   sectionInput,
@@ -20,7 +22,11 @@ const planStock = stockInput.extend({
 
 const common = { brake: brakeInput, pieceLength: pieceLengthInput }
 
-const ofProfile = z.object({ ...common, profile: profileInput, stock: planStock })
+const ofProfile = z.object({
+  ...common,
+  profile: profileInput,
+  stock: planStock.extend(limitsInput),
+})
 
 const ofSection = z.object({
   ...common,
@@ -33,7 +39,7 @@ const ofSection = z.object({
 const planOfProfile = defineVerb(
   ofProfile,
   ({ profile, stock, brake, pieceLength }): VerbAnswer => {
-    const problems = profileProblems(profile, stock)
+    const problems = profileProblems(profile, stock, stockLimits({ ...stock, sheet: stock }))
     if (hasErrors(problems)) {
       return { exit: 3, output: { feasible: false, proven: true, steps: [], problems } }
     }

@@ -1,10 +1,11 @@
 import { z } from 'zod'
 import { hasErrors } from '#shared/profile/problem'
 import { profileProblems } from '#shared/profile/problems'
+import { stockLimits } from '#shared/profile/stock-limits'
 import { valueProblems } from '#shared/profile/value-problems'
 import { flatStrip, roundToShear } from '#shared/strip/flat-strip'
 import { paintedArea, pieceWeight } from '#shared/strip/weight'
-import { pieceLengthInput, profileInput, stockInput } from './kernel-input'
+import { limitsInput, pieceLengthInput, profileInput, stockInput } from './kernel-input'
 import type { VerbAnswer } from './verb'
 import { defineVerb } from './verb'
 
@@ -13,16 +14,17 @@ const stripInput = z.object({
   // Unfolding needs no density; it is used for the weight where it is given.
   stock: stockInput.partial({ density: true, springbackPer90: true }).extend({
     widestStrip: z.number().positive().optional(),
+    ...limitsInput,
   }),
   pieceLength: pieceLengthInput.optional(),
 })
 
 const answerStrip = ({ profile, stock, pieceLength }: z.output<typeof stripInput>): VerbAnswer => {
-  const { widestStrip, density, thickness } = stock
+  const { density, thickness } = stock
   const meaningless = valueProblems(profile)
   if (hasErrors(meaningless)) return { exit: 3, output: { problems: meaningless } }
   const strip = flatStrip(profile, stock)
-  const problems = profileProblems(profile, stock, widestStrip === undefined ? {} : { widestStrip })
+  const problems = profileProblems(profile, stock, stockLimits({ ...stock, sheet: stock }))
   const ofThePiece =
     pieceLength === undefined
       ? {}

@@ -3,6 +3,7 @@ import type { FieldError } from '#shared/http/problem'
 import type { ProfileProblem } from '#shared/profile/problem'
 import { profileProblems } from '#shared/profile/problems'
 import type { Profile } from '#shared/profile/profile.schema'
+import { stockLimits } from '#shared/profile/stock-limits'
 import type { Stock } from '#shared/stock/stock.schema'
 
 /** Where in the request the part lies that a problem is about; lists count from 0. */
@@ -17,7 +18,7 @@ function placeOf({ bend, hem, leg }: ProfileProblem): string {
  * `path`. Empty when it can be made; warnings do not count.
  */
 export const profileErrors = (profile: Profile, stock: Stock | null, path: string): FieldError[] =>
-  profileProblems(profile, stock?.sheet ?? null, stock ? { widestStrip: stock.widestStrip } : {})
+  profileProblems(profile, stock?.sheet ?? null, stock ? stockLimits(stock) : {})
     .filter(({ severity }) => severity === 'error')
     .map((problem) => ({
       path: path + placeOf(problem),

@@ -5,6 +5,7 @@ import { hasErrors, type ProfileProblem } from '#shared/profile/problem'
 import type { Part } from '#shared/drawing/display-list'
 import { profileProblems } from '#shared/profile/problems'
 import type { Profile } from '#shared/profile/profile.schema'
+import { stockLimits } from '#shared/profile/stock-limits'
 import type { Stock } from '#shared/stock/stock.schema'
 import { flatStrip } from '#shared/strip/flat-strip'
 import type { Strip } from '#shared/strip/strip.schema'
@@ -26,7 +27,7 @@ export interface DrawingCheck {
 }
 
 export function checkDrawing(profile: Profile, stock: Stock, pieceLength: Inches): DrawingCheck {
-  const problems = profileProblems(profile, stock.sheet, { widestStrip: stock.widestStrip })
+  const problems = profileProblems(profile, stock.sheet, stockLimits(stock))
   if (hasErrors(problems)) return { problems, strip: null, weight: null }
   const strip = flatStrip(profile, stock.sheet)
   return { problems, strip, weight: pieceWeight(strip, stock.sheet, pieceLength) }
