@@ -1,3 +1,4 @@
+import { endsVerb } from './ends-verb'
 import { planVerb } from './plan-verb'
 import { roofRunVerb } from './roof-run-verb'
 import { stripVerb } from './strip-verb'
@@ -7,6 +8,7 @@ import { badInput } from './verb'
 const VERBS: Readonly<Record<string, Verb>> = {
   strip: stripVerb,
   plan: planVerb,
+  ends: endsVerb,
   'roof-run': roofRunVerb,
 }
 
