@@ -28,6 +28,7 @@ import { runsRoutes } from '#server/features/runs/runs.routes'
 import { createRunsService } from '#server/features/runs/runs.service'
 import { createShelfServiceOn } from '#server/features/shelf/create-shelf-service'
 import { shelfRoutes } from '#server/features/shelf/shelf.routes'
+import { createTestBendsServiceOn } from '#server/features/stocks/create-test-bends-service'
 import { createStocksQueries } from '#server/features/stocks/stocks.queries'
 import { stocksRoutes } from '#server/features/stocks/stocks.routes'
 import type { Route } from '#server/http/define-route'
@@ -60,7 +61,7 @@ export function compose(ports: Ports): Composition {
       ...peopleRoutes(createPeopleService),
       ...jobsRoutes(createJobsServiceOn),
       ...shelfRoutes((db) => createShelfServiceOn(db, clock)),
-      ...stocksRoutes(createStocksQueries),
+      ...stocksRoutes(createStocksQueries, (db) => createTestBendsServiceOn(db, clock)),
       ...brakesRoutes(createBrakesQueries),
       ...plansRoutes(
         (db) => createPlansServiceOn(db, { planner, onError }),

@@ -6,6 +6,7 @@ import { STOCKS, type StockInsert } from '#server/db/tables/stocks'
 import type { Brake } from '#shared/bend-plan/brake.schema'
 import { DEMO_BRAKES } from '#shared/bend-plan/demo-brakes'
 import type { OrderInput, OrderLineInput } from '#shared/orders/order.schema'
+import type { TestBendInput } from '#shared/stock/stock.contract'
 import type { Profile } from '#shared/profile/profile.schema'
 import { getStarter } from '#shared/profile/starters'
 
@@ -122,5 +123,21 @@ export const orderInput = (
   notes: '',
   lines: [...lines],
   goods: [],
+  ...given,
+})
+
+/** A square bend of a strip as `createStock` makes it, its radius not measured. */
+export const testBendInput = (
+  brakeId: string,
+  given: Partial<TestBendInput> = {},
+): TestBendInput => ({
+  brakeId,
+  stripWidth: 4.953,
+  legA: 3,
+  legB: 2,
+  turn: 90,
+  thickness: 0.0239,
+  insideRadius: null,
+  note: '',
   ...given,
 })
