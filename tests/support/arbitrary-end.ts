@@ -1,0 +1,87 @@
+import fc from 'fast-check'
+import type { Corner, CutPlane, End, PieceEnds } from '#shared/ends/end.schema'
+import type { Profile } from '#shared/profile/profile.schema'
+import type { FoldingSheet } from '#shared/strip/flat-parts'
+import { flatParts } from '#shared/strip/flat-parts'
+import { profileArbitrary, sheetArbitrary } from './arbitrary-profile'
+
+const degrees = (most: number) => fc.double({ min: -most, max: most, noNaN: true })
+
+const cosOf = (angle: number): number => Math.cos((angle / 180) * Math.PI)
+
+const sinOf = (angle: number): number => Math.sin((angle / 180) * Math.PI)
+
+/** Degrees that the run turns in a corner. */
+export const runTurn = ({ slopeIn, slopeOut, plan }: Corner): number => {
+  const likeness = cosOf(slopeIn) * cosOf(slopeOut) * cosOf(plan) + sinOf(slopeIn) * sinOf(slopeOut)
+  return (Math.acos(Math.max(-1, Math.min(1, likeness))) / Math.PI) * 180
+}
+
+/** Corners of roofs: slopes up to 60 degrees, a turn up to 140. */
+export const cornerArbitrary: fc.Arbitrary<Corner> = fc
+  .record({ slopeIn: degrees(60), slopeOut: degrees(60), plan: degrees(140) })
+  .filter((corner) => runTurn(corner) <= 140)
+
+export const planeArbitrary: fc.Arbitrary<CutPlane> = fc.oneof(
+  fc.record({ plumb: degrees(70) }),
+  fc.record({ corner: cornerArbitrary }),
+  fc.record({
+    normal: fc.tuple(
+      fc.double({ min: 0.4, max: 3, noNaN: true }),
+      fc.double({ min: -1, max: 1, noNaN: true }),
+      fc.double({ min: -1, max: 1, noNaN: true }),
+    ),
+  }),
+)
+
+/** Some of the legs, each once, with something for each. */
+const onLegs = <T>(legs: number, of: fc.Arbitrary<T>): fc.Arbitrary<(T & { leg: number })[]> =>
+  fc
+    .uniqueArray(fc.integer({ min: 1, max: legs }), { maxLength: legs })
+    .chain((chosen) => fc.tuple(...chosen.map((leg) => of.map((value) => ({ ...value, leg })))))
+
+const quarters = (least: number, most: number) =>
+  fc.integer({ min: least * 4, max: most * 4 }).map((count) => count / 4)
+
+/** Ends that can be cut on a profile of so many legs, if the piece is long enough. */
+export const endArbitrary = (legs: number): fc.Arbitrary<End> => {
+  const tabs = fc.oneof(fc.constant([]), onLegs(legs, fc.record({ length: quarters(0.5, 2) })))
+  return fc.oneof(
+    fc.record({ kind: fc.constant('square' as const), tabs }),
+    fc.record({
+      kind: fc.constant('lap' as const),
+      side: fc.constantFrom('under' as const, 'over' as const),
+      length: quarters(1, 6),
+      tabs,
+    }),
+    fc.record({
+      kind: fc.constant('miter' as const),
+      plane: planeArbitrary,
+      lay: degrees(180),
+      legs: fc.oneof(fc.constant([]), onLegs(legs, fc.record({ plane: planeArbitrary }))),
+      tabs,
+    }),
+  )
+}
+
+const hasStrip = (profile: Profile, sheet: FoldingSheet): boolean =>
+  flatParts(profile, sheet).runs.every(({ straight }) => straight > 0)
+
+/** Profiles that leave every leg some flat between its bends; they may cross themselves. */
+export const foldableArbitrary = fc
+  .record({ profile: profileArbitrary, sheet: sheetArbitrary })
+  .filter(({ profile, sheet }) => hasStrip(profile, sheet))
+
+export const dressedArbitrary = foldableArbitrary.chain(({ profile, sheet }) => {
+  const end = endArbitrary(profile.legs.length)
+  return fc.record({
+    profile: fc.constant(profile),
+    sheet: fc.constant(sheet),
+    pieceLength: quarters(24, 240),
+    ends: fc.record<PieceEnds>({
+      left: end,
+      right: end,
+      lowEnd: fc.constantFrom('left', 'right', null),
+    }),
+  })
+})
