@@ -1,4 +1,4 @@
-import { isLess } from '#shared/geometry/tolerance'
+import { isAtMost, isLess } from '#shared/geometry/tolerance'
 import { findCrossing } from '#shared/profile/crossing'
 import type { ProfileProblem } from '#shared/profile/problem'
 import { hasErrors, profileProblem } from '#shared/profile/problem'
@@ -91,27 +91,23 @@ const crossingProblems = (profile: Profile, parts: FlatParts): ProfileProblem[] 
   ]
 }
 
-const widthProblems = (width: Inches, limits: ProfileLimits): ProfileProblem[] => {
-  if (!(width <= WIDEST_STRIP)) {
-    return [
-      profileProblem({
-        code: 'stripTooWide',
-        cure: 'narrowProfile',
-        found: width,
-        limit: WIDEST_STRIP,
-      }),
-    ]
+/** The leg that is too wide all alone, if one is. */
+const legOver = ({ legs }: Profile, limit: Inches): number | null => {
+  const longest = Math.max(...legs)
+  return isLess(limit, longest) ? legs.indexOf(longest) + 1 : null
+}
+
+const widthProblems = (
+  profile: Profile,
+  found: Inches,
+  { widestStrip }: ProfileLimits,
+): ProfileProblem[] => {
+  const wider = (limit: Inches) => ({ found, limit, leg: legOver(profile, limit) })
+  if (!isAtMost(found, WIDEST_STRIP)) {
+    return [profileProblem({ code: 'stripTooWide', cure: 'narrowProfile', ...wider(WIDEST_STRIP) })]
   }
-  const { widestStrip } = limits
-  return widestStrip !== undefined && isLess(widestStrip, width)
-    ? [
-        profileProblem({
-          code: 'stripWiderThanStock',
-          cure: 'widerStock',
-          found: width,
-          limit: widestStrip,
-        }),
-      ]
+  return widestStrip !== undefined && isLess(widestStrip, found)
+    ? [profileProblem({ code: 'stripWiderThanStock', cure: 'widerStock', ...wider(widestStrip) })]
     : []
 }
 
@@ -133,12 +129,12 @@ export const profileProblems = (
     const girth = girthOf(profile)
     return [
       ...values,
-      ...(Number.isFinite(girth) && girth > WIDEST_STRIP ? widthProblems(girth, {}) : []),
+      ...(Number.isFinite(girth) && girth > WIDEST_STRIP ? widthProblems(profile, girth, {}) : []),
     ]
   }
   const parts = flatParts(profile, sheet ?? THINNEST)
   const eaten = eatenProblems(parts)
-  const width = widthProblems(flatStrip(profile, sheet ?? THINNEST).stripWidth, limits)
+  const width = widthProblems(profile, flatStrip(profile, sheet ?? THINNEST).stripWidth, limits)
   const longHems = longHemProblems(profile, parts)
   // What cannot be folded cannot be looked at folded; its own fault is named already.
   const foldable =

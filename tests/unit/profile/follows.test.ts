@@ -1,7 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { isAtMost } from '#shared/geometry/tolerance'
-import { includedFromRoof, isSlope, resolveFollows } from '#shared/profile/follows'
+import { includedFromRoof, resolveFollows } from '#shared/profile/follows'
 import { profileProblems } from '#shared/profile/problems'
 import type { Follows } from '#shared/profile/profile.schema'
 import { pitchAngle } from '#shared/units/angle'
