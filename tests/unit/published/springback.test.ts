@@ -79,6 +79,8 @@ describe('Tabellenbuch Metall, springback factor kR (column heads from memory)',
     if (!result.ok) expect.fail(result.code)
     expect(result.factor).toBe(0.99)
     expectPrinted(90 + result.springbackPer90, '90.9')
+    // kR is the wanted angle over the one at the tool.
+    expect((90 + result.springbackPer90) * result.factor).toBeCloseTo(90, 9)
   })
 
   it.each([
