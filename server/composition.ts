@@ -8,6 +8,8 @@ import { handOffRoutes } from '#server/features/hand-off/hand-off.routes'
 import { createHandOffService } from '#server/features/hand-off/hand-off.service'
 import { createJobsServiceOn } from '#server/features/jobs/create-jobs-service'
 import { jobsRoutes } from '#server/features/jobs/jobs.routes'
+import { labelsRoutes } from '#server/features/labels/labels.routes'
+import { createLabelsService } from '#server/features/labels/labels.service'
 import {
   createOrderPlanningOn,
   createOrdersServiceOn,
@@ -77,6 +79,7 @@ export function compose(ports: Ports): Composition {
       ...runsRoutes((db) => createRunsService(db, making)),
       ...bundlesRoutes((db) => createBundlesService(db, making)),
       ...handOffRoutes((db) => createHandOffService(db, making)),
+      ...labelsRoutes((db) => createLabelsService(db, making)),
     ],
   }
 }

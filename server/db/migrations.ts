@@ -11,6 +11,7 @@ import * as planCache from '#migrations/0009_plan_cache'
 import * as overrides from '#migrations/0010_overrides'
 import * as endsAndGoods from '#migrations/0011_ends_and_goods'
 import * as testBends from '#migrations/0012_test_bends'
+import * as labelPrints from '#migrations/0013_label_prints'
 
 interface NamedMigration {
   readonly name: string
@@ -34,6 +35,7 @@ const MIGRATIONS: readonly NamedMigration[] = [
   { name: '0010_overrides', migration: overrides },
   { name: '0011_ends_and_goods', migration: endsAndGoods },
   { name: '0012_test_bends', migration: testBends },
+  { name: '0013_label_prints', migration: labelPrints },
 ]
 
 export const migrationSource: Knex.MigrationSource<NamedMigration> = {

@@ -3,6 +3,7 @@ import * as bundles from '#shared/bundles/bundles.contract'
 import * as handOff from '#shared/hand-off/hand-off.contract'
 import type { Endpoint } from '#shared/http/endpoint'
 import * as jobs from '#shared/jobs/jobs.contract'
+import * as labels from '#shared/labels/labels.contract'
 import * as orders from '#shared/orders/orders.contract'
 import * as people from '#shared/people/people.contract'
 import * as lookup from '#shared/pieces/lookup.contract'
@@ -33,4 +34,5 @@ export const ENDPOINTS: readonly Endpoint[] = [
   runs,
   bundles,
   handOff,
+  labels,
 ].flatMap((contract) => Object.values<unknown>(contract).filter(isEndpoint))

@@ -60,6 +60,16 @@ export class ApiAgent {
     return z.parse<E['answer']>(endpoint.answer, answer.body)
   }
 
+  /** Reads a file of the API as its link opens it. */
+  async file(endpoint: Endpoint, input: Pick<CallInput<Endpoint>, 'params' | 'query'>) {
+    const path = fillPath(endpoint.path, input.params ?? {}) + searchOf(input.query)
+    const answer = await this.fetch(path)
+    if (answer.status !== 200) {
+      throw new Error(`GET ${path} answered ${answer.status}: ${await answer.text()}`)
+    }
+    return { headers: answer.headers, bytes: new Uint8Array(await answer.arrayBuffer()) }
+  }
+
   /** Reads the session, as a page does when it loads. */
   async loadSession() {
     const { person, csrfToken } = sessionSchema.parse((await this.get('/session')).body)

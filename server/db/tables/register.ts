@@ -10,6 +10,12 @@ import type {
   IdempotencyKeyUpdate,
 } from './idempotency-keys'
 import type { JobInsert, JobRow, JobUpdate } from './jobs'
+import type {
+  LabelPrintInsert,
+  LabelPrintPieceInsert,
+  LabelPrintPieceRow,
+  LabelPrintRow,
+} from './label-prints'
 import type { LiveEventInsert, LiveEventRow } from './live-events'
 import type { OrderEventInsert, OrderEventRow } from './order-events'
 import type { OrderLineInsert, OrderLineRow, OrderLineUpdate } from './order-lines'
@@ -61,6 +67,8 @@ declare module 'knex/types/tables' {
     pieces: Knex.CompositeTableType<PieceRow, PieceInsert, PieceUpdate>
     piece_events: Knex.CompositeTableType<PieceEventRow, PieceEventInsert>
     piece_moves: PieceMoveRow
+    label_prints: Knex.CompositeTableType<LabelPrintRow, LabelPrintInsert>
+    label_print_pieces: Knex.CompositeTableType<LabelPrintPieceRow, LabelPrintPieceInsert>
     plan_cache: Knex.CompositeTableType<PlanCacheRow, PlanCacheInsert, PlanCacheUpdate>
   }
 }

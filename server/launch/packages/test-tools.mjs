@@ -5,7 +5,12 @@ import { installDebianPackages } from './debian-packages.mjs'
  * Programs that the tests run, by the Debian package that brings them. Each is looked for at the
  * path where Debian puts it.
  */
-export const TEST_TOOLS = [{ package: 'chromium', program: '/usr/bin/chromium' }]
+export const TEST_TOOLS = [
+  { package: 'chromium', program: '/usr/bin/chromium' },
+  // What is printed is read back: pages and text of PDFs, and the bar codes on them.
+  { package: 'poppler-utils', program: '/usr/bin/pdftoppm' },
+  { package: 'zbar-tools', program: '/usr/bin/zbarimg' },
+]
 
 /**
  * @param {typeof TEST_TOOLS} tools

@@ -96,6 +96,20 @@ describe('the API document', () => {
     expect(list?.requestBody).toBeUndefined()
   })
 
+  it('says of a file what it is, and promises no JSON', async () => {
+    const { paths } = await read()
+    const files = ENDPOINTS.filter(({ produces }) => produces !== 'application/json')
+    expect(files.length).toBeGreaterThan(0)
+    for (const { path, produces } of files) {
+      const operation = paths[path.replace(/:(\w+)/g, '{$1}')]?.get
+      expect(operation?.responses[200], path).toEqual({
+        description: 'A file.',
+        content: { [produces]: { schema: { type: 'string', format: 'binary' } } },
+      })
+    }
+    expect(z.string().parse((await get('/docs')).body)).toContain('a file, <code>application/pdf')
+  })
+
   it('can be read as a page without script', async () => {
     const { headers, body } = await get('/docs')
     const page = z.string().parse(body)

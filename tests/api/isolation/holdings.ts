@@ -2,6 +2,7 @@ import { createShelfProfile } from '#shared/shelf/shelf.contract'
 import type { Order } from '#shared/orders/order.schema'
 import { askAboutOrder, submitOrder, withdrawOrder } from '#shared/orders/orders.contract'
 import { createJob } from '#shared/jobs/jobs.contract'
+import { printLabels } from '#shared/labels/labels.contract'
 import { firstCode, type Floor } from '../../support/making-factories'
 import type { Crew } from '../../support/shop-scene'
 import { orderInput, zProfile } from '../../support/shop-factories'
@@ -25,6 +26,8 @@ export interface Holdings {
   readonly runCode: string
   readonly bundleId: string
   readonly bundleCode: string
+  /** Labels of the released order. */
+  readonly printId: string
   readonly eventIds: readonly number[]
 }
 
@@ -53,6 +56,9 @@ export async function createHoldings(floor: Floor, crew: Crew): Promise<Holdings
   const code = firstCode(released)
   const bundle = await floor.bundle(released, await floor.bendAll(released))
   const piece = await floor.readPiece(code)
+  const print = await floor.counter.call(printLabels, {
+    body: { of: { kind: 'order', orderId: released.id } },
+  })
   return {
     companyId: crew.companyId,
     companyName: job.company.name,
@@ -68,6 +74,7 @@ export async function createHoldings(floor: Floor, crew: Crew): Promise<Holdings
     runCode: (await floor.readRun(piece.runId)).code,
     bundleId: bundle.id,
     bundleCode: bundle.code,
+    printId: print.id,
     eventIds: piece.events.slice(-1).map(({ id }) => id),
   }
 }

@@ -204,12 +204,14 @@ describe('what the shop alone may do', () => {
     orderId: foreign.order.id,
     runId: foreign.runId,
     bundleId: foreign.bundleId,
+    printId: foreign.printId,
     code: endpoint.path.startsWith('/bundles') ? foreign.bundleCode : foreign.code,
   })
   const unknownParams = {
     orderId: randomUUID(),
     runId: randomUUID(),
     bundleId: randomUUID(),
+    printId: randomUUID(),
     code: newCode('piece'),
   }
 

@@ -1,0 +1,128 @@
+import { execFile } from 'node:child_process'
+import { mkdtemp, readdir, readFile, rm, writeFile } from 'node:fs/promises'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
+import { promisify } from 'node:util'
+
+const run = promisify(execFile)
+
+/** Programs of Debian's poppler-utils and zbar-tools, by the paths where Debian puts them. */
+const tool = async (name: string, args: readonly string[]): Promise<string> => {
+  const { stdout } = await run(`/usr/bin/${name}`, args, { maxBuffer: 32 * 1024 * 1024 })
+  return stdout
+}
+
+/** Lends a folder with the PDF in it. */
+async function withPdf<T>(bytes: Uint8Array, use: (file: string, folder: string) => Promise<T>) {
+  const folder = await mkdtemp(join(tmpdir(), 'foldyard-paper-'))
+  try {
+    const file = join(folder, 'paper.pdf')
+    await writeFile(file, bytes)
+    return await use(file, folder)
+  } finally {
+    await rm(folder, { recursive: true })
+  }
+}
+
+/** The text of each page in the order in which it is read. */
+export const textOfPages = (bytes: Uint8Array): Promise<string[]> =>
+  withPdf(bytes, async (file) => {
+    const text = await tool('pdftotext', ['-layout', file, '-'])
+    // A form feed ends every page.
+    return text.split('\f').slice(0, -1)
+  })
+
+export interface PdfFacts {
+  readonly [name: string]: string
+}
+
+/** What `pdfinfo` says, by its names: `Title`, `Pages`, `Page size`, `Tagged`… */
+export const factsOf = (bytes: Uint8Array): Promise<PdfFacts> =>
+  withPdf(bytes, async (file) => {
+    const lines = (await tool('pdfinfo', ['-isodates', file])).trim().split('\n')
+    return Object.fromEntries(
+      lines.map((line) => {
+        const at = line.indexOf(':')
+        return [line.slice(0, at), line.slice(at + 1).trim()]
+      }),
+    )
+  })
+
+export interface UsedFont {
+  readonly name: string
+  readonly embedded: boolean
+}
+
+export const fontsOf = (bytes: Uint8Array): Promise<UsedFont[]> =>
+  withPdf(bytes, async (file) => {
+    const rows = (await tool('pdffonts', [file])).trim().split('\n').slice(2)
+    return rows.map((row) => {
+      const [name = '', ...rest] = row.split(/\s+/)
+      // From the right: object and generation, uni, sub, emb.
+      return { name: name.replace(/^[A-Z]{6}\+/, ''), embedded: rest.at(-5) === 'yes' }
+    })
+  })
+
+/** A word of a page with its box: points from the upper left corner. */
+export interface PlacedWord {
+  readonly page: number
+  readonly text: string
+  readonly xMin: number
+  readonly yMin: number
+  readonly xMax: number
+  readonly yMax: number
+}
+
+export const wordsOf = (bytes: Uint8Array): Promise<PlacedWord[]> =>
+  withPdf(bytes, async (file) => {
+    const html = await tool('pdftotext', ['-bbox', file, '-'])
+    const pages = html.split('<page ').slice(1)
+    return pages.flatMap((page, index) =>
+      Array.from(
+        page.matchAll(
+          /<word xMin="([\d.-]+)" yMin="([\d.-]+)" xMax="([\d.-]+)" yMax="([\d.-]+)">([^<]*)</g,
+        ),
+        ([, xMin, yMin, xMax, yMax, text = '']) => ({
+          page: index + 1,
+          text: text.replaceAll('&quot;', '"').replaceAll('&apos;', "'").replaceAll('&amp;', '&'),
+          xMin: Number(xMin),
+          yMin: Number(yMin),
+          xMax: Number(xMax),
+          yMax: Number(yMax),
+        }),
+      ),
+    )
+  })
+
+/**
+ * The codes that an independent reader finds on each page, printed in pure black and white as a
+ * thermal printer does, from top to bottom and left to right.
+ */
+export const codesOnPages = (bytes: Uint8Array, dpi: number): Promise<string[][]> =>
+  withPdf(bytes, async (file, folder) => {
+    await tool('pdftoppm', ['-r', String(dpi), '-mono', file, join(folder, 'page')])
+    const pages = (await readdir(folder)).filter((name) => name.endsWith('.pbm')).sort()
+    const found: string[][] = []
+    for (const page of pages) {
+      const lines = await tool('zbarimg', ['--quiet', '--nodbus', join(folder, page)])
+      found.push(lines.trim().split('\n'))
+    }
+    return found
+  })
+
+/** The color of a point of the first page, CSS hex. Points from the upper left corner. */
+export const colorAt = (
+  bytes: Uint8Array,
+  at: { readonly x: number; readonly y: number },
+): Promise<string> =>
+  withPdf(bytes, async (file, folder) => {
+    const dot = (points: number) => String(Math.floor((points / 72) * DOTS))
+    await tool('pdftoppm', [
+      ...['-r', String(DOTS), '-aa', 'no', '-aaVector', 'no', '-singlefile'],
+      ...['-x', dot(at.x), '-y', dot(at.y), '-W', '1', '-H', '1', file, join(folder, 'dot')],
+    ])
+    const image = await readFile(join(folder, 'dot.ppm'))
+    return `#${image.subarray(-3).toString('hex').toUpperCase()}`
+  })
+
+const DOTS = 288
