@@ -25,11 +25,12 @@ const ofEnd =
   (found: FoundProblem): EndProblem => ({ ...found, end })
 
 /** The two cuts leave nothing of the piece somewhere across the strip. */
-const meetingProblems = ({ at, left, right, blankLength }: StripBorders): EndProblem[] => {
+const meetingProblems = (borders: StripBorders): EndProblem[] => {
+  const { at, legs, left, right, blankLength } = borders
   const { at: place, taken } = narrowest(left.border, right.border)
   if (isLess(taken, blankLength)) return []
-  const run = at.findIndex((_, index) => place <= (at[index + 1] ?? Infinity))
-  return [ofEnd('right')(foundProblem('endsMeet', { leg: run, found: taken, limit: blankLength }))]
+  const leg = legs[at.findIndex((mark) => mark >= place) - 1] ?? legs[0] ?? null
+  return [ofEnd('right')(foundProblem('endsMeet', { leg, found: taken, limit: blankLength }))]
 }
 
 export type ExaminedEnds =

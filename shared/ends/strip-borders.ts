@@ -1,4 +1,4 @@
-import { endCut } from '#shared/ends/end-cut'
+import { endCut, legOf } from '#shared/ends/end-cut'
 import type { EndDepth } from '#shared/ends/end-depth'
 import { endDepth } from '#shared/ends/end-depth'
 import type { End, PieceEnds } from '#shared/ends/end.schema'
@@ -26,6 +26,8 @@ export interface StripBorders {
   readonly strip: Strip
   /** Edge A, each crease, edge B. */
   readonly at: readonly Inches[]
+  /** The leg between each two of them; a lip counts to the leg it lies on. */
+  readonly legs: readonly number[]
   readonly left: EndDepth
   readonly right: EndDepth
   readonly blankLength: Inches
@@ -43,11 +45,13 @@ export const stripBorders = ({ profile, sheet, pieceLength, ends }: PieceToLay):
   const strip = flatStrip(profile, sheet)
   const at = markPlaces(strip)
   const { left, right } = ends ?? SQUARE_ENDS
-  const leftDepth = endDepth(endCut(profile, sheet, left, 'left'), at, left, 'left')
+  const leftCut = endCut(profile, sheet, left, 'left')
+  const leftDepth = endDepth(leftCut, at, left, 'left')
   const rightDepth = endDepth(endCut(profile, sheet, right, 'right'), at, right, 'right')
   return {
     strip,
     at,
+    legs: leftCut.runs.map(({ of }) => legOf(of, profile.legs.length)),
     left: leftDepth,
     right: rightDepth,
     blankLength: pieceLength + leftDepth.standsOut + rightDepth.standsOut,

@@ -77,7 +77,7 @@ export const dressedArbitrary = foldableArbitrary.chain(({ profile, sheet }) => 
   return fc.record({
     profile: fc.constant(profile),
     sheet: fc.constant(sheet),
-    pieceLength: quarters(24, 240),
+    pieceLength: quarters(4, 240),
     ends: fc.record<PieceEnds>({
       left: end,
       right: end,
