@@ -1,4 +1,4 @@
-import { isEqual } from '#shared/geometry/tolerance'
+import { isEqual, isLess } from '#shared/geometry/tolerance'
 import type { Profile } from '#shared/profile/profile.schema'
 import { girthOf } from '#shared/strip/flat-strip'
 import type { Inches } from '#shared/units/brands'
@@ -17,5 +17,5 @@ export const findLegForGirth = (profile: Profile, leg: number, stated: Inches): 
   const length = profile.legs[leg - 1]
   if (length === undefined) throw new RangeError(`There is no leg ${leg}.`)
   const solved = length + girthDifference(profile, stated)
-  return solved > 0 ? solved : null
+  return isLess(0, solved) ? solved : null
 }

@@ -64,6 +64,24 @@ describe('kernel strip', () => {
     })
   })
 
+  it('warns of radii below what alloy and paint of the stock bear', () => {
+    // 3003-H16 takes a whole thickness at 1/32 in.; a paint of 2T likewise.
+    const stock = { ...STEEL, metal: 'aluminum', thickness: 1 / 32, alloy: '3003-H16' }
+    expect(ask('strip', { profile: face, stock: { ...stock, paintTBend: 2 } })).toMatchObject({
+      exit: 0,
+      output: {
+        problems: [
+          { code: 'radiusBelowMetal', found: 0.03, limit: 1 / 32, severity: 'warning' },
+          { code: 'radiusBelowPaint', bend: 1, limit: 1 / 32 },
+          { code: 'hemBelowPaint', hem: 'B', found: 0, limit: 1 / 32 },
+        ],
+      },
+    })
+    expect(
+      ask('plan', { profile: face, stock, brake: 'upAndDown', pieceLength: 120 }),
+    ).toMatchObject({ output: { problems: [{ code: 'radiusBelowMetal' }] } })
+  })
+
   it.each<[string, unknown, string[]]>([
     ['nothing', {}, ['profile', 'stock']],
     ['null', null, ['']],

@@ -62,6 +62,20 @@ describe('values that mean nothing', () => {
       },
       { code: 'followsIncomplete', bend: 1 },
     ],
+    [
+      'a slope past plumb',
+      { ...profileOf([2, 2]), bends: [{ turn: 20, follows: { rule: 'ridge', pitch: 90 } }] },
+      { code: 'pitchOutOfRange', bend: 1, found: 90, limit: 90, unit: 'degrees' },
+    ],
+    [
+      'a second slope below level',
+      {
+        ...profileOf([2, 2]),
+        bends: [{ turn: 20, follows: { rule: 'hip', pitch: 'job', second: -1 } }],
+      },
+      { code: 'pitchOutOfRange', bend: 1, found: -1, limit: 0 },
+    ],
+    ['a leg of less than a hair', profileOf([2, 1e-12], [90]), { code: 'legNotPositive', leg: 2 }],
   ])('%s is named', (_, profile, problem) => {
     const problems = found(profile)
     expect(problems).toHaveLength(1)
@@ -176,6 +190,14 @@ describe('width', () => {
     expect(found(profileOf([40, 30], [90]))).toMatchObject([{ code: 'stripTooWide', limit: 60 }])
     expect(found(profileOf([1e308, 1e308], [90]))).toMatchObject([{ code: 'stripTooWide' }])
     expect(profileProblems(profileOf([61]), null)).toMatchObject([{ code: 'stripTooWide' }])
+  })
+
+  it('names the leg that is too wide all alone', () => {
+    expect(found(profileOf([1, 61], [90]))).toMatchObject([{ code: 'stripTooWide', leg: 2 }])
+    expect(found(profileOf([40, 30], [90]))).toMatchObject([{ code: 'stripTooWide', leg: null }])
+    expect(found(profileOf([21, 2], [90]), { widestStrip: 20 })).toMatchObject([
+      { code: 'stripWiderThanStock', leg: 1 },
+    ])
   })
 
   it('over the stock is refused with both widths', () => {
