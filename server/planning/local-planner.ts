@@ -4,6 +4,7 @@ import type { PlanTask } from '#server/planning/plan-task'
 import type { Planner } from '#server/planning/planner'
 import { planProfile } from '#shared/bend-plan/plan-profile'
 import type { Plan } from '#shared/bend-plan/plan.schema'
+import { sheetOn } from '#shared/stock/sheet-on'
 
 const MOST_PLANS = 1000
 
@@ -20,12 +21,12 @@ export function createLocalPlanner(): Planner {
   }
 
   return {
-    planOnAll: (profile, sheet, pieceLength, brakes) =>
+    planOnAll: (profile, stock, pieceLength, brakes) =>
       Promise.resolve().then(() =>
         brakes.map(({ id, brake }) => ({
           brakeId: id,
           brakeName: brake.name,
-          plan: planOf({ profile, sheet, brake, pieceLength }),
+          plan: planOf({ profile, sheet: sheetOn(stock, id), brake, pieceLength }),
         })),
       ),
   }

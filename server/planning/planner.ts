@@ -1,7 +1,7 @@
 import type { Brake } from '#shared/bend-plan/brake.schema'
 import type { BrakePlan } from '#shared/plans/plans.contract'
 import type { Profile } from '#shared/profile/profile.schema'
-import type { Sheet } from '#shared/stock/stock.schema'
+import type { CalibratedSheet } from '#shared/stock/sheet-on'
 import type { Inches } from '#shared/units/brands'
 
 /** A brake of the shop, as far as planning asks for it. */
@@ -28,14 +28,14 @@ export interface PlanningOptions {
 /** Where bend plans come from: a port. */
 export interface Planner {
   /**
-   * One plan a brake, in the order of `brakes`. The profile must be free of errors
-   * (`profileProblems`); the kernel's RangeError passes through otherwise.
+   * One plan a brake, in the order of `brakes`, each by the stock's sheet on that brake. The profile
+   * must be free of errors there (`brakesFor`); the kernel's RangeError passes through otherwise.
    *
    * @throws not-ready where too much waits already or the time is over; the signal's reason
    */
   readonly planOnAll: (
     profile: Profile,
-    sheet: Sheet,
+    stock: CalibratedSheet,
     pieceLength: Inches,
     brakes: readonly PlannedBrake[],
     options?: PlanningOptions,

@@ -7,6 +7,7 @@ import type { PlanWorkers } from '#server/planning/plan-workers'
 import type { Planner, PlanningOptions } from '#server/planning/planner'
 import { SharedTasks } from '#server/planning/shared-tasks'
 import type { Plan } from '#shared/bend-plan/plan.schema'
+import { sheetOn } from '#shared/stock/sheet-on'
 
 const MOST_PLANS = 1000
 /** A plan cut short by the clock might become better on a quieter machine. */
@@ -65,10 +66,10 @@ export function createWorkerPlanner(deps: WorkerPlannerDeps): Planner {
     }
 
   return {
-    planOnAll: async (profile, sheet, pieceLength, brakes, { signal, onProgress } = {}) => {
+    planOnAll: async (profile, stock, pieceLength, brakes, { signal, onProgress } = {}) => {
       const tellProgress = watchProgress(onProgress, reportEvery)
       const asked = brakes.map(({ id, brake }) => {
-        const task = { profile, sheet, brake, pieceLength }
+        const task = { profile, sheet: sheetOn(stock, id), brake, pieceLength }
         return { id, brake, task, key: planKey(task) }
       })
       const unknown = asked.map(({ key }) => key).filter((key) => !findKept(key))

@@ -4,7 +4,7 @@ import { systemClock } from '#server/adapters/clock'
 import { startPlanning } from '#server/planning/start-planning'
 import { DEMO_BRAKES } from '#shared/bend-plan/demo-brakes'
 import type { Profile } from '#shared/profile/profile.schema'
-import { STEEL_24 } from '../support/bend-plan-cases'
+import { STOCK_24 } from '../support/bend-plan-cases'
 import { hardProfile } from '../support/hard-profile'
 import type { BenchRow } from './bench-row'
 import type { BenchShop } from './bench-shop'
@@ -30,7 +30,7 @@ export async function benchPlanning({ db }: BenchShop): Promise<BenchRow[]> {
       },
     },
   )
-  const plan = (profile: Profile) => planning.planner.planOnAll(profile, STEEL_24, 120, brakes)
+  const plan = (profile: Profile) => planning.planner.planOnAll(profile, STOCK_24, 120, brakes)
   const planAll = async (bends: number, count: number) => {
     const left = Array.from({ length: count }, (_, index) => hardProfile(index + 1, bends))
     await Promise.all(

@@ -4,6 +4,7 @@ import { DEMO_BRAKE } from '#shared/bend-plan/demo-brakes'
 import type { Section } from '#shared/bend-plan/plan.schema'
 import type { PlanRequest } from '#shared/bend-plan/planner'
 import type { SectionHem } from '#shared/bend-plan/section'
+import type { CalibratedSheet } from '#shared/stock/sheet-on'
 import type { Sheet } from '#shared/stock/stock.schema'
 
 /** 24 ga steel of the known outcomes: T 0.024, springback 2 per 90, density 0.284. */
@@ -15,6 +16,9 @@ export const STEEL_24: Sheet = {
   density: 0.284,
   springbackPer90: 2,
 }
+
+/** The same on a brake on which nobody measured it. */
+export const STOCK_24: CalibratedSheet = { sheet: STEEL_24, calibrations: [] }
 
 export const hem = (turn: 1 | -1, lip = 0.5, gap = 0): SectionHem => ({ lip, gap, turn })
 

@@ -1,5 +1,6 @@
 import type { Db } from '#server/db/knex'
 import { BRAKES } from '#server/db/tables/brakes'
+import { CALIBRATIONS } from '#server/db/tables/calibrations'
 import { JOBS, type JobInsert } from '#server/db/tables/jobs'
 import { SHELF_PROFILES } from '#server/db/tables/shelf-profiles'
 import { STOCKS, type StockInsert } from '#server/db/tables/stocks'
@@ -7,6 +8,7 @@ import type { Brake } from '#shared/bend-plan/brake.schema'
 import { DEMO_BRAKES } from '#shared/bend-plan/demo-brakes'
 import type { OrderInput, OrderLineInput } from '#shared/orders/order.schema'
 import type { TestBendInput } from '#shared/stock/stock.contract'
+import type { Calibration } from '#shared/stock/stock.schema'
 import type { Profile } from '#shared/profile/profile.schema'
 import { getStarter } from '#shared/profile/starters'
 
@@ -141,3 +143,33 @@ export const testBendInput = (
   note: '',
   ...given,
 })
+
+export const calibrationOf = (
+  brakeId: string,
+  kFactor: number,
+  insideRadius: number,
+): Calibration => ({
+  brakeId,
+  brakeName: `Brake ${brakeId}`,
+  kFactor,
+  insideRadius,
+  bends: 2,
+  by: 'Mo Manager',
+  at: '2026-03-02T14:00:00.000Z',
+})
+
+/** Takes K and radius into use on a brake, as a manager does with a fit. */
+export async function calibrate(
+  db: Db,
+  { stockId, brakeId, personId }: { stockId: string; brakeId: string; personId: string },
+  { kFactor, insideRadius }: { kFactor: number; insideRadius: number },
+): Promise<void> {
+  await db(CALIBRATIONS).insert({
+    stock_id: stockId,
+    brake_id: brakeId,
+    k_factor: kFactor,
+    inside_radius: insideRadius,
+    bends: 2,
+    person_id: personId,
+  })
+}

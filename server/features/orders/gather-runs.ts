@@ -4,6 +4,7 @@ import type { ShopBrake } from '#shared/brakes/brakes.contract'
 import type { Override } from '#shared/orders/override.schema'
 import type { BrakePlan } from '#shared/plans/plans.contract'
 import type { Stock } from '#shared/stock/stock.schema'
+import { stockOn } from '#shared/stock/sheet-on'
 import { flatStrip } from '#shared/strip/flat-strip'
 import type { Strip } from '#shared/strip/strip.schema'
 
@@ -11,6 +12,7 @@ import type { Strip } from '#shared/strip/strip.schema'
 export interface PlannedRun {
   /** The lines in the order's order; at least one. */
   readonly lines: readonly [StoredLine, ...StoredLine[]]
+  /** As it is bent on the brake. */
   readonly stock: Stock
   readonly strip: Strip
   readonly brake: ShopBrake
@@ -50,10 +52,11 @@ function toRun([first, ...rest]: [PlannedLine, ...PlannedLine[]]): PlannedRun {
     (most, item) => (item.line.length > most.line.length ? item : most),
     first,
   )
+  const stock = stockOn(first.stock, first.brake.id)
   return {
     lines: [first.line, ...rest.map(({ line }) => line)],
-    stock: first.stock,
-    strip: flatStrip(first.line.profile, first.stock.sheet),
+    stock,
+    strip: flatStrip(first.line.profile, stock.sheet),
     brake: first.brake,
     plan: longest.plan,
     override: first.override,

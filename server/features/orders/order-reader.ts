@@ -1,4 +1,5 @@
 import type { BrakesQueries } from '#server/features/brakes/brakes.queries'
+import { lineStrip } from '#server/features/orders/line-strip'
 import { planLine } from '#server/features/orders/plan-line'
 import type { OrderPiecesQueries } from '#server/features/orders/order-pieces.queries'
 import type { OrdersQueries, StoredLine } from '#server/features/orders/orders.queries'
@@ -6,8 +7,6 @@ import type { StocksQueries } from '#server/features/stocks/stocks.queries'
 import type { PlannedBrake, Planner } from '#server/planning/planner'
 import type { Order, OrderLine } from '#shared/orders/order.schema'
 import type { Stock } from '#shared/stock/stock.schema'
-import { flatStrip } from '#shared/strip/flat-strip'
-import { pieceWeight } from '#shared/strip/weight'
 
 export interface OrderReaderDeps {
   readonly queries: OrdersQueries
@@ -23,20 +22,21 @@ type MadeOf = Pick<OrderLine, 'stock' | 'strip' | 'pieceWeight' | 'bendsOn' | 'o
 export const createOrderReader = (deps: OrderReaderDeps) => {
   const { queries, pieces, stocks, brakes, planner } = deps
 
-  /** What holds before release: stock and brakes as they are now. */
+  /**
+   * What holds before release: stock and brakes as they are now. Which brake it will be is not known
+   * yet, so the strip is that of the stock's own K; the plans are each brake's.
+   */
   async function computeLine(
     line: StoredLine,
     stock: Stock,
     shopBrakes: readonly PlannedBrake[],
     signal: AbortSignal | undefined,
   ): Promise<MadeOf> {
-    const strip = flatStrip(line.profile, stock.sheet)
     const plans = await planLine({ line, stock, brakes: shopBrakes, planner, signal })
     const feasible = plans.filter(({ plan }) => plan.feasible)
     return {
       stock,
-      strip,
-      pieceWeight: pieceWeight(strip, stock.sheet, line.length),
+      ...lineStrip(line, stock.sheet),
       bendsOn: feasible.map(({ brakeName }) => brakeName),
       override: null,
     }

@@ -3,7 +3,7 @@ import { companyScope } from '#server/db/company-scope'
 import type { JobsQueries } from '#server/features/jobs/jobs.queries'
 import { isBeforeRelease } from '#server/features/orders/before-release'
 import { orderConflict } from '#server/features/orders/order-conflict'
-import { checkLines, linesForPitch } from '#server/features/orders/order-lines'
+import { checkOrder, linesForPitch, stocksOf } from '#server/features/orders/order-lines'
 import type { OrderReader } from '#server/features/orders/order-reader'
 import type { OrdersQueries } from '#server/features/orders/orders.queries'
 import type { OrdersStore } from '#server/features/orders/orders.store'
@@ -69,7 +69,7 @@ export const createOrdersService = (deps: OrdersDeps) => {
 
   const saveLines = async (orderId: string, input: OrderInput, pitchRise: number) => {
     const lines = linesForPitch(input.lines, pitchRise)
-    checkLines(lines, await stocks.mapStocks(lines.map(({ stockId }) => stockId)))
+    checkOrder({ ...input, lines }, await stocks.mapStocks(stocksOf(input)))
     await store.replaceLines(orderId, lines)
   }
 

@@ -1,5 +1,5 @@
+import { brakesFor } from '#server/planning/brakes-for'
 import type { PlannedBrake, Planner } from '#server/planning/planner'
-import { profileErrors } from '#server/planning/profile-errors'
 import type { OrderLineInput } from '#shared/orders/order.schema'
 import type { BrakePlan } from '#shared/plans/plans.contract'
 import type { Stock } from '#shared/stock/stock.schema'
@@ -12,7 +12,7 @@ export interface LineToPlan {
   readonly signal?: AbortSignal | undefined
 }
 
-/** A plan a brake; none where the stock has changed so that the line cannot be made of it. */
+/** A plan for every brake on which the stock leaves room for the line; it may be none. */
 export async function planLine({
   line,
   stock,
@@ -20,8 +20,9 @@ export async function planLine({
   planner,
   signal,
 }: LineToPlan): Promise<BrakePlan[]> {
-  if (profileErrors(line.profile, stock, '').length > 0) return []
-  return planner.planOnAll(line.profile, stock.sheet, line.length, brakes, {
+  const able = brakesFor(line.profile, stock, brakes, '').brakes
+  if (able.length === 0) return []
+  return planner.planOnAll(line.profile, stock, line.length, able, {
     ...(signal && { signal }),
   })
 }

@@ -4,13 +4,14 @@ import {
   type PlannedLine,
   type PlannedRun,
 } from '#server/features/orders/gather-runs'
+import { endErrors } from '#server/features/orders/line-strip'
 import type { StoredLine } from '#server/features/orders/orders.queries'
 import { overridePath, overridesByLine } from '#server/features/orders/release-overrides'
 import { cannotBend, invalidInput, profileProblem } from '#server/http/errors'
+import { brakesFor, type BrakesFor } from '#server/planning/brakes-for'
 import { findFreest, listCheapest, type BrakeLoad } from '#server/planning/choose-brake'
 import { planReasonText } from '#server/planning/plan-reason-text'
 import type { Planner } from '#server/planning/planner'
-import { profileErrors } from '#server/planning/profile-errors'
 import type { ShopBrake } from '#shared/brakes/brakes.contract'
 import type { FieldError } from '#shared/http/problem'
 import type { OverrideInput } from '#shared/orders/override.schema'
@@ -42,14 +43,15 @@ interface LineMadeOf {
  * busy one, then to the one with the least to bend, what this release brings included, then to the
  * shop's first.
  *
- * @throws profile-problem where a stock has changed so that a line cannot be made of it any more
+ * @throws profile-problem where the pitch or a stock has changed so that a line or its ends cannot be
+ *   made any more
  * @throws invalid-input for an override that names nothing, or a line that bends
  * @throws cannot-bend naming every line that bends nowhere, with each brake's reasons
  */
 export async function planRelease(input: ReleaseInput): Promise<PlannedRun[]> {
   const { lines, brakes, overrides } = input
   const overrideOf = overridesByLine(overrides, lines, brakes)
-  const madeOf = await planLines(input)
+  const madeOf = await planLines(input, overrideOf)
   checkOverrides(madeOf, overrides)
   checkAllBend(
     madeOf.filter(({ line }) => !overrideOf.has(line.id)),
@@ -73,21 +75,46 @@ export async function planRelease(input: ReleaseInput): Promise<PlannedRun[]> {
     const override = given && { by: input.by, at: input.at.toISOString(), reason: given.reason }
     return { line, stock, brake: getById(brakeById, brakeId), plan, override: override ?? null }
   })
-  return gatherRuns(planned)
+  const runs = gatherRuns(planned)
+  checkEnds(runs, lines)
+  return runs
 }
 
-async function planLines({ lines, stocks, brakes, planner }: ReleaseInput): Promise<LineMadeOf[]> {
-  const madeOf = lines.map((line) => ({ line, stock: getById(stocks, line.stockId) }))
-  const problems = madeOf.flatMap(({ line, stock }, index) =>
-    profileErrors(line.profile, stock, `lines.${index}.profile`),
-  )
+async function planLines(
+  { lines, stocks, brakes, planner }: ReleaseInput,
+  overrideOf: ReadonlyMap<string, OverrideInput>,
+): Promise<LineMadeOf[]> {
+  const madeOf = lines.map((line, index) => {
+    const stock = getById(stocks, line.stockId)
+    return { line, stock, able: brakesFor(line.profile, stock, brakes, `lines.${index}.profile`) }
+  })
+  const problems = madeOf.flatMap(({ line, able }) => unmakeable(able, overrideOf.get(line.id)))
   if (problems.length > 0) throw profileProblem(problems)
   const planned: LineMadeOf[] = []
-  for (const { line, stock } of madeOf) {
-    const plans = await planner.planOnAll(line.profile, stock.sheet, line.length, brakes)
+  for (const { line, stock, able } of madeOf) {
+    const plans = await planner.planOnAll(line.profile, stock, line.length, able.brakes)
     planned.push({ line, stock, plans })
   }
   return planned
+}
+
+/** Ends that the sheet of the line's brake, or a drawing that followed the roof, leaves no room for. */
+function checkEnds(runs: readonly PlannedRun[], lines: readonly StoredLine[]): void {
+  const errors = runs.flatMap((run) =>
+    run.lines.flatMap((line) => endErrors(line, run.stock.sheet, `lines.${lines.indexOf(line)}`)),
+  )
+  if (errors.length > 0) throw profileProblem(errors)
+}
+
+/**
+ * What keeps a line from being made at all: of the brake that an override names, or else of the
+ * first where it can be made on none.
+ */
+function unmakeable(able: BrakesFor<ShopBrake>, override: OverrideInput | undefined): FieldError[] {
+  if (override) return able.errorsOn.get(override.brakeId) ?? []
+  if (able.brakes.length > 0) return []
+  const [first] = able.errorsOn.values()
+  return first ?? []
 }
 
 function chooseBrake(

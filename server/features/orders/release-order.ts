@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto'
 import type { BrakesQueries } from '#server/features/brakes/brakes.queries'
 import type { FrozenLine } from '#server/features/orders/frozen-line'
 import type { PlannedRun } from '#server/features/orders/gather-runs'
+import { lineStrip } from '#server/features/orders/line-strip'
 import type { OrdersQueries } from '#server/features/orders/orders.queries'
 import { planRelease } from '#server/features/orders/plan-release'
 import type { NewPiece, ReleaseStore } from '#server/features/orders/release.store'
@@ -10,7 +11,6 @@ import type { SignedIn } from '#server/http/define-route'
 import { KERNEL_VERSION } from '#server/planning/kernel-version'
 import type { Planner } from '#server/planning/planner'
 import type { OverrideInput } from '#shared/orders/override.schema'
-import { pieceWeight } from '#shared/strip/weight'
 
 export interface ReleaseDeps {
   readonly queries: OrdersQueries
@@ -56,13 +56,12 @@ export const createReleaseOrder =
   }
 
 const frozenLines = (run: PlannedRun): [string, FrozenLine][] => {
-  const { lines, stock, strip, brake, plan, override } = run
+  const { lines, stock, brake, plan, override } = run
   return lines.map((line) => [
     line.id,
     {
       stock,
-      strip,
-      pieceWeight: pieceWeight(strip, stock.sheet, line.length),
+      ...lineStrip(line, stock.sheet),
       brakeId: brake.id,
       brakeName: brake.brake.name,
       plan,

@@ -3,6 +3,7 @@ import type { StocksQueries } from '#server/features/stocks/stocks.queries'
 import { invalidField, profileProblem } from '#server/http/errors'
 import type { SignedIn } from '#server/http/signed-in'
 import type { PersonalMessage } from '#server/live/live-message'
+import { brakesFor } from '#server/planning/brakes-for'
 import type { Planner } from '#server/planning/planner'
 import { profileErrors } from '#server/planning/profile-errors'
 import type { AnswerOf, BodyOf } from '#shared/http/endpoint'
@@ -30,10 +31,10 @@ export const createPlansService = ({ stocks, brakes, planner, tellProgress }: Pl
     const errors = profileErrors(profile, stock, 'profile')
     if (errors.length > 0) throw profileProblem(errors)
     const strip = flatStrip(profile, stock.sheet)
-    const shopBrakes = await brakes.listBrakes()
+    const able = brakesFor(profile, stock, await brakes.listBrakes(), 'profile').brakes
     const progress = oneAtATime(tellProgress)
     try {
-      const plans = await planner.planOnAll(profile, stock.sheet, pieceLength, shopBrakes, {
+      const plans = await planner.planOnAll(profile, stock, pieceLength, able, {
         signal,
         ...(progressKey !== undefined && {
           onProgress: (done) =>

@@ -9,7 +9,7 @@ import { DEMO_BRAKE } from '#shared/bend-plan/demo-brakes'
 import { planProfile } from '#shared/bend-plan/plan-profile'
 import type { Profile } from '#shared/profile/profile.schema'
 import { startApi, type Api } from '../../support/api-app'
-import { STEEL_24 } from '../../support/bend-plan-cases'
+import { STEEL_24, STOCK_24 } from '../../support/bend-plan-cases'
 import { FakeClock } from '../../support/fake-clock'
 import { zProfile } from '../../support/shop-factories'
 
@@ -50,7 +50,7 @@ function openProcess(clock = new FakeClock(NOW), cutShort = false) {
   }
   const cache = createPlanCache({ db: api.db, clock, onError })
   const planner = createWorkerPlanner({ workers, cache, clock, reportEvery: 0, onError })
-  const plan = (profile: Profile = zProfile()) => planner.planOnAll(profile, STEEL_24, 120, brakes)
+  const plan = (profile: Profile = zProfile()) => planner.planOnAll(profile, STOCK_24, 120, brakes)
   return { plan, made, errors, clock }
 }
 

@@ -1,17 +1,8 @@
 import { describe, expect, it } from 'vitest'
 import { sheetOn, stockOn } from '#shared/stock/sheet-on'
-import type { Calibration, Stock } from '#shared/stock/stock.schema'
+import type { Stock } from '#shared/stock/stock.schema'
 import { STEEL } from '../../support/arbitrary-profile'
-
-const calibration = (brakeId: string, kFactor: number, insideRadius: number): Calibration => ({
-  brakeId,
-  brakeName: `Brake ${brakeId}`,
-  kFactor,
-  insideRadius,
-  bends: 2,
-  by: 'Mo Manager',
-  at: '2026-03-02T14:00:00.000Z',
-})
+import { calibrationOf } from '../../support/shop-factories'
 
 const stock: Stock = {
   id: 'stock',
@@ -25,7 +16,7 @@ const stock: Stock = {
   kSource: 'handbookHard',
   paintTBend: null,
   alloy: null,
-  calibrations: [calibration('long', 0.44, 0.045), calibration('short', 0.38, 0.02)],
+  calibrations: [calibrationOf('long', 0.44, 0.045), calibrationOf('short', 0.38, 0.02)],
 }
 
 describe('the sheet on a brake', () => {
