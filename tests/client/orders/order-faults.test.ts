@@ -6,8 +6,25 @@ import {
   stillStands,
 } from '@/features/orders/form/order-faults'
 import { orderBody } from '@/features/orders/form/order-body'
-import type { DraftLine, OrderDraft } from '@/features/orders/draft/order-draft'
+import type { DraftEnds } from '@/features/ends/model/draft-end'
+import { SQUARE } from '@/features/ends/model/end-edits'
+import type { DraftGood, DraftLine, OrderDraft } from '@/features/orders/draft/order-draft'
 import { draft, line, STOCK } from './draft-lines'
+
+const OPEN_LAP: DraftEnds = {
+  left: { kind: 'lap', side: 'over', length: null, tabs: [] },
+  right: SQUARE,
+  lowEnd: null,
+}
+
+const TAPE: DraftGood = {
+  key: 'tape',
+  kind: 'butylTape',
+  quantity: 40,
+  unit: 'foot',
+  stockId: null,
+  note: '',
+}
 
 const ground = { stocks: [STOCK], today: '2026-12-01' }
 const found = (written: OrderDraft) =>
@@ -32,6 +49,13 @@ describe('found before anything is sent', () => {
     [{ length: null }, 'lines.0.length lengthMissing'],
     [{ length: 126.5 }, 'lines.0.length lengthBeyondStock'],
     [{ length: 601 }, 'lines.0.length lengthTooLong'],
+    [{ statedGirth: 0 }, 'lines.0.statedGirth girthOutOfRange'],
+    [{ statedGirth: 120.5 }, 'lines.0.statedGirth girthOutOfRange'],
+    [{ ends: OPEN_LAP }, 'lines.0.ends endsIncomplete'],
+    [
+      { hands: { drawn: 'left', left: 3, right: null }, quantity: null },
+      'lines.0.hands handsMissing',
+    ],
   ])('%j: %s', (change, fault) => {
     expect(found(withLineOf(change))).toEqual([fault])
   })
@@ -61,6 +85,25 @@ describe('found before anything is sent', () => {
     expect(found(draft({ lines: [] }))).toEqual(['lines noLines'])
   })
 
+  test('small goods need a number, and a stock that the shop has', () => {
+    const goods = [
+      { ...TAPE, quantity: null },
+      { ...TAPE, quantity: 100_001 },
+      { ...TAPE, note: 'n'.repeat(201) },
+      { ...TAPE, stockId: '7c4b1f0e-2f6d-4c52-9a0c-0d5be1f7ffff' },
+      { ...TAPE, stockId: STOCK.id },
+    ]
+    expect(found(draft({ goods }))).toEqual([
+      'goods.0.quantity goodMissing',
+      'goods.1.quantity goodTooMany',
+      'goods.2.note noteTooLong',
+      'goods.3.stockId stockGone',
+    ])
+    expect(found(draft({ goods: Array.from({ length: 41 }, () => TAPE) }))).toEqual([
+      'goods tooManyGoods',
+    ])
+  })
+
   test('stocks are not judged while they are not known', () => {
     expect(draftFaults(draft(), { ...ground, stocks: [] })).toEqual([])
   })
@@ -81,14 +124,31 @@ describe('field errors of the server', () => {
     expect(faults.map(({ path, code }) => [path, code])).toEqual([['lines.2.profile', 'profile']])
   })
 
+  test('inside ends and hands belong to the one place the form has for them', () => {
+    const faults = faultsOfErrors([
+      { path: 'lines.1.ends.left.length', message: 'Too long.' },
+      { path: 'lines.0.hands', message: 'Left and right together must be the quantity.' },
+    ])
+    expect(faults.map(({ path, code }) => [path, code])).toEqual([
+      ['lines.1.ends', 'server'],
+      ['lines.0.hands', 'server'],
+    ])
+  })
+
   test('that no field of the form shows are said elsewhere, none is lost', () => {
     const faults = faultsOfErrors([
       { path: 'jobId', message: 'No such job.' },
       { path: 'lines.0.length', message: 'Too long.' },
+      { path: 'lines.0.ends', message: 'Cannot be cut.' },
       { path: 'lines.4.length', message: 'Too long.' },
+      { path: 'goods.0.quantity', message: 'At least one.' },
       { path: 'neededBy', message: 'Passed.' },
     ])
-    expect(faultsElsewhere(faults, 1).map(({ path }) => path)).toEqual(['jobId', 'lines.4.length'])
+    expect(faultsElsewhere(faults, draft()).map(({ path }) => path)).toEqual([
+      'jobId',
+      'lines.4.length',
+      'goods.0.quantity',
+    ])
   })
 
   test('stand until their own field is changed', () => {

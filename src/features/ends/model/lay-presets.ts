@@ -84,6 +84,9 @@ export function usualLay(profile: Profile, run: Run): Degrees {
       return run.lowEnd === null ? wrapped(0 - run.slope - before) : 0 - before
     case 'ridge':
       return run.lowEnd === null ? wrapped(run.slope - before) : 0 - before
+    case 'hip':
+    case 'valley':
+      return wrapped(drawn.turn / -2 - before)
     case 'gable':
     case 'sidewall':
     case 'transition':

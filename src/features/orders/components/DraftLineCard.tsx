@@ -1,28 +1,35 @@
 import { useId, useState } from 'react'
-import { useTranslation } from 'react-i18next'
-import { Button } from '@/components/Button'
-import { ButtonLink } from '@/components/ButtonLink'
 import { Notice } from '@/components/Notice'
+import { EndsPanel } from '@/features/ends/components/EndsPanel'
+import type { EndedLine } from '@/features/ends/model/neighbors'
+import { RoofLinePanel } from '@/features/roof-line/components/RoofLinePanel'
 import type { DraftLine, LinePatch } from '../draft/order-draft'
+import { checkLine, UNTIL_ENTERED, type LineGround } from '../form/check-line'
 import { faultAt, type Fault } from '../form/order-faults'
 import { useFaultWords } from '../form/useFaultWords'
-import { checkLine, type LineGround } from '../form/check-line'
 import { LineBends } from './LineBends'
+import { LineEnds } from './LineEnds'
 import { LineFacts } from './LineFacts'
 import { LineAmounts, LineNames } from './LineFields'
 import { LineFigure } from './LineFigure'
 import { LineHead } from './LineHead'
+import { LineTools, type LinePanel } from './LineTools'
+import { GirthCure, GirthDifference } from './StatedGirth'
 import { StockName } from './StockName'
 
 interface Props {
   readonly line: DraftLine
   readonly index: number
+  /** All lines of the order: some cover one roof line together, others meet at their ends. */
+  readonly lines: readonly DraftLine[]
+  readonly ended: readonly EndedLine[]
   readonly ground: LineGround
   readonly faults: readonly Fault[]
   /** While the order is on its way. */
   readonly disabled: boolean
   readonly boardPath: string
   readonly onChange: (patch: LinePatch) => void
+  readonly onCover: (lines: DraftLine[]) => void
   readonly onDuplicate: () => void
   readonly onRemove: () => void
 }
@@ -30,28 +37,34 @@ interface Props {
 const isNamed = ({ mark, name, stockId }: DraftLine): boolean =>
   mark !== '' && name !== '' && stockId !== null
 
-/** One line of an order being written: the drawing, what it takes, how many and how long. */
+const NAME_FIELDS = ['mark', 'name', 'stockId', 'statedGirth']
+
+/** One line of an order being written: the drawing, what it takes, how many, how long, how it ends. */
 export function DraftLineCard({
   line,
   index,
+  lines,
+  ended,
   ground,
   faults,
   disabled,
   boardPath,
   onChange,
+  onCover,
   onDuplicate,
   onRemove,
 }: Props) {
-  const { t } = useTranslation('orders')
   const words = useFaultWords()
   const id = useId()
   const checked = checkLine(line, ground)
   // Fields that stood open stay so while they are typed into.
-  const [open, setOpen] = useState(() => !isNamed(line))
-  const shown =
-    open || ['mark', 'name', 'stockId'].some((field) => faultAt(faults, `lines.${index}.${field}`))
-  const drawingFault = words(faultAt(faults, `lines.${index}.profile`))
+  const [panel, setPanel] = useState<LinePanel | null>(() => (isNamed(line) ? null : 'names'))
+  const faultOf = (field: string) => words(faultAt(faults, `lines.${index}.${field}`))
+  const namesWanted = NAME_FIELDS.some((field) => faultOf(field) !== undefined)
+  const namesShown = panel === 'names' || namesWanted
   const { check, drawnIn, stock } = checked
+  const drawingFault = faultOf('profile')
+  const endsFault = faultOf('ends')
 
   return (
     <article
@@ -63,6 +76,7 @@ export function DraftLineCard({
         mark={line.mark}
         name={line.name}
         quantity={line.quantity}
+        hands={line.hands}
         length={line.length}
       />
       <div className="grid gap-x-10 gap-y-3 lg:grid-cols-[22.5rem_minmax(0,34rem)]">
@@ -83,6 +97,15 @@ export function DraftLineCard({
           <LineBends check={check} plans={checked.plans} />
           {drawingFault && <Notice kind="error">{drawingFault}</Notice>}
           {stock && <StockName stock={stock} />}
+          <GirthDifference profile={line.profile} stated={line.statedGirth} />
+          <GirthCure
+            profile={line.profile}
+            stated={line.statedGirth}
+            disabled={disabled}
+            onProfile={(profile) => onChange({ profile })}
+          />
+          <LineEnds ends={line.ends} />
+          {endsFault && <Notice kind="error">{endsFault}</Notice>}
           <LineAmounts
             line={line}
             index={index}
@@ -90,8 +113,24 @@ export function DraftLineCard({
             disabled={disabled}
             onChange={onChange}
           />
-          {shown && (
-            <div id={`${id}-names`}>
+        </div>
+      </div>
+      {!disabled && (
+        <LineTools
+          id={`${id}-panel`}
+          open={panel}
+          namesOpen={namesShown}
+          canDress={check?.strip !== undefined && check?.strip !== null}
+          boardPath={boardPath}
+          onOpen={setPanel}
+          onDuplicate={onDuplicate}
+          onRemove={onRemove}
+        />
+      )}
+      {(panel !== null || namesShown) && (
+        <div id={`${id}-panel`} className="flex flex-col gap-6 border-t border-rule pt-4">
+          {namesShown && (
+            <div className="max-w-xl">
               <LineNames
                 line={line}
                 index={index}
@@ -99,36 +138,46 @@ export function DraftLineCard({
                 faults={faults}
                 disabled={disabled}
                 onChange={(patch) => {
-                  setOpen(true)
+                  setPanel('names')
                   onChange(patch)
                 }}
               />
             </div>
           )}
-          {!disabled && (
-            <div className="-mx-1.5 flex flex-wrap">
-              <Button
-                variant="quiet"
-                className="px-1.5!"
-                aria-expanded={shown}
-                aria-controls={`${id}-names`}
-                onClick={() => setOpen(!shown)}
-              >
-                {shown ? t('line.close') : t('line.change')}
-              </Button>
-              <ButtonLink variant="quiet" className="px-1.5!" to={boardPath}>
-                {t('line.editDrawing')}
-              </ButtonLink>
-              <Button variant="quiet" className="px-1.5!" onClick={onDuplicate}>
-                {t('line.duplicate')}
-              </Button>
-              <Button variant="quiet" className="px-1.5!" onClick={onRemove}>
-                {t('line.remove')}
-              </Button>
-            </div>
+          {panel === 'ends' && drawnIn && check?.strip && (
+            <EndsPanel
+              lineKey={line.key}
+              profile={checked.profile}
+              stock={drawnIn}
+              strip={check.strip}
+              pieceLength={line.length ?? UNTIL_ENTERED}
+              ends={line.ends}
+              hands={line.hands}
+              quantity={line.quantity}
+              check={checked.ends}
+              pitchRise={ground.pitchRise}
+              lines={ended}
+              disabled={disabled}
+              onEnds={(ends) => onChange({ ends })}
+              onHands={onChange}
+            />
+          )}
+          {panel === 'roofLine' && drawnIn && (
+            <RoofLinePanel
+              line={line}
+              lines={lines}
+              stock={drawnIn}
+              checked={checked}
+              ground={ground}
+              disabled={disabled}
+              onUse={(covered) => {
+                setPanel(null)
+                onCover(covered)
+              }}
+            />
           )}
         </div>
-      </div>
+      )}
     </article>
   )
 }

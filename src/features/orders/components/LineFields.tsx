@@ -1,8 +1,10 @@
 import { useTranslation } from 'react-i18next'
+import type { Side } from '#shared/ends/end.schema'
 import type { Stock } from '#shared/stock/stock.schema'
 import { DimensionField } from '@/components/keypad/DimensionField'
 import { Select } from '@/components/Select'
 import { TextField } from '@/components/TextField'
+import { handChoice, withHandCount, withQuantity } from '@/features/ends/model/hand-edits'
 import { useUnits } from '@/features/people/useUnits'
 import type { DraftLine, LinePatch } from '../draft/order-draft'
 import { faultAt, type Fault } from '../form/order-faults'
@@ -22,21 +24,39 @@ function useLineError(index: number, faults: readonly Fault[]) {
   return (field: string) => words(faultAt(faults, `lines.${index}.${field}`))
 }
 
-/** What every line has to be told: how many and how long. */
+const SIDES: readonly Side[] = ['left', 'right']
+
+/** What every line has to be told: how many, of a pair each hand, and how long. */
 export function LineAmounts({ line, index, faults, disabled, onChange }: Props) {
   const { t } = useTranslation('orders')
   const { units } = useUnits()
   const error = useLineError(index, faults)
+  const { hands } = line
   return (
     <div className="grid items-start gap-4 sm:grid-cols-2">
-      <QuantityField
-        value={line.quantity}
-        error={error('quantity')}
-        disabled={disabled}
-        onChange={(quantity) => onChange({ quantity })}
-      />
+      {hands && handChoice(hands) === 'pair' ? (
+        SIDES.map((hand) => (
+          <QuantityField
+            key={hand}
+            label={t(`line.quantityOf.${hand}`)}
+            value={hands[hand]}
+            error={hands[hand] === null ? error('hands') : error('quantity')}
+            disabled={disabled}
+            onChange={(count) => onChange(withHandCount(hands, hand, count))}
+          />
+        ))
+      ) : (
+        <QuantityField
+          label={t('line.quantity')}
+          value={line.quantity}
+          error={error('quantity') ?? error('hands')}
+          disabled={disabled}
+          onChange={(quantity) => onChange(withQuantity(line, quantity))}
+        />
+      )}
       <DimensionField
         label={t('line.length')}
+        hint={line.ends ? t('line.lengthHint') : undefined}
         purpose="run"
         units={units}
         value={line.length}
@@ -48,7 +68,7 @@ export function LineAmounts({ line, index, faults, disabled, onChange }: Props) 
   )
 }
 
-/** What the board has filled in already: mark, name and stock. */
+/** What the board has filled in already: mark, name and stock; the girth that is expected. */
 export function LineNames({
   line,
   index,
@@ -59,6 +79,7 @@ export function LineNames({
 }: Props & { readonly stocks: readonly Stock[] }) {
   const { t } = useTranslation('orders')
   const { t: stockText } = useTranslation('stocks')
+  const { units } = useUnits()
   const error = useLineError(index, faults)
   return (
     <div className="flex flex-col gap-4">
@@ -97,6 +118,15 @@ export function LineNames({
           }),
         }))}
         onChange={(event) => onChange({ stockId: event.target.value || null })}
+      />
+      <DimensionField
+        label={t('girth.label')}
+        hint={t('girth.hint')}
+        units={units}
+        value={line.statedGirth}
+        disabled={disabled}
+        error={error('statedGirth')}
+        onChange={(statedGirth) => onChange({ statedGirth })}
       />
     </div>
   )

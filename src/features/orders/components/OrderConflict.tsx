@@ -4,7 +4,9 @@ import type { Order } from '#shared/orders/order.schema'
 import type { Stock } from '#shared/stock/stock.schema'
 import { Button } from '@/components/Button'
 import { ProfileThumb } from '@/features/drawing/figure/ProfileThumb'
+import { useEndWords } from '@/features/ends/useEndWords'
 import { useUnits } from '@/features/people/useUnits'
+import { GoodsList } from '@/features/roof-line/components/GoodsList'
 import { useFormats } from '@/lib/format/useFormats'
 import type { DraftLine, OrderDraft } from '../draft/order-draft'
 import { compareOrders } from '../form/compare-orders'
@@ -79,6 +81,16 @@ export function OrderConflict({ draft, order, stocks, onKeepMine, onTakeTheirs }
             theirs={theirs ? <LineCell line={theirs} stock={theirs.stock} /> : none}
           />
         ))}
+        {(draft.goods.length > 0 || order.goods.length > 0) && (
+          <Row
+            label={t('goods:title')}
+            differs={difference.goods}
+            mine={draft.goods.length > 0 ? <GoodsList goods={draft.goods} stocks={stocks} /> : none}
+            theirs={
+              order.goods.length > 0 ? <GoodsList goods={order.goods} stocks={stocks} /> : none
+            }
+          />
+        )}
       </table>
       <div className="grid grid-cols-2 gap-4">
         <Button onClick={onKeepMine}>{t('conflict.keepMine')}</Button>
@@ -118,12 +130,18 @@ function Row({ label, differs, mine, theirs }: RowProps) {
 }
 
 interface LineCellProps {
-  readonly line: Pick<DraftLine, 'name' | 'profile' | 'quantity' | 'length'>
+  readonly line: Pick<
+    DraftLine,
+    'name' | 'profile' | 'quantity' | 'length' | 'ends' | 'hands' | 'statedGirth'
+  >
   readonly stock: Stock | undefined
 }
 
-function LineCell({ line: { name, profile, quantity, length }, stock }: LineCellProps) {
-  const { run } = useUnits()
+function LineCell({ line, stock }: LineCellProps) {
+  const { t } = useTranslation('orders')
+  const { run, size } = useUnits()
+  const words = useEndWords()
+  const { name, profile, quantity, length, ends, hands, statedGirth } = line
   return (
     <>
       <span className="block">{name}</span>
@@ -139,7 +157,19 @@ function LineCell({ line: { name, profile, quantity, length }, stock }: LineCell
       )}
       <span className="block font-figure text-small">
         {quantity ?? '?'} × {length === null ? '?' : run(length)}
+        {hands && ` · ${words.hands(hands)}`}
       </span>
+      {ends && (
+        <span className="block text-small">
+          {words.ends(ends)}
+          {ends.lowEnd !== null && ` · ${words.run(ends.lowEnd)}`}
+        </span>
+      )}
+      {statedGirth !== null && (
+        <span className="block text-small">
+          {t('girth.stated', { girth: size(statedGirth, 32) })}
+        </span>
+      )}
       {stock && (
         <span className="text-small">
           <StockName stock={stock} />

@@ -2,10 +2,11 @@ import { useEffect, useRef, useState, type ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Button } from '@/components/Button'
 import { Notice } from '@/components/Notice'
+import { GoodsSection } from '@/features/roof-line/components/GoodsSection'
 import { newKey } from '@/lib/api/idempotency'
 import { nextMark, type DraftLine } from '../draft/order-draft'
 import type { OrderDraftHandle } from '../draft/useOrderDraft'
-import type { LineGround } from '../form/check-line'
+import { checkLine, type LineGround } from '../form/check-line'
 import { faultAt, faultsElsewhere } from '../form/order-faults'
 import { useFaultWords } from '../form/useFaultWords'
 import type { OrderFormState } from '../form/useOrderForm'
@@ -54,7 +55,15 @@ export function OrderForm({
   const { faults, delivery, presses } = state
   const form = useRef<HTMLFormElement>(null)
   const [removed, setRemoved] = useState<Removed | null>(null)
+  const [covered, setCovered] = useState<readonly DraftLine[] | null>(null)
   const linesFault = words(faultAt(faults, 'lines'))
+  const checked = draft.lines.map((line) => ({ line, answer: checkLine(line, ground) }))
+  const ended = checked.flatMap(({ line, answer: { profile, drawnIn } }) =>
+    drawnIn ? [{ ...line, profile, sheet: drawnIn.sheet }] : [],
+  )
+  const counted = checked.flatMap(({ line, answer: { stock, check } }) =>
+    stock && check?.strip ? [{ line, stock, girth: check.strip.girth }] : [],
+  )
 
   // A press that found something missing leads to the first of it.
   useEffect(() => {
@@ -79,7 +88,7 @@ export function OrderForm({
       <DeliveryNotice
         sending={draft.sending}
         delivery={delivery}
-        elsewhere={faultsElsewhere(faults, draft.lines.length)}
+        elsewhere={faultsElsewhere(faults, draft)}
         arrivedAt={arrivedAt}
         onStop={state.stop}
         onDrop={onDrop}
@@ -90,13 +99,23 @@ export function OrderForm({
           key={line.key}
           line={line}
           index={index}
+          lines={draft.lines}
+          ended={ended}
           ground={ground}
           faults={faults}
           disabled={draft.sending}
           boardPath={boardPath(line.key)}
           onChange={(patch) => handle.updateLine(line.key, patch)}
+          onCover={(lines) => {
+            setCovered(draft.lines)
+            handle.setLines(lines)
+          }}
           onDuplicate={() =>
-            handle.addLine({ ...line, key: newKey(), mark: nextMark(draft) }, index + 1)
+            // A copy covers nothing yet: it would be replaced with the roof line it was copied from.
+            handle.addLine(
+              { ...line, key: newKey(), mark: nextMark(draft), covers: null },
+              index + 1,
+            )
           }
           onRemove={() => {
             setRemoved({ line, at: index })
@@ -119,8 +138,31 @@ export function OrderForm({
           </span>
         </Notice>
       )}
+      {covered && (
+        <Notice kind="info">
+          <span className="flex flex-wrap items-center justify-between gap-3">
+            {t('line.covered')}
+            <Button
+              onClick={() => {
+                handle.setLines(covered)
+                setCovered(null)
+              }}
+            >
+              {t('line.coveredUndo')}
+            </Button>
+          </span>
+        </Notice>
+      )}
       {linesFault && <Notice kind="error">{linesFault}</Notice>}
       {!draft.sending && <div className="flex flex-wrap gap-3">{more}</div>}
+      <GoodsSection
+        goods={draft.goods}
+        lines={counted}
+        stocks={ground.stocks}
+        faults={faults}
+        disabled={draft.sending}
+        onChange={handle.setGoods}
+      />
       <div className="flex max-w-[59rem] flex-col gap-6 border-t-2 border-ink pt-4">
         <OrderFields
           draft={draft}
@@ -130,7 +172,7 @@ export function OrderForm({
           question={question}
           onChange={handle.setFields}
         />
-        <OrderReview lines={draft.lines} ground={ground} />
+        <OrderReview draft={draft} ground={ground} />
         <OrderCaution />
       </div>
     </form>

@@ -3,10 +3,12 @@ import { useTranslation } from 'react-i18next'
 import type { OrderLine } from '#shared/orders/order.schema'
 import { BendsLine } from './LineBends'
 import { OverrideNote } from './OverrideNote'
+import { LineEnds } from './LineEnds'
 import { LineFacts } from './LineFacts'
 import { LineFigure } from './LineFigure'
 import { LineHead } from './LineHead'
 import { LinePieces } from './LinePieces'
+import { GirthDifference } from './StatedGirth'
 import { StockName } from './StockName'
 
 interface Props {
@@ -33,6 +35,7 @@ export function OrderLineCard({ line, unreleased, piecePath }: Props) {
         mark={line.mark}
         name={line.name}
         quantity={quantity}
+        hands={line.hands}
         length={line.length}
       />
       <div className="grid gap-x-10 gap-y-3 lg:grid-cols-[22.5rem_minmax(0,34rem)]">
@@ -40,6 +43,8 @@ export function OrderLineCard({ line, unreleased, piecePath }: Props) {
         <div className="flex flex-col gap-3">
           <LineFacts strip={strip} pieceWeight={line.pieceWeight} quantity={quantity} />
           <StockName stock={stock} />
+          <GirthDifference profile={line.profile} stated={line.statedGirth} />
+          <LineEnds ends={line.ends} />
           <BendsLine
             good={bendsOn.length > 0}
             words={

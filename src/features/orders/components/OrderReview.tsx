@@ -1,17 +1,22 @@
 import { useTranslation } from 'react-i18next'
+import { girthDifference } from '#shared/profile/stated-girth'
+import { useEndWords } from '@/features/ends/useEndWords'
 import { useUnits } from '@/features/people/useUnits'
+import { GoodsList } from '@/features/roof-line/components/GoodsList'
 import { useFormats } from '@/lib/format/useFormats'
 import { usePlanWords } from '@/features/drawing/usePlanWords'
-import type { DraftLine } from '../draft/order-draft'
+import type { DraftLine, OrderDraft } from '../draft/order-draft'
 import { bendsNowhere, checkLine, type LineGround } from '../form/check-line'
 
 interface Props {
-  readonly lines: readonly DraftLine[]
+  readonly draft: OrderDraft
   readonly ground: LineGround
 }
 
-/** The last look: how much it is in all, and what no brake of the shop bends. */
-export function OrderReview({ lines, ground }: Props) {
+const marksOf = (lines: readonly DraftLine[]): string => lines.map(({ mark }) => mark).join(', ')
+
+/** The last look: every line in a row, how much it is in all, and what the shop will ask about. */
+export function OrderReview({ draft: { lines, goods }, ground }: Props) {
   const { t } = useTranslation('orders')
   const { weight } = useUnits()
   const { count } = useFormats()
@@ -23,11 +28,22 @@ export function OrderReview({ lines, ground }: Props) {
       sum + (line.length === null ? 0 : (answer.check?.weight ?? 0) * (line.quantity ?? 0)),
     0,
   )
-  const nowhere = checked.filter(({ answer }) => bendsNowhere(answer))
+  const nowhere = checked.filter(({ answer }) => bendsNowhere(answer)).map(({ line }) => line)
+  const otherGirth = lines.filter(
+    ({ profile, statedGirth }) =>
+      statedGirth !== null && girthDifference(profile, statedGirth) !== 0,
+  )
   const made = checked.flatMap(({ answer }) => answer.plans).find(({ plan }) => plan.feasible)
     ?.plan.checks
   return (
     <section aria-label={t('review.title')} className="flex max-w-prose flex-col gap-2">
+      {lines.length > 0 && (
+        <ul className="divide-y divide-rule border-y border-rule">
+          {lines.map((line) => (
+            <ReviewedLine key={line.key} line={line} />
+          ))}
+        </ul>
+      )}
       <p className="font-figure text-lead">
         {t('review.total', {
           count: pieces,
@@ -36,12 +52,47 @@ export function OrderReview({ lines, ground }: Props) {
           weight: weight(pounds),
         })}
       </p>
+      {goods.length > 0 && (
+        <div>
+          <h4 className="text-small text-scribe">{t('goods:title')}</h4>
+          <GoodsList goods={goods} stocks={ground.stocks} />
+        </div>
+      )}
       {nowhere.length > 0 && (
         <p className="font-semibold text-chalk">
-          {t('review.nowhere', { marks: nowhere.map(({ line }) => line.mark).join(', ') })}
+          {t('review.nowhere', { marks: marksOf(nowhere) })}
+        </p>
+      )}
+      {otherGirth.length > 0 && (
+        <p className="font-semibold text-chalk">
+          {t('review.otherGirth', { marks: marksOf(otherGirth) })}
         </p>
       )}
       {made && <p className="text-small text-scribe">{checks(made)}</p>}
     </section>
+  )
+}
+
+function ReviewedLine({ line }: { readonly line: DraftLine }) {
+  const words = useEndWords()
+  const { run } = useUnits()
+  const { mark, name, quantity, length, hands, ends } = line
+  return (
+    <li className="py-1.5">
+      <p className="flex flex-wrap gap-x-3">
+        <span className="font-figure font-bold">{mark}</span>
+        <span className="min-w-32 flex-1">{name}</span>
+        <span className="font-figure whitespace-nowrap">
+          {quantity ?? '?'} × {length === null ? '?' : run(length)}
+          {hands && <strong> · {words.hands(hands)}</strong>}
+        </span>
+      </p>
+      {ends && (
+        <p className="text-small text-scribe">
+          {words.ends(ends)}
+          {ends.lowEnd !== null && ` · ${words.run(ends.lowEnd)}`}
+        </p>
+      )}
+    </li>
   )
 }

@@ -6,21 +6,24 @@ import { Icon } from '@/components/Icon'
 import { IconButton } from '@/components/IconButton'
 
 interface Props {
+  readonly label: string
   readonly value: number | null
   readonly error: string | undefined
   readonly disabled: boolean
+  /** How many digits are taken. */
+  readonly digits?: number
   readonly onChange: (quantity: number | null) => void
 }
 
-/** How many pieces: typed, or one more and one less with a thumb. */
-export function QuantityField({ value, error, disabled, onChange }: Props) {
+/** How many: typed, or one more and one less with a thumb. */
+export function QuantityField({ label, value, error, disabled, digits = 4, onChange }: Props) {
   const { t } = useTranslation('orders')
   const id = useId()
   return (
-    <Field id={id} label={t('line.quantity')} error={error}>
+    <Field id={id} label={label} error={error}>
       <span className="flex gap-1">
         <IconButton
-          label={t('line.fewer')}
+          label={t('line.fewerOf', { label })}
           icon={<Icon name="minus" />}
           className="border border-edge bg-sheet"
           disabled={disabled || value === null || value <= 1}
@@ -37,12 +40,12 @@ export function QuantityField({ value, error, disabled, onChange }: Props) {
           aria-describedby={describedBy(id, { hint: undefined, error })}
           onFocus={(event) => event.target.select()}
           onChange={(event) => {
-            const digits = event.target.value.replace(/\D/g, '').slice(0, 4)
-            onChange(digits === '' ? null : Number(digits))
+            const typed = event.target.value.replace(/\D/g, '').slice(0, digits)
+            onChange(typed === '' ? null : Number(typed))
           }}
         />
         <IconButton
-          label={t('line.more')}
+          label={t('line.moreOf', { label })}
           icon={<Icon name="plus" />}
           className="border border-edge bg-sheet"
           disabled={disabled}

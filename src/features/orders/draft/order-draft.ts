@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { profileSchema } from '#shared/profile/profile.schema'
 import { GOOD_KINDS, GOOD_UNITS } from '#shared/roof-line/goods.schema'
 import { draftEndsSchema, draftHandsSchema } from '@/features/ends/model/draft-end'
+import { draftRoofLineSchema } from '@/features/roof-line/model/draft-roof-line'
 
 /** A line that is being written: what is not filled in yet is null. Inches. */
 export const draftLineSchema = z.strictObject({
@@ -22,7 +23,7 @@ export const draftLineSchema = z.strictObject({
    * The line on the roof that its pieces cover together with those of other lines of the same key;
    * known on this device alone, for counting small goods. Null where it was not made of one.
    */
-  covers: z.strictObject({ roofLine: z.string(), lap: z.number() }).nullable(),
+  covers: z.strictObject({ roofLine: z.string(), line: draftRoofLineSchema }).nullable(),
 })
 
 /** Small goods that are being written. */
@@ -118,6 +119,13 @@ export const withLine = (
   line: DraftLine,
   at: number = draft.lines.length,
 ): OrderDraft => ({ ...draft, sending: false, lines: draft.lines.toSpliced(at, 0, line) })
+
+/** The lines as they are to be from now on. */
+export const withLines = (draft: OrderDraft, lines: readonly DraftLine[]): OrderDraft => ({
+  ...draft,
+  sending: false,
+  lines: [...lines],
+})
 
 export const withLinePatch = (draft: OrderDraft, key: string, patch: LinePatch): OrderDraft => ({
   ...draft,

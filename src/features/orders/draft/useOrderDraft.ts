@@ -15,6 +15,7 @@ import {
   withGoods,
   withLine,
   withLinePatch,
+  withLines,
   withoutLine,
   type DraftFields,
   type DraftGood,
@@ -29,6 +30,7 @@ export interface OrderDraftHandle extends KeptDraft {
   readonly addLine: (line: DraftLine, at?: number) => void
   readonly updateLine: (key: string, patch: LinePatch) => void
   readonly removeLine: (key: string) => void
+  readonly setLines: (lines: readonly DraftLine[]) => void
   readonly setGoods: (goods: readonly DraftGood[]) => void
   readonly setFields: (patch: DraftFields) => void
   readonly replace: (draft: OrderDraft) => void
@@ -46,6 +48,7 @@ export function useDraftSlot(slot: Slot): OrderDraftHandle {
       addLine: (line, at) => changeSlot(slot, (draft) => withLine(draft, line, at)),
       updateLine: (key, patch) => changeSlot(slot, (draft) => withLinePatch(draft, key, patch)),
       removeLine: (key) => changeSlot(slot, (draft) => withoutLine(draft, key)),
+      setLines: (lines) => changeSlot(slot, (draft) => withLines(draft, lines)),
       setGoods: (goods) => changeSlot(slot, (draft) => withGoods(draft, goods)),
       setFields: (patch) => changeSlot(slot, (draft) => ({ ...draft, ...patch })),
       replace: (next) => changeSlot(slot, () => next),

@@ -13,7 +13,7 @@ import { checkEnds, type EndsCheck } from '@/features/ends/model/check-ends'
 import type { DraftLine } from '../draft/order-draft'
 
 /** Figures of a line whose length is still to be entered are those of a 10 ft piece. */
-const UNTIL_ENTERED = 120
+export const UNTIL_ENTERED = 120
 
 /** What the lines of an order are checked against. */
 export interface LineGround {

@@ -1,5 +1,6 @@
 import type { FieldError } from '#shared/http/problem'
 import type { Stock } from '#shared/stock/stock.schema'
+import { completeEnds } from '@/features/ends/model/draft-end'
 import type { OrderDraft } from '../draft/order-draft'
 
 /** What can be wrong in an order that is being written; each has its words in the texts. */
@@ -18,6 +19,15 @@ export type FaultCode =
   | 'lengthMissing'
   | 'lengthTooLong'
   | 'lengthBeyondStock'
+  | 'handsMissing'
+  | 'girthOutOfRange'
+  | 'endsIncomplete'
+  | 'endsFaulty'
+  | 'blankBeyondStock'
+  | 'tooManyGoods'
+  | 'goodMissing'
+  | 'goodTooMany'
+  | 'noteTooLong'
   | 'neededByMissing'
   | 'neededByPast'
   | 'profile'
@@ -27,7 +37,7 @@ export interface Fault {
   /** Dotted, as in the request: `neededBy`, `lines.0.length`. */
   readonly path: string
   readonly code: FaultCode
-  /** Inches, for `lengthBeyondStock`. */
+  /** Inches, for `lengthBeyondStock` and `blankBeyondStock`. */
   readonly limit?: number
   /** The server's own sentence, in English, for `server`. */
   readonly message?: string
@@ -39,6 +49,11 @@ const MOST_PIECES = 500
 const LONGEST = 600
 const MARK_LETTERS = 20
 const NAME_LETTERS = 80
+/** Inches; the API's bound on a stated girth. */
+const WIDEST_GIRTH = 120
+const MOST_GOODS = 40
+const MOST_OF_A_GOOD = 100_000
+const NOTE_LETTERS = 200
 
 interface Ground {
   /** Empty while the stocks are not known yet: then they are not judged. */
@@ -74,6 +89,14 @@ const lengthFault = (length: number | null, stock: Stock | undefined): FaultCode
   return stock && length > stock.longestPiece ? 'lengthBeyondStock' : null
 }
 
+const girthFault = (girth: number | null): FaultCode | null =>
+  girth !== null && (girth <= 0 || girth > WIDEST_GIRTH) ? 'girthOutOfRange' : null
+
+const goodFault = (quantity: number | null): FaultCode | null => {
+  if (quantity === null || !Number.isInteger(quantity) || quantity < 1) return 'goodMissing'
+  return quantity > MOST_OF_A_GOOD ? 'goodTooMany' : null
+}
+
 /** What the server would refuse, found before anything is sent. Empty when the order may go. */
 export function draftFaults(draft: OrderDraft, { stocks, today, mayStay }: Ground): Fault[] {
   const faults: Fault[] = []
@@ -91,26 +114,42 @@ export function draftFaults(draft: OrderDraft, { stocks, today, mayStay }: Groun
     const earlier = draft.lines.slice(0, index).map(({ mark }) => mark)
     add(at('mark'), markFault(line.mark, earlier))
     add(at('name'), nameFault(line.name))
-    add(at('quantity'), quantityFault(line.quantity))
+    if (line.hands && line.quantity === null) add(at('hands'), 'handsMissing')
+    else add(at('quantity'), quantityFault(line.quantity))
+    add(at('statedGirth'), girthFault(line.statedGirth))
+    if (line.ends && completeEnds(line.ends) === null) add(at('ends'), 'endsIncomplete')
     add(at('length'), lengthFault(line.length, stock), stock?.longestPiece)
     if (line.stockId === null) add(at('stockId'), 'stockMissing')
     else if (stocks.length > 0 && !stock) add(at('stockId'), 'stockGone')
   })
+
+  if (draft.goods.length > MOST_GOODS) add('goods', 'tooManyGoods')
+  draft.goods.forEach(({ quantity, note, stockId }, index) => {
+    add(`goods.${index}.quantity`, goodFault(quantity))
+    if (note.trim().length > NOTE_LETTERS) add(`goods.${index}.note`, 'noteTooLong')
+    if (stockId !== null && stocks.length > 0 && !stocks.some(({ id }) => id === stockId)) {
+      add(`goods.${index}.stockId`, 'stockGone')
+    }
+  })
   return faults
 }
 
-/** `lines.2.profile.bends.0` speaks of the drawing of line 2: shown at its figure. */
-const PROFILE_PATH = /^(lines\.\d+\.profile)\b/
+/**
+ * `lines.2.profile.bends.0` speaks of the drawing of line 2: shown at its figure; so do ends and
+ * hands of a line at the one place that the form has for them.
+ */
+const PART_PATH = /^(lines\.\d+\.(profile|ends|hands))\b/
 
 /** The server's field errors as faults of the form's fields, one a field, the first counts. */
 export function faultsOfErrors(errors: readonly FieldError[]): Fault[] {
   const byPath = new Map<string, Fault>()
   for (const { path, message } of errors) {
-    const drawing = PROFILE_PATH.exec(path)?.[1]
-    const fault: Fault =
-      drawing === undefined
-        ? { path, code: 'server', message }
-        : { path: drawing, code: 'profile', message }
+    const [, part, name] = PART_PATH.exec(path) ?? []
+    const fault: Fault = {
+      path: part ?? path,
+      code: name === 'profile' ? 'profile' : 'server',
+      message,
+    }
     if (!byPath.has(fault.path)) byPath.set(fault.path, fault)
   }
   return [...byPath.values()]
@@ -120,21 +159,28 @@ export const faultAt = (faults: readonly Fault[], path: string): Fault | undefin
   faults.find((fault) => fault.path === path)
 
 /** Faults that belong to no field of the form, which has to say them at its foot. */
-export const faultsElsewhere = (faults: readonly Fault[], lineCount: number): Fault[] => {
-  const known = new Set(['neededBy', 'poNumber', 'notes', 'lines', 'answer'])
-  const inLine = /^lines\.(\d+)\.(mark|name|stockId|quantity|length|profile)$/
+export const faultsElsewhere = (
+  faults: readonly Fault[],
+  { lines, goods }: Pick<OrderDraft, 'lines' | 'goods'>,
+): Fault[] => {
+  const known = new Set(['neededBy', 'poNumber', 'notes', 'lines', 'goods', 'answer'])
+  const inLine =
+    /^lines\.(\d+)\.(mark|name|stockId|quantity|length|profile|ends|hands|statedGirth)$/
+  const inGood = /^goods\.(\d+)\.(quantity|note|stockId)$/
   return faults.filter(({ path }) => {
     if (known.has(path)) return false
-    const index = inLine.exec(path)?.[1]
-    return index === undefined || Number(index) >= lineCount
+    const line = inLine.exec(path)?.[1]
+    if (line !== undefined) return Number(line) >= lines.length
+    const good = inGood.exec(path)?.[1]
+    return good === undefined || Number(good) >= goods.length
   })
 }
 
 const fieldOf = (draft: OrderDraft, path: string): unknown => {
-  const [, index, field] = /^lines\.(\d+)\.(\w+)$/.exec(path) ?? []
+  const [, list, index, field] = /^(lines|goods)\.(\d+)\.(\w+)$/.exec(path) ?? []
   if (index !== undefined && field !== undefined) {
-    const line = draft.lines[Number(index)]
-    return line && [line.key, new Map<string, unknown>(Object.entries(line)).get(field)]
+    const item = list === 'lines' ? draft.lines[Number(index)] : draft.goods[Number(index)]
+    return item && [item.key, new Map<string, unknown>(Object.entries(item)).get(field)]
   }
   return new Map<string, unknown>(Object.entries(draft)).get(path)
 }

@@ -1,4 +1,5 @@
 import { useState } from 'react'
+import { isLess } from '#shared/geometry/tolerance'
 import { hasErrors } from '#shared/profile/problem'
 import { ApiProblem } from '@/lib/api/api-errors'
 import type { OrderDraft } from '../draft/order-draft'
@@ -8,12 +9,22 @@ import { checkLine, type LineGround } from './check-line'
 import { draftFaults, faultsOfErrors, stillStands, type Fault } from './order-faults'
 import { dayOf } from './today'
 
-const drawingFaults = (draft: OrderDraft, ground: LineGround): Fault[] =>
-  draft.lines.flatMap((line, index) =>
-    hasErrors(checkLine(line, ground).check?.problems ?? [])
-      ? [{ path: `lines.${index}.profile`, code: 'profile' as const }]
-      : [],
-  )
+const partFaults = (draft: OrderDraft, ground: LineGround): Fault[] =>
+  draft.lines.flatMap((line, index): Fault[] => {
+    const { check, ends, stock } = checkLine(line, ground)
+    if (hasErrors(check?.problems ?? []))
+      return [{ path: `lines.${index}.profile`, code: 'profile' }]
+    const path = `lines.${index}.ends`
+    if (ends && ends.problems.length > 0) return [{ path, code: 'endsFaulty' }]
+    const blank = ends?.layout?.blankLength ?? 0
+    // A piece that is too long by itself is a fault of its length.
+    return stock &&
+      line.length !== null &&
+      isLess(stock.longestPiece, blank) &&
+      line.length <= stock.longestPiece
+      ? [{ path, code: 'blankBeyondStock', limit: stock.longestPiece }]
+      : []
+  })
 
 /** The faults of the last answer, until their fields are changed. */
 function useServerFaults(draft: OrderDraft, error: Error | null): Fault[] {
@@ -40,7 +51,7 @@ export function useOrderForm(
   const serverFaults = useServerFaults(draft, delivery.error)
   const own = [
     ...draftFaults(draft, { stocks: ground.stocks, today, ...(mayStay ? { mayStay } : {}) }),
-    ...drawingFaults(draft, ground),
+    ...partFaults(draft, ground),
   ]
   const shown = presses > 0 ? own : []
   const faults = [

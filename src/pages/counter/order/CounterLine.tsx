@@ -4,12 +4,14 @@ import type { OrderLine } from '#shared/orders/order.schema'
 import { paths } from '@/app/paths'
 import { PlanDetails } from '@/features/drawing/plan/PlanDetails'
 import { BendsLine } from '@/features/orders/components/LineBends'
+import { LineEnds } from '@/features/orders/components/LineEnds'
 import { LineFacts } from '@/features/orders/components/LineFacts'
 import { LineFigure } from '@/features/orders/components/LineFigure'
 import { LineHead } from '@/features/orders/components/LineHead'
 import { OverrideNote } from '@/features/orders/components/OverrideNote'
 import { PieceCodes } from '@/features/orders/components/PieceCodes'
 import { LineReasons } from '@/features/orders/components/RefusedLines'
+import { GirthDifference } from '@/features/orders/components/StatedGirth'
 import { StockName } from '@/features/orders/components/StockName'
 
 /** A line as it is checked at the counter: the drawing beside what it takes and what bends it. */
@@ -29,12 +31,15 @@ export function CounterLine({ line }: { readonly line: OrderLine }) {
         mark={line.mark}
         name={line.name}
         quantity={quantity}
+        hands={line.hands}
         length={line.length}
       />
       <div className="grid gap-x-10 gap-y-3 md:grid-cols-[22.5rem_minmax(0,1fr)]">
         <LineFigure profile={line.profile} stock={stock} strip={strip} name={line.name} />
         <div className="flex flex-col gap-3">
           <StockName stock={stock} />
+          <GirthDifference profile={line.profile} stated={line.statedGirth} />
+          <LineEnds ends={line.ends} />
           <LineFacts strip={strip} pieceWeight={line.pieceWeight} quantity={quantity} />
           <BendsLine
             good={bends}

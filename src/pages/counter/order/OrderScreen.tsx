@@ -7,6 +7,7 @@ import { Button } from '@/components/Button'
 import { ButtonLink } from '@/components/ButtonLink'
 import { Notice } from '@/components/Notice'
 import { useAnswerQuestion, useReleaseOrder } from '@/features/orders/api/orders.mutations'
+import { OrderGoods } from '@/features/orders/components/OrderGoods'
 import { QuestionAnswer } from '@/features/orders/components/QuestionAnswer'
 import { WithdrawDialog } from '@/features/orders/components/WithdrawDialog'
 import { isIncoming } from '@/features/orders/open-orders'
@@ -141,6 +142,7 @@ export function OrderScreen({ order }: { readonly order: Order }) {
           {order.lines.map((line) => (
             <CounterLine key={line.id} line={line} />
           ))}
+          <OrderGoods order={order} />
         </div>
         <div className="xl:col-start-2">
           <OrderPast order={order} />

@@ -12,6 +12,7 @@ import { LoadingState } from '@/components/LoadingState'
 import { useAnswerQuestion } from '@/features/orders/api/orders.mutations'
 import { orderQuery } from '@/features/orders/api/orders.queries'
 import { OrderCaution } from '@/features/orders/components/OrderCaution'
+import { OrderGoods } from '@/features/orders/components/OrderGoods'
 import { OrderHistory } from '@/features/orders/components/OrderHistory'
 import { OrderLineCard } from '@/features/orders/components/OrderLineCard'
 import { OrderStateWord } from '@/features/orders/components/OrderStateWord'
@@ -94,6 +95,7 @@ function OrderScreen({ order }: { readonly order: Order }) {
             piecePath={(code) => paths.piece('roof', code)}
           />
         ))}
+        <OrderGoods order={order} />
         <section aria-labelledby="history" className="max-w-3xl border-t-2 border-ink pt-4">
           <h2 id="history" className="mb-2 font-bold">
             {t('history')}

@@ -1,0 +1,77 @@
+import { closeEnds, type ClosedEnds } from '#shared/ends/close-ends'
+import type { End, PieceEnds, Side } from '#shared/ends/end.schema'
+import type { EndOfPiece } from '#shared/ends/folded-end'
+import { mirrorEnds } from '#shared/ends/hands'
+import { matchingLay } from '#shared/ends/run-frame'
+import { isEqual } from '#shared/geometry/tolerance'
+import type { Profile } from '#shared/profile/profile.schema'
+import type { Sheet } from '#shared/stock/stock.schema'
+import { completeEnds, type DraftEnds, type DraftHands } from './draft-end'
+import { otherSide } from './end-edits'
+import { otherHand } from './hand-edits'
+
+/** An order line as far as its ends may meet another's. */
+export interface EndedLine {
+  readonly key: string
+  readonly mark: string
+  readonly name: string
+  /** As the shop will make it. */
+  readonly profile: Profile
+  readonly sheet: Sheet
+  readonly ends: DraftEnds | null
+  readonly hands: DraftHands | null
+}
+
+/** An end that may lie in the same corner: a right end meets a left one. */
+export interface Neighbor {
+  readonly id: string
+  readonly line: EndedLine
+  readonly side: Side
+  /** The hand of the piece, where the line has hands. */
+  readonly hand: Side | null
+  readonly end: End
+}
+
+/** The pieces of a line: as drawn, and mirrored where the other hand is made too. */
+function piecesOf({ ends, hands }: EndedLine): { hand: Side | null; ends: PieceEnds }[] {
+  const drawn = ends && completeEnds(ends)
+  if (!drawn) return []
+  const mirrored = otherHand(hands)
+  return [
+    { hand: hands?.drawn ?? null, ends: drawn },
+    ...(mirrored === null ? [] : [{ hand: mirrored, ends: mirrorEnds(drawn) }]),
+  ]
+}
+
+/** Every miter that can meet an end of this side, own line included. */
+export const neighborsOf = (side: Side, lines: readonly EndedLine[]): Neighbor[] =>
+  lines.flatMap((line) =>
+    piecesOf(line).flatMap(({ hand, ends }) => {
+      const met = otherSide(side)
+      const end = ends[met]
+      return end.kind === 'miter'
+        ? [{ id: `${line.key} ${hand ?? 'none'}`, line, side: met, hand, end }]
+        : []
+    }),
+  )
+
+/** How the two close in their corner. */
+export const closingWith = (own: EndOfPiece, { line, side, end }: Neighbor): ClosedEnds =>
+  closeEnds(own, { profile: line.profile, sheet: line.sheet, side, end })
+
+const sameDrawing = (a: Profile, b: Profile): boolean =>
+  a.legs.length === b.legs.length &&
+  a.legs.every((leg, index) => isEqual(leg, b.legs[index] ?? NaN)) &&
+  a.bends.every(({ turn }, index) => isEqual(turn, b.bends[index]?.turn ?? NaN))
+
+/**
+ * The lay at which a neighbor of the same drawing would be the mirror image in the corner, degrees;
+ * null where another lay is no cure.
+ */
+export function layThatCloses(own: EndOfPiece, neighbor: Neighbor): number | null {
+  const { end } = own
+  if (end.kind !== 'miter' || neighbor.end.kind !== 'miter' || !('corner' in end.plane)) return null
+  if (!sameDrawing(own.profile, neighbor.line.profile)) return null
+  const lay = matchingLay(end.plane.corner, own.side, end.lay)
+  return isEqual(lay, neighbor.end.lay) ? null : lay
+}
