@@ -14,7 +14,7 @@ const plain: Print = (value) => String(value ?? '?')
 const TEXTS: Record<EndProblemCode, readonly [print: Print, text: string]> = {
   profileFaulty: [plain, 'The profile has no strip to cut ends on. Put the profile right first.'],
   noSuchLeg: [plain, 'Leg {found} is named and the profile has {limit}. Name one of its legs.'],
-  legNamedTwice: [plain, 'Leg {leg} is named {found} times. Name each leg once.'],
+  legNamedTwice: [plain, 'Leg {leg} is named more than once. Name each leg once.'],
   notFinite: [plain, '{part} holds a value that is not a number above zero. Send a number.'],
   planeAlongPiece: [
     angle,
