@@ -107,7 +107,9 @@ describe('A line with dressed ends', () => {
       { length: 2, ends: { left: plumbEnd(-60), right: plumbEnd(60), lowEnd: null } },
       'lines.0.ends.right',
       'endsMeet',
-      expect.stringMatching(/^Both cuts together take .* Lengthen the piece or cut less\.$/) as unknown,
+      expect.stringMatching(
+        /^Both cuts together take .* Lengthen the piece or cut less\.$/,
+      ) as unknown,
     ],
   ])('is refused for %s, with what cures it', async (_what, given, path, code, message) => {
     const answer = await trySubmit(given)
