@@ -86,9 +86,10 @@ export type EndProblemCode = (typeof END_PROBLEM_CODES)[number]
  * - `profileFaulty`: the profile has no strip to lay out; `profileProblems` says why. None.
  * - `noSuchLeg`, `legNamedTwice`: the leg's number; the number of legs, of times it may stand (1).
  * - `notFinite`: the value, which is no number; null. Of a length also one that is not above its
- *   limit, 0.
+ *   limit, 0; of a lay one beyond its limit, 360.
  * - `planeAlongPiece`: degrees between the plane and the piece; the least there may be.
- * - `cornerTurnsBack`: degrees that the run turns in the corner; the most.
+ * - `cornerTurnsBack`: degrees that the run turns in the corner, of a turn in plan of 180
+ *   and more that turn; the most.
  * - `lapLongerThanPiece`, `tabLongerThanPiece`: inches; the piece's length.
  * - `endsMeet`: inches that both cuts together take off the blank at one place; the blank's length.
  */

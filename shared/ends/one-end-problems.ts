@@ -1,6 +1,6 @@
 import { angleToPiece, planeNormal } from '#shared/ends/cut-plane'
 import type { EndProblem, EndProblemCode } from '#shared/ends/end-layout'
-import type { CutPlane, End, Side } from '#shared/ends/end.schema'
+import type { Corner, CutPlane, End, Side } from '#shared/ends/end.schema'
 import { cornerFrames } from '#shared/ends/run-frame'
 import { isAtMost, isLess } from '#shared/geometry/tolerance'
 import { degrees } from '#shared/geometry/vector'
@@ -39,11 +39,17 @@ const runProblem = (slope: Degrees): FoundProblem[] =>
     ? []
     : [foundProblem('planeAlongPiece', { found: 90 - Math.abs(slope), limit: LEAST_CUT_ANGLE })]
 
-const cornerProblems = ({ corner }: Extract<CutPlane, { corner: unknown }>): FoundProblem[] => {
+/** Of a corner whose turn seen from above is half a turn or more, that turn; else the run's own. */
+const turnOf = (corner: Corner): Degrees => {
+  if (Math.abs(corner.plan) >= 180) return Math.abs(corner.plan)
+  const { into, outOf } = cornerFrames(corner)
+  return degrees(Math.acos(Math.max(-1, Math.min(1, dot3(into, outOf)))))
+}
+
+const cornerProblems = (corner: Corner): FoundProblem[] => {
   const runs = [...runProblem(corner.slopeIn), ...runProblem(corner.slopeOut)]
   if (runs.length > 0) return runs.slice(0, 1)
-  const { into, outOf } = cornerFrames(corner)
-  const turn = degrees(Math.acos(Math.max(-1, Math.min(1, dot3(into, outOf)))))
+  const turn = turnOf(corner)
   return isAtMost(turn, MOST_TURN)
     ? []
     : [foundProblem('cornerTurnsBack', { found: turn, limit: MOST_TURN })]
@@ -52,7 +58,7 @@ const cornerProblems = ({ corner }: Extract<CutPlane, { corner: unknown }>): Fou
 const planeProblems = (plane: CutPlane, side: Side, leg: number | null): FoundProblem[] => {
   const broken = numbersOf(plane).find((value) => !Number.isFinite(value))
   if (broken !== undefined) return [foundProblem('notFinite', { leg, found: broken })]
-  if ('corner' in plane) return cornerProblems(plane).map((found) => ({ ...found, leg }))
+  if ('corner' in plane) return cornerProblems(plane.corner).map((found) => ({ ...found, leg }))
   if ('plumb' in plane && Math.abs(plane.plumb) >= 90) {
     return runProblem(plane.plumb).map((found) => ({ ...found, leg }))
   }
@@ -87,6 +93,12 @@ const lengthProblems = (
     : [foundProblem(code, { leg, found: length, limit: pieceLength })]
 }
 
+/** A section is never turned more than once round. */
+const MOST_LAY: Degrees = 360
+
+const layProblems = (lay: Degrees): FoundProblem[] =>
+  Math.abs(lay) <= MOST_LAY ? [] : [foundProblem('notFinite', { found: lay, limit: MOST_LAY })]
+
 /** What is wrong with one end by itself, of a piece of so many legs and inches. */
 export const oneEndProblems = (
   end: End,
@@ -106,7 +118,7 @@ export const oneEndProblems = (
     : []),
   ...(end.kind === 'miter'
     ? [
-        ...(Number.isFinite(end.lay) ? [] : [foundProblem('notFinite', { found: end.lay })]),
+        ...layProblems(end.lay),
         ...planeProblems(end.plane, side, null),
         ...legProblems(
           end.legs.map(({ leg }) => leg),
