@@ -5,6 +5,7 @@ import { openBenchShop } from './bench-shop'
 import { tableLines } from './bench-table'
 import { benchDrawing } from './drawing.bench'
 import { benchExplain } from './explain.bench'
+import { benchLabels, labelsTitle } from './labels.bench'
 import { benchMoves, movesTitle } from './moves.bench'
 import { benchOrders, ordersTitle } from './orders.bench'
 import { benchPlan } from './plan.bench'
@@ -31,6 +32,7 @@ const kernel = [
   { title: 'Bend plan, in this process', rows: benchPlan() },
   { title: 'Why not and what would cure it, in this process', rows: benchExplain() },
   { title: 'Drawing, in this process', rows: benchDrawing() },
+  { title: labelsTitle, rows: await benchLabels() },
 ]
 
 const shop = await openBenchShop()
