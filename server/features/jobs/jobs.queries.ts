@@ -83,6 +83,12 @@ export const createJobsQueries = (db: Db) => {
       const row = await jobs(scope).where('j.id', id).first()
       return row && toJob(row)
     },
+
+    /** As `findJob`, and until the transaction ends nobody gives the job another pitch. */
+    async holdJob(id: string, scope: string | null): Promise<Job | undefined> {
+      const row = await jobs(scope).where('j.id', id).forShare('j').first()
+      return row && toJob(row)
+    },
   }
 }
 

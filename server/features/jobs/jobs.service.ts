@@ -5,6 +5,7 @@ import type { SignedIn } from '#server/http/define-route'
 import { changedMeanwhile, notFound } from '#server/http/errors'
 import type { Announcement } from '#server/live/announce'
 import type { OwningCompany } from '#server/features/jobs/owning-company'
+import type { RedrawOrders } from '#server/features/orders/redraw-orders'
 import type { BodyOf, QueryOf } from '#shared/http/endpoint'
 import type { createJob, Job, listJobs, updateJob } from '#shared/jobs/jobs.contract'
 
@@ -12,10 +13,12 @@ export interface JobsDeps {
   readonly queries: JobsQueries
   readonly store: JobsStore
   readonly owningCompany: OwningCompany
+  readonly redrawOrders: RedrawOrders
   readonly announce: (announcement: Announcement) => Promise<void>
 }
 
-export const createJobsService = ({ queries, store, owningCompany, announce }: JobsDeps) => {
+export const createJobsService = (deps: JobsDeps) => {
+  const { queries, store, owningCompany, redrawOrders, announce } = deps
   const getJob = async (id: string, person: SignedIn): Promise<Job> => {
     const job = await queries.findJob(id, companyScope(person))
     if (!job) throw notFound('job')
@@ -44,9 +47,13 @@ export const createJobsService = ({ queries, store, owningCompany, announce }: J
       return getJob(id, person)
     },
 
-    /** @throws changed-meanwhile with the job as it is now */
+    /**
+     * Another pitch is drawn on every order of the job that can still be changed.
+     *
+     * @throws changed-meanwhile with the job as it is now
+     */
     async updateJob(id: string, body: BodyOf<typeof updateJob>, person: SignedIn): Promise<Job> {
-      const { company } = await getJob(id, person)
+      const { company, pitchRise: from } = await getJob(id, person)
       const changed = await store.updateJob(id, body.version, {
         ...(body.name !== undefined && { name: body.name }),
         ...(body.address !== undefined && { address: body.address }),
@@ -55,6 +62,10 @@ export const createJobsService = ({ queries, store, owningCompany, announce }: J
       const job = await getJob(id, person)
       if (!changed) throw changedMeanwhile(job)
       await tell('jobs', id, company.id)
+      const to = job.pitchRise
+      if (to !== from) {
+        await redrawOrders({ jobId: id, companyId: company.id, to, personId: person.id })
+      }
       // Orders show the name of their job.
       if (body.name !== undefined) await tell('orders', null, company.id)
       return job

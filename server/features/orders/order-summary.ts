@@ -65,7 +65,7 @@ export function selectOrderSummaries(db: Db, scope: string | null) {
   return scope === null ? query : query.where('o.company_id', scope)
 }
 
-/** The job's pitch is shown as it was when the order was last submitted: the drawing follows it. */
+/** The job's pitch is shown as the order is drawn for it: one that was released keeps its own. */
 export const toOrderSummary = (row: OrderSummaryRow): OrderSummary => ({
   id: row.id,
   number: row.number,

@@ -105,7 +105,7 @@ export const createOrdersService = (deps: OrdersDeps) => {
 
     /** @throws not-found for the job, invalid-input, profile-problem */
     async submitOrder(body: BodyOf<typeof submitOrder>, person: SignedIn): Promise<Order> {
-      const job = await jobs.findJob(body.jobId, companyScope(person))
+      const job = await jobs.holdJob(body.jobId, companyScope(person))
       if (!job) throw notFound('job')
       checkDay(body.neededBy)
       const id = await store.createOrder({

@@ -3,6 +3,7 @@ import { ORDER_EVENTS, type OrderEventInsert } from '#server/db/tables/order-eve
 import { ORDER_LINES } from '#server/db/tables/order-lines'
 import { ORDERS, type OrderInsert, type OrderUpdate } from '#server/db/tables/orders'
 import type { OrderLineInput } from '#shared/orders/order.schema'
+import type { Profile } from '#shared/profile/profile.schema'
 
 export const createOrdersStore = (db: Db) => ({
   async createOrder(order: OrderInsert): Promise<string> {
@@ -46,6 +47,36 @@ export const createOrdersStore = (db: Db) => ({
         stated_girth: line.statedGirth,
       })),
     )
+  },
+
+  /**
+   * The orders of a job that can still be changed, each locked until the transaction ends, in one
+   * order everywhere. Those that were released or withdrawn while it waited drop out.
+   */
+  async lockOpenOrders(jobId: string): Promise<{ id: string; pitchRise: number }[]> {
+    const rows = await db(ORDERS)
+      .where({ job_id: jobId })
+      .whereNull('released_at')
+      .whereNull('withdrawn_at')
+      .orderBy('id')
+      .forNoKeyUpdate()
+      .select('id', 'pitch_rise')
+    return rows.map(({ id, pitch_rise: pitchRise }) => ({ id, pitchRise }))
+  },
+
+  async redrawLine(id: string, profile: Profile): Promise<void> {
+    await db(ORDER_LINES)
+      .where({ id })
+      .update({ profile: JSON.stringify(profile) })
+  },
+
+  /** The pitch that a locked order is drawn for, and its next version where a person must look. */
+  async followPitch(
+    id: string,
+    { pitchRise, nextVersion }: { readonly pitchRise: number; readonly nextVersion: boolean },
+  ): Promise<void> {
+    await db(ORDERS).where({ id }).update({ pitch_rise: pitchRise })
+    if (nextVersion) await db(ORDERS).where({ id }).increment('version')
   },
 
   async addEvent(event: OrderEventInsert): Promise<void> {
