@@ -10,7 +10,7 @@ import { Button } from '@/components/Button'
 import { Tabs } from '@/components/Tabs'
 import type { EndsCheck } from '../model/check-ends'
 import type { Run } from '../model/corner-presets'
-import { completeEnd, type DraftEnd, type DraftEnds, type DraftHands } from '../model/draft-end'
+import type { DraftEnd, DraftEnds, DraftHands } from '../model/draft-end'
 import {
   BOTH_SQUARE,
   copiedMirrored,
@@ -29,11 +29,11 @@ import { EndForm } from './EndForm'
 import { EndPictures } from './EndPictures'
 import { HandsFields } from './HandsFields'
 import { LayFields } from './LayFields'
-import { MeetsHere } from './MeetsHere'
 import { RunFields } from './RunFields'
 
 interface Props {
   readonly lineKey: string
+  readonly mark: string
   /** As the shop will make it. */
   readonly profile: Profile
   readonly stock: Stock
@@ -122,7 +122,6 @@ function OneEnd({ ends, side, run, onWrite, ...props }: EndProps) {
   const lay = layOf(ends)
   const outer = outerEdge(profile, lay ?? usualLay(profile, run))
   const dressed = ends[side]
-  const complete = completeEnd(dressed)
   const mirrored = copiedMirrored(ends, side)
 
   function change(end: DraftEnd) {
@@ -151,6 +150,8 @@ function OneEnd({ ends, side, run, onWrite, ...props }: EndProps) {
       />
       <div className="flex min-w-0 flex-col gap-4">
         <EndPictures
+          lineKey={lineKey}
+          mark={props.mark}
           profile={profile}
           stock={stock}
           strip={strip}
@@ -158,15 +159,9 @@ function OneEnd({ ends, side, run, onWrite, ...props }: EndProps) {
           check={check}
           side={side}
           hands={hands}
+          lines={lines}
+          disabled={disabled}
         />
-        {complete?.kind === 'miter' && (
-          <MeetsHere
-            own={{ profile, sheet: stock.sheet, end: complete, side }}
-            ownKey={lineKey}
-            lines={lines}
-            disabled={disabled}
-          />
-        )}
         {!disabled && endsToKeep({ ...BOTH_SQUARE, [side]: dressed }) && (
           <Button
             className="self-start"

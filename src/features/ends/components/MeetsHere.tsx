@@ -1,37 +1,27 @@
-import { useMemo, useState } from 'react'
 import { useTranslation } from 'react-i18next'
+import type { ClosedEnds } from '#shared/ends/close-ends'
 import type { LegClosing } from '#shared/ends/closing-edges'
 import type { EndOfPiece } from '#shared/ends/folded-end'
 import { printAngle } from '#shared/units/angle'
 import { Icon } from '@/components/Icon'
 import { Select } from '@/components/Select'
 import { useUnits } from '@/features/people/useUnits'
-import {
-  closingWith,
-  layThatCloses,
-  neighborsOf,
-  type EndedLine,
-  type Neighbor,
-} from '../model/neighbors'
+import { layThatCloses, type Neighbor } from '../model/neighbors'
 import { useEndWords } from '../useEndWords'
+import type { Met } from '../useNeighbor'
 
 interface Props {
   readonly own: EndOfPiece
   readonly ownKey: string
-  readonly lines: readonly EndedLine[]
+  readonly meeting: Met
   readonly disabled: boolean
 }
 
 /** Which end meets this one in its corner, and on which legs the two close. */
-export function MeetsHere({ own, ownKey, lines, disabled }: Props) {
+export function MeetsHere({ own, ownKey, meeting, disabled }: Props) {
   const { t } = useTranslation('ends')
   const words = useEndWords()
-  const neighbors = useMemo(() => neighborsOf(own.side, lines), [own.side, lines])
-  const [chosen, setChosen] = useState<string | null>(null)
-  // Until one is chosen: the first that lies in the same corner.
-  const met =
-    neighbors.find(({ id }) => id === chosen) ??
-    (chosen === null ? neighbors.find((each) => closingWith(own, each).ok) : undefined)
+  const { neighbors, met, closed, choose } = meeting
 
   const nameOf = ({ line, side, hand }: Neighbor): string =>
     t('meets.option', {
@@ -51,9 +41,9 @@ export function MeetsHere({ own, ownKey, lines, disabled }: Props) {
         value={met?.id ?? ''}
         disabled={disabled}
         options={neighbors.map((neighbor) => ({ value: neighbor.id, label: nameOf(neighbor) }))}
-        onChange={(event) => setChosen(event.target.value)}
+        onChange={(event) => choose(event.target.value)}
       />
-      {met && <Closing own={own} neighbor={met} name={met.line.mark} />}
+      {met && closed && <Closing own={own} neighbor={met} closed={closed} />}
     </div>
   )
 }
@@ -61,12 +51,12 @@ export function MeetsHere({ own, ownKey, lines, disabled }: Props) {
 interface ClosingProps {
   readonly own: EndOfPiece
   readonly neighbor: Neighbor
-  readonly name: string
+  readonly closed: ClosedEnds
 }
 
-function Closing({ own, neighbor, name }: ClosingProps) {
+function Closing({ own, neighbor, closed }: ClosingProps) {
   const { t } = useTranslation('ends')
-  const closed = closingWith(own, neighbor)
+  const name = neighbor.line.mark
   if (!closed.ok) {
     return (
       <p role="status" className="font-semibold text-chalk">
@@ -82,10 +72,10 @@ function Closing({ own, neighbor, name }: ClosingProps) {
         {closed.closes ? t('meets.closes') : t('meets.open')}
       </p>
       {!closed.closes && (
-        <>
+        <div className="grid gap-x-6 gap-y-2 sm:grid-cols-2">
           <Legs title={t('meets.thisPiece')} closings={closed.a} />
           <Legs title={t('meets.otherPiece', { name })} closings={closed.b} />
-        </>
+        </div>
       )}
       {lay !== null && <p>{t('meets.layCloses', { name, lay: printAngle(lay) })}</p>}
     </div>
@@ -102,7 +92,7 @@ function Legs({ title, closings }: LegsProps) {
   const { size } = useUnits()
   return (
     <div>
-      <h6 className="text-small text-scribe">{title}</h6>
+      <p className="text-small text-scribe">{title}</p>
       <ul>
         {closings.map(({ leg, nearest, closesOn, gap }) => (
           <li key={leg} className={closesOn === null ? 'text-chalk' : ''}>

@@ -147,6 +147,7 @@ export function DraftLineCard({
           {panel === 'ends' && drawnIn && check?.strip && (
             <EndsPanel
               lineKey={line.key}
+              mark={line.mark}
               profile={checked.profile}
               stock={drawnIn}
               strip={check.strip}
