@@ -1,73 +1,293 @@
-import type { Bounds } from '#shared/geometry/bounds'
 import type { Segment } from '#shared/geometry/segment'
-import { boxOfSegment, distanceBetween, distanceToBox } from '#shared/geometry/segment'
 import type { Vector } from '#shared/geometry/vector'
-import { cross, dot, lengthOf, scale, subtract } from '#shared/geometry/vector'
+import { lineNearBox, linesNear } from './flat-geometry'
+import { Raster } from './raster'
 
-/** Metal as drawn: the chords of its middle line and how far its bands reach to either side. */
+/**
+ * What labels keep clear of: the chords of drawn lines and how far these reach to either side. The
+ * chords are sorted into square cells, so that a question looks only at those nearby.
+ */
 export interface Metal {
-  readonly chords: readonly Segment[]
   readonly half: number
+  /** x1, y1, x2, y2 of each chord in turn. */
+  readonly chords: Float64Array
+  readonly cells: Cells
+  /** Undefined where there are no lines. */
+  readonly raster: Raster | undefined
 }
 
-/** True when the two boxes are at least `reach` apart along an axis. */
-const isApart = (a: Bounds, { from, to }: Segment, reach: number): boolean =>
-  Math.min(from.x, to.x) - reach >= a.maxX ||
-  Math.max(from.x, to.x) + reach <= a.minX ||
-  Math.min(from.y, to.y) - reach >= a.maxY ||
-  Math.max(from.y, to.y) + reach <= a.minY
+interface Cells {
+  readonly minX: number
+  readonly minY: number
+  readonly size: number
+  readonly columns: number
+  readonly rows: number
+  /** Row by row: where a cell's chords begin in `chords`; one more for the end of the last. */
+  readonly begins: Int32Array
+  /** Chords by their number. */
+  readonly chords: Int32Array
+}
+
+/** Cells along the longer side of the drawing. */
+const CELLS = 16
+
+/** Calls `visit` with each cell that the box of a chord meets, and the chord's number. */
+const eachCell = (
+  chords: Float64Array,
+  cells: Pick<Cells, 'minX' | 'minY' | 'size' | 'columns'>,
+  visit: (cell: number, chord: number) => void,
+): void => {
+  const { minX, minY, size, columns } = cells
+  for (let chord = 0; chord * 4 < chords.length; chord += 1) {
+    const x1 = chords[chord * 4] ?? 0
+    const y1 = chords[chord * 4 + 1] ?? 0
+    const x2 = chords[chord * 4 + 2] ?? 0
+    const y2 = chords[chord * 4 + 3] ?? 0
+    const left = Math.floor((Math.min(x1, x2) - minX) / size)
+    const right = Math.floor((Math.max(x1, x2) - minX) / size)
+    const bottom = Math.floor((Math.max(y1, y2) - minY) / size)
+    for (let row = Math.floor((Math.min(y1, y2) - minY) / size); row <= bottom; row += 1) {
+      for (let column = left; column <= right; column += 1) visit(row * columns + column, chord)
+    }
+  }
+}
+
+const sortIntoCells = (chords: Float64Array): Cells => {
+  let minX = Infinity
+  let minY = Infinity
+  let maxX = -Infinity
+  let maxY = -Infinity
+  for (let index = 0; index < chords.length; index += 2) {
+    const x = chords[index] ?? 0
+    const y = chords[index + 1] ?? 0
+    if (x < minX) minX = x
+    if (x > maxX) maxX = x
+    if (y < minY) minY = y
+    if (y > maxY) maxY = y
+  }
+  const size = Math.max(maxX - minX, maxY - minY, 1e-6) / CELLS
+  const columns = Math.floor((maxX - minX) / size) + 1
+  const rows = Math.floor((maxY - minY) / size) + 1
+  const grid = { minX, minY, size, columns }
+  const begins = new Int32Array(columns * rows + 1)
+  eachCell(chords, grid, (cell) => {
+    begins[cell + 1] = (begins[cell + 1] ?? 0) + 1
+  })
+  for (let cell = 1; cell < begins.length; cell += 1) {
+    begins[cell] = (begins[cell] ?? 0) + (begins[cell - 1] ?? 0)
+  }
+  const sorted = new Int32Array(begins.at(-1) ?? 0)
+  const filled = begins.slice()
+  eachCell(chords, grid, (cell, chord) => {
+    const at = filled[cell] ?? 0
+    sorted[at] = chord
+    filled[cell] = at + 1
+  })
+  return { ...grid, rows, begins, chords: sorted }
+}
+
+const NO_CELLS: Cells = {
+  minX: 0,
+  minY: 0,
+  size: 1,
+  columns: 0,
+  rows: 0,
+  begins: new Int32Array(1),
+  chords: new Int32Array(0),
+}
+
+const metalOfChords = (chords: Float64Array, half: number): Metal => ({
+  half,
+  chords,
+  cells: chords.length === 0 ? NO_CELLS : sortIntoCells(chords),
+  raster: chords.length === 0 ? undefined : new Raster(chords),
+})
+
+/** Lines to keep clear of, drawn `half` pixels to either side. Without lines everything is clear. */
+export const metalOf = (lines: readonly Segment[], half: number): Metal =>
+  metalOfChords(
+    Float64Array.from(lines.flatMap(({ from, to }) => [from.x, from.y, to.x, to.y])),
+    half,
+  )
+
+/** The same for one open chain. */
+export const metalOfChain = (points: readonly Vector[], half: number): Metal => {
+  const chords = new Float64Array(Math.max(0, points.length - 1) * 4)
+  for (let index = 1; index < points.length; index += 1) {
+    const from = points[index - 1]
+    const to = points[index]
+    if (from === undefined || to === undefined) break
+    chords.set([from.x, from.y, to.x, to.y], (index - 1) * 4)
+  }
+  return metalOfChords(chords, half)
+}
 
 /** True when the box keeps `gap` away from the metal. */
-export const isBoxClear = (metal: Metal, box: Bounds, gap: number): boolean => {
-  const reach = metal.half + gap
-  return metal.chords.every(
-    (chord) => isApart(box, chord, reach) || distanceToBox(chord, box) >= reach,
-  )
+export const isBoxClear = (
+  { half, chords, cells, raster }: Metal,
+  minX: number,
+  minY: number,
+  maxX: number,
+  maxY: number,
+  gap: number,
+): boolean => {
+  const reach = half + gap
+  if (raster === undefined) return true
+  if (raster.isSurelyClear(minX - reach, minY - reach, maxX + reach, maxY + reach)) return true
+  if (
+    raster.isSurelyMet(minX - reach, minY, maxX + reach, maxY) ||
+    raster.isSurelyMet(minX, minY - reach, maxX, maxY + reach)
+  ) {
+    return false
+  }
+  const left = Math.max(0, Math.floor((minX - reach - cells.minX) / cells.size))
+  const right = Math.min(cells.columns - 1, Math.floor((maxX + reach - cells.minX) / cells.size))
+  const top = Math.max(0, Math.floor((minY - reach - cells.minY) / cells.size))
+  const bottom = Math.min(cells.rows - 1, Math.floor((maxY + reach - cells.minY) / cells.size))
+  for (let row = top; row <= bottom; row += 1) {
+    const first = cells.begins[row * cells.columns + left] ?? 0
+    const last = cells.begins[row * cells.columns + right + 1] ?? 0
+    for (let index = first; index < last; index += 1) {
+      const at = (cells.chords[index] ?? 0) * 4
+      const x1 = chords[at] ?? 0
+      const x2 = chords[at + 2] ?? 0
+      if ((x1 <= minX - reach && x2 <= minX - reach) || (x1 >= maxX + reach && x2 >= maxX + reach))
+        continue
+      const y1 = chords[at + 1] ?? 0
+      const y2 = chords[at + 3] ?? 0
+      if ((y1 <= minY - reach && y2 <= minY - reach) || (y1 >= maxY + reach && y2 >= maxY + reach))
+        continue
+      if (lineNearBox(x1, y1, x2, y2, minX, minY, maxX, maxY, reach)) return false
+    }
+  }
+  return true
 }
 
-/** True when the line keeps `gap` away from the metal. */
-export const isLineClear = (metal: Metal, line: Segment, gap: number): boolean => {
-  const reach = metal.half + gap
-  const box = boxOfSegment(line)
-  return metal.chords.every(
-    (chord) => isApart(box, chord, reach) || distanceBetween(chord, line) >= reach,
-  )
+/** True when the line from (ax, ay) to (bx, by) keeps `gap` away from the metal. */
+export const isLineClear = (
+  { half, chords, cells, raster }: Metal,
+  ax: number,
+  ay: number,
+  bx: number,
+  by: number,
+  gap: number,
+): boolean => {
+  const reach = half + gap
+  const minX = Math.min(ax, bx) - reach
+  const maxX = Math.max(ax, bx) + reach
+  const minY = Math.min(ay, by) - reach
+  const maxY = Math.max(ay, by) + reach
+  if (raster === undefined || raster.isSurelyClear(minX, minY, maxX, maxY)) return true
+  const left = Math.max(0, Math.floor((minX - cells.minX) / cells.size))
+  const right = Math.min(cells.columns - 1, Math.floor((maxX - cells.minX) / cells.size))
+  const top = Math.max(0, Math.floor((minY - cells.minY) / cells.size))
+  const bottom = Math.min(cells.rows - 1, Math.floor((maxY - cells.minY) / cells.size))
+  for (let row = top; row <= bottom; row += 1) {
+    const first = cells.begins[row * cells.columns + left] ?? 0
+    const last = cells.begins[row * cells.columns + right + 1] ?? 0
+    for (let index = first; index < last; index += 1) {
+      const at = (cells.chords[index] ?? 0) * 4
+      const x1 = chords[at] ?? 0
+      const x2 = chords[at + 2] ?? 0
+      if ((x1 <= minX && x2 <= minX) || (x1 >= maxX && x2 >= maxX)) continue
+      const y1 = chords[at + 1] ?? 0
+      const y2 = chords[at + 3] ?? 0
+      if ((y1 <= minY && y2 <= minY) || (y1 >= maxY && y2 >= maxY)) continue
+      if (linesNear(ax, ay, bx, by, x1, y1, x2, y2, reach)) return false
+    }
+  }
+  return true
 }
 
-/** Where a ray (unit direction) first comes within `reach` of a point. */
-const meetCircle = (from: Vector, along: Vector, center: Vector, reach: number): number => {
-  const offset = subtract(from, center)
-  const b = dot(offset, along)
-  const c = dot(offset, offset) - reach * reach
+/** Where a ray from (x, y) along the unit (ux, uy) first comes within `reach` of (cx, cy). */
+const meetCircle = (
+  x: number,
+  y: number,
+  ux: number,
+  uy: number,
+  cx: number,
+  cy: number,
+  reach: number,
+): number => {
+  const dx = x - cx
+  const dy = y - cy
+  const b = dx * ux + dy * uy
+  const c = dx * dx + dy * dy - reach * reach
   if (c <= 0) return 0
   const root = b * b - c
-  if (root < 0 || b > 0) return Infinity
-  return -b - Math.sqrt(root)
+  return root < 0 || b > 0 ? Infinity : -b - Math.sqrt(root)
 }
 
-const meetChord = (from: Vector, along: Vector, chord: Segment, reach: number): number => {
+/** Where the ray first comes within `reach` of a segment. */
+const meetChord = (
+  x: number,
+  y: number,
+  ux: number,
+  uy: number,
+  x1: number,
+  y1: number,
+  x2: number,
+  y2: number,
+  reach: number,
+): number => {
   const ends = Math.min(
-    meetCircle(from, along, chord.from, reach),
-    meetCircle(from, along, chord.to, reach),
+    meetCircle(x, y, ux, uy, x1, y1, reach),
+    meetCircle(x, y, ux, uy, x2, y2, reach),
   )
-  const d = subtract(chord.to, chord.from)
-  const length = lengthOf(d)
+  const length = Math.sqrt((x2 - x1) * (x2 - x1) + (y2 - y1) * (y2 - y1))
   if (length === 0) return ends
-  const unit = scale(d, 1 / length)
-  const offset = subtract(from, chord.from)
-  const aside = cross(unit, offset)
-  const inside = dot(unit, offset)
+  const cx = (x2 - x1) / length
+  const cy = (y2 - y1) / length
+  const aside = cx * (y - y1) - cy * (x - x1)
+  const inside = cx * (x - x1) + cy * (y - y1)
   if (Math.abs(aside) <= reach) return inside >= 0 && inside <= length ? 0 : ends
-  const closing = cross(unit, along)
+  const closing = cx * uy - cy * ux
   if (closing === 0) return ends
   const t = (Math.sign(aside) * reach - aside) / closing
-  const at = inside + t * dot(unit, along)
+  const at = inside + t * (cx * ux + cy * uy)
   return t >= 0 && at >= 0 && at <= length ? Math.min(ends, t) : ends
 }
 
-/** How far a ray (unit direction) runs before it is `gap` from the metal; Infinity if it never is. */
-export const runToMetal = (metal: Metal, from: Vector, along: Vector, gap: number): number =>
-  Math.min(
-    Infinity,
-    ...metal.chords.map((chord) => meetChord(from, along, chord, metal.half + gap)),
-  )
+/**
+ * How far a ray from (x, y) along the unit (ux, uy) runs before it is `gap` from the metal;
+ * Infinity if it never is.
+ */
+export const runToMetal = (
+  { half, chords }: Metal,
+  x: number,
+  y: number,
+  ux: number,
+  uy: number,
+  gap: number,
+): number => {
+  const reach = half + gap
+  let run = Infinity
+  for (let at = 0; at < chords.length; at += 4) {
+    const x1 = chords[at] ?? 0
+    const y1 = chords[at + 1] ?? 0
+    const x2 = chords[at + 2] ?? 0
+    const y2 = chords[at + 3] ?? 0
+    // Most chords lie to one side of the ray, or behind it.
+    const a = ux * (y1 - y) - uy * (x1 - x)
+    const b = ux * (y2 - y) - uy * (x2 - x)
+    if ((a > reach && b > reach) || (a < -reach && b < -reach)) continue
+    if (ux * (x1 - x) + uy * (y1 - y) < -reach && ux * (x2 - x) + uy * (y2 - y) < -reach) continue
+    run = Math.min(run, meetChord(x, y, ux, uy, x1, y1, x2, y2, reach))
+  }
+  return run
+}
+
+/** How far the metal's middle reaches beyond (x, y) along the unit (ux, uy); 0 if it does not. */
+export const reachOfMetal = (
+  { chords }: Metal,
+  x: number,
+  y: number,
+  ux: number,
+  uy: number,
+): number => {
+  let reach = 0
+  for (let at = 0; at < chords.length; at += 2) {
+    reach = Math.max(reach, ((chords[at] ?? 0) - x) * ux + ((chords[at + 1] ?? 0) - y) * uy)
+  }
+  return reach
+}

@@ -1,12 +1,10 @@
-import { contains } from '#shared/geometry/bounds'
-import type { Segment } from '#shared/geometry/segment'
-import { segment } from '#shared/geometry/segment'
 import type { Vector } from '#shared/geometry/vector'
-import { add, between, distance, dot, leftOf, scale, subtract } from '#shared/geometry/vector'
-import { runToMetal } from './clearance'
-import type { LabelSpace, PlacedLabel } from './label-space'
-import { isFree, isLineFree, reachOfText, ringCandidates } from './label-space'
-import { textBox } from './text-box'
+import { between } from '#shared/geometry/vector'
+import { reachOfMetal, runToMetal } from './clearance'
+import type { LabelSpace, Line, PlacedLabel } from './label-space'
+import { fanOf, isInFrame, isLineFree, reachOfText, ringOf, textAt } from './label-space'
+import type { Stream } from './placement'
+import { Later } from './placement'
 
 /** A leg as a dimension sees it, in pixels: its middle line out to the ends of its dimension. */
 export interface Measured {
@@ -18,152 +16,243 @@ export interface Measured {
 /** How far the extension lines run past the dimension line. */
 const OVERSHOOT = 4
 
-/** With so many places around its middle, a leg needs no leader to its quarters. */
-const ENOUGH_AROUND = 30
-
 /** Half the length of the slash at the end of a dimension line. */
 const TICK = 3.5
 
 /** Room between the metal and an extension line. */
 const EXTENSION_GAP = 3
 
-const unit = (v: Vector): Vector => {
-  const length = Math.hypot(v.x, v.y)
-  return length === 0 ? { x: 1, y: 0 } : scale(v, 1 / length)
-}
-
-/** How far the drawing reaches beyond the leg's line in a direction. */
-const reachOfFigure = (space: LabelSpace, from: Vector, normal: Vector): number =>
-  Math.max(
-    0,
-    ...space.metal.chords.flatMap((chord) => [
-      dot(subtract(chord.from, from), normal),
-      dot(subtract(chord.to, from), normal),
-    ]),
-  )
-
-/**
- * The line that leads from the end of a dimension back towards its leg. It stops short of the
- * first metal on its way; `unbridged` is what is left to the leg.
- */
-const extension = (
-  space: LabelSpace,
-  foot: Vector,
-  normal: Vector,
-  offset: number,
-): { readonly line: Segment; readonly unbridged: number } | undefined => {
-  const tip = add(foot, scale(normal, offset + OVERSHOOT))
-  if (!contains(space.frame, tip)) return undefined
-  const whole = offset + OVERSHOOT - space.metal.half - EXTENSION_GAP
-  const run = Math.min(whole, runToMetal(space.metal, tip, scale(normal, -1), EXTENSION_GAP))
-  if (run < OVERSHOOT) return undefined
-  return { line: segment(tip, add(tip, scale(normal, -run))), unbridged: whole - run }
-}
-
-/** A slash at either end of a dimension line, as drafters set it. */
-const ticks = (line: Segment): Segment[] => {
-  const along = unit(subtract(line.to, line.from))
-  const slant = scale(unit(add(along, leftOf(along))), TICK)
-  return [line.from, line.to].map((end) => segment(subtract(end, slant), add(end, slant)))
-}
-
 /** Parts of the dimension line over which its number may stand, best first. */
 const ALONG = [0.5, 0.3, 0.7, 0.1, 0.9]
 
-const dimensionOn = (
-  space: LabelSpace,
-  leg: Measured,
-  normal: Vector,
-  offset: number,
-  cost: number,
-): PlacedLabel[] => {
-  const from = add(leg.from, scale(normal, offset))
-  const to = add(leg.to, scale(normal, offset))
-  const line = segment(from, to)
-  // The slashes at its ends reach out from the line.
-  if (!isLineFree(space, line, TICK + 1)) return []
-  const ends = [leg.from, leg.to].map((foot) => extension(space, foot, normal, offset))
-  const [first, second] = ends
-  if (first === undefined || second === undefined) return []
-  const unbridged = Math.max(0, first.unbridged) + Math.max(0, second.unbridged)
-  const size = space.pen.text
-  const aside = reachOfText(leg.text, size, normal) + 3
-  const lines = [line, first.line, second.line, ...ticks(line)]
-  return ALONG.flatMap((along, index) => {
-    const at = add(between(from, to, along), scale(normal, aside))
-    const box = textBox(leg.text, size, at)
-    if (!isFree(space, box)) return []
-    const total = cost + index * 0.8 + unbridged * 0.06
-    return { text: leg.text, at, size, boxes: [box], lines, cost: total }
-  })
+/** What the next best part costs. */
+const ASIDE = 0.8
+
+/** What it costs to stand on the side of the figure's middle, or where metal encloses the place. */
+const INWARD = 1.5
+const ENCLOSED = 5
+
+/** What a number without lines costs, and what one with a leader. */
+const BARE = 8
+const LEADER = 14
+
+/**
+ * What is drawn of a dimension's three lines: the dimension line between its slashes, the slashes
+ * as drafters set them, the two extension lines.
+ */
+export const dimensionLines = ([line, ...extensions]: readonly Line[]): Line[] => {
+  if (line === undefined) return []
+  const [from, to] = line
+  const along = unit(to.x - from.x, to.y - from.y)
+  const past = TICK * Math.SQRT1_2
+  const ends = [
+    { x: from.x + along.x * past, y: from.y + along.y * past },
+    { x: to.x - along.x * past, y: to.y - along.y * past },
+  ] as const
+  const slant = unit(along.x - along.y, along.y + along.x)
+  const ticks = ends.map(({ x, y }): Line => [
+    { x: x - slant.x * TICK, y: y - slant.y * TICK },
+    { x: x + slant.x * TICK, y: y + slant.y * TICK },
+  ])
+  return [ends, ...extensions, ...ticks]
+}
+
+const unit = (x: number, y: number): Vector => {
+  const length = Math.hypot(x, y)
+  return length === 0 ? { x: 1, y: 0 } : { x: x / length, y: y / length }
+}
+
+/** A number at several parts of a line beside its leg; without lines unless they are given. */
+class NumbersAlong implements Stream<PlacedLabel> {
+  least: number
+  private index = 0
+
+  constructor(
+    protected readonly space: LabelSpace,
+    protected readonly leg: Measured,
+    protected readonly normal: Vector,
+    /** From the leg to the middle of the number. */
+    private readonly offset: number,
+    cost: number,
+  ) {
+    this.least = cost
+  }
+
+  next(): PlacedLabel | undefined {
+    return this.nextWith([], false)
+  }
+
+  protected nextWith(lines: readonly number[], isDimension: boolean): PlacedLabel | undefined {
+    const { space, leg, normal, offset, least } = this
+    const along = ALONG[this.index]
+    this.index += 1
+    this.least = this.index < ALONG.length ? least + ASIDE : Infinity
+    if (along === undefined) return undefined
+    const x = leg.from.x + (leg.to.x - leg.from.x) * along + normal.x * offset
+    const y = leg.from.y + (leg.to.y - leg.from.y) * along + normal.y * offset
+    return textAt(space, leg.text, space.pen.text, x, y, lines, isDimension, least)
+  }
+}
+
+/** The same with a dimension line, its extension lines and the slashes that drafters set. */
+class DimensionAt extends NumbersAlong {
+  private lines: readonly number[] | undefined
+
+  constructor(
+    space: LabelSpace,
+    leg: Measured,
+    normal: Vector,
+    private readonly line: number,
+    cost: number,
+  ) {
+    const reach = reachOfText(leg.text, space.pen.text, normal.x, normal.y)
+    super(space, leg, normal, line + reach + 3, cost)
+  }
+
+  override next(): PlacedLabel | undefined {
+    if (this.lines !== undefined) return this.nextWith(this.lines, true)
+    this.lines = this.drawLines()
+    return undefined
+  }
+
+  /** The lines where there is room for them. What an extension leaves unbridged makes them dearer. */
+  private drawLines(): readonly number[] {
+    const { space, leg, normal, line } = this
+    const fromX = leg.from.x + normal.x * line
+    const fromY = leg.from.y + normal.y * line
+    const toX = leg.to.x + normal.x * line
+    const toY = leg.to.y + normal.y * line
+    const first = this.extensionAt(leg.from)
+    const last = this.extensionAt(leg.to)
+    // The slashes at its ends reach out from the line.
+    const isRoom = first > 0 && last > 0 && isLineFree(space, fromX, fromY, toX, toY, TICK + 1)
+    if (!isRoom) {
+      this.least = Infinity
+      return []
+    }
+    this.least += (2 * this.wholeExtension() - first - last) * 0.06
+    // Past its slashes, so that nothing else comes to stand on them.
+    const along = unit(toX - fromX, toY - fromY)
+    const past = TICK * Math.SQRT1_2
+    const lines = [
+      fromX - along.x * past,
+      fromY - along.y * past,
+      toX + along.x * past,
+      toY + along.y * past,
+    ]
+    const tip = line + OVERSHOOT
+    for (const end of [0, 1]) {
+      const foot = end === 0 ? leg.from : leg.to
+      const back = tip - (end === 0 ? first : last)
+      lines.push(foot.x + normal.x * tip, foot.y + normal.y * tip)
+      lines.push(foot.x + normal.x * back, foot.y + normal.y * back)
+    }
+    return lines
+  }
+
+  private wholeExtension(): number {
+    return Math.max(OVERSHOOT, this.line + OVERSHOOT - this.space.metal.half - EXTENSION_GAP)
+  }
+
+  /**
+   * How long the line is that leads from an end of the dimension back towards its leg: it stops
+   * short of the first metal on its way. 0 where there is no room for one.
+   */
+  private extensionAt(foot: Vector): number {
+    const { space, normal, line } = this
+    const x = foot.x + normal.x * (line + OVERSHOOT)
+    const y = foot.y + normal.y * (line + OVERSHOOT)
+    if (!isInFrame(space, x, y)) return 0
+    const free = runToMetal(space.metal, x, y, -normal.x, -normal.y, EXTENSION_GAP)
+    const run = Math.min(this.wholeExtension(), free)
+    return run < OVERSHOOT ? 0 : run
+  }
 }
 
 /**
  * Ways to dimension a leg: a dimension line on either side, from beside the metal to beyond the
  * whole figure; the bare number beside the leg; a number with a leader.
  */
-export const dimensionCandidates = (
+export const dimensionPlaces = (
   space: LabelSpace,
   leg: Measured,
   middle: Vector,
-  ways: { readonly lines: boolean; readonly leaders: boolean },
-): PlacedLabel[] => {
-  const size = space.pen.text
-  const along = unit(subtract(leg.to, leg.from))
+  ways: { readonly lines: boolean },
+): Stream<PlacedLabel>[] => {
+  const along = unit(leg.to.x - leg.from.x, leg.to.y - leg.from.y)
   const mid = between(leg.from, leg.to, 0.5)
-  const found: PlacedLabel[] = []
-  for (const normal of [leftOf(along), scale(leftOf(along), -1)]) {
-    const beside = space.metal.half + size * 0.8 + 2
-    const beyond = reachOfFigure(space, mid, normal) + beside
-    const face = add(mid, scale(normal, space.metal.half + 2))
-    const enclosed = runToMetal(space.metal, face, normal, 0) < Infinity ? 5 : 0
-    const inward = dot(subtract(middle, mid), normal) > 1 ? 1.5 : 0
-    const offsets = new Set([
-      ...[0, 1, 2, 3].map((row) => beside + row * size * 1.6),
-      ...[0, 1, 2, 3].map((row) => beyond + row * size * 1.6),
-    ])
-    if (ways.lines) {
-      for (const offset of offsets) {
-        const far = ((offset - beside) / size) * 0.5
-        found.push(...dimensionOn(space, leg, normal, offset, far + enclosed + inward))
-      }
-    }
-    found.push(...bareNumbers(space, leg, normal, (ways.lines ? 8 : 0) + enclosed + inward))
-  }
-  if (!ways.leaders) return found
-  const first = scale(unit(subtract(mid, middle)), distance(mid, middle) > 1 ? 1 : -1)
-  for (const part of [0.5, 0.25, 0.75]) {
-    const around = ringCandidates(space, {
-      text: leg.text,
-      size,
-      anchor: between(leg.from, leg.to, part),
-      first,
-      step: 18,
-      gaps: [1, 2, 3, 4.5, 6, 8, 11].map((rows) => space.metal.half + rows * size),
-      leaderFrom: 0,
-      widest: 180,
-      cost: part === 0.5 ? 14 : 16,
-      costPerTurn: 0.01,
-      costPerGap: 1,
-    })
-    found.push(...around)
-    if (around.length >= ENOUGH_AROUND) break
-  }
-  return found
+  const out = { x: mid.x - middle.x, y: mid.y - middle.y }
+  // Out from the figure; where the leg lies in its middle there is no out.
+  const away = Math.hypot(out.x, out.y) > 1 ? out : { x: 0 - out.x, y: 0 - out.y }
+  const sides = [
+    { x: 0 - along.y, y: along.x },
+    { x: along.y, y: 0 - along.x },
+  ].map((normal) => {
+    const isInward = (middle.x - mid.x) * normal.x + (middle.y - mid.y) * normal.y > 1
+    const cost = isInward ? INWARD : 0
+    return new Later(cost, () => placesBeside(space, leg, normal, cost, ways.lines))
+  })
+  const leaders = new Later(LEADER, () => [
+    leaderPlaces(space, leg, 0.5, away, LEADER),
+    leaderPlaces(space, leg, 0.25, away, LEADER + 2),
+    leaderPlaces(space, leg, 0.75, away, LEADER + 2),
+  ])
+  return [...sides, leaders]
 }
 
-const bareNumbers = (
+const ROWS = [0, 1, 2, 3]
+
+const placesBeside = (
   space: LabelSpace,
   leg: Measured,
   normal: Vector,
-  cost: number,
-): PlacedLabel[] => {
+  side: number,
+  withLines: boolean,
+): Stream<PlacedLabel>[] => {
   const size = space.pen.text
-  const aside = space.metal.half + reachOfText(leg.text, size, normal) + 4
-  return ALONG.flatMap((part, index) => {
-    const at = add(between(leg.from, leg.to, part), scale(normal, aside))
-    const box = textBox(leg.text, size, at)
-    if (!isFree(space, box)) return []
-    return { text: leg.text, at, size, boxes: [box], lines: [], cost: cost + index * 0.8 }
-  })
+  const { half } = space.metal
+  const mid = between(leg.from, leg.to, 0.5)
+  const face = { x: mid.x + normal.x * (half + 2), y: mid.y + normal.y * (half + 2) }
+  const isEnclosed = runToMetal(space.metal, face.x, face.y, normal.x, normal.y, 0) < Infinity
+  const cost = side + (isEnclosed ? ENCLOSED : 0)
+  const offset = half + reachOfText(leg.text, size, normal.x, normal.y) + 4
+  const numbers = new NumbersAlong(space, leg, normal, offset, cost + (withLines ? BARE : 0))
+  if (!withLines) return [numbers]
+  const beside = half + size * 0.8 + 2
+  const linesFrom = (begin: number) =>
+    ROWS.map((row) => {
+      const line = begin + row * size * 1.6
+      return new DimensionAt(space, leg, normal, line, cost + ((line - beside) / size) * 0.5)
+    })
+  const reach = reachOfMetal(space.metal, mid.x, mid.y, normal.x, normal.y)
+  return [
+    ...linesFrom(beside),
+    ...(reach > 0 ? [new Later(cost + (reach / size) * 0.5, () => linesFrom(beside + reach))] : []),
+    numbers,
+  ]
 }
+
+const LEADER_FAN = fanOf(18)
+
+const LEADER_ROWS = [1, 2, 3, 4.5, 6, 8, 11]
+
+const leaderPlaces = (
+  space: LabelSpace,
+  leg: Measured,
+  part: number,
+  first: Vector,
+  cost: number,
+): Stream<PlacedLabel> =>
+  ringOf(space, {
+    text: leg.text,
+    size: space.pen.text,
+    anchor: between(leg.from, leg.to, part),
+    first,
+    fan: LEADER_FAN,
+    gaps: LEADER_ROWS.map((rows) => space.metal.half + rows * space.pen.text),
+    leaderFrom: 0,
+    widest: 180,
+    cost,
+    costPerTurn: 0.01,
+    costPerGap: 1,
+  })

@@ -2,7 +2,6 @@ import { radians, vector } from '#shared/geometry/vector'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Sheet } from '#shared/stock/stock.schema'
 import type { FlatFold, FlatParts } from '#shared/strip/flat-parts'
-import { flatParts } from '#shared/strip/flat-parts'
 import type { WalkedPart } from '#shared/strip/section-walk'
 import { walkSection } from '#shared/strip/section-walk'
 import type { Pen } from './pen'
@@ -38,19 +37,20 @@ const hemRadiusDrawn = (fold: FlatFold, profile: Profile, pen: Pen): number => {
 
 /**
  * The middle line of the sheet as it is drawn at `scale` pixels an inch, in inches in the frame of
- * `foldedSection`. Drawing conventions: legs and corners are where they truly are; bends are
- * rounded as far as the pen's weight needs, never less than they are; a hem is opened as far as
- * its lip can be told from its leg, and only the lip moves for that.
+ * `foldedSection`. `parts` are the profile's own, of `flatParts`. Drawing conventions: legs and
+ * corners are where they truly are; bends are rounded as far as the pen's weight needs, never less
+ * than they are; a hem is opened as far as its lip can be told from its leg, and only the lip moves
+ * for that.
  *
  * Draws drafts too: a leg that its bends use up is drawn without length.
  */
 export const drawnSection = (
   profile: Profile,
-  sheet: Sheet,
+  parts: FlatParts,
+  sheet: Pick<Sheet, 'thickness'>,
   scale: number,
   pen: Pen,
 ): WalkedPart[] => {
-  const parts = flatParts(profile, sheet)
   const radii = parts.folds.map((fold) => fold.insideRadius + sheet.thickness / 2)
   const extra = parts.folds.map((fold, index) => {
     const radius = radii[index] ?? 0

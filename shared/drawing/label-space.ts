@@ -1,15 +1,12 @@
 import type { Bounds } from '#shared/geometry/bounds'
-import { boxAround, contains, holds } from '#shared/geometry/bounds'
-import type { Segment } from '#shared/geometry/segment'
-import { clipToBox, segment } from '#shared/geometry/segment'
+import { radians } from '#shared/geometry/vector'
 import type { Vector } from '#shared/geometry/vector'
-import { add, degrees, distance, heading, scale, subtract } from '#shared/geometry/vector'
 import type { Metal } from './clearance'
 import { isBoxClear, isLineClear } from './clearance'
 import type { Point } from './display-list'
 import type { Pen } from './pen'
-import type { Candidate } from './placement'
-import { TEXT_HEIGHT, textBox, textWidth } from './text-box'
+import type { Candidate, Stream } from './placement'
+import { TEXT_HEIGHT, textWidth } from './text-box'
 
 /** Where labels may go: inside the frame and off the metal. Pixels, y down. */
 export interface LabelSpace {
@@ -18,45 +15,171 @@ export interface LabelSpace {
   readonly pen: Pen
 }
 
-/** A label in place. `lines[0]` of a leader runs from the text to the part it means. */
+/**
+ * A label in place: its text fills its one box. A leader's one line runs from the text to the part
+ * it means; for the three lines of a dimension see `dimensionLines`.
+ */
 export interface PlacedLabel extends Candidate {
   readonly text: string
-  readonly at: Point
   readonly size: number
   /** Lettered edges stand in a circle. */
-  readonly radius?: number
+  readonly radius: number | undefined
+  readonly isDimension: boolean
+}
+
+export type Line = readonly [Point, Point]
+
+/** Where the text of a label is centred. */
+export const middleOfLabel = ({
+  boxes: [minX = 0, minY = 0, maxX = 0, maxY = 0],
+}: Candidate): Point => ({
+  x: (minX + maxX) / 2,
+  y: (minY + maxY) / 2,
+})
+
+export const linesOfLabel = ({ lines }: Candidate): Line[] => {
+  const found: Line[] = []
+  for (let at = 0; at < lines.length; at += 4) {
+    const [x1 = 0, y1 = 0, x2 = 0, y2 = 0] = lines.slice(at, at + 4)
+    found.push([
+      { x: x1, y: y1 },
+      { x: x2, y: y2 },
+    ])
+  }
+  return found
 }
 
 /** Room between text and metal. */
 export const TEXT_CLEARANCE = 3
 
-export const isFree = (space: LabelSpace, box: Bounds): boolean =>
-  holds(space.frame, box) && isBoxClear(space.metal, box, TEXT_CLEARANCE)
+/** True when a box lies in the frame and off the metal. */
+export const isFree = (
+  { frame, metal }: LabelSpace,
+  minX: number,
+  minY: number,
+  maxX: number,
+  maxY: number,
+): boolean =>
+  minX >= frame.minX &&
+  minY >= frame.minY &&
+  maxX <= frame.maxX &&
+  maxY <= frame.maxY &&
+  isBoxClear(metal, minX, minY, maxX, maxY, TEXT_CLEARANCE)
 
-export const isLineFree = (space: LabelSpace, line: Segment, gap: number): boolean =>
-  contains(space.frame, line.from) &&
-  contains(space.frame, line.to) &&
-  isLineClear(space.metal, line, gap)
+export const isInFrame = ({ frame }: LabelSpace, x: number, y: number): boolean =>
+  x >= frame.minX && x <= frame.maxX && y >= frame.minY && y <= frame.maxY
 
-/** How far a box of text reaches from its middle in a direction (unit). */
-export const reachOfText = (text: string, size: number, along: Vector): number => {
-  const box = textBox(text, size, { x: 0, y: 0 })
-  return Math.abs(along.x) * box.maxX + Math.abs(along.y) * box.maxY
+/** True when a line lies in the frame and keeps `gap` away from the metal. */
+export const isLineFree = (
+  space: LabelSpace,
+  ax: number,
+  ay: number,
+  bx: number,
+  by: number,
+  gap: number,
+): boolean =>
+  isInFrame(space, ax, ay) &&
+  isInFrame(space, bx, by) &&
+  isLineClear(space.metal, ax, ay, bx, by, gap)
+
+/** How far a text reaches from its middle along the unit (ux, uy). */
+export const reachOfText = (text: string, size: number, ux: number, uy: number): number =>
+  (Math.abs(ux) * textWidth(text, size) + Math.abs(uy) * size * TEXT_HEIGHT) / 2
+
+/** A text centred on (x, y), if it is free there. */
+export const textAt = (
+  space: LabelSpace,
+  text: string,
+  size: number,
+  x: number,
+  y: number,
+  lines: readonly number[],
+  isDimension: boolean,
+  cost: number,
+): PlacedLabel | undefined => {
+  const halfWidth = textWidth(text, size) / 2
+  const halfHeight = (size * TEXT_HEIGHT) / 2
+  if (!isFree(space, x - halfWidth, y - halfHeight, x + halfWidth, y + halfHeight)) return undefined
+  const boxes = [x - halfWidth, y - halfHeight, x + halfWidth, y + halfHeight]
+  return { text, size, radius: undefined, isDimension, boxes, lines, cost }
 }
 
-/** Directions fanned out from a first one, nearest first: 0, +step, -step, +2 step … to the widest. */
-export const fan = (
-  first: Vector,
-  step: number,
-  widest: number,
-): { direction: Vector; turned: number }[] => {
-  const base = degrees(Math.atan2(first.y, first.x))
-  const directions = [{ direction: heading(base), turned: 0 }]
-  for (let turned = step; turned <= widest; turned += step) {
-    directions.push({ direction: heading(base + turned), turned })
-    if (turned < 180) directions.push({ direction: heading(base - turned), turned })
+/** Directions fanned out from a first one, nearest first: 0, +step, -step, +2 step … to 180. */
+export interface Fan {
+  /** Degrees from the first. */
+  readonly turned: readonly number[]
+  readonly cos: readonly number[]
+  readonly sin: readonly number[]
+}
+
+export const fanOf = (step: number): Fan => {
+  const turns = [0]
+  for (let turned = step; turned <= 180; turned += step) {
+    turns.push(turned)
+    if (turned < 180) turns.push(0 - turned)
   }
-  return directions
+  return {
+    turned: turns.map(Math.abs),
+    cos: turns.map((turn) => Math.cos(radians(turn))),
+    sin: turns.map((turn) => Math.sin(radians(turn))),
+  }
+}
+
+/** Tries a place in a direction (unit); undefined where there is no room. */
+type Place = (row: number, ux: number, uy: number, cost: number) => PlacedLabel | undefined
+
+/** Places in rows, each row over the directions of one fan; of all rows the cheapest place first. */
+class RowsOfPlaces implements Stream<PlacedLabel> {
+  least: number
+  private row = 0
+  /** How many directions of each row have been tried. */
+  private readonly tried: number[]
+  private readonly ux: number
+  private readonly uy: number
+
+  constructor(
+    /** What the rows begin with, rising. */
+    private readonly costs: readonly number[],
+    private readonly fan: Fan,
+    first: Vector,
+    private readonly widest: number,
+    private readonly costPerTurn: number,
+    private readonly place: Place,
+  ) {
+    const length = Math.hypot(first.x, first.y)
+    this.ux = length === 0 ? 1 : first.x / length
+    this.uy = length === 0 ? 0 : first.y / length
+    this.tried = costs.map(() => 0)
+    this.least = costs[0] ?? Infinity
+  }
+
+  next(): PlacedLabel | undefined {
+    const { fan, row, ux, uy, least } = this
+    const index = this.tried[row] ?? 0
+    const c = fan.cos[index] ?? 1
+    const s = fan.sin[index] ?? 0
+    this.tried[row] = index + 1
+    this.goOn()
+    return this.place(row, ux * c - uy * s, ux * s + uy * c, least)
+  }
+
+  private goOn(): void {
+    let least = Infinity
+    for (let row = 0; row < this.costs.length; row += 1) {
+      const index = this.tried[row] ?? 0
+      const turned = this.fan.turned[index] ?? Infinity
+      if (turned <= this.widest) {
+        const cost = (this.costs[row] ?? Infinity) + this.costPerTurn * turned
+        if (cost < least) {
+          least = cost
+          this.row = row
+        }
+      }
+      // The rows rise, so behind a row that was not begun nothing is cheaper.
+      if (index === 0) break
+    }
+    this.least = least
+  }
 }
 
 interface RingOptions {
@@ -66,8 +189,8 @@ interface RingOptions {
   readonly anchor: Vector
   /** Where it would best stand. */
   readonly first: Vector
-  readonly step: number
-  /** Distances from the anchor to the near border of the text. */
+  readonly fan: Fan
+  /** Distances from the anchor to the near border of the text, rising. */
   readonly gaps: readonly number[]
   /** From this gap on a leader is drawn. */
   readonly leaderFrom: number
@@ -80,70 +203,71 @@ interface RingOptions {
   readonly costPerGap: number
 }
 
-/** The leader from the border of the text towards the anchor, up to `stop` from it. */
-const leaderTo = (at: Vector, box: Bounds, anchor: Vector, stop: number): Segment => {
-  const inside = clipToBox(segment(at, anchor), box)
-  const from = inside?.to ?? at
-  const back = subtract(from, anchor)
-  const length = distance(from, anchor)
-  const left = Math.min(length, stop)
-  return segment(from, length === 0 ? anchor : add(anchor, scale(back, left / length)))
-}
-
 /** Places around an anchor, nearer and straighter ones cheaper. */
-export const ringCandidates = (space: LabelSpace, options: RingOptions): PlacedLabel[] => {
-  const { text, size, anchor } = options
+export const ringOf = (space: LabelSpace, options: RingOptions): Stream<PlacedLabel> => {
+  const { text, size, anchor, gaps, fan, first, widest, costPerTurn, leaderFrom } = options
   const stop = options.stop ?? space.metal.half + 2
   const width = textWidth(text, size)
   const height = size * TEXT_HEIGHT
-  const directions = fan(options.first, options.step, options.widest)
-  const found: PlacedLabel[] = []
-  for (const gap of options.gaps) {
-    for (const { direction, turned } of directions) {
-      const reach = (Math.abs(direction.x) * width + Math.abs(direction.y) * height) / 2
-      const at = add(anchor, scale(direction, gap + reach))
-      const box = boxAround(at, width, height)
-      if (!isFree(space, box)) continue
-      // Even without its leader drawn, nothing may stand between a label and what it means.
-      const leader = leaderTo(at, box, anchor, stop)
-      if (!isLineFree(space, leader, 1)) continue
-      const lines = gap >= options.leaderFrom ? [leader] : []
-      const cost =
-        options.cost + options.costPerTurn * turned + options.costPerGap * (gap / space.pen.text)
-      found.push({ text, at, size, boxes: [box], lines, cost })
+  const costs = gaps.map((gap) => options.cost + options.costPerGap * (gap / space.pen.text))
+  const place: Place = (row, ux, uy, cost) => {
+    const gap = gaps[row] ?? 0
+    const reach = (Math.abs(ux) * width + Math.abs(uy) * height) / 2
+    const x = anchor.x + ux * (gap + reach)
+    const y = anchor.y + uy * (gap + reach)
+    if (!isFree(space, x - width / 2, y - height / 2, x + width / 2, y + height / 2)) {
+      return undefined
     }
+    // The leader begins where it leaves the text and ends before the metal.
+    const leaves = Math.min(
+      ux === 0 ? Infinity : width / 2 / Math.abs(ux),
+      uy === 0 ? Infinity : height / 2 / Math.abs(uy),
+    )
+    const from = Math.max(0, gap + reach - leaves)
+    const to = Math.min(stop, from)
+    const ax = anchor.x + ux * from
+    const ay = anchor.y + uy * from
+    const bx = anchor.x + ux * to
+    const by = anchor.y + uy * to
+    // Even without its leader drawn, nothing may stand between a label and what it means.
+    if (!isLineFree(space, ax, ay, bx, by, 1)) return undefined
+    const boxes = [x - width / 2, y - height / 2, x + width / 2, y + height / 2]
+    const lines = gap >= leaderFrom ? [ax, ay, bx, by] : []
+    return { text, size, radius: undefined, isDimension: false, boxes, lines, cost }
   }
-  return found
+  return new RowsOfPlaces(costs, fan, first, widest, costPerTurn, place)
 }
 
 /** Room between an edge and its letter's circle; from the third on a leader leads there. */
 const LETTER_GAPS = [4, 9, 18, 30, 46, 70, 100]
 
+const LETTER_COSTS = LETTER_GAPS.map((_, row) => row * 2)
+
+const LETTER_FAN = fanOf(15)
+
 /** The letter of an edge in its circle, close to the edge or tied to it. */
-export const letterCandidates = (
+export const letterPlaces = (
   space: LabelSpace,
   letter: string,
   anchor: Vector,
   first: Vector,
-): PlacedLabel[] => {
+): Stream<PlacedLabel> => {
   const size = space.pen.text * 0.85
   const radius = size * 0.68
-  const directions = fan(first, 15, 180)
-  const found: PlacedLabel[] = []
-  for (const [row, gap] of LETTER_GAPS.entries()) {
-    for (const { direction, turned } of directions) {
-      const at = add(anchor, scale(direction, space.metal.half + radius + gap))
-      const around = boxAround(at, 2 * radius, 2 * radius)
-      if (!isFree(space, around)) continue
-      const leader = segment(
-        add(at, scale(direction, 0 - radius)),
-        add(anchor, scale(direction, space.metal.half + 2)),
-      )
-      if (!isLineFree(space, leader, 0.5)) continue
-      const lines = row < 2 ? [] : [leader]
-      const cost = turned / 20 + row * 2
-      found.push({ text: letter, at, size, radius, boxes: [around], lines, cost })
-    }
+  const { half } = space.metal
+  const place: Place = (row, ux, uy, cost) => {
+    const away = half + radius + (LETTER_GAPS[row] ?? 0)
+    const x = anchor.x + ux * away
+    const y = anchor.y + uy * away
+    if (!isFree(space, x - radius, y - radius, x + radius, y + radius)) return undefined
+    const ax = x - ux * radius
+    const ay = y - uy * radius
+    const bx = anchor.x + ux * (half + 2)
+    const by = anchor.y + uy * (half + 2)
+    if (!isLineFree(space, ax, ay, bx, by, 0.5)) return undefined
+    const boxes = [x - radius, y - radius, x + radius, y + radius]
+    const lines = row < 2 ? [] : [ax, ay, bx, by]
+    return { text: letter, size, radius, isDimension: false, boxes, lines, cost }
   }
-  return found
+  return new RowsOfPlaces(LETTER_COSTS, LETTER_FAN, first, 180, 1 / 20, place)
 }

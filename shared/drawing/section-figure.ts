@@ -3,6 +3,8 @@ import { distanceToPath } from '#shared/geometry/polyline'
 import type { Vector } from '#shared/geometry/vector'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Sheet } from '#shared/stock/stock.schema'
+import type { FlatParts } from '#shared/strip/flat-parts'
+import { flatParts } from '#shared/strip/flat-parts'
 import type { DisplayList, Part, Point } from './display-list'
 import type { PlacedLabel } from './label-space'
 import type { Pen } from './pen'
@@ -72,21 +74,45 @@ export interface Figure {
 /** Smallest type, pixels. */
 const SMALLEST_TEXT = 9
 
-/**
- * Layouts tried one after another until one has room for everything: margins and type size in
- * parts of the frame's type size, and whether numbers may stand off with a leader.
- */
-const TRIALS = [
-  { margin: 2.4, text: 1, leaders: false },
-  { margin: 2.4, text: 1, leaders: true },
-  { margin: 3.6, text: 1, leaders: true },
-  { margin: 2.4, text: 0.8, leaders: true },
-  { margin: 4, text: 0.8, leaders: true },
-  { margin: 2.4, text: 0.65, leaders: true },
+interface Trial {
+  /** Free room on each side, in lines of text. */
+  readonly margin: number
+  /** In parts of the frame's type size. */
+  readonly text: number
+}
+
+/** Layouts tried one after another, by the number of legs up to which they are. */
+const TRIALS: readonly { readonly legs: number; readonly trials: readonly Trial[] }[] = [
+  {
+    legs: 6,
+    trials: [
+      { margin: 2.4, text: 1 },
+      { margin: 3.6, text: 1 },
+      { margin: 2.4, text: 0.8 },
+      { margin: 4, text: 0.8 },
+      { margin: 2.4, text: 0.65 },
+    ],
+  },
+  // Each further layout costs more here and gains less.
+  {
+    legs: 12,
+    trials: [
+      { margin: 3, text: 1 },
+      { margin: 4, text: 0.8 },
+      { margin: 2.4, text: 0.65 },
+    ],
+  },
+  {
+    legs: Infinity,
+    trials: [
+      { margin: 2.4, text: 0.8 },
+      { margin: 2.4, text: 0.65 },
+    ],
+  },
 ]
 
-/** With this many legs the larger type has no chance, and trying it costs most. */
-const CROWDED = 13
+/** With so few legs a layout with room for everything may still be improved on. */
+const FEW_LEGS = 6
 
 /** A layout whose worst label costs less than this is not improved on. */
 const GOOD_ENOUGH = 13
@@ -138,21 +164,21 @@ export const sectionFigure = (profile: Profile, sheet: Sheet, options: SectionOp
 
 const bestLayout = (profile: Profile, sheet: Sheet, options: SectionOptions): Layout => {
   const pen = penFor(options.width, options.height, options.textSize)
-  const trials =
-    profile.legs.length < CROWDED
-      ? TRIALS
-      : TRIALS.filter((trial) => trial.text < 1 && trial.margin < 3)
+  const parts = flatParts(profile, sheet)
+  const legs = profile.legs.length
+  const trials = TRIALS.find((row) => legs <= row.legs)?.trials ?? []
   let best: Layout | undefined
   for (const [tried, trial] of trials.entries()) {
     const text = Math.max(Math.min(pen.text, SMALLEST_TEXT), pen.text * trial.text)
-    const layout = layOut(profile, sheet, options, { ...pen, text }, trial)
+    const layout = layOut(profile, sheet, parts, options, { ...pen, text }, trial)
     const cost = layout.cost + 5 * tried
     if (best === undefined || cost < best.cost) best = { ...layout, cost }
     const worst = Math.max(0, ...layout.placed.map((label) => label?.cost ?? Infinity))
     if (worst < GOOD_ENOUGH) return best
     const next = trials[tried + 1]
     const isComplete = best.placed.every((label) => label !== undefined)
-    if (isComplete && next !== undefined && next.text < trial.text) return best
+    if (isComplete && (legs > FEW_LEGS || (next !== undefined && next.text < trial.text)))
+      return best
   }
   if (best === undefined) throw new Error('No layout was tried.')
   return best
@@ -161,9 +187,10 @@ const bestLayout = (profile: Profile, sheet: Sheet, options: SectionOptions): La
 const layOut = (
   profile: Profile,
   sheet: Sheet,
+  parts: FlatParts,
   options: SectionOptions,
   pen: Pen,
-  trial: { readonly margin: number; readonly leaders: boolean },
+  trial: Trial,
 ): Layout => {
   const shown = {
     dimensions: options.show?.dimensions ?? true,
@@ -172,9 +199,9 @@ const layOut = (
   }
   const isBare = !shown.dimensions && !shown.angles && !shown.edges
   const room = isBare ? 1 : shown.dimensions ? trial.margin * pen.text : 2 * pen.text
-  const section = placeSection(profile, sheet, options, pen, room)
+  const section = placeSection(profile, sheet, parts, options, pen, room)
   const frame = grow({ minX: 0, minY: 0, maxX: options.width, maxY: options.height }, -2)
-  const labels = sectionLabels(profile, section, options.labels, shown, frame, trial.leaders)
+  const labels = sectionLabels(profile, section, options.labels, shown, frame)
   const placed = placeLabels(labels)
   const cost = placed.reduce(
     (sum, label, index) => sum + (label?.cost ?? (labels[index]?.weight ?? 0) * 100),
@@ -185,7 +212,7 @@ const layOut = (
 
 const findPart = (section: PlacedSection, point: Point, reach: number): Part | undefined => {
   let best: { part: Part; distance: number } | undefined
-  for (const { part, points } of section.parts) {
+  for (const { part, points } of section.parts()) {
     const distance = distanceToPath(points, point)
     if (distance <= reach && (best === undefined || distance < best.distance)) {
       best = { part, distance }

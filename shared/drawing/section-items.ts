@@ -1,7 +1,9 @@
 import type { Profile } from '#shared/profile/profile.schema'
+import { dimensionLines } from './dimension-labels'
 import type { DisplayItem, Part, PathShape, Point, Role } from './display-list'
 import { isSamePart } from './display-list'
 import type { PlacedLabel } from './label-space'
+import { linesOfLabel, middleOfLabel } from './label-space'
 import type { Pen } from './pen'
 import type { SectionLabel } from './section-labels'
 import type { PlacedSection } from './section-view'
@@ -45,7 +47,8 @@ export const drawMetal = (
     items.push(line(isPainted ? 'paint' : 'bare', points, band + overlap))
   }
   items.push(line('metal', section.chain(0), pen.metal))
-  for (const { part, points } of section.parts.toReversed()) {
+  const isMarked = marks.selected || marks.hovered || marks.problems.length > 0
+  for (const { part, points } of isMarked ? section.parts().toReversed() : []) {
     const role = markOf(part, marks)
     if (role !== undefined) items.push(line(role, points, pen.metal, part))
   }
@@ -61,7 +64,10 @@ const markOf = (part: Part, marks: Marks): Role | undefined => {
 
 /** Legs first, so that the bends and hems between them lie on top. */
 export const drawTargets = (section: PlacedSection): DisplayItem[] =>
-  section.parts.toReversed().map(({ part, points }) => line('target', points, TARGET_WIDTH, part))
+  section
+    .parts()
+    .toReversed()
+    .map(({ part, points }) => line('target', points, TARGET_WIDTH, part))
 
 export const drawLabel = (
   label: PlacedLabel,
@@ -72,15 +78,16 @@ export const drawLabel = (
   const mark = markOf(meaning.part, marks)
   const { part } = meaning
   const lineRole = mark ?? (part.kind === 'edge' ? 'edge' : 'dimension')
-  const items: DisplayItem[] = label.lines.map((s) =>
-    line(lineRole, [s.from, s.to], pen.hairline, part),
-  )
+  const at = middleOfLabel(label)
+  const lines = linesOfLabel(label)
+  const drawn = label.isDimension ? dimensionLines(lines) : lines
+  const items: DisplayItem[] = drawn.map((points) => line(lineRole, points, pen.hairline, part))
   if (label.radius !== undefined) {
     items.push({
       kind: 'circle',
       role: lineRole,
       part,
-      center: label.at,
+      center: at,
       radius: label.radius,
       width: pen.hairline,
       filled: false,
@@ -90,7 +97,7 @@ export const drawLabel = (
     kind: 'text',
     role: mark ?? meaning.role,
     part,
-    at: label.at,
+    at,
     text: label.text,
     size: label.size,
     rotation: 0,

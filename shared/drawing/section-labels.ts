@@ -1,15 +1,24 @@
 import type { Bounds } from '#shared/geometry/bounds'
-import { boundsOf, middleOf } from '#shared/geometry/bounds'
 import type { Vector } from '#shared/geometry/vector'
-import { add, between, heading, radians, rotate, scale, subtract } from '#shared/geometry/vector'
+import {
+  add,
+  between,
+  distance,
+  heading,
+  radians,
+  rotate,
+  scale,
+  subtract,
+} from '#shared/geometry/vector'
 import type { Hem, Profile } from '#shared/profile/profile.schema'
 import type { RoundPart, StraightPart, WalkedPart } from '#shared/strip/section-walk'
 import type { Measured } from './dimension-labels'
-import { dimensionCandidates } from './dimension-labels'
+import { dimensionPlaces } from './dimension-labels'
 import type { Part, Role } from './display-list'
 import type { LabelSpace, PlacedLabel } from './label-space'
-import { letterCandidates, ringCandidates } from './label-space'
+import { fanOf, letterPlaces, reachOfText, ringOf, TEXT_CLEARANCE } from './label-space'
 import type { Label } from './placement'
+import { Later } from './placement'
 import type { FigureLabels } from './section-figure'
 import type { PlacedSection } from './section-view'
 
@@ -21,6 +30,10 @@ export interface SectionLabel extends Label<PlacedLabel> {
 
 const WEIGHT = { leg: 10, edge: 8, hem: 6, angle: 2 }
 
+const HEM_FAN = fanOf(15)
+
+const ANGLE_FAN = fanOf(10)
+
 /** In smaller frames a number stands beside its leg, without dimension lines. */
 const NARROWEST_WITH_LINES = 260
 
@@ -30,11 +43,10 @@ export const sectionLabels = (
   labels: FigureLabels,
   shown: { readonly dimensions: boolean; readonly angles: boolean; readonly edges: boolean },
   frame: Bounds,
-  leaders: boolean,
 ): SectionLabel[] => {
   const space: LabelSpace = { metal: section.metal, frame, pen: section.pen }
   return [
-    ...(shown.dimensions ? legLabels(profile, section, labels, space, leaders) : []),
+    ...(shown.dimensions ? legLabels(profile, section, labels, space) : []),
     ...(shown.edges ? edgeLabels(section, space) : []),
     ...(shown.dimensions ? hemLabels(profile, section, labels, space) : []),
     ...(shown.angles ? angleLabels(section, labels, space) : []),
@@ -71,18 +83,14 @@ const measuredLeg = (
   }
 }
 
-const middleOfFigure = (section: PlacedSection): Vector =>
-  middleOf(boundsOf(section.parts.flatMap((part) => part.points)))
-
 const legLabels = (
   profile: Profile,
   section: PlacedSection,
   labels: FigureLabels,
   space: LabelSpace,
-  leaders: boolean,
 ): SectionLabel[] => {
-  const middle = middleOfFigure(section)
-  const ways = { lines: space.frame.maxX >= NARROWEST_WITH_LINES, leaders }
+  const { middle } = section
+  const ways = { lines: space.frame.maxX >= NARROWEST_WITH_LINES }
   return section.walked.flatMap((part, index) => {
     if (part.kind !== 'straight' || typeof part.of !== 'number') return []
     const leg = part.of
@@ -92,7 +100,7 @@ const legLabels = (
       part: { kind: 'leg' as const, leg },
       role: 'dimensionText' as const,
       weight: WEIGHT.leg,
-      candidates: dimensionCandidates(space, measured, middle, ways),
+      streams: dimensionPlaces(space, measured, middle, ways),
     }
   })
 }
@@ -116,7 +124,7 @@ const edgeLabels = (section: PlacedSection, space: LabelSpace): SectionLabel[] =
       part: { kind: 'edge' as const, edge },
       role: 'edge' as const,
       weight: WEIGHT.edge,
-      candidates: letterCandidates(space, edge, section.toFrame(end), out),
+      streams: [letterPlaces(space, edge, section.toFrame(end), out)],
     }
   })
 }
@@ -140,30 +148,58 @@ const hemLabels = (
         part: { kind: 'hem', edge },
         role: 'dimensionText',
         weight: WEIGHT.hem,
-        candidates: ringCandidates(space, {
-          text: labels.hem?.(hem.length) ?? labels.length(hem.length),
-          size: space.pen.text,
-          anchor,
-          first: away,
-          step: 15,
-          gaps: [0.35, 0.8, 1.4, 2.2, 3.5, 5, 7.5].map(
-            (rows) => space.metal.half + rows * space.pen.text,
-          ),
-          leaderFrom: space.metal.half + 0.7 * space.pen.text,
-          widest: 180,
-          cost: 0,
-          costPerTurn: 0.04,
-          costPerGap: 1.2,
-        }),
+        streams: [
+          ringOf(space, {
+            text: labels.hem?.(hem.length) ?? labels.length(hem.length),
+            size: space.pen.text,
+            anchor,
+            first: away,
+            fan: HEM_FAN,
+            gaps: [0.35, 0.8, 1.4, 2.2, 3.5, 5, 7.5].map(
+              (rows) => space.metal.half + rows * space.pen.text,
+            ),
+            leaderFrom: space.metal.half + 0.7 * space.pen.text,
+            widest: 180,
+            cost: 0,
+            costPerTurn: 0.04,
+            costPerGap: 1.2,
+          }),
+        ],
       },
     ]
   }
   return [...label('A', profile.hemA), ...label('B', profile.hemB)]
 }
 
-/** Which way the inside of a bend opens. */
-const insideOf = (section: PlacedSection, part: RoundPart): Vector =>
-  inFrame(section, subtract(part.arc.center, part.mid))
+/** Which way the inside of a bend opens (unit). */
+const insideOf = (section: PlacedSection, part: RoundPart): Vector => {
+  const toCenter = inFrame(section, subtract(part.arc.center, part.mid))
+  const length = Math.hypot(toCenter.x, toCenter.y)
+  return length === 0 ? { x: 0, y: -1 } : scale(toCenter, 1 / length)
+}
+
+/**
+ * How far from its corner a text on the inside of a bend must begin so that it clears both legs:
+ * its middle lies as far off either leg as its own reach and the metal's.
+ */
+const snugGap = (
+  section: PlacedSection,
+  part: RoundPart,
+  inside: Vector,
+  text: string,
+  size: number,
+): number => {
+  const needed = section.metal.half + TEXT_CLEARANCE
+  const half = radians(180 - Math.abs(part.turn)) / 2
+  const aside = [part.arc.start + 90, part.arc.start + part.turn + 90].map((turned) => {
+    const leg = inFrame(section, heading(turned))
+    return reachOfText(text, size, leg.y, leg.x)
+  })
+  const middle = (needed + Math.max(...aside)) / Math.max(Math.sin(half), 0.05)
+  // Corner and middle of the bend lie apart, the more the rounder it is drawn.
+  const corner = distance(section.toFrame(part.corner), section.toFrame(part.mid))
+  return middle - corner - reachOfText(text, size, inside.x, inside.y)
+}
 
 const angleLabels = (
   section: PlacedSection,
@@ -175,15 +211,16 @@ const angleLabels = (
     const included = 180 - Math.abs(part.turn)
     const { half } = space.metal
     const size = space.pen.text * 0.9
+    const text = labels.angle(part.turn)
     // In a sharp bend the metal of both legs leaves no room until this far from the corner.
     const narrow = (half + 2) / Math.sin(radians(included) / 2)
-    const gaps = [0, 1, 2, 3, 4, 5, 6, 8, 10, 13].map((row) => narrow + 1 + row * size * 0.45)
     const inside = insideOf(section, part)
+    const snug = Math.max(snugGap(section, part, inside, text, size), half + TEXT_CLEARANCE) + 0.01
     const common = {
-      text: labels.angle(part.turn),
+      text,
       size,
       anchor: section.toFrame(part.mid),
-      step: 10,
+      fan: ANGLE_FAN,
       costPerTurn: 0.02,
       costPerGap: 1,
     }
@@ -191,25 +228,29 @@ const angleLabels = (
       part: { kind: 'bend' as const, bend: part.fold },
       role: 'angleText' as const,
       weight: WEIGHT.angle,
-      candidates: [
-        ...ringCandidates(space, {
+      streams: [
+        ringOf(space, {
           ...common,
           first: inside,
-          gaps,
+          gaps: ANGLE_ROWS.map((row) => snug + row * size * 0.45),
           leaderFrom: narrow + 1 + 2.4 * size,
           stop: narrow,
           widest: Math.min(70, included / 2),
           cost: 0,
         }),
         // Where the inside is taken, by a hem say, the angle stands outside and a line leads in.
-        ...ringCandidates(space, {
-          ...common,
-          first: scale(inside, -1),
-          gaps: [1.2, 2, 3, 4.5].map((rows) => half + rows * size),
-          leaderFrom: 0,
-          widest: 80,
-          cost: 11,
-        }),
+        new Later(11, () => [
+          ringOf(space, {
+            ...common,
+            first: scale(inside, -1),
+            gaps: [1.2, 2, 3, 4.5].map((rows) => half + rows * size),
+            leaderFrom: 0,
+            widest: 80,
+            cost: 11,
+          }),
+        ]),
       ],
     }
   })
+
+const ANGLE_ROWS = [0, 1, 2, 3, 4, 5, 6, 8, 10, 13]

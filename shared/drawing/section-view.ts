@@ -1,14 +1,14 @@
 import type { Bounds } from '#shared/geometry/bounds'
-import { boundsOf, heightOf, middleOf, widthOf } from '#shared/geometry/bounds'
-import { segmentsOf } from '#shared/geometry/polyline'
-import type { Segment } from '#shared/geometry/segment'
+import { heightOf, middleOf, widthOf } from '#shared/geometry/bounds'
 import type { Vector } from '#shared/geometry/vector'
-import { between, distance, rotate, vector } from '#shared/geometry/vector'
+import { between, distance, radians, rotate, vector } from '#shared/geometry/vector'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Sheet } from '#shared/stock/stock.schema'
+import type { FlatParts } from '#shared/strip/flat-parts'
 import type { WalkedPart } from '#shared/strip/section-walk'
 import { offsetChain } from '#shared/strip/section-walk'
 import type { Metal } from './clearance'
+import { metalOfChain } from './clearance'
 import type { Part, Point } from './display-list'
 import { drawnSection } from './drawn-section'
 import type { Pen } from './pen'
@@ -33,20 +33,27 @@ export interface PlacedSection {
   readonly toSection: (point: Point) => Vector
   readonly walked: readonly WalkedPart[]
   readonly pen: Pen
-  readonly parts: readonly DrawnPart[]
+  /** Every part with the line it is drawn with; worked out when it is asked for. */
+  readonly parts: () => readonly DrawnPart[]
+  /** The middle of the figure. */
+  readonly middle: Point
   readonly metal: Metal
   /** The line at an offset from the middle of the metal, pixels to the left of the walk. */
   readonly chain: (left: number) => Point[]
 }
 
-export const frameTransform = ({ origin, scale, rotation }: FrameView) => ({
-  toFrame: (point: Vector): Point => {
-    const turned = rotate(point, rotation)
-    return { x: origin.x + turned.x * scale, y: origin.y - turned.y * scale }
-  },
-  toSection: (point: Point): Vector =>
-    rotate(vector((point.x - origin.x) / scale, (origin.y - point.y) / scale), -rotation),
-})
+export const frameTransform = ({ origin, scale, rotation }: FrameView) => {
+  const along = Math.cos(radians(rotation)) * scale
+  const aside = Math.sin(radians(rotation)) * scale
+  return {
+    toFrame: (point: Vector): Point => ({
+      x: origin.x + point.x * along - point.y * aside,
+      y: origin.y - point.x * aside - point.y * along,
+    }),
+    toSection: (point: Point): Vector =>
+      rotate(vector((point.x - origin.x) / scale, (origin.y - point.y) / scale), -rotation),
+  }
+}
 
 interface FitOptions {
   readonly width: number
@@ -69,8 +76,7 @@ const chordsOf = (
   walked: readonly WalkedPart[],
   scale: number,
   toFrame: (point: Vector) => Point,
-): Segment[] =>
-  segmentsOf(offsetChain(walked, 0, { maxStep: 60, tolerance: 0.4 / scale }).map(toFrame))
+): Point[] => offsetChain(walked, 0, { maxStep: 60, tolerance: 0.4 / scale }).map(toFrame)
 
 const flatnessAt = (scale: number) => ({ maxStep: 12, tolerance: 0.08 / scale })
 
@@ -85,12 +91,38 @@ const partOf = (walked: WalkedPart): Part => {
   return { kind: 'bend', bend: walked.fold }
 }
 
-const turnedBounds = (walked: readonly WalkedPart[], rotation: number): Bounds =>
-  boundsOf(
-    offsetChain(walked, 0, { maxStep: 12, tolerance: 0.01 }).map((point) =>
-      rotate(point, rotation),
-    ),
-  )
+/** The box around the middle line when the piece is turned. */
+const turnedBounds = (walked: readonly WalkedPart[], rotation: number): Bounds => {
+  const c = Math.cos(radians(rotation))
+  const s = Math.sin(radians(rotation))
+  let minX = Infinity
+  let minY = Infinity
+  let maxX = -Infinity
+  let maxY = -Infinity
+  const take = (x: number, y: number) => {
+    if (x < minX) minX = x
+    if (x > maxX) maxX = x
+    if (y < minY) minY = y
+    if (y > maxY) maxY = y
+  }
+  for (const part of walked) {
+    for (const { x, y } of [part.from, part.to]) take(x * c - y * s, x * s + y * c)
+    if (part.kind === 'straight') continue
+    // Where an arc runs level or upright it reaches furthest.
+    const { center, radius, start, sweep } = part.arc
+    const x = center.x * c - center.y * s
+    const y = center.x * s + center.y * c
+    const low = start + rotation + Math.min(0, sweep)
+    for (let quarter = Math.ceil(low / 90); quarter * 90 <= low + Math.abs(sweep); quarter += 1) {
+      const side = ((quarter % 4) + 4) % 4
+      take(x + radius * (UPRIGHT[side] ?? 0), y + radius * (UPRIGHT[(side + 3) % 4] ?? 0))
+    }
+  }
+  return { minX, minY, maxX, maxY }
+}
+
+/** The cosine of no, one, two and three quarter turns. */
+const UPRIGHT = [1, 0, -1, 0]
 
 /**
  * Fits the section into the frame with `room` pixels free on each side. The pen's weight depends
@@ -100,6 +132,7 @@ const turnedBounds = (walked: readonly WalkedPart[], rotation: number): Bounds =
 export const placeSection = (
   profile: Profile,
   sheet: Sheet,
+  parts: FlatParts,
   options: FitOptions,
   framePen: Pen,
   room: number,
@@ -107,12 +140,12 @@ export const placeSection = (
   const rotation = options.view?.rotation ?? options.rotation ?? 0
   let scale = options.view?.scale ?? 1
   let pen = framePen
-  let walked = drawnSection(profile, sheet, 1000, withWeight(framePen, 0))
+  let walked = drawnSection(profile, parts, sheet, 1000, withWeight(framePen, 0))
   let bounds = turnedBounds(walked, rotation)
   for (let pass = 0; pass < 3; pass += 1) {
     if (options.view === undefined) scale = scaleToFit(bounds, options, room + halfWeight(pen))
     pen = penForScale(framePen, profile, sheet, scale)
-    walked = drawnSection(profile, sheet, scale, pen)
+    walked = drawnSection(profile, parts, sheet, scale, pen)
     bounds = turnedBounds(walked, rotation)
   }
   const middle = middleOf(bounds)
@@ -122,15 +155,17 @@ export const placeSection = (
   }
   const view = { origin, scale, rotation }
   const transform = frameTransform(view)
-  const chainOf = (parts: readonly WalkedPart[], left: number): Point[] =>
-    offsetChain(parts, left / scale, flatnessAt(scale)).map(transform.toFrame)
+  const chainOf = (pieces: readonly WalkedPart[], left: number): Point[] =>
+    offsetChain(pieces, left / scale, flatnessAt(scale)).map(transform.toFrame)
+  let drawn: readonly DrawnPart[] | undefined
   return {
     view,
     ...transform,
     walked,
     pen,
-    parts: drawnParts(walked, scale, (parts) => chainOf(parts, 0)),
-    metal: { chords: chordsOf(walked, scale, transform.toFrame), half: halfWeight(pen) },
+    parts: () => (drawn ??= drawnParts(walked, scale, (pieces) => chainOf(pieces, 0))),
+    middle: { x: origin.x + middle.x * scale, y: origin.y - middle.y * scale },
+    metal: metalOfChain(chordsOf(walked, scale, transform.toFrame), halfWeight(pen)),
     chain: (left) => chainOf(walked, left),
   }
 }

@@ -6,10 +6,11 @@ import { offsetCorners, roundCorners } from '#shared/geometry/corner-path'
 import { segmentsOf } from '#shared/geometry/polyline'
 import type { Vector } from '#shared/geometry/vector'
 import { rotate, vector } from '#shared/geometry/vector'
+import { metalOf } from './clearance'
 import { clipPolygon, clipSides } from './clip-polygon'
 import type { DisplayItem, DisplayList, Point } from './display-list'
 import type { LabelSpace } from './label-space'
-import { letterCandidates } from './label-space'
+import { letterPlaces, linesOfLabel, middleOfLabel } from './label-space'
 import type { Pen } from './pen'
 import { halfWeight, penFor } from './pen'
 import { placeLabels } from './placement'
@@ -229,7 +230,7 @@ const drawLetters = (
   const frame = grow(view.frame, -3)
   const points = chain.map(view.place)
   const space: LabelSpace = {
-    metal: { chords: segmentsOf(points), half: halfWeight(pen) },
+    metal: metalOf(segmentsOf(points), halfWeight(pen)),
     frame,
     pen,
   }
@@ -241,24 +242,24 @@ const drawLetters = (
     if (end === undefined || next === undefined) return []
     const seen = contains(frame, end) ? end : leavingPoint(points, frame)
     const out = vector(end.x - next.x, end.y - next.y)
-    return { edge, weight: 1, candidates: letterCandidates(space, edge, seen, out) }
+    return { edge, weight: 1, streams: [letterPlaces(space, edge, seen, out)] }
   })
   return placeLabels(labels).flatMap((placed, index): DisplayItem[] => {
     const edge = labels[index]?.edge
     if (placed?.radius === undefined || edge === undefined) return []
     const part = { kind: 'edge' as const, edge }
     return [
-      ...placed.lines.map((line) => path('edge', [line.from, line.to], 1, part)),
+      ...linesOfLabel(placed).map((points) => path('edge', points, 1, part)),
       {
         kind: 'circle',
         role: 'edge',
         part,
-        center: placed.at,
+        center: middleOfLabel(placed),
         radius: placed.radius,
         width: 1,
         filled: false,
       },
-      text('edge', edge, placed.at, placed.size, part, true),
+      text('edge', edge, middleOfLabel(placed), placed.size, part, true),
     ]
   })
 }
