@@ -126,3 +126,52 @@ export const colorAt = (
   })
 
 const DOTS = 288
+
+/** Poppler's box of a word is as high as the font's ascent and descent: letters fill the middle of it. */
+const SLACK = 0.28
+
+/** Pairs of words on a page that are printed over each other, as text for a failing test. */
+export function overlapsOf(words: readonly PlacedWord[]): string[] {
+  const cores = words.map((word) => {
+    const upright = word.yMax - word.yMin > word.xMax - word.xMin && word.text.length > 2
+    const slackX = upright ? (word.xMax - word.xMin) * SLACK : 0.5
+    const slackY = upright ? 0.5 : (word.yMax - word.yMin) * SLACK
+    return {
+      ...word,
+      xMin: word.xMin + slackX,
+      xMax: word.xMax - slackX,
+      yMin: word.yMin + slackY,
+      yMax: word.yMax - slackY,
+    }
+  })
+  return cores.flatMap((a, index) =>
+    cores
+      .slice(index + 1)
+      .filter(
+        (b) =>
+          a.page === b.page &&
+          a.xMin < b.xMax &&
+          b.xMin < a.xMax &&
+          a.yMin < b.yMax &&
+          b.yMin < a.yMax,
+      )
+      .map((b) => `page ${a.page}: "${a.text}" and "${b.text}"`),
+  )
+}
+
+/** Words that stand beyond the margin of their page. */
+export const outsideOf = (
+  words: readonly PlacedWord[],
+  page: { readonly width: number; readonly height: number },
+  margin: number,
+): string[] =>
+  words
+    .filter(
+      ({ xMin, yMin, xMax, yMax }) =>
+        xMin < margin ||
+        xMax > page.width - margin ||
+        // The box is higher than the letters.
+        (yMin + yMax) / 2 < margin ||
+        (yMin + yMax) / 2 > page.height - margin,
+    )
+    .map(({ page: number, text }) => `page ${number}: "${text}"`)
