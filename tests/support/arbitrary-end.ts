@@ -5,7 +5,11 @@ import type { FoldingSheet } from '#shared/strip/flat-parts'
 import { flatParts } from '#shared/strip/flat-parts'
 import { profileArbitrary, sheetArbitrary } from './arbitrary-profile'
 
-const degrees = (most: number) => fc.double({ min: -most, max: most, noNaN: true })
+/** Without -0, which a mirror turns into 0. */
+const between = (least: number, most: number) =>
+  fc.double({ min: least, max: most, noNaN: true }).map((value) => value + 0)
+
+const degrees = (most: number) => between(-most, most)
 
 const cosOf = (angle: number): number => Math.cos((angle / 180) * Math.PI)
 
@@ -26,11 +30,7 @@ export const planeArbitrary: fc.Arbitrary<CutPlane> = fc.oneof(
   fc.record({ plumb: degrees(70) }),
   fc.record({ corner: cornerArbitrary }),
   fc.record({
-    normal: fc.tuple(
-      fc.double({ min: 0.4, max: 3, noNaN: true }),
-      fc.double({ min: -1, max: 1, noNaN: true }),
-      fc.double({ min: -1, max: 1, noNaN: true }),
-    ),
+    normal: fc.tuple(between(0.4, 3), between(-1, 1), between(-1, 1)),
   }),
 )
 
