@@ -4,6 +4,7 @@ import type { BenchShop } from './bench-shop'
 import { openBenchShop } from './bench-shop'
 import { tableLines } from './bench-table'
 import { benchDrawing } from './drawing.bench'
+import { benchEnds } from './ends.bench'
 import { benchExplain } from './explain.bench'
 import { benchLabels, labelsTitle } from './labels.bench'
 import { benchMoves, movesTitle } from './moves.bench'
@@ -29,6 +30,7 @@ async function machineLine({ db }: BenchShop): Promise<string> {
 // The kernel first: nothing else of ours runs on the machine then.
 const kernel = [
   { title: 'Strip, in this process', rows: benchStrip() },
+  { title: 'Piece ends, in this process', rows: benchEnds() },
   { title: 'Bend plan, in this process', rows: benchPlan() },
   { title: 'Why not and what would cure it, in this process', rows: benchExplain() },
   { title: 'Drawing, in this process', rows: benchDrawing() },
