@@ -17,9 +17,10 @@ export type LaidStrip =
  * The strip lies left side up, edge A nearest; `along` counts from the blank's left end and `at`
  * from edge A, but a mark's `along` from the end it belongs to. A right end's mark lies at the
  * greatest t of its cut less its own, a left end's at its own t less the least. On a leg the cut
- * is a straight line from crease to crease; within a bend's own zone the sheet really cuts along
- * a curve, which is off that line by less than the bend's radius and thickness. `pieceLength`
- * counts from tip to tip, laps included; tabs make the blank longer.
+ * is a straight line from crease to crease, laid out at the sharp corners of the sheet's middle;
+ * within a bend the sheet really cuts along a curve, which lies off the mark by at most the cut's
+ * slope times (R + T/2)(1 / cos(turn / 2) - 1). `pieceLength` counts from tip to tip, laps included;
+ * tabs make the blank longer.
  *
  * An end that cannot be cut gives its problems instead, by code and with values. Never throws.
  */
