@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { newCode } from '#server/features/pieces/new-code'
 import { may } from '#shared/access/permissions'
+import { listBrakes } from '#shared/brakes/brakes.contract'
 import { ENDPOINTS } from '#shared/http/contracts'
 import type { Endpoint } from '#shared/http/endpoint'
 import { getJob, listJobs } from '#shared/jobs/jobs.contract'
@@ -10,9 +11,10 @@ import { listOrders } from '#shared/orders/orders.contract'
 import { getPiece, undoMoves } from '#shared/pieces/pieces.contract'
 import { getSession } from '#shared/people/people.contract'
 import { listShelf } from '#shared/shelf/shelf.contract'
+import { recordTestBend } from '#shared/stock/stock.contract'
 import { fillPath, type ApiAgent, type ApiAnswer } from '../../support/api-agent'
-import { openFloor, type Floor } from '../../support/making-factories'
-import { lineInput, orderInput, zProfile } from '../../support/shop-factories'
+import { at, openFloor, type Floor } from '../../support/making-factories'
+import { lineInput, orderInput, testBendInput, zProfile } from '../../support/shop-factories'
 import { createHoldings, marksOf, type Holdings } from './holdings'
 import { namedThings, nameOf } from './named-things'
 
@@ -199,12 +201,24 @@ async function readByOwner(): Promise<unknown> {
 }
 
 describe('what the shop alone may do', () => {
+  let bendId: string
+  beforeAll(async () => {
+    const { items } = await floor.manager.call(listBrakes)
+    const { bends } = await floor.wren.call(recordTestBend, {
+      params: { stockId: floor.stockId },
+      body: testBendInput(at(items, 0).id),
+    })
+    bendId = at(bends, 0).id
+  })
+
   /** By the place of the id in the path; the shop's endpoints name no other things there. */
   const theirParams = (endpoint: Endpoint): Record<string, string> => ({
     orderId: foreign.order.id,
     runId: foreign.runId,
     bundleId: foreign.bundleId,
     printId: foreign.printId,
+    stockId: floor.stockId,
+    bendId,
     code: endpoint.path.startsWith('/bundles') ? foreign.bundleCode : foreign.code,
   })
   const unknownParams = {
@@ -212,6 +226,8 @@ describe('what the shop alone may do', () => {
     runId: randomUUID(),
     bundleId: randomUUID(),
     printId: randomUUID(),
+    stockId: randomUUID(),
+    bendId: randomUUID(),
     code: newCode('piece'),
   }
 
