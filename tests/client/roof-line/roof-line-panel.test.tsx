@@ -83,12 +83,13 @@ describe('a line on the roof', () => {
       },
     })
     await type('Length to cover', "8'")
-    // At 45 degrees the point is as long as the section is wide: leg 1 and what leg 3 runs on.
-    expect(screen.getByText(/Added for miter points and tabs: 5 1\/2" at the left/)).toBeVisible()
+    // The point is as long as the section is wide at 45 degrees, 4 1/2 in.; the tab stands at the
+    // deep side of the cut, so that it reaches 5/8 in. beyond the tip and no more.
+    expect(screen.getByText(/Added for miter points and tabs: 5 1\/8" at the left/)).toBeVisible()
     await user.click(
       screen.getByRole('checkbox', { name: 'The length runs to the tips of the miters already' }),
     )
-    expect(screen.getByText(/Added for miter points and tabs: 1" at the left/)).toBeVisible()
+    expect(screen.getByText(/Added for miter points and tabs: 5\/8" at the left/)).toBeVisible()
   })
 
   it('that no piece of the shop can cover so says what would', async () => {

@@ -16,6 +16,7 @@ import type { EndedLine } from '../model/neighbors'
 import { useEndWords } from '../useEndWords'
 import { useNeighbor } from '../useNeighbor'
 import { CornerPicture } from './CornerPicture'
+import { EndOutline } from './EndOutline'
 import { MeetsHere } from './MeetsHere'
 
 interface Props {
@@ -74,6 +75,7 @@ export function EndPictures(props: Props) {
       {own.end.kind === 'miter' && (
         <MeetsHere own={own} ownKey={props.lineKey} meeting={meeting} disabled={disabled} />
       )}
+      <EndOutline layout={shown.layout} strip={strip} stock={stock} side={side} />
       <MarkTable end={shown.layout[side]} strip={strip} caption={t(`marks.caption.${side}`)} />
     </div>
   )
