@@ -16,6 +16,7 @@ import { createDemoShop } from './demo/shop'
 import { DEMO_STOCKS } from './demo/stocks'
 import { STORIES } from './demo/stories'
 import { tellStories } from './demo/tell'
+import { TEST_BEND_STEPS } from './demo/test-bends'
 
 /** Who can sign in to the demo shop. */
 export const DEMO_ACCOUNTS: readonly {
@@ -42,7 +43,7 @@ export async function seedDemo(db: Knex): Promise<void> {
   const passwordHash = await hashPassword(DEMO_PASSWORD)
   await db.transaction(async (trx) => {
     await insertShop(trx, calendar, random, passwordHash)
-    await tellStories(createDemoShop(trx, calendar, random), STORIES)
+    await tellStories(createDemoShop(trx, calendar, random), STORIES, TEST_BEND_STEPS)
   })
 }
 

@@ -7,16 +7,24 @@ import { DEMO_STOCKS } from './stocks'
 
 const { ines } = DEMO_PEOPLE
 
-const inputOf = ([mark, name, profile, stock, quantity, length]: LineOfStory): OrderLineInput => ({
+const inputOf = ([
+  mark,
+  name,
+  profile,
+  stock,
+  quantity,
+  length,
+  dressing = {},
+]: LineOfStory): OrderLineInput => ({
   mark,
   name,
   profile: DEMO_PROFILES[profile],
   stockId: DEMO_STOCKS[stock].id,
   quantity,
   length,
-  ends: null,
-  hands: null,
-  statedGirth: null,
+  ends: dressing.ends ?? null,
+  hands: dressing.hands ?? null,
+  statedGirth: dressing.statedGirth ?? null,
 })
 
 export const submit: Act = async ({ shop, story, setOrder }) => {
@@ -27,7 +35,7 @@ export const submit: Act = async ({ shop, story, setOrder }) => {
       neededBy: shop.calendar.day(story.neededIn),
       notes: story.notes,
       lines: story.lines.map(inputOf),
-      goods: [],
+      goods: story.goods ?? [],
     },
     DEMO_PEOPLE[story.by],
   )

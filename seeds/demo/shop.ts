@@ -15,11 +15,20 @@ import { createReleaseOrder } from '#server/features/orders/release-order'
 import { createPiecesService, type PiecesService } from '#server/features/pieces/pieces.service'
 import { createRunsService, type RunsService } from '#server/features/runs/runs.service'
 import { createStocksQueries } from '#server/features/stocks/stocks.queries'
+import { listTestBends } from '#server/features/stocks/test-bends.queries'
+import {
+  createTestBendsService,
+  type TestBendsService,
+} from '#server/features/stocks/test-bends.service'
+import { createTestBendsStore } from '#server/features/stocks/test-bends.store'
 import { announce } from '#server/live/announce'
 import { createLocalPlanner } from '#server/planning/local-planner'
 import type { Calendar } from './calendar'
-import type { DemoRandom } from './demo-random'
+import { createDemoRandom, type DemoRandom } from './demo-random'
 import { createDemoReleaseStore } from './release-store'
+
+/** Ids of test bends are drawn apart, so that they move no code of the pieces. */
+const TEST_BEND_SEED = 20_261
 
 /** The product's own services under a clock that the seed sets, so that its history obeys every rule. */
 export interface DemoShop {
@@ -31,6 +40,7 @@ export interface DemoShop {
   readonly runs: RunsService
   readonly bundles: BundlesService
   readonly handOff: HandOffService
+  readonly testBends: TestBendsService
 }
 
 export function createDemoShop(db: Db, calendar: Calendar, random: DemoRandom): DemoShop {
@@ -50,7 +60,21 @@ export function createDemoShop(db: Db, calendar: Calendar, random: DemoRandom): 
     runs: createRunsService(db, ports),
     bundles: createBundlesService(db, ports),
     handOff: createHandOffService(db, ports),
+    testBends: createDemoTestBends(db, clock),
   }
+}
+
+function createDemoTestBends(db: Db, clock: { now: () => Date }): TestBendsService {
+  const { nextId } = createDemoRandom(TEST_BEND_SEED)
+  const base = createTestBendsStore(db)
+  return createTestBendsService({
+    stocks: createStocksQueries(db),
+    brakes: createBrakesQueries(db),
+    listBends: (stockId) => listTestBends(db, stockId),
+    store: { ...base, addTestBend: (bend) => base.addTestBend({ id: nextId(), ...bend }) },
+    clock,
+    announce: (announcement) => announce(db, announcement),
+  })
 }
 
 function createDemoOrders(db: Db, random: DemoRandom, clock: { now: () => Date }): OrdersService {

@@ -16,7 +16,8 @@ import type { StockInsert } from '#server/db/tables/stocks'
  * Widths are those of 48 in. coil and 36 in. copper sheet, lengths what the shop's brakes take:
  * common practice, no source.
  *
- * The T-bend ratings of the paints are invented for the demo, as the paints are.
+ * The T-bend ratings of the paints are invented for the demo, as the paints are: one of them is too
+ * brittle for a closed hem.
  */
 const STEEL = {
   metal: 'steel',
@@ -28,7 +29,7 @@ const STEEL = {
   widest_strip: 48,
   longest_piece: 126,
   k_source: 'handbookHard',
-  paint_t_bend: 2,
+  paint_t_bend: 0,
   alloy: null,
 } as const
 
@@ -36,7 +37,7 @@ const ALUMINUM = {
   ...STEEL,
   metal: 'aluminum',
   density: 0.098,
-  alloy: '3105-H24',
+  alloy: '3105-H25',
 } as const
 
 const steel24 = { ...STEEL, thickness_name: '24 ga', thickness: 0.0276 }
@@ -83,6 +84,7 @@ export const DEMO_STOCKS = {
     thickness: 0.04,
     inside_radius: 0.04,
     color_name: 'Chalk 1',
+    paint_t_bend: 2,
     color_hex: '#e9e6dc',
   },
   copper: {

@@ -1,4 +1,5 @@
 import { amendFirst, answer, ask, release, submit, withdraw } from './acts'
+import { DRESSED } from './dressed-stories'
 import {
   bend,
   bendByCount,
@@ -270,4 +271,4 @@ const ASKED: readonly Story[] = [
   },
 ]
 
-export const STORIES: readonly Story[] = [...MADE, ...ASKED]
+export const STORIES: readonly Story[] = [...MADE, ...ASKED, ...DRESSED]

@@ -1,20 +1,32 @@
 import { DEMO_PEOPLE } from './people'
 import type { DemoShop } from './shop'
-import type { Step, Story, Told } from './story'
+import type { ShopStep, Story } from './story'
 
 interface Happening {
   readonly moment: Date
-  readonly step: Step
-  readonly told: Omit<Told, 'now'>
+  readonly happen: () => Promise<void>
 }
 
-/** Lets all stories happen, each step in its turn, so that numbers and events run with the time. */
-export async function tellStories(shop: DemoShop, stories: readonly Story[]): Promise<void> {
-  const happenings = stories.flatMap((story) => happeningsOf(shop, story))
+/**
+ * Lets all stories happen, and what happens in the shop beside them, each step in its turn, so that
+ * numbers and events run with the time.
+ */
+export async function tellStories(
+  shop: DemoShop,
+  stories: readonly Story[],
+  steps: readonly ShopStep[],
+): Promise<void> {
+  const happenings = [
+    ...stories.flatMap((story) => happeningsOf(shop, story)),
+    ...steps.map(({ day, time, act }) => ({
+      moment: shop.calendar.moment(day, time),
+      happen: () => act(shop),
+    })),
+  ]
   happenings.sort((a, b) => a.moment.getTime() - b.moment.getTime())
-  for (const { moment, step, told } of happenings) {
+  for (const { moment, happen } of happenings) {
     shop.setTime(moment)
-    await step.act({ ...told, now: moment })
+    await happen()
   }
 }
 
@@ -31,9 +43,8 @@ function happeningsOf(shop: DemoShop, story: Story): Happening[] {
       orderId = id
     },
   }
-  return story.steps.map((step) => ({
-    moment: shop.calendar.moment(step.day, step.time),
-    step,
-    told,
-  }))
+  return story.steps.map(({ day, time, act }) => {
+    const now = shop.calendar.moment(day, time)
+    return { moment: now, happen: () => act({ ...told, now }) }
+  })
 }

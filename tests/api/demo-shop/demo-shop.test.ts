@@ -6,6 +6,9 @@ import { ROLES } from '#shared/access/permissions'
 import { ORDER_STATES } from '#shared/orders/order.schema'
 import { parseCode } from '#shared/pieces/codes'
 import { PIECE_MOVES } from '#shared/pieces/piece-state'
+import { getRun } from '#shared/runs/runs.contract'
+import { listStocks, listTestBends } from '#shared/stock/stock.contract'
+import { stockSchema } from '#shared/stock/stock.schema'
 import { startApi, type Api } from '../../support/api-app'
 
 let api: Api
@@ -49,7 +52,7 @@ describe('The demo shop', () => {
       stocks: 6,
       brakes: 3,
       jobs: 5,
-      orders: 13,
+      orders: 15,
       shelf_profiles: 11,
     })
   })
@@ -64,6 +67,44 @@ describe('The demo shop', () => {
     expect([...states].sort()).toEqual(['bent', 'bundled', 'pickedUp', 'queued', 'scrapped'])
     const remakes = await api.db('pieces').whereNotNull('remake_of').pluck('state')
     expect(remakes.sort()).toEqual(['bundled', 'queued'])
+  })
+
+  it('has pieces of both hands at the brake and on the rack', async () => {
+    const agent = api.newAgent()
+    await agent.signIn(DEMO_PEOPLE.wren.email, DEMO_PASSWORD)
+    const [run] = await api
+      .db('runs as r')
+      .join('orders as o', 'o.id', 'r.order_id')
+      .where('o.po_number', '7744')
+      .orderBy('r.number')
+      .pluck<string[]>('r.id')
+    const { pieces } = await agent.call(getRun, { params: { runId: run ?? '' } })
+    expect(pieces.map(({ hand, lowEnd, state }) => [hand, lowEnd, state])).toEqual([
+      ['left', 'left', 'bundled'],
+      ['left', 'left', 'bundled'],
+      ['right', 'right', 'bundled'],
+      ['right', 'right', 'queued'],
+    ])
+  })
+
+  it('cuts by what was measured where a test bend is in use', async () => {
+    const agent = api.newAgent()
+    await agent.signIn(DEMO_PEOPLE.juno.email, DEMO_PASSWORD)
+    const { items } = await agent.call(listStocks)
+    const measured = items.filter(({ calibrations }) => calibrations.length > 0)
+    expect(measured.map(({ colorName }) => colorName)).toEqual(['Harbor 7'])
+    const [stock] = measured
+    if (!stock) throw new Error('Nothing was measured.')
+    const { bends, fits } = await agent.call(listTestBends, { params: { stockId: stock.id } })
+    expect(bends).toHaveLength(2)
+    expect(fits).toMatchObject([{ kFactor: stock.calibrations[0]?.kFactor, bends: 2 }])
+    const runs = await api.db('runs').orderBy('number')
+    const byMeasure = runs
+      .map((row) => stockSchema.safeParse(row.stock).data)
+      .filter((made) => made !== undefined && made.calibrations.length > 0)
+    expect(byMeasure.map((made) => made?.sheet.kFactor)).toEqual(
+      Array(2).fill(stock.calibrations[0]?.kFactor),
+    )
   })
 
   it('has an account for every role, and all of them can sign in', async () => {
