@@ -11,7 +11,10 @@ const isIdle = (before: StripPoint, point: StripPoint, after: StripPoint): boole
   return Math.abs(aside) <= TOLERANCE * length
 }
 
-/** The closed polygon without repeats and without corners on a straight side. */
+/**
+ * A closed polygon without repeats and without corners on a straight side. Its first point and its
+ * last are taken for corners as they stand.
+ */
 export const tidyPolygon = (points: readonly StripPoint[]): StripPoint[] => {
   const kept: StripPoint[] = []
   for (const point of points) {
@@ -20,14 +23,6 @@ export const tidyPolygon = (points: readonly StripPoint[]): StripPoint[] => {
     if (last && Math.hypot(point.along - last.along, point.at - last.at) <= TOLERANCE) continue
     if (last && beforeLast && isIdle(beforeLast, last, point)) kept.pop()
     kept.push(point)
-  }
-  // Where the polygon closes: its last corner, then its first.
-  for (let turn = 0; turn < 2; turn += 1) {
-    const [first, second] = kept
-    const [last, beforeLast] = [kept.at(-1), kept.at(-2)]
-    if (kept.length < 4 || !first || !second || !last || !beforeLast) return kept
-    if (isIdle(beforeLast, last, first)) kept.pop()
-    else if (isIdle(last, first, second)) kept.shift()
   }
   return kept
 }

@@ -152,14 +152,15 @@ describe('hems of a folded end', () => {
   })
 
   it('are missing for the length of an under lap, and not of an over lap', () => {
-    const lipAt = (side: 'under' | 'over') => {
-      const end: End = { kind: 'lap', side, length: 4, tabs: [] }
-      const faces = foldedEnd({ ...square, end })
+    const lipAt = (lap: 'under' | 'over', side: Side) => {
+      const end: End = { kind: 'lap', side: lap, length: 4, tabs: [] }
+      const faces = foldedEnd({ ...square, end, side })
       expect(faceOf(faces, 1).cut[0].x).toBe(0)
       return faceOf(faces, 'lipA').cut[0].x
     }
-    expect(lipAt('under')).toBe(4)
-    expect(lipAt('over')).toBe(0)
+    expect(lipAt('under', 'left')).toBe(4)
+    expect(lipAt('under', 'right')).toBe(-4)
+    expect(lipAt('over', 'left')).toBe(0)
   })
 })
 

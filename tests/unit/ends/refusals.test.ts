@@ -107,6 +107,11 @@ describe('an end that cannot be cut is refused with its values', () => {
       { code: 'cornerTurnsBack', found: 179, limit: 178 },
     ],
     [
+      'a corner of more than half round',
+      miter(level(-185)),
+      { code: 'cornerTurnsBack', found: 185, limit: 178 },
+    ],
+    [
       'a run that falls back on itself',
       miter({ corner: { slopeIn: 60, slopeOut: -60, plan: 180 } }),
       { code: 'cornerTurnsBack', found: 180, limit: 178 },
@@ -198,6 +203,7 @@ describe('an end that cannot be cut is refused with its values', () => {
     ['with a bend too few', { ...face, bends: [] }],
     ['with a bend of half a turn', profileOf([4, 6], [180])],
     ['with a leg its bends use up', profileOf([4, 0.02, 6], [90, 90])],
+    ['with a leg its bends use up but for their own zones', profileOf([4, 0.08, 6], [90, 90])],
     [
       'with a hem of no length',
       profileOf([4], [], { hemA: { style: 'closed', length: 0, turn: 1 } }),
