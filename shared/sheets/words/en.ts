@@ -48,6 +48,7 @@ export const EN: SheetWords = {
     high: 'HIGH END',
     square: 'Cut square.',
     under: 'Lap that slips under its neighbor.',
+    relief: (length) => `Cut away what is dotted, over ${length} from the end.`,
     over: 'Lap that takes its neighbor in.',
     miter: 'Mitered: prick the marks and cut from one to the next.',
     tab: (leg, length) =>

@@ -48,6 +48,7 @@ export const ES: SheetWords = {
     high: 'EXTREMO ALTO',
     square: 'Corte a escuadra.',
     under: 'Traslape que entra debajo de la vecina.',
+    relief: (length) => `Recorte lo punteado, en ${length} desde el extremo.`,
     over: 'Traslape que recibe a la vecina.',
     miter: 'A inglete: marque los puntos y corte de uno al siguiente.',
     tab: (leg, length) =>

@@ -50,6 +50,8 @@ export interface SheetWords {
     readonly high: string
     readonly square: string
     readonly under: string
+    /** What is cut off for a lap that slips under. */
+    readonly relief: (length: string) => string
     readonly over: string
     readonly miter: string
     readonly tab: (leg: number, length: string) => string
