@@ -30,11 +30,10 @@ export function TestBendsPage() {
 
 function OfStock({ stocks }: { readonly stocks: readonly Stock[] }) {
   const { t } = useTranslation('stocks')
-  const { t: officeText } = useTranslation('office')
   const [search, setSearch] = useSearchParams()
   const stock = stocks.find(({ id }) => id === search.get('stock')) ?? stocks[0]
   if (!stock) {
-    return <EmptyState title={officeText('stocks.empty')} hint={officeText('stocks.emptyHint')} />
+    return <EmptyState title={t('office:stocks.empty')} hint={t('office:stocks.emptyHint')} />
   }
   return (
     <div className="flex flex-col gap-8">

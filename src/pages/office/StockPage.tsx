@@ -15,7 +15,6 @@ import { OfficeNav } from './OfficeNav'
 /** One stock: what is reckoned with, where it comes from, and the bends that were measured. */
 export function StockPage() {
   const { t } = useTranslation('stocks')
-  const { t: officeText } = useTranslation('office')
   const { stockId = '' } = useParams()
   const { data, error, refetch } = useQuery(stocksQuery())
   const stock = data?.items.find(({ id }) => id === stockId)
@@ -25,18 +24,18 @@ export function StockPage() {
         thickness: stock.thicknessName,
         metal: t(`metal.${stock.sheet.metal}`),
       })
-    : officeText('stocks.title')
+    : t('office:stocks.title')
   return (
     <PlaceFrame
       title={title}
-      subtitle={officeText('stocks.open')}
+      subtitle={t('office:stocks.open')}
       nav={<OfficeNav />}
-      back={{ to: paths.office.stocks(), label: officeText('stocks.title') }}
+      back={{ to: paths.office.stocks(), label: t('office:stocks.title') }}
     >
       {!data &&
         (error ? <ErrorState error={error} onRetry={() => void refetch()} /> : <LoadingState />)}
       {data && !stock && (
-        <EmptyState title={officeText('stocks.gone')} hint={officeText('stocks.goneHint')} />
+        <EmptyState title={t('office:stocks.gone')} hint={t('office:stocks.goneHint')} />
       )}
       {stock && (
         <div className="flex flex-col gap-8">

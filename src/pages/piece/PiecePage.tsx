@@ -68,6 +68,12 @@ function PieceSheet({ piece, place }: { readonly piece: Piece; readonly place: P
   const facts = [
     { label: t('code'), value: piece.code, figure: true },
     { label: t('length'), value: run(piece.length), figure: true },
+    ...(piece.hand === null
+      ? []
+      : [{ label: t('hand'), value: t(`handOf.${piece.hand}`), figure: true }]),
+    ...(piece.lowEnd === null
+      ? []
+      : [{ label: t('lowEnd'), value: t(`sideOf.${piece.lowEnd}`), figure: false }]),
     { label: t('order'), value: orderNumber(piece.orderNumber), figure: true },
     { label: t('job'), value: piece.job, figure: false },
     { label: t('company'), value: piece.company, figure: false },

@@ -34,6 +34,12 @@ export const routes: RouteObject[] = [
         ...lazyPage(async () => (await import('./orders/AmendOrderPage')).AmendOrderPage),
       },
       {
+        path: 'orders/:orderId/lines/:lineId',
+        ...lazyPage(
+          async () => (await import('@/pages/strip-sheet/OrderStripSheetPage')).OrderStripSheetPage,
+        ),
+      },
+      {
         path: 'pieces/:code',
         ...lazyPage(async () => (await import('@/pages/piece/PiecePage')).PiecePage),
       },

@@ -1,6 +1,7 @@
 import { useId } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { OrderLine } from '#shared/orders/order.schema'
+import { ButtonLink } from '@/components/ButtonLink'
 import { BendsLine } from './LineBends'
 import { OverrideNote } from './OverrideNote'
 import { LineEnds } from './LineEnds'
@@ -17,10 +18,12 @@ interface Props {
   readonly unreleased: boolean
   /** Where a piece's history is; absent where the reader has no such page. */
   readonly piecePath?: (code: string) => string
+  /** Where the line's strip sheet is. */
+  readonly sheetPath: string
 }
 
 /** A line of an order that is in: the drawing as the shop has it, and how far its pieces are. */
-export function OrderLineCard({ line, unreleased, piecePath }: Props) {
+export function OrderLineCard({ line, unreleased, piecePath, sheetPath }: Props) {
   const { t } = useTranslation('orders')
   const { t: drawing } = useTranslation('drawing')
   const id = useId()
@@ -53,6 +56,9 @@ export function OrderLineCard({ line, unreleased, piecePath }: Props) {
                 : drawing('answer.bendsNowhere')
             }
           />
+          <ButtonLink variant="quiet" className="-mx-1.5 self-start px-1.5!" to={sheetPath}>
+            {t('line.sheet')}
+          </ButtonLink>
           {line.override && <OverrideNote override={line.override} />}
           {unreleased && <p className="text-small text-scribe">{t('line.noPieces')}</p>}
           {pieces.length > 0 && (

@@ -11,6 +11,7 @@ import { SvgFigure } from '@/features/drawing/figure/SvgFigure'
 import { useFigureColors } from '@/features/drawing/figure/useFigureLook'
 import { usePlanWords } from '@/features/drawing/usePlanWords'
 import { useUnits } from '@/features/people/useUnits'
+import { NextPiece } from './NextPiece'
 import { StandFigure } from './StandFigure'
 
 interface Props {
@@ -62,6 +63,7 @@ export function BendStep({ run, step, picture, number }: Props) {
           {t('step.count', { number, total: run.plan.steps.length })} ·{' '}
           <b className="text-ink">{fold}</b>
         </p>
+        <NextPiece run={run} />
         <GaugeFigure run={run} step={step} />
         <AngleFigure run={run} step={step} />
         <p className="mt-auto border-t border-rule pt-3 text-small text-scribe">

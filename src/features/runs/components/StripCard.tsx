@@ -6,12 +6,13 @@ import { ChecksMade } from '@/features/drawing/panels/ChecksMade'
 import { OverrideNote } from '@/features/orders/components/OverrideNote'
 import { useUnits } from '@/features/people/useUnits'
 import { useFormats } from '@/lib/format/useFormats'
+import { RunLines } from './RunLines'
 import { StandFigure } from './StandFigure'
 
 /** The first card of a run: what to cut, where the creases lie, what the finished piece looks like. */
 export function StripCard({ run }: { readonly run: Run }) {
   const { t } = useTranslation('brake')
-  const { size, run: length, weight } = useUnits()
+  const { size, weight } = useUnits()
   const { duration } = useFormats()
   const { ref, size: room } = useElementSize()
   const heaviest = Math.max(...run.pieces.map((piece) => piece.weight))
@@ -38,13 +39,7 @@ export function StripCard({ run }: { readonly run: Run }) {
         <p className="text-scribe">{t('strip.width')}</p>
         <StandFigure text={size(run.strip.stripWidth, 32).replace(/"$/, '')} testId="strip-width" />
         <p className="text-scribe">{t('strip.lengths')}</p>
-        <ul className="font-figure text-figure">
-          {run.lengths.map(({ length: inches, count }) => (
-            <li key={inches}>
-              {count} × {length(inches)}
-            </li>
-          ))}
-        </ul>
+        <RunLines run={run} />
         <p className="text-small">
           {t('strip.brake', { brake: run.brakeName })}
           {run.plan.seconds !== null && ` ${t('strip.time', { time: duration(run.plan.seconds) })}`}

@@ -2,6 +2,7 @@ import { useId } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { OrderLine } from '#shared/orders/order.schema'
 import { paths } from '@/app/paths'
+import { ButtonLink } from '@/components/ButtonLink'
 import { PlanDetails } from '@/features/drawing/plan/PlanDetails'
 import { BendsLine } from '@/features/orders/components/LineBends'
 import { LineEnds } from '@/features/orders/components/LineEnds'
@@ -15,8 +16,15 @@ import { GirthDifference } from '@/features/orders/components/StatedGirth'
 import { StockName } from '@/features/orders/components/StockName'
 
 /** A line as it is checked at the counter: the drawing beside what it takes and what bends it. */
-export function CounterLine({ line }: { readonly line: OrderLine }) {
+export function CounterLine({
+  line,
+  sheetPath,
+}: {
+  readonly line: OrderLine
+  readonly sheetPath: string
+}) {
   const { t } = useTranslation('drawing')
+  const { t: say } = useTranslation('orders')
   const id = useId()
   const { bendsOn, stock, strip, quantity, pieces } = line
   const bends = bendsOn.length > 0
@@ -53,6 +61,9 @@ export function CounterLine({ line }: { readonly line: OrderLine }) {
               </div>
             )}
           </BendsLine>
+          <ButtonLink variant="quiet" className="-mx-1.5 self-start px-1.5!" to={sheetPath}>
+            {say('line.sheet')}
+          </ButtonLink>
           {line.override && <OverrideNote override={line.override} />}
           {pieces.length === 0 && (
             <PlanDetails profile={line.profile} stock={stock} pieceLength={line.length} />

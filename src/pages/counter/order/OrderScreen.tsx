@@ -140,7 +140,11 @@ export function OrderScreen({ order }: { readonly order: Order }) {
         <div className="flex min-w-0 flex-col gap-8 xl:col-start-1 xl:row-span-2 xl:row-start-1">
           <h2 className="sr-only">{t('order.lines')}</h2>
           {order.lines.map((line) => (
-            <CounterLine key={line.id} line={line} />
+            <CounterLine
+              key={line.id}
+              line={line}
+              sheetPath={paths.counter.stripSheet(order.id, line.id)}
+            />
           ))}
           <OrderGoods order={order} />
         </div>

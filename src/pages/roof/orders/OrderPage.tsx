@@ -93,6 +93,7 @@ function OrderScreen({ order }: { readonly order: Order }) {
             line={line}
             unreleased={open}
             piecePath={(code) => paths.piece('roof', code)}
+            sheetPath={paths.roof.stripSheet(order.id, line.id)}
           />
         ))}
         <OrderGoods order={order} />
