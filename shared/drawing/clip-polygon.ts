@@ -31,3 +31,52 @@ export const clipPolygon = (polygon: readonly Vector[], box: Bounds): Vector[] =
 /** The polygon's own sides inside the box, without the cuts along the box. */
 export const clipSides = (polygon: readonly Vector[], box: Bounds): Segment[] =>
   segmentsOf(polygon, true).flatMap((side) => clipToBox(side, box) ?? [])
+
+/**
+ * The polygon's border inside the box as open chains, without the cuts along the box; one closed
+ * chain (its first point again at the end) where all of it lies inside.
+ */
+export const clipBorder = (polygon: readonly Vector[], box: Bounds): Vector[][] => {
+  const chains: Vector[][] = []
+  for (const { from, to } of clipSides(polygon, box)) {
+    const chain = chains.at(-1)
+    const end = chain?.at(-1)
+    if (chain && end && isSamePlace(end, from)) chain.push(to)
+    else chains.push([from, to])
+  }
+  const first = chains[0]
+  const last = chains.at(-1)
+  const [begin, end] = [first?.[0], last?.at(-1)]
+  // The chain that the first corner lies on was begun in its middle.
+  if (first && last && first !== last && begin && end && isSamePlace(end, begin)) {
+    chains.pop()
+    chains[0] = [...last, ...first.slice(1)]
+  }
+  return chains
+}
+
+const isSamePlace = (a: Vector, b: Vector): boolean => Math.hypot(a.x - b.x, a.y - b.y) < 1e-6
+
+/** Slanting lines across a polygon, as far as they lie inside: `step` apart, rising to the right (y down). */
+export const hatchPolygon = (polygon: readonly Vector[], step: number): Segment[] => {
+  const sides = segmentsOf(polygon, true)
+  const rises = polygon.map(({ x, y }) => x + y)
+  const lines: Segment[] = []
+  const last = Math.max(...rises)
+  for (let rise = Math.ceil(Math.min(...rises) / step) * step; rise < last; rise += step) {
+    // The line x + y = rise; where it passes a side, by x.
+    const places = sides
+      .flatMap(({ from, to }) => {
+        const a = from.x + from.y - rise
+        const b = to.x + to.y - rise
+        return a > 0 === b > 0 ? [] : from.x + ((to.x - from.x) * a) / (a - b)
+      })
+      .sort((a, b) => a - b)
+    for (let index = 0; index + 1 < places.length; index += 2) {
+      const [from, to] = places.slice(index, index + 2)
+      if (from === undefined || to === undefined || to - from < 0.5) continue
+      lines.push({ from: { x: from, y: rise - from }, to: { x: to, y: rise - to } })
+    }
+  }
+  return lines
+}

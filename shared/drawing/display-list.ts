@@ -25,9 +25,24 @@ export type Role =
   | 'selected'
   | 'hovered'
   | 'problem'
+  | 'warning'
   | 'tool'
   | 'toolEdge'
   | 'ghost'
+  /** The border of a dressed strip, as it is cut. */
+  | 'outline'
+  /** What is cut off the blank. */
+  | 'cutAway'
+  | 'slit'
+  | 'tabHatch'
+  /** The line a tab is folded on. */
+  | 'tabFold'
+  /** Where a hem is opened again. */
+  | 'opening'
+  /** A place to prick. */
+  | 'mark'
+  /** Words beside a drawing. */
+  | 'word'
   /** Never seen; a wide target for a finger. */
   | 'target'
 
