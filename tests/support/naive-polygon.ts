@@ -48,3 +48,15 @@ export const isSimple = (polygon: readonly FlatPoint[]): boolean => {
     })
   })
 }
+
+const distanceToSide = (point: FlatPoint, [a, b]: Side): number => {
+  const [along, at] = [b.along - a.along, b.at - a.at]
+  const squared = along * along + at * at
+  const part = ((point.along - a.along) * along + (point.at - a.at) * at) / (squared || 1)
+  const near = Math.min(1, Math.max(0, part))
+  return Math.hypot(point.along - a.along - near * along, point.at - a.at - near * at)
+}
+
+/** How far a point lies off the polygon's border. */
+export const offBorder = (polygon: readonly FlatPoint[], point: FlatPoint): number =>
+  Math.min(...sidesOf(polygon).map((side) => distanceToSide(point, side)))
