@@ -14,11 +14,10 @@ const layLine = ({ profile, length, ends }: Cut, sheet: Sheet): LaidStrip =>
   layStrip({ profile, sheet, pieceLength: length, ends })
 
 /**
- * What keeps the ends of a line from being cut, named below `path`; empty where they can. The profile
- * must be free of errors.
+ * What keeps the ends of a line from being cut, named below `path`; empty where they can. A profile
+ * with errors has no strip to cut, which stands at the left end.
  */
 export const endErrors = (line: Cut, sheet: Sheet, path: string): FieldError[] => {
-  if (line.ends === null) return []
   const laid = layLine(line, sheet)
   if (laid.ok) return []
   return laid.problems.map((problem) => ({
