@@ -1,7 +1,13 @@
 import { useMemo, useState } from 'react'
 import type { ClosedEnds } from '#shared/ends/close-ends'
 import type { EndOfPiece } from '#shared/ends/folded-end'
-import { closingWith, neighborsOf, type EndedLine, type Neighbor } from './model/neighbors'
+import {
+  closingWith,
+  likeliest,
+  neighborsOf,
+  type EndedLine,
+  type Neighbor,
+} from './model/neighbors'
 
 export interface Met {
   /** Every end that could meet this one. */
@@ -12,7 +18,7 @@ export interface Met {
   readonly choose: (id: string) => void
 }
 
-/** Which end meets this one: the one that was chosen, until then the first that lies in its corner. */
+/** Which end meets this one: the one that was chosen, until then the one that closes best. */
 export function useNeighbor(own: EndOfPiece | null, lines: readonly EndedLine[]): Met {
   const [chosen, setChosen] = useState<string | null>(null)
   return useMemo(() => {
@@ -22,9 +28,7 @@ export function useNeighbor(own: EndOfPiece | null, lines: readonly EndedLine[])
     const met =
       chosen === ''
         ? null
-        : (neighbors.find(({ id }) => id === chosen) ??
-          neighbors.find((each) => closingWith(own, each).ok) ??
-          null)
+        : (neighbors.find(({ id }) => id === chosen) ?? likeliest(own, neighbors))
     return { neighbors, met, closed: met && closingWith(own, met), choose: setChosen }
   }, [own, lines, chosen])
 }

@@ -177,10 +177,10 @@ describe('a miter', () => {
     const table = screen.getByRole('table', { name: /Marks of the left end/ })
     const rows = within(table).getAllByRole('row').slice(1)
     expect(rows.map((row) => within(row).getByRole('rowheader').textContent)).toEqual([
-      'edge A',
-      'bend 1',
-      'bend 2',
-      'edge B',
+      'Edge A',
+      'Bend 1',
+      'Bend 2',
+      'Edge B',
     ])
     expect(screen.getByRole('img', { name: 'A at its left end, folded' })).toBeVisible()
   })

@@ -49,7 +49,7 @@ export async function openOrder(change: Partial<OrderDraft>) {
     [SUBMIT]: () => json(order(), 201),
   })
   const app = renderApp(`/roof/jobs/${JOB_ID}/order`)
-  await screen.findByRole('button', { name: 'Submit order' }, { timeout: 10_000 })
+  await screen.findByRole('button', { name: 'Submit order' }, { timeout: 30_000 })
 
   /** The draft as it is kept on the device now. */
   const read = (): OrderDraft => {

@@ -19,9 +19,12 @@ interface Props {
 
 /** As wide as a phone's column; it shrinks with anything narrower. */
 const WIDTH = 358
-const HEIGHT = 240
+const HEIGHT = 210
 /** Degrees that a press turns the corner under the eye. */
-const STEP = 30
+const TURNS = [
+  { way: 'left', by: -30, place: 'left-0' },
+  { way: 'right', by: 30, place: 'right-0' },
+] as const
 
 /** The end folded, with the piece that meets it: the corner as it will stand on the roof. */
 export function CornerPicture({ own, mark, stock, meeting: { met, closed } }: Props) {
@@ -56,7 +59,7 @@ export function CornerPicture({ own, mark, stock, meeting: { met, closed } }: Pr
   )
   const side = words.side(own.side)
   return (
-    <figure className="max-w-[22.5rem]">
+    <figure className="relative max-w-[22.5rem]">
       <SvgFigure
         display={display}
         colors={colors}
@@ -67,21 +70,15 @@ export function CornerPicture({ own, mark, stock, meeting: { met, closed } }: Pr
         }
         className="h-auto max-w-full"
       />
-      <figcaption className="flex items-center justify-between text-small text-scribe">
-        {t('picture.cornerCaption')}
-        <span className="flex">
-          <IconButton
-            label={t('picture.turnLeft')}
-            icon={<Icon name="undo" />}
-            onClick={() => setTurn(turn - STEP)}
-          />
-          <IconButton
-            label={t('picture.turnRight')}
-            icon={<Icon name="redo" />}
-            onClick={() => setTurn(turn + STEP)}
-          />
-        </span>
-      </figcaption>
+      {TURNS.map(({ way, by, place }) => (
+        <IconButton
+          key={way}
+          label={t(`picture.turn.${way}`)}
+          icon={<Icon name="back" className={by > 0 ? 'size-5 rotate-180' : 'size-5'} />}
+          className={`absolute bottom-0 ${place}`}
+          onClick={() => setTurn(turn + by)}
+        />
+      ))}
     </figure>
   )
 }

@@ -33,32 +33,34 @@ export function LayFields({ profile, stock, lay, run, disabled, onChange }: Prop
   const slope = printSlope(run.slope)
   return (
     <div className="flex flex-col gap-3">
-      <div className="flex flex-wrap items-end gap-x-4 gap-y-3">
-        <Select
-          label={t('lay.leg')}
-          className="w-28"
-          value={String(leg)}
-          disabled={disabled}
-          options={profile.legs.map((_, index) => ({
-            value: String(index + 1),
-            label: t('drawing:part.leg', { number: index + 1 }),
-          }))}
-          onChange={(event) => setLeg(Number(event.target.value))}
-        />
-        <Select
-          label={t('lay.lies')}
-          className="min-w-40 flex-1"
-          value={lies}
-          disabled={disabled}
-          options={liesOf(run)
-            .filter((known) => known !== 'own' || lies === 'own')
-            .map((known) => ({ value: known, label: t(`lay.${known}`, { slope }) }))}
-          onChange={(event) => {
-            const chosen = liesOf(run).find((known) => known === event.target.value)
-            if (chosen === undefined || chosen === 'own') return
-            onChange(layFor(profile, leg, chosen, lay ?? 0, run))
-          }}
-        />
+      <div className="grid grid-cols-[minmax(0,1fr)_auto] items-end gap-x-4">
+        <div className="flex min-w-0 flex-col gap-3 sm:flex-row">
+          <Select
+            label={t('lay.leg')}
+            className="sm:w-28"
+            value={String(leg)}
+            disabled={disabled}
+            options={profile.legs.map((_, index) => ({
+              value: String(index + 1),
+              label: t('drawing:part.leg', { number: index + 1 }),
+            }))}
+            onChange={(event) => setLeg(Number(event.target.value))}
+          />
+          <Select
+            label={t('lay.lies')}
+            className="sm:max-w-md sm:flex-1"
+            value={lies}
+            disabled={disabled}
+            options={liesOf(run)
+              .filter((known) => known !== 'own' || lies === 'own')
+              .map((known) => ({ value: known, label: t(`lay.${known}`, { slope }) }))}
+            onChange={(event) => {
+              const chosen = liesOf(run).find((known) => known === event.target.value)
+              if (chosen === undefined || chosen === 'own') return
+              onChange(layFor(profile, leg, chosen, lay ?? 0, run))
+            }}
+          />
+        </div>
         {lay !== null && <LaidSection profile={profile} stock={stock} lay={lay} />}
       </div>
       <Disclosure summary={t('lay.exact')} wanted={lies === 'own'}>

@@ -55,6 +55,20 @@ export const neighborsOf = (side: Side, lines: readonly EndedLine[]): Neighbor[]
     }),
   )
 
+/**
+ * The neighbor that closes on most legs; null where none closes on any. Told anew for every end, so
+ * that nobody has to be chosen where a drawing leaves no doubt.
+ */
+export function likeliest(own: EndOfPiece, neighbors: readonly Neighbor[]): Neighbor | null {
+  const counted = neighbors.map((neighbor) => {
+    const closed = closingWith(own, neighbor)
+    const legs = closed.ok ? closed.a.filter(({ closesOn }) => closesOn !== null).length : 0
+    return { neighbor, legs }
+  })
+  const most = Math.max(0, ...counted.map(({ legs }) => legs))
+  return (most > 0 && counted.find(({ legs }) => legs === most)?.neighbor) || null
+}
+
 /** How the two close in their corner. */
 export const closingWith = (own: EndOfPiece, { line, side, end }: Neighbor): ClosedEnds =>
   closeEnds(own, { profile: line.profile, sheet: line.sheet, side, end })
@@ -70,7 +84,10 @@ const sameDrawing = (a: Profile, b: Profile): boolean =>
  */
 export function layThatCloses(own: EndOfPiece, neighbor: Neighbor): number | null {
   const { end } = own
-  if (end.kind !== 'miter' || neighbor.end.kind !== 'miter' || !('corner' in end.plane)) return null
+  if (end.kind !== 'miter' || neighbor.end.kind !== 'miter') return null
+  // Legs cut by planes of their own close on no mirror image.
+  if (end.legs.length > 0 || neighbor.end.legs.length > 0) return null
+  if (!('corner' in end.plane) || !('corner' in neighbor.end.plane)) return null
   if (!sameDrawing(own.profile, neighbor.line.profile)) return null
   const lay = matchingLay(end.plane.corner, own.side, end.lay)
   return isEqual(lay, neighbor.end.lay) ? null : lay
