@@ -80,8 +80,21 @@ export const svgElement = (item: DisplayItem, colors: FigureColors): SvgElement 
   }
 }
 
+/** Characters that XML 1.0 does not know even when they are escaped. */
+const isForbidden = (character: string): boolean => {
+  const code = character.codePointAt(0) ?? 0
+  const isControl = code < 0x20 && code !== 0x09 && code !== 0x0a && code !== 0x0d
+  return isControl || (code >= 0xd800 && code <= 0xdfff) || code === 0xfffe || code === 0xffff
+}
+
 const escape = (text: string): string =>
-  text.replace(/&/g, '&amp;').replace(/</g, '&lt;').replace(/>/g, '&gt;').replace(/"/g, '&quot;')
+  Array.from(text)
+    .filter((character) => !isForbidden(character))
+    .join('')
+    .replace(/&/g, '&amp;')
+    .replace(/</g, '&lt;')
+    .replace(/>/g, '&gt;')
+    .replace(/"/g, '&quot;')
 
 const markup = ({ tag, attributes, text }: SvgElement): string => {
   const list = Object.entries(attributes)
@@ -90,18 +103,35 @@ const markup = ({ tag, attributes, text }: SvgElement): string => {
   return text === undefined ? `<${tag}${list}/>` : `<${tag}${list}>${escape(text)}</${tag}>`
 }
 
+export interface SvgFile {
+  /** Inches that a unit of the drawing takes on paper: 1/72 for points. Screens decide without. */
+  readonly inchesPerUnit?: number
+  /** Draws on the ground of the colors, which the drawing is made for, instead of on nothing. */
+  readonly ground?: boolean
+}
+
 /**
  * The drawing as one SVG document, the frame's pixels as user units. `title` becomes its
  * accessible name. Unseen targets are left out.
  */
-export const toSvg = (display: DisplayList, colors: FigureColors, title?: string): string => {
+export const toSvg = (
+  display: DisplayList,
+  colors: FigureColors,
+  title?: string,
+  { inchesPerUnit, ground = false }: SvgFile = {},
+): string => {
   const { width, height } = display
   const shapes = display.items
     .filter((item) => item.role !== 'target')
     .map((item) => markup(svgElement(item, colors)))
   const name = title === undefined ? '' : `<title>${escape(title)}</title>`
+  const size = (units: number) =>
+    inchesPerUnit === undefined ? `${units}` : `${round(units * inchesPerUnit * 1000) / 1000}in`
+  const paper = ground
+    ? `<rect width="${width}" height="${height}" fill="${escape(colors.ground)}"/>`
+    : ''
   return (
-    `<svg xmlns="http://www.w3.org/2000/svg" width="${width}" height="${height}"` +
-    ` viewBox="0 0 ${width} ${height}" role="img">${name}${shapes.join('')}</svg>`
+    `<svg xmlns="http://www.w3.org/2000/svg" width="${size(width)}" height="${size(height)}"` +
+    ` viewBox="0 0 ${width} ${height}" role="img">${name}${paper}${shapes.join('')}</svg>`
   )
 }
