@@ -1,5 +1,5 @@
 import fc from 'fast-check'
-import type { Corner, CutPlane, End, PieceEnds } from '#shared/ends/end.schema'
+import type { Corner, CutPlane, End, LegPlane, PieceEnds, Tab } from '#shared/ends/end.schema'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { FoldingSheet } from '#shared/strip/flat-parts'
 import { flatParts } from '#shared/strip/flat-parts'
@@ -45,7 +45,14 @@ const quarters = (least: number, most: number) =>
 
 /** Ends that can be cut on a profile of so many legs, if the piece is long enough. */
 export const endArbitrary = (legs: number): fc.Arbitrary<End> => {
-  const tabs = fc.oneof(fc.constant([]), onLegs(legs, fc.record({ length: quarters(0.5, 2) })))
+  const tabs: fc.Arbitrary<Tab[]> = fc.oneof(
+    fc.constant<Tab[]>([]),
+    onLegs(legs, fc.record({ length: quarters(0.5, 2) })),
+  )
+  const ownPlanes: fc.Arbitrary<LegPlane[]> = fc.oneof(
+    fc.constant<LegPlane[]>([]),
+    onLegs(legs, fc.record({ plane: planeArbitrary })),
+  )
   return fc.oneof(
     fc.record({ kind: fc.constant('square' as const), tabs }),
     fc.record({
@@ -58,7 +65,7 @@ export const endArbitrary = (legs: number): fc.Arbitrary<End> => {
       kind: fc.constant('miter' as const),
       plane: planeArbitrary,
       lay: degrees(180),
-      legs: fc.oneof(fc.constant([]), onLegs(legs, fc.record({ plane: planeArbitrary }))),
+      legs: ownPlanes,
       tabs,
     }),
   )

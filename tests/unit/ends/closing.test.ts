@@ -1,7 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { closeEnds } from '#shared/ends/close-ends'
-import type { Corner, End, Side } from '#shared/ends/end.schema'
+import type { Corner, CutPlane, End, Side } from '#shared/ends/end.schema'
 import type { EndOfPiece } from '#shared/ends/folded-end'
 import { foldedEnd } from '#shared/ends/folded-end'
 import { layStrip } from '#shared/ends/lay-strip'
@@ -12,13 +12,15 @@ import { profileOf, STEEL } from '../../support/arbitrary-profile'
 import type { Triple } from '../../support/naive-ends'
 import { apart, naiveAxes, naiveCornerCut, naiveMarkPoints } from '../../support/naive-ends'
 
-const miter = (corner: Corner, lay: number): End => ({
+const cutBy = (plane: CutPlane, lay = 0): End => ({
   kind: 'miter',
-  plane: { corner },
+  plane,
   lay,
   legs: [],
   tabs: [],
 })
+
+const miter = (corner: Corner, lay: number): End => cutBy({ corner }, lay)
 
 const pairArbitrary = fc.record({
   piece: foldableArbitrary,
@@ -189,7 +191,7 @@ describe('ends that cannot be placed in a corner', () => {
     end,
     side,
   })
-  const plumb = (slope: number): End => ({ ...miter(corner, 0), plane: { plumb: slope } })
+  const plumb = (slope: number): End => cutBy({ plumb: slope })
   const square: End = { kind: 'square', tabs: [] }
 
   it.each<[string, EndOfPiece, EndOfPiece]>([
@@ -203,7 +205,7 @@ describe('ends that cannot be placed in a corner', () => {
   })
 
   it('name the fault of the end that has one', () => {
-    const faulty: End = { ...miter(corner, 0), plane: { normal: [0, 1, 0] } }
+    const faulty = cutBy({ normal: [0, 1, 0] })
     expect(closeEnds(of('right', miter(corner, 0)), of('left', faulty))).toMatchObject({
       ok: false,
       problems: [{ code: 'planeAlongPiece', end: 'left', found: 0, limit: 1 }],
