@@ -11,7 +11,9 @@ export const STALE_ROOTS: Record<LiveTopic, readonly string[]> = {
   pieces: ['pieces', 'orders', 'runs', 'rack'],
   runs: ['runs', 'pieces'],
   rack: ['rack', 'pieces', 'orders'],
-  stocks: ['stocks', 'plans'],
+  stocks: ['stocks', 'plans', 'orders'],
   brakes: ['brakes', 'plans'],
-  people: ['people'],
+  // Every change to people is in the log.
+  people: ['people', 'audit'],
+  mails: ['mails'],
 }

@@ -1,11 +1,24 @@
 import { useTranslation } from 'react-i18next'
 import type { OrderEvent } from '#shared/orders/order.schema'
+import { readRedrawn } from '#shared/orders/redrawn'
 import { useFormats } from '@/lib/format/useFormats'
 
 /** What was done with an order, the latest first. */
 export function OrderHistory({ events }: { readonly events: readonly OrderEvent[] }) {
   const { t } = useTranslation('orders')
   const { moment } = useFormats()
+
+  /** The signs of a redrawn order as sentences: what followed the roof, and what has to be looked at. */
+  function redrawnWords(text: string): string {
+    const read = readRedrawn(text)
+    if (!read) return text
+    const { from, to, drawn, mitered } = read
+    return [
+      t(drawn === '' ? 'redrawn.pitch' : 'redrawn.lines', { from, to, marks: drawn }),
+      ...(mitered === '' ? [] : [t('redrawn.mitered', { from, marks: mitered })]),
+    ].join('\n')
+  }
+
   return (
     <ol className="divide-y divide-rule border-y border-rule">
       {events.toReversed().map(({ id, kind, at, by, text }) => (
@@ -16,7 +29,11 @@ export function OrderHistory({ events }: { readonly events: readonly OrderEvent[
               {moment(at)}
             </time>
           </p>
-          {text !== '' && <p className="whitespace-pre-line text-scribe">{text}</p>}
+          {text !== '' && (
+            <p className="whitespace-pre-line text-scribe">
+              {kind === 'redrawn' ? redrawnWords(text) : text}
+            </p>
+          )}
         </li>
       ))}
     </ol>

@@ -28,7 +28,7 @@ export function RunLines({ run }: { readonly run: Run }) {
               aria-label={t('strip.sheetOf', { mark: line.mark })}
               className="flex min-h-target flex-wrap items-baseline gap-x-3 border-b border-rule py-2 text-dye underline"
             >
-              <span className="font-figure text-figure text-ink no-underline">
+              <span className="font-figure text-figure">
                 {line.quantity} × {length(line.length)}
               </span>
               <span className="font-bold">{line.mark}</span>
