@@ -4,7 +4,8 @@ import { endCut } from '#shared/ends/end-cut'
 import type { EndProblem } from '#shared/ends/end-layout'
 import type { Corner, CutPlane, End } from '#shared/ends/end.schema'
 import type { EndOfPiece } from '#shared/ends/folded-end'
-import { oneEndProblems } from '#shared/ends/one-end-problems'
+import { hasStrip } from '#shared/ends/mark-places'
+import { foundProblem, oneEndProblems } from '#shared/ends/one-end-problems'
 import type { RunFrame } from '#shared/ends/run-frame'
 import { cornerFrames } from '#shared/ends/run-frame'
 import { isEqual } from '#shared/geometry/tolerance'
@@ -63,8 +64,11 @@ const cutEdges = ({ profile, sheet, end, side }: EndOfPiece, frame: RunFrame): C
     typeof of === 'number' ? [{ leg: of, from: inWorld(from, frame), to: inWorld(to, frame) }] : [],
   )
 
-const faultsOf = ({ profile, end, side }: EndOfPiece): EndProblem[] =>
-  oneEndProblems(end, side, profile.legs.length, Infinity).map((found) => ({ ...found, end: side }))
+const faultsOf = ({ profile, sheet, end, side }: EndOfPiece): EndProblem[] =>
+  (hasStrip(profile, sheet)
+    ? oneEndProblems(end, side, profile.legs.length, Infinity)
+    : [foundProblem('profileFaulty')]
+  ).map((found) => ({ ...found, end: side }))
 
 const refused = (
   code: Extract<ClosedEnds, { ok: false }>['code'],
@@ -79,8 +83,7 @@ const refused = (
  *
  * The pieces lie with their corner's points (see `endCut`) on each other, or where more of the cut
  * closes, see `shift`. The corner is the one that the planes name; two plumb cuts make one without
- * a turn. What cannot be placed is refused by code. The profiles are taken as sound: ask
- * `profileProblems` first.
+ * a turn. What cannot be placed or cut is refused by code. Never throws.
  */
 export const closeEnds = (a: EndOfPiece, b: EndOfPiece): ClosedEnds => {
   if (a.side === b.side) return refused('sameSide')

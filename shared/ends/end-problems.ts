@@ -1,24 +1,11 @@
 import type { EndProblem } from '#shared/ends/end-layout'
 import type { FoundProblem } from '#shared/ends/one-end-problems'
 import { foundProblem, oneEndProblems } from '#shared/ends/one-end-problems'
+import { hasStrip } from '#shared/ends/mark-places'
 import type { PieceToLay, StripBorders } from '#shared/ends/strip-borders'
-import { markPlaces, SQUARE_ENDS, stripBorders } from '#shared/ends/strip-borders'
+import { SQUARE_ENDS, stripBorders } from '#shared/ends/strip-borders'
 import { narrowest } from '#shared/ends/strip-polygon'
-import { isAtMost, isLess } from '#shared/geometry/tolerance'
-import { hasErrors } from '#shared/profile/problem'
-import type { Profile } from '#shared/profile/profile.schema'
-import { valueProblems } from '#shared/profile/value-problems'
-import type { FoldingSheet } from '#shared/strip/flat-parts'
-import { flatParts } from '#shared/strip/flat-parts'
-import { flatStrip } from '#shared/strip/flat-strip'
-
-/** Without a strip there is nothing to cut: no sense in the values, or legs their bends use up. */
-const hasStrip = (profile: Profile, sheet: FoldingSheet): boolean => {
-  if (hasErrors(valueProblems(profile))) return false
-  if (flatParts(profile, sheet).runs.some(({ straight }) => !isAtMost(0, straight))) return false
-  const places = markPlaces(flatStrip(profile, sheet))
-  return places.every((place, index) => index === 0 || isLess(places[index - 1] ?? NaN, place))
-}
+import { isLess } from '#shared/geometry/tolerance'
 
 const ofEnd =
   (end: EndProblem['end']) =>

@@ -1,6 +1,7 @@
 import type { CutRun } from '#shared/ends/end-cut'
 import { endCut } from '#shared/ends/end-cut'
 import type { End, Side } from '#shared/ends/end.schema'
+import { hasStrip } from '#shared/ends/mark-places'
 import { oneEndProblems } from '#shared/ends/one-end-problems'
 import type { Vector3 } from '#shared/geometry/vector3'
 import { vector3 } from '#shared/geometry/vector3'
@@ -38,13 +39,14 @@ const moved = (point: Vector3, along: Inches): Vector3 => vector3(point.x + alon
  * missing lips included). Tabs, the trim of an under lap's free edges and an over lap's opened hems
  * are not shown: they leave the cut as it is.
  *
- * Throws a RangeError for an end with problems (`endProblems`) or a stub that is not above 0.
+ * Throws a RangeError for an end or a profile with problems (`endProblems`) or a stub that is not above 0.
  */
 export const foldedEnd = (given: EndOfPiece & { readonly stub: Inches }): readonly FoldedFace[] => {
   const { profile, sheet, end, side, stub } = given
   if (!(stub > 0 && Number.isFinite(stub))) {
     throw new RangeError(`A stub of ${stub} in. shows nothing: give a length above 0.`)
   }
+  if (!hasStrip(profile, sheet)) throw new RangeError('The profile has no strip to cut.')
   const [fault] = oneEndProblems(end, side, profile.legs.length, Infinity)
   if (fault) throw new RangeError(`The ${side} end cannot be cut: ${fault.code}.`)
   const inward = side === 'right' ? -1 : 1

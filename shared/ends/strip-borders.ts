@@ -2,6 +2,7 @@ import { endCut, legOf } from '#shared/ends/end-cut'
 import type { EndDepth } from '#shared/ends/end-depth'
 import { endDepth } from '#shared/ends/end-depth'
 import type { End, PieceEnds } from '#shared/ends/end.schema'
+import { markPlaces } from '#shared/ends/mark-places'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { FoldingSheet } from '#shared/strip/flat-parts'
 import { flatStrip } from '#shared/strip/flat-strip'
@@ -32,13 +33,6 @@ export interface StripBorders {
   readonly right: EndDepth
   readonly blankLength: Inches
 }
-
-/** Where marks lie across the strip: at edge A, at each crease, at edge B. */
-export const markPlaces = (strip: Strip): Inches[] => [
-  0,
-  ...strip.creases.map((crease) => crease.at),
-  strip.stripWidth,
-]
 
 /** The borders of both ends on the strip. Nothing is checked here: ask `endProblems` first. */
 export const stripBorders = ({ profile, sheet, pieceLength, ends }: PieceToLay): StripBorders => {

@@ -212,6 +212,15 @@ describe('ends that cannot be placed in a corner', () => {
     })
   })
 
+  it('name a profile that has no strip', () => {
+    const faulty = { ...of('left', miter(corner, 0)), profile: profileOf([NaN]) }
+    expect(closeEnds(of('right', miter(corner, 0)), faulty)).toMatchObject({
+      ok: false,
+      code: 'endFaulty',
+      problems: [{ code: 'profileFaulty', end: 'left' }],
+    })
+  })
+
   it('but a square end closes on a corner that its neighbor names, as far as it can', () => {
     const closed = closeEnds(of('right', miter(corner, 0)), of('left', square))
     expect(closed).toMatchObject({ ok: true, closes: false, corner })

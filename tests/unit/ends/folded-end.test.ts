@@ -171,6 +171,11 @@ describe('a folded end that cannot be shown', () => {
     expect(() => foldedEnd({ ...square, end: SQUARE_END, stub })).toThrow(RangeError)
   })
 
+  it('has a profile without a strip', () => {
+    const profile = profileOf([4, 0.02, 6], [90, 90])
+    expect(() => foldedEnd({ ...square, profile, end: SQUARE_END })).toThrow(/no strip/)
+  })
+
   it('has an end that cannot be cut', () => {
     const end: End = {
       kind: 'miter',
