@@ -33,7 +33,26 @@ const kept = new Map<PdfFont, Buffer>()
 export function readFont(font: PdfFont): Buffer {
   const known = kept.get(font)
   if (known) return known
-  const bytes = readFileSync(resolve(FILES[font]))
+  const file = readFileSync(resolve(FILES[font]))
+  const bytes = font === 'figures' || font === 'figuresBold' ? withoutLigatures(file) : file
   kept.set(font, bytes)
+  return bytes
+}
+
+const HEADER_BYTES = 12
+const ENTRY_BYTES = 16
+
+/**
+ * The same font without its table of substitutions: its entry in the table directory gets a name that
+ * nobody looks for. JetBrains Mono draws `--`, `->` or `..` as one sign, but a mark or a P.O. number
+ * stays letter for letter; and fontkit 2.0.4 fails on the blank glyphs that such signs are made of.
+ */
+function withoutLigatures(font: Buffer): Buffer {
+  const bytes = Buffer.from(font)
+  const tables = bytes.readUInt16BE(4)
+  for (let table = 0; table < tables; table += 1) {
+    const at = HEADER_BYTES + table * ENTRY_BYTES
+    if (bytes.toString('latin1', at, at + 4) === 'GSUB') bytes.write('none', at, 'latin1')
+  }
   return bytes
 }

@@ -69,7 +69,7 @@ export const ES: SheetWords = {
     edgeB: 'borde B',
   },
   template: {
-    check: (length) => `Mida esta línea: tiene que medir ${length}.`,
+    check: (length) => `Mida esta línea: debe tener ${length} de largo.`,
     full: 'Imprima al 100 %, sin ajustar a la página.',
     join: 'Corte por los marcos y una las páginas por sus letras.',
     noDressedEnd: 'Los dos extremos van a escuadra: no hay extremo que poner sobre la lámina.',

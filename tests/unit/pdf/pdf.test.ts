@@ -9,6 +9,7 @@ import {
   wrapText,
   type TextStyle,
 } from '#server/adapters/pdf/pdf-text'
+import { textWidth } from '#shared/drawing/text-box'
 import { factsOf, fontsOf, textOfPages, wordsOf } from '../../support/paper'
 
 const OPTIONS: PdfOptions = {
@@ -75,6 +76,22 @@ describe('a PDF', () => {
     })
     const [page = ''] = await textOfPages(bytes)
     expect(page.match(/¿Dónde está el tapajuntas\? ñ ü · – — “½” 5 3\/4" 12° × €/g)).toHaveLength(2)
+  })
+
+  it.each(PDF_FONTS)('keeps signs in a row apart in %s', async (font) => {
+    const text = 'A--1 -> <= .. === || www //'
+    const bytes = await draw((pdf) => {
+      drawText(pdf, text, { font, size: 12, color: '#000000' }, { x: 36, baseline: 100 })
+    })
+    expect((await textOfPages(bytes)).join('').trim()).toBe(text)
+  })
+
+  it('has the figures of a monospaced face, all as wide as they are measured for drawings', () => {
+    const pdf = new Pdf(OPTIONS)
+    for (const text of ['5 3/4"', 'A--1', '90°']) {
+      const width = widthOfText(pdf, text, { font: 'figures', size: 10, color: '#000000' })
+      expect(width).toBeCloseTo(textWidth(text, 10), 6)
+    }
   })
 
   it('finds every font file', () => {

@@ -3,6 +3,7 @@ import { PAGE_SIZES } from '#server/adapters/pdf/page-frame'
 import { sheetPiece, type SheetLine } from '#server/features/sheets/sheet-line'
 import { sheetSpeech } from '#server/features/sheets/strip-sheet/sheet-speech'
 import { drawStripSheet } from '#server/features/sheets/strip-sheet/strip-sheet'
+import type { End } from '#shared/ends/end.schema'
 import type { Language, Units } from '#shared/people/people.contract'
 import type { Paper } from '#shared/sheets/sheets.contract'
 import { sheetWords } from '#shared/sheets/words/sheet-words'
@@ -42,7 +43,7 @@ const LINES: [string, SheetLine][] = [
     (name): [string, SheetLine] => {
       const profile = NAMED_PROFILES[name]
       if (!profile) throw new Error(`There is no profile ${name}.`)
-      const under = { kind: 'lap', side: 'under', length: 4, tabs: [] } as const
+      const under: End = { kind: 'lap', side: 'under', length: 4, tabs: [] }
       return [name, sheetLine({ profile, ends: { left: under, right: under, lowEnd: null } })]
     },
   ),
