@@ -4,6 +4,7 @@ import type { Vector } from '#shared/geometry/vector'
 import type { FoldedSection } from '#shared/strip/folded-section'
 import type { Crease, Strip } from '#shared/strip/strip.schema'
 import type { Inches } from '#shared/units/brands'
+import { creaseSpans } from './crease-spans'
 
 export interface DxfDrawing {
   readonly layout: StripLayout
@@ -78,22 +79,29 @@ const onSheet = ({ along, at }: StripPoint): Vector => ({ x: along, y: at })
 const layerOf = ({ fold, turn }: Crease): DxfLayer =>
   typeof fold === 'string' ? 'HEM' : turn > 0 ? 'CREASE-UP' : 'CREASE-DOWN'
 
-/** Where an end's cut meets a crease, from that end's square blank. */
-const cutAt = (end: EndLayout, crease: number): Inches =>
-  end.marks.find((mark) => mark.crease === crease)?.along ?? 0
-
 /** `90 up`, `45 down`, `hem up`: degrees of bend, the left side being up. */
 const creaseWords = ({ fold, turn }: Crease): string => {
   const amount = typeof fold === 'string' ? 'hem' : figure(Math.abs(turn))
   return `${amount} ${turn > 0 ? 'up' : 'down'}`
 }
 
+/** What is left of each crease; its words stand over the middle of the longest stretch. */
 const creases = ({ layout, strip }: DxfDrawing): Group[] =>
-  strip.creases.flatMap((crease, index) => {
-    const from = { x: cutAt(layout.left, index), y: crease.at }
-    const to = { x: layout.blankLength - cutAt(layout.right, index), y: crease.at }
-    const middle = { x: (from.x + to.x) / 2, y: crease.at + TEXT_HEIGHT / 4 }
-    return [...line(layerOf(crease), from, to), ...text(middle, creaseWords(crease))]
+  strip.creases.flatMap((crease) => {
+    const spans = creaseSpans(layout.outline, crease.at).toSorted(
+      (a, b) => b.to - b.from - (a.to - a.from),
+    )
+    const [longest] = spans
+    const words = longest && {
+      x: (longest.from + longest.to) / 2,
+      y: crease.at + TEXT_HEIGHT / 4,
+    }
+    return [
+      ...spans.flatMap(({ from, to }) =>
+        line(layerOf(crease), { x: from, y: crease.at }, { x: to, y: crease.at }),
+      ),
+      ...(words ? text(words, creaseWords(crease)) : []),
+    ]
   })
 
 const endLines = ({ tabs, slits }: EndLayout): Group[] => [
@@ -162,7 +170,8 @@ const header = (): Group[] => [
  * A dressed strip as an ASCII DXF (release 12, which opens most widely), full size in inches. The
  * strip lies left side up: x along the piece from the blank's left end, y across it from edge A.
  * `OUTLINE` is what is left when everything is cut away, `SECTION` the folded piece's border beside
- * it; both are closed polylines. Creases are lines from cut to cut with their degrees of bend.
+ * it; both are closed polylines. Creases are lines as far as metal stands on both sides of them, with
+ * their degrees of bend.
  *
  * It carries no words of a person's, so that nothing can be smuggled into the file.
  */
