@@ -58,7 +58,7 @@ export function BendStep({ run, step, picture, number }: Props) {
           </div>
         </div>
       </div>
-      <aside className="flex w-104 shrink-0 flex-col gap-2 overflow-y-auto border-l border-rule px-6 py-4 max-lg:w-full max-lg:border-t max-lg:border-l-0">
+      <aside className="flex w-104 shrink-0 flex-col gap-1 overflow-y-auto border-l border-rule px-6 py-3 max-lg:w-full max-lg:border-t max-lg:border-l-0">
         <p className="text-scribe">
           {t('step.count', { number, total: run.plan.steps.length })} ·{' '}
           <b className="text-ink">{fold}</b>
