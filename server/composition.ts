@@ -28,6 +28,8 @@ import { planLimit } from '#server/features/plans/plan-limit'
 import { plansRoutes } from '#server/features/plans/plans.routes'
 import { runsRoutes } from '#server/features/runs/runs.routes'
 import { createRunsService } from '#server/features/runs/runs.service'
+import { sheetsRoutes } from '#server/features/sheets/sheets.routes'
+import { createSheetsService } from '#server/features/sheets/sheets.service'
 import { createShelfServiceOn } from '#server/features/shelf/create-shelf-service'
 import { shelfRoutes } from '#server/features/shelf/shelf.routes'
 import { createTestBendsServiceOn } from '#server/features/stocks/create-test-bends-service'
@@ -80,6 +82,7 @@ export function compose(ports: Ports): Composition {
       ...bundlesRoutes((db) => createBundlesService(db, making)),
       ...handOffRoutes((db) => createHandOffService(db, making)),
       ...labelsRoutes((db) => createLabelsService(db, making)),
+      ...sheetsRoutes((db) => createSheetsService(db, { clock, shopTimeZone })),
     ],
   }
 }

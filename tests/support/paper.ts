@@ -175,3 +175,46 @@ export const outsideOf = (
         (yMin + yMax) / 2 > page.height - margin,
     )
     .map(({ page: number, text }) => `page ${number}: "${text}"`)
+
+/** A stretch of black dots in one row of a page; points from the upper left corner. */
+export interface BlackRun {
+  readonly y: number
+  readonly from: number
+  readonly length: number
+}
+
+/**
+ * The unbroken horizontal black lines of a page that are at least so many points long, as they come
+ * out of a printer of 288 dots per inch: four to a point.
+ */
+export const blackRuns = (bytes: Uint8Array, page: number, least: number): Promise<BlackRun[]> =>
+  withPdf(bytes, async (file, folder) => {
+    const only = ['-f', String(page), '-l', String(page), '-singlefile']
+    await tool('pdftoppm', ['-r', String(DOTS), '-mono', ...only, file, join(folder, 'page')])
+    const { width, height, isBlack } = readBitmap(await readFile(join(folder, 'page.pbm')))
+    const perPoint = DOTS / 72
+    const runs: BlackRun[] = []
+    for (let y = 0; y < height; y += 1) {
+      let from = 0
+      for (let x = 0; x <= width; x += 1) {
+        if (x < width && isBlack(x, y)) continue
+        const length = (x - from) / perPoint
+        if (length >= least) runs.push({ y: y / perPoint, from: from / perPoint, length })
+        from = x + 1
+      }
+    }
+    return runs
+  })
+
+/** A raw portable bitmap: a header in text, then eight dots to a byte, 1 for black. */
+function readBitmap(file: Buffer) {
+  const [header = '', width = '', height = ''] =
+    /^P4\s+(?:#[^\n]*\n)?(\d+)\s+(\d+)\s/.exec(file.toString('latin1', 0, 200)) ?? []
+  if (header === '') throw new Error('Not a raw portable bitmap.')
+  const rowBytes = Math.ceil(Number(width) / 8)
+  const isBlack = (x: number, y: number): boolean => {
+    const byte = file[header.length + y * rowBytes + (x >> 3)] ?? 0
+    return (byte & (0x80 >> (x & 7))) !== 0
+  }
+  return { width: Number(width), height: Number(height), isBlack }
+}

@@ -1,11 +1,13 @@
 import type { Clock } from '#server/adapters/clock'
 import { companyScope } from '#server/db/company-scope'
 import type { Db } from '#server/db/knex'
+import { drawEndTemplates } from '#server/features/sheets/end-templates'
 import { sheetPiece, type SheetLine, type SheetPiece } from '#server/features/sheets/sheet-line'
 import type { SheetPaper } from '#server/features/sheets/sheet-pages'
 import { findOrderLine, findRunLine } from '#server/features/sheets/sheets.queries'
 import { sheetSpeech } from '#server/features/sheets/strip-sheet/sheet-speech'
 import { drawStripSheet } from '#server/features/sheets/strip-sheet/strip-sheet'
+import { stripSvg } from '#server/features/sheets/strip-svg'
 import { notFound } from '#server/http/errors'
 import type { SignedIn } from '#server/http/signed-in'
 import { toDxf } from '#shared/drawing/dxf'
@@ -26,14 +28,16 @@ interface Wish {
   readonly hand?: Side | undefined
 }
 
+type Printed = Wish & { readonly paper: Paper }
+
+type Draw<W extends Wish> = (meant: LineMeant, wish: W, person: SignedIn) => Promise<FileAnswer>
+
 /** All throw `not-found`; `invalid-input` for a hand that the line has no pieces of. */
 export interface SheetsService {
-  readonly stripSheet: (
-    meant: LineMeant,
-    wish: Wish & { readonly paper: Paper },
-    person: SignedIn,
-  ) => Promise<FileAnswer>
-  readonly stripDxf: (meant: LineMeant, wish: Wish, person: SignedIn) => Promise<FileAnswer>
+  readonly stripSheet: Draw<Printed>
+  readonly endTemplates: Draw<Printed>
+  readonly stripSvg: Draw<Wish>
+  readonly stripDxf: Draw<Wish>
 }
 
 export interface SheetsPorts {
@@ -56,19 +60,32 @@ export const createSheetsService = (db: Db, ports: SheetsPorts): SheetsService =
     return { paper, language, at, day }
   }
 
+  const speechOf = ({ language, units }: SignedIn) => sheetSpeech(sheetWords(language), units)
+
   return {
     stripSheet: async (meant, wish, person) => {
       const piece = await pieceOf(meant, wish, person)
-      const speech = sheetSpeech(sheetWords(person.language), person.units)
-      const bytes = await drawStripSheet(piece, speech, paperOf(wish.paper, person))
-      return { name: fileName(piece, 'strip', 'pdf'), bytes }
+      const bytes = await drawStripSheet(piece, speechOf(person), paperOf(wish.paper, person))
+      return { name: fileName(piece, 'strip.pdf'), bytes }
+    },
+
+    endTemplates: async (meant, wish, person) => {
+      const piece = await pieceOf(meant, wish, person)
+      const bytes = await drawEndTemplates(piece, speechOf(person), paperOf(wish.paper, person))
+      return { name: fileName(piece, 'ends.pdf'), bytes }
+    },
+
+    stripSvg: async (meant, wish, person) => {
+      const piece = await pieceOf(meant, wish, person)
+      return { name: fileName(piece, 'strip.svg'), bytes: utf8(stripSvg(piece, speechOf(person))) }
     },
 
     stripDxf: async (meant, wish, person) => {
-      const { line, layout, ...piece } = await pieceOf(meant, wish, person)
-      const section = foldedSection(line.profile, line.stock.sheet)
-      const text = toDxf({ layout, strip: line.strip, section })
-      return { name: fileName({ line, ...piece }, 'strip', 'dxf'), bytes: utf8(text) }
+      const piece = await pieceOf(meant, wish, person)
+      const { profile, stock, strip } = piece.line
+      const section = foldedSection(profile, stock.sheet)
+      const text = toDxf({ layout: piece.layout, strip, section })
+      return { name: fileName(piece, 'strip.dxf'), bytes: utf8(text) }
     },
   }
 }
@@ -85,15 +102,12 @@ async function getLine(db: Db, meant: LineMeant, person: SignedIn): Promise<Shee
 }
 
 /** `F-2047-north-rake-L-strip.pdf`: letters, digits, dots and dashes, whatever the mark is. */
-function fileName(
-  { line, hand }: Pick<SheetPiece, 'line' | 'hand'>,
-  what: string,
-  ending: string,
-): string {
+function fileName({ line, hand }: SheetPiece, what: string): string {
   const mark = line.mark
     .normalize('NFD')
+    .replace(/\p{Mark}+/gu, '')
     .replace(/[^A-Za-z0-9]+/g, '-')
     .replace(/^-+|-+$/g, '')
   const parts = [orderNumber(line.orderNumber), mark, hand && HAND_LETTERS[hand], what]
-  return `${parts.filter(Boolean).join('-')}.${ending}`
+  return parts.filter(Boolean).join('-')
 }

@@ -3,7 +3,7 @@ import type { Order } from '#shared/orders/order.schema'
 import { askAboutOrder, submitOrder, withdrawOrder } from '#shared/orders/orders.contract'
 import { createJob } from '#shared/jobs/jobs.contract'
 import { printLabels } from '#shared/labels/labels.contract'
-import { firstCode, type Floor } from '../../support/making-factories'
+import { at, firstCode, type Floor } from '../../support/making-factories'
 import type { Crew } from '../../support/shop-scene'
 import { orderInput, zProfile } from '../../support/shop-factories'
 
@@ -16,6 +16,8 @@ export interface Holdings {
   readonly profileId: string
   /** Submitted, and free to be changed. */
   readonly order: Order
+  /** Of that order. */
+  readonly lineId: string
   /** Sent back with a question. */
   readonly asked: Order
   readonly withdrawn: Order
@@ -30,6 +32,8 @@ export interface Holdings {
   readonly printId: string
   readonly eventIds: readonly number[]
 }
+
+export const firstLineOf = ({ lines }: Order): string => at(lines, 0).id
 
 export async function createHoldings(floor: Floor, crew: Crew): Promise<Holdings> {
   const { agent } = crew
@@ -66,6 +70,7 @@ export async function createHoldings(floor: Floor, crew: Crew): Promise<Holdings
     jobId: job.id,
     profileId: saved.id,
     order,
+    lineId: firstLineOf(order),
     asked,
     withdrawn,
     released,

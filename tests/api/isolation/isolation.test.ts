@@ -15,7 +15,7 @@ import { recordTestBend } from '#shared/stock/stock.contract'
 import { fillPath, type ApiAgent, type ApiAnswer } from '../../support/api-agent'
 import { at, openFloor, type Floor } from '../../support/making-factories'
 import { lineInput, orderInput, testBendInput, zProfile } from '../../support/shop-factories'
-import { createHoldings, marksOf, type Holdings } from './holdings'
+import { createHoldings, firstLineOf, marksOf, type Holdings } from './holdings'
 import { namedThings, nameOf } from './named-things'
 
 let floor: Floor
@@ -41,6 +41,7 @@ function nowhere(holdings: Holdings): Holdings {
     withdrawn: never(holdings.withdrawn),
     released: never(holdings.released),
     code: newCode('piece'),
+    lineId: randomUUID(),
     eventIds: [2_000_000_000],
   }
 }
@@ -52,7 +53,12 @@ function nowhere(holdings: Holdings): Holdings {
 const TAKEN_FROM: Record<string, 'shop' | ((from: Holdings) => Partial<Holdings>[])> = {
   jobId: ({ jobId }) => [{ jobId }],
   orderId: ({ order, asked, withdrawn, released }) =>
-    [order, asked, withdrawn, released].map((each) => ({ order: each, asked: each })),
+    [order, asked, withdrawn, released].map((each) => ({
+      order: each,
+      asked: each,
+      lineId: firstLineOf(each),
+    })),
+  lineId: ({ lineId }) => [{ lineId }],
   profileId: ({ profileId }) => [{ profileId }],
   companyId: ({ companyId }) => [{ companyId }],
   code: ({ code }) => [{ code }],
@@ -71,6 +77,10 @@ interface Request {
 const input = () => orderInput([lineInput(floor.stockId)])
 const job = { name: 'Cow barn', address: '', pitchRise: 4 }
 const drawn = { name: 'Rake', profile: zProfile() }
+
+const ofLine = ({ order, lineId }: Holdings): Request => ({
+  params: { orderId: order.id, lineId },
+})
 
 /** A request that its owner may make, for everything a crew lead may do by an id or a code. */
 const REQUESTS: Record<string, (own: Holdings) => Request> = {
@@ -97,6 +107,10 @@ const REQUESTS: Record<string, (own: Holdings) => Request> = {
     params: { orderId: id },
     body: { version, reason: 'Not needed.' },
   }),
+  'GET /orders/:orderId/lines/:lineId/strip-sheet.pdf': ofLine,
+  'GET /orders/:orderId/lines/:lineId/ends.pdf': ofLine,
+  'GET /orders/:orderId/lines/:lineId/strip.svg': ofLine,
+  'GET /orders/:orderId/lines/:lineId/strip.dxf': ofLine,
   'GET /pieces/:code': ({ code }) => ({ params: { code } }),
   'POST /piece-events/undo': ({ eventIds }) => ({
     body: { eventIds, reason: 'A slip.' },
@@ -217,6 +231,7 @@ describe('what the shop alone may do', () => {
     runId: foreign.runId,
     bundleId: foreign.bundleId,
     printId: foreign.printId,
+    lineId: foreign.lineId,
     stockId: floor.stockId,
     bendId,
     code: endpoint.path.startsWith('/bundles') ? foreign.bundleCode : foreign.code,
@@ -226,6 +241,7 @@ describe('what the shop alone may do', () => {
     runId: randomUUID(),
     bundleId: randomUUID(),
     printId: randomUUID(),
+    lineId: randomUUID(),
     stockId: randomUUID(),
     bendId: randomUUID(),
     code: newCode('piece'),

@@ -16,7 +16,7 @@ export function endName({ ends }: SheetPiece, side: Side, { words }: SheetSpeech
   return `${title} · ${ends.lowEnd === side ? words.end.low : words.end.high}`
 }
 
-const outlineLabels = (piece: SheetPiece, speech: SheetSpeech) => ({
+export const outlineLabels = (piece: SheetPiece, speech: SheetSpeech) => ({
   length: placeOnStrip(speech, piece.line.strip),
   run: speech.run,
   end: (side: Side) => endName(piece, side, speech),
