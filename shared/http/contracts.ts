@@ -10,6 +10,7 @@ import * as lookup from '#shared/pieces/lookup.contract'
 import * as pieces from '#shared/pieces/pieces.contract'
 import * as plans from '#shared/plans/plans.contract'
 import * as runs from '#shared/runs/runs.contract'
+import * as sheets from '#shared/sheets/sheets.contract'
 import * as shelf from '#shared/shelf/shelf.contract'
 import * as stock from '#shared/stock/stock.contract'
 
@@ -35,4 +36,5 @@ export const ENDPOINTS: readonly Endpoint[] = [
   bundles,
   handOff,
   labels,
+  sheets,
 ].flatMap((contract) => Object.values<unknown>(contract).filter(isEndpoint))
