@@ -1,6 +1,6 @@
-import i18next from 'i18next'
 import { themeSchema, type Language, type Self, type Theme } from '#shared/people/people.contract'
 import { recall, remember } from '@/lib/device/remembered'
+import { speak } from '@/locales/index'
 import { asLanguage } from '@/locales/languages'
 
 /** The language before anyone has signed in: the last one used here, or the browser's. */
@@ -14,10 +14,17 @@ export function applyTheme(theme: Theme): void {
   remember('theme', theme)
 }
 
+/** Without signal the words of another language cannot come: then the old ones stay until it is back. */
 export async function applyLanguage(language: Language): Promise<void> {
-  document.documentElement.lang = language
   remember('language', language)
-  if (i18next.language !== language) await i18next.changeLanguage(language)
+  try {
+    await speak(language)
+  } catch (error) {
+    if (navigator.onLine) throw error
+    window.addEventListener('online', () => void applyLanguage(language), { once: true })
+    return
+  }
+  document.documentElement.lang = language
 }
 
 /** Language and theme follow the person who is signed in. */

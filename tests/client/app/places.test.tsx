@@ -16,6 +16,8 @@ const as = (role: (typeof ROLES)[number], more = {}) =>
 
 beforeEach(async () => {
   holdCsrfToken(null)
+  // Texts are loaded when somebody speaks their language, which is not what is tested here.
+  await import('@/locales/texts-es')
   await startLocales('en')
 })
 
