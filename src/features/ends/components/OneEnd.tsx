@@ -30,6 +30,9 @@ interface Props extends Omit<EndsPanelProps, 'ends'> {
   readonly onWrite: (ends: DraftEnds) => void
 }
 
+/** What is focused is scrolled to below the picture that stays above it. */
+const CLEAR_OF_PICTURE = 'max-lg:[&_:is(input,select,button,summary)]:scroll-mt-60'
+
 /**
  * One end: its form, and beside it how it will be. On a narrow screen the corner stays in sight
  * above the form while it is scrolled.
@@ -67,7 +70,7 @@ export function OneEnd({ ends, side, run, onWrite, ...line }: Props) {
           </p>
         )}
       </div>
-      <div className="lg:col-start-1 lg:row-span-2 lg:row-start-1">
+      <div className={`${CLEAR_OF_PICTURE} lg:col-start-1 lg:row-span-2 lg:row-start-1`}>
         <EndForm
           end={dressed}
           side={side}
@@ -79,7 +82,7 @@ export function OneEnd({ ends, side, run, onWrite, ...line }: Props) {
           onChange={change}
         />
       </div>
-      <div className="flex min-w-0 flex-col gap-4 lg:col-start-2">
+      <div className={`${CLEAR_OF_PICTURE} flex min-w-0 flex-col gap-4 lg:col-start-2`}>
         {own?.end.kind === 'miter' && (
           <MeetsHere own={own} ownKey={lineKey} meeting={meeting} disabled={disabled} />
         )}

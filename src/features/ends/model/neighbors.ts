@@ -55,18 +55,22 @@ export const neighborsOf = (side: Side, lines: readonly EndedLine[]): Neighbor[]
     }),
   )
 
+const namesCorner = (end: End): boolean => end.kind === 'miter' && 'corner' in end.plane
+
 /**
- * The neighbor that closes on most legs; null where none closes on any. Told anew for every end, so
- * that nobody has to be chosen where a drawing leaves no doubt.
+ * The neighbor that closes on most legs, or else the first that is cut for the same corner; null
+ * where none is either. Nobody has to be chosen where the drawings leave no doubt.
  */
 export function likeliest(own: EndOfPiece, neighbors: readonly Neighbor[]): Neighbor | null {
-  const counted = neighbors.map((neighbor) => {
+  let best: { neighbor: Neighbor; closing: number } | null = null
+  for (const neighbor of neighbors) {
     const closed = closingWith(own, neighbor)
-    const legs = closed.ok ? closed.a.filter(({ closesOn }) => closesOn !== null).length : 0
-    return { neighbor, legs }
-  })
-  const most = Math.max(0, ...counted.map(({ legs }) => legs))
-  return (most > 0 && counted.find(({ legs }) => legs === most)?.neighbor) || null
+    if (!closed.ok) continue
+    const closing = closed.a.filter(({ closesOn }) => closesOn !== null).length
+    if (closing === 0 && !(namesCorner(own.end) && namesCorner(neighbor.end))) continue
+    if (best === null || closing > best.closing) best = { neighbor, closing }
+  }
+  return best?.neighbor ?? null
 }
 
 /** How the two close in their corner. */

@@ -1,8 +1,9 @@
-import { useEffect, useRef, useState, type ReactNode } from 'react'
+import { Fragment, useEffect, useRef, useState, type ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import { Button } from '@/components/Button'
 import { Notice } from '@/components/Notice'
 import { GoodsSection } from '@/features/roof-line/components/GoodsSection'
+import { linesOfRoofLine } from '@/features/roof-line/model/use-pieces'
 import { newKey } from '@/lib/api/idempotency'
 import { nextMark, type DraftLine } from '../draft/order-draft'
 import type { OrderDraftHandle } from '../draft/useOrderDraft'
@@ -36,6 +37,18 @@ interface Removed {
   readonly at: number
 }
 
+interface Covered {
+  /** The line that the first pieces of the roof line were put into. */
+  readonly key: string
+  readonly before: readonly DraftLine[]
+  /** It can be taken back for as long as nothing else was changed since. */
+  readonly after: readonly DraftLine[]
+}
+
+/** The very same items, one by one. */
+const isUnchanged = (after: readonly unknown[], now: readonly unknown[]): boolean =>
+  after.length === now.length && after.every((item, index) => item === now[index])
+
 /** An order being written or amended: its lines, what belongs to the whole, and the last look. */
 export function OrderForm({
   id,
@@ -55,7 +68,7 @@ export function OrderForm({
   const { faults, delivery, presses } = state
   const form = useRef<HTMLFormElement>(null)
   const [removed, setRemoved] = useState<Removed | null>(null)
-  const [covered, setCovered] = useState<readonly DraftLine[] | null>(null)
+  const [covered, setCovered] = useState<Covered | null>(null)
   const linesFault = words(faultAt(faults, 'lines'))
   const checked = draft.lines.map((line) => ({ line, answer: checkLine(line, ground) }))
   const ended = checked.flatMap(({ line, answer: { profile, drawnIn } }) =>
@@ -95,33 +108,50 @@ export function OrderForm({
         onSendAnother={onSendAnother}
       />
       {draft.lines.map((line, index) => (
-        <DraftLineCard
-          key={line.key}
-          line={line}
-          index={index}
-          lines={draft.lines}
-          ended={ended}
-          ground={ground}
-          faults={faults}
-          disabled={draft.sending}
-          boardPath={boardPath(line.key)}
-          onChange={(patch) => handle.updateLine(line.key, patch)}
-          onCover={(lines) => {
-            setCovered(draft.lines)
-            handle.setLines(lines)
-          }}
-          onDuplicate={() =>
-            // A copy covers nothing yet: it would be replaced with the roof line it was copied from.
-            handle.addLine(
-              { ...line, key: newKey(), mark: nextMark(draft), covers: null },
-              index + 1,
-            )
-          }
-          onRemove={() => {
-            setRemoved({ line, at: index })
-            handle.removeLine(line.key)
-          }}
-        />
+        <Fragment key={line.key}>
+          <DraftLineCard
+            line={line}
+            index={index}
+            lines={draft.lines}
+            ended={ended}
+            ground={ground}
+            faults={faults}
+            disabled={draft.sending}
+            boardPath={boardPath(line.key)}
+            onChange={(patch) => handle.updateLine(line.key, patch)}
+            onCover={(lines) => {
+              const [first = line] = linesOfRoofLine(line, draft.lines)
+              setCovered({ key: first.key, before: draft.lines, after: lines })
+              handle.setLines(lines)
+            }}
+            onDuplicate={() =>
+              // A copy covers nothing yet: it would be replaced with the roof line it was copied from.
+              handle.addLine(
+                { ...line, key: newKey(), mark: nextMark(draft), covers: null },
+                index + 1,
+              )
+            }
+            onRemove={() => {
+              setRemoved({ line, at: index })
+              handle.removeLine(line.key)
+            }}
+          />
+          {covered?.key === line.key && isUnchanged(covered.after, draft.lines) && (
+            <Notice kind="info">
+              <span className="flex flex-wrap items-center justify-between gap-3">
+                {t('line.covered')}
+                <Button
+                  onClick={() => {
+                    handle.setLines(covered.before)
+                    setCovered(null)
+                  }}
+                >
+                  {t('line.coveredUndo')}
+                </Button>
+              </span>
+            </Notice>
+          )}
+        </Fragment>
       ))}
       {removed && (
         <Notice kind="info">
@@ -134,21 +164,6 @@ export function OrderForm({
               }}
             >
               {t('line.undo')}
-            </Button>
-          </span>
-        </Notice>
-      )}
-      {covered && (
-        <Notice kind="info">
-          <span className="flex flex-wrap items-center justify-between gap-3">
-            {t('line.covered')}
-            <Button
-              onClick={() => {
-                handle.setLines(covered)
-                setCovered(null)
-              }}
-            >
-              {t('line.coveredUndo')}
             </Button>
           </span>
         </Notice>

@@ -23,6 +23,11 @@ interface Props {
   readonly onChange: (goods: readonly DraftGood[]) => void
 }
 
+interface Undo {
+  readonly before: readonly DraftGood[]
+  readonly after: readonly DraftGood[]
+}
+
 const UNIT_OF: Record<GoodKind, GoodUnit> = {
   fasteners: 'each',
   butylTape: 'foot',
@@ -37,11 +42,14 @@ export function GoodsSection({ goods, lines, stocks, faults, disabled, onChange 
   const { t } = useTranslation('goods')
   const words = useFaultWords()
   const [counting, setCounting] = useState(false)
-  const [before, setBefore] = useState<readonly DraftGood[] | null>(null)
+  const [undo, setUndo] = useState<Undo | null>(null)
+  // For as long as nothing else was changed since.
+  const canUndo =
+    undo?.after.length === goods.length && undo.after.every((good, index) => good === goods[index])
   const error = words(faultAt(faults, 'goods'))
 
   function change(next: readonly DraftGood[]) {
-    setBefore(goods)
+    setUndo({ before: goods, after: next })
     onChange(next)
   }
 
@@ -74,12 +82,12 @@ export function GoodsSection({ goods, lines, stocks, faults, disabled, onChange 
         </ul>
       )}
       {error && <Notice kind="error">{error}</Notice>}
-      {before && before !== goods && !disabled && (
+      {undo && canUndo && !disabled && (
         <Button
           className="self-start"
           onClick={() => {
-            onChange(before)
-            setBefore(null)
+            onChange(undo.before)
+            setUndo(null)
           }}
         >
           {t('undo')}

@@ -37,16 +37,21 @@ const word = (role: Role, x: number, y: number, text: string): DisplayItem => ({
   bold: false,
 })
 
-/** Texts from left to right, without those that would touch the one before. */
-function apart(texts: readonly { x: number; text: string }[]): { x: number; text: string }[] {
-  let reached = -Infinity
-  return texts.filter(({ x, text }) => {
-    const half = textWidth(text, TEXT) / 2 + 3
-    if (x - half < reached) return false
-    reached = x + half
-    return true
-  })
+interface Label {
+  readonly x: number
+  readonly text: string
 }
+
+const isApart = (a: Label, b: Label): boolean =>
+  Math.abs(a.x - b.x) >= (textWidth(a.text, TEXT) + textWidth(b.text, TEXT)) / 2 + 6
+
+/** The labels that touch none before them; those that matter most come first. */
+const apart = (labels: readonly Label[]): Label[] =>
+  labels.reduce<Label[]>(
+    (placed, label) =>
+      placed.every((other) => isApart(label, other)) ? [...placed, label] : placed,
+    [],
+  )
 
 /**
  * A line on the roof from its low or left end: the pieces as they lie, where each lap begins, the
@@ -68,7 +73,7 @@ export function roofLineFigure(
     order.map(({ from, to, length: piece }) => ({ x: toX((from + to) / 2), text: print(piece) })),
   )
   const places = apart(
-    [0, ...laps, length].map((at) => ({ x: inside(toX(at), print(at)), text: print(at) })),
+    [length, 0, ...laps].map((at) => ({ x: inside(toX(at), print(at)), text: print(at) })),
   )
   const items: DisplayItem[] = [
     ...order.map(({ from, to }, index) =>
