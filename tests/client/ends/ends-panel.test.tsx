@@ -151,7 +151,7 @@ describe('a miter', () => {
 
   it('cuts a leg by itself', async () => {
     const { user, line: kept } = await openEnds({ ends: CORNERED })
-    await user.click(screen.getByText('Leg by leg: tabs, cuts of its own'))
+    await user.click(screen.getByText('Leg by leg: tabs and own cuts'))
     await user.selectOptions(screen.getByRole('combobox', { name: 'Leg 2 is cut' }), 'square')
     expect(kept().ends?.left).toMatchObject({ legs: [{ leg: 2, plane: { normal: [1, 0, 0] } }] })
     await user.selectOptions(screen.getByRole('combobox', { name: 'Leg 2 is cut' }), 'as the end')

@@ -103,6 +103,15 @@ describe('pieces of a line', () => {
     expect(groups.map(({ length }) => length)).toEqual([100])
   })
 
+  test('a full piece with a tab is as long as the shop makes both together', () => {
+    const tab = { point: 0, tab: 0.91 }
+    const groups = groupsOf({ length: 2 * 120 - 4 - 0.91, rightExtra: 0.91 }, MITERED, false, {
+      first: NO_EXTRA,
+      last: tab,
+    })
+    expect(groups.map(({ length }) => length)).toEqual([120, 119 + 1 / 16])
+  })
+
   test('always cover the line', () => {
     fc.assert(
       fc.property(

@@ -148,7 +148,7 @@ function FaceAlone({ end, profile, run, disabled, onChange }: FaceProps) {
   const done = JSON.stringify(end.legs) === JSON.stringify(legs)
   return (
     <div>
-      <p className="text-small text-scribe">{t(`face.${cut}Hint`)}</p>
+      <p className="text-small text-scribe">{t('face.hint')}</p>
       <Button
         disabled={disabled}
         aria-pressed={done}

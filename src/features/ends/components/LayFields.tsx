@@ -33,7 +33,7 @@ export function LayFields({ profile, stock, lay, run, disabled, onChange }: Prop
   const slope = printSlope(run.slope)
   return (
     <div className="flex flex-col gap-3">
-      <div className="grid grid-cols-[minmax(0,1fr)_auto] items-end gap-x-4">
+      <div className="grid grid-cols-[minmax(0,1fr)_auto] items-end gap-x-4 sm:grid-cols-[minmax(0,34rem)_auto] sm:justify-start">
         <div className="flex min-w-0 flex-col gap-3 sm:flex-row">
           <Select
             label={t('lay.leg')}

@@ -12,11 +12,21 @@ interface Props {
   readonly disabled: boolean
   /** How many digits are taken. */
   readonly digits?: number
+  /** What one less ends at. */
+  readonly least?: number
   readonly onChange: (quantity: number | null) => void
 }
 
 /** How many: typed, or one more and one less with a thumb. */
-export function QuantityField({ label, value, error, disabled, digits = 4, onChange }: Props) {
+export function QuantityField({
+  label,
+  value,
+  error,
+  disabled,
+  digits = 4,
+  least = 1,
+  onChange,
+}: Props) {
   const { t } = useTranslation('orders')
   const id = useId()
   return (
@@ -26,8 +36,8 @@ export function QuantityField({ label, value, error, disabled, digits = 4, onCha
           label={t('line.fewerOf', { label })}
           icon={<Icon name="minus" />}
           className="border border-edge bg-sheet"
-          disabled={disabled || value === null || value <= 1}
-          onClick={() => onChange((value ?? 2) - 1)}
+          disabled={disabled || value === null || value <= least}
+          onClick={() => value !== null && onChange(value - 1)}
         />
         <input
           id={id}

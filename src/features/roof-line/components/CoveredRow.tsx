@@ -45,6 +45,7 @@ export function CoveredRow({ line, choice, onChange }: Props) {
           value={choice.fastenedLegs}
           disabled={false}
           digits={2}
+          least={0}
           error={choice.fastenedLegs === null ? t('fastenedMissing') : undefined}
           onChange={(fastenedLegs) => onChange({ ...choice, fastenedLegs })}
         />

@@ -1,4 +1,4 @@
-import { TOLERANCE } from '#shared/geometry/tolerance'
+import { isAtMost, TOLERANCE } from '#shared/geometry/tolerance'
 import type { RoofLine } from '#shared/roof-line/roof-line.schema'
 import type { RoofPieces } from '#shared/roof-line/roof-pieces'
 import type { Inches } from '#shared/units/brands'
@@ -17,11 +17,17 @@ export interface PieceGroup {
   readonly count: number
 }
 
-/** An exact length is rounded up to what a tape shows, so that the line stays covered. */
 const SIXTEENTHS = 16
 
-const cutLength = (exact: Inches): Inches =>
-  Math.ceil(exact * SIXTEENTHS - TOLERANCE * SIXTEENTHS) / SIXTEENTHS
+/**
+ * An exact length as a tape shows it: counted up, so that the line stays covered, but down where
+ * the piece with its tabs would be longer than the shop makes them.
+ */
+function cutLength(exact: Inches, tabs: Inches, longest: Inches): Inches {
+  const up = Math.ceil((exact - tabs - TOLERANCE) * SIXTEENTHS) / SIXTEENTHS
+  if (isAtMost(up + tabs, longest)) return up
+  return tabs === 0 ? longest : Math.floor((longest - tabs + TOLERANCE) * SIXTEENTHS) / SIXTEENTHS
+}
 
 /** What the ends of the whole line add, at its low or left end and at the other. */
 export interface OutsideExtras {
@@ -30,8 +36,8 @@ export interface OutsideExtras {
 }
 
 /**
- * The pieces of a line in the order of their first one, alike in length and ends together; lengths
- * counted up to 1/16 in., but never over the longest piece.
+ * The pieces of a line in the order of their first one, alike in length and ends together, in
+ * lengths to 1/16 in.
  */
 export function pieceGroups(
   { order }: RoofPieces,
@@ -46,7 +52,7 @@ export function pieceGroups(
     // A tab is metal beyond the tip, which an order line's length leaves out.
     const tabs =
       (index === 0 ? extras.first.tab : 0) + (index === order.length - 1 ? extras.last.tab : 0)
-    const length = Math.min(cutLength(piece.length), pieceLength) - tabs
+    const length = cutLength(piece.length, tabs, pieceLength)
     const key = JSON.stringify([length, ends])
     const known = groups.find((group) => group.key === key)
     if (known) known.count += 1
