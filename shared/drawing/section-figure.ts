@@ -39,7 +39,10 @@ export interface SectionOptions {
   }
   readonly selected?: Part | null
   readonly hovered?: Part | null
+  /** What cannot be made. */
   readonly problems?: readonly Part[]
+  /** What can be made but deserves a look. */
+  readonly warnings?: readonly Part[]
   /** Turns the piece counter-clockwise, degrees. */
   readonly rotation?: number
   /** Type size in pixels instead of the one that suits the frame. */
@@ -141,6 +144,7 @@ export const sectionFigure = (profile: Profile, sheet: Sheet, options: SectionOp
     selected: options.selected ?? null,
     hovered: options.hovered ?? null,
     problems: options.problems ?? [],
+    warnings: options.warnings ?? [],
   }
   const items = [
     ...drawMetal(profile, section, pen, marks),

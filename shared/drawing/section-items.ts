@@ -12,6 +12,7 @@ export interface Marks {
   readonly selected: Part | null
   readonly hovered: Part | null
   readonly problems: readonly Part[]
+  readonly warnings: readonly Part[]
 }
 
 const line = (role: Role, points: readonly Point[], width: number, part?: Part): PathShape => ({
@@ -47,7 +48,8 @@ export const drawMetal = (
     items.push(line(isPainted ? 'paint' : 'bare', points, band + overlap))
   }
   items.push(line('metal', section.chain(0), pen.metal))
-  const isMarked = marks.selected || marks.hovered || marks.problems.length > 0
+  const isMarked =
+    marks.selected || marks.hovered || marks.problems.length > 0 || marks.warnings.length > 0
   for (const { part, points } of isMarked ? section.parts().toReversed() : []) {
     const role = markOf(part, marks)
     if (role !== undefined) items.push(line(role, points, pen.metal, part))
@@ -58,6 +60,7 @@ export const drawMetal = (
 const markOf = (part: Part, marks: Marks): Role | undefined => {
   if (marks.selected && isSamePart(part, marks.selected)) return 'selected'
   if (marks.problems.some((problem) => isSamePart(part, problem))) return 'problem'
+  if (marks.warnings.some((warning) => isSamePart(part, warning))) return 'warning'
   if (marks.hovered && isSamePart(part, marks.hovered)) return 'hovered'
   return undefined
 }

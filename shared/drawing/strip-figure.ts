@@ -20,6 +20,7 @@ export interface StripOptions {
   readonly selected?: Part | null
   readonly hovered?: Part | null
   readonly problems?: readonly Part[]
+  readonly warnings?: readonly Part[]
   readonly textSize?: number
   readonly targets?: boolean
 }
@@ -174,9 +175,10 @@ const boxOfFlat = (flat: Flat, { toX, sheet }: StripPlace): Bounds => ({
 const markRole = (
   part: Part,
   options: StripOptions,
-): 'selected' | 'problem' | 'hovered' | undefined => {
+): 'selected' | 'problem' | 'warning' | 'hovered' | undefined => {
   if (isSelected(part, options)) return 'selected'
   if (options.problems?.some((problem) => isSamePart(part, problem))) return 'problem'
+  if (options.warnings?.some((warning) => isSamePart(part, warning))) return 'warning'
   if (options.hovered && isSamePart(part, options.hovered)) return 'hovered'
   return undefined
 }

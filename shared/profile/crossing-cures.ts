@@ -1,11 +1,11 @@
-import type { ProfileEdit } from '#shared/profile/edits'
+import type { ProfileCure } from '#shared/profile/profile-cure'
 import type { ProfileProblem } from '#shared/profile/problem'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Degrees, Inches } from '#shared/units/brands'
 
 /** An edit to try, and how much it asks for in inches, or in what counts as much. */
 interface Step {
-  readonly edit: ProfileEdit
+  readonly edit: ProfileCure
   readonly size: number
 }
 
@@ -69,7 +69,7 @@ const hemSteps = ({ hemA, hemB }: Profile): Step[] =>
 export const crossingSteps = (
   profile: Profile,
   { leg, otherLeg }: Pick<ProfileProblem, 'leg' | 'otherLeg'>,
-): ProfileEdit[] => {
+): ProfileCure[] => {
   const first = Math.min(leg ?? 1, otherLeg ?? 1)
   const last = Math.max(leg ?? 1, otherLeg ?? 1)
   return [

@@ -1,6 +1,6 @@
 import { TOLERANCE } from '#shared/geometry/tolerance'
 import { crossingSteps } from '#shared/profile/crossing-cures'
-import type { ProfileEdit } from '#shared/profile/edits'
+import type { ProfileCure } from '#shared/profile/profile-cure'
 import { isSlope } from '#shared/profile/follows'
 import type { ProfileProblem } from '#shared/profile/problem'
 import type { Follows, Hem, Profile } from '#shared/profile/profile.schema'
@@ -18,13 +18,13 @@ const down = (inches: Inches): Inches => tapeStep(inches, 'down', 'fraction')
 const positive = (length: Inches): Inches[] =>
   length < 0 ? [-length, ...SHORT_LENGTHS] : [...SHORT_LENGTHS]
 
-const setLegs = (leg: number, lengths: readonly Inches[]): ProfileEdit[] =>
+const setLegs = (leg: number, lengths: readonly Inches[]): ProfileCure[] =>
   lengths.map((length) => ({ kind: 'setLeg', leg, length }))
 
 /** A whole turn more or less is the same fold: 200 degrees to the left are 160 to the right. */
 const turnWithin = (turn: Degrees): Degrees => turn - 360 * Math.round(turn / 360)
 
-const turnEdits = ({ bends }: Profile, bend: number): ProfileEdit[] => {
+const turnEdits = ({ bends }: Profile, bend: number): ProfileCure[] => {
   const { turn, follows } = bends[bend - 1] ?? { turn: NaN }
   // The roof gives the angle; a turn of its own would cut the bend loose.
   if (follows || !Number.isFinite(turn)) return []
@@ -34,7 +34,7 @@ const turnEdits = ({ bends }: Profile, bend: number): ProfileEdit[] => {
 }
 
 /** Slopes that are none are left out: the job's and the same on both sides come in their place. */
-const pitchEdits = ({ bends }: Profile, bend: number): ProfileEdit[] => {
+const pitchEdits = ({ bends }: Profile, bend: number): ProfileCure[] => {
   const follows = bends[bend - 1]?.follows
   if (!follows) return []
   const { rule, pitch, second } = follows
@@ -53,7 +53,7 @@ const hemEdits = (
   profile: Profile,
   edge: 'A' | 'B',
   change: (hem: Hem) => readonly (Hem | null)[],
-): ProfileEdit[] => {
+): ProfileCure[] => {
   const hem = edge === 'A' ? profile.hemA : profile.hemB
   return hem ? change(hem).map((changed) => ({ kind: 'setHem', edge, hem: changed })) : []
 }
@@ -69,7 +69,7 @@ const hemCandidates = (
   profile: Profile,
   { code, found, limit, leg }: ProfileProblem,
   edge: 'A' | 'B',
-): ProfileEdit[] => {
+): ProfileCure[] => {
   const of = (change: (hem: Hem) => readonly (Hem | null)[]) => hemEdits(profile, edge, change)
   switch (code) {
     case 'hemNotPositive':
@@ -107,7 +107,7 @@ const hemCandidates = (
  * of them do is for the caller to try. None where no edit of the drawing can: a value that must be
  * typed, a radius that belongs to the stock.
  */
-export const cureCandidates = (profile: Profile, problem: ProfileProblem): ProfileEdit[] => {
+export const cureCandidates = (profile: Profile, problem: ProfileProblem): ProfileCure[] => {
   const { code, leg, bend, hem, found, limit } = problem
   if (code === 'crossesItself') return crossingSteps(profile, problem)
   if (hem !== null) return hemCandidates(profile, problem, hem)

@@ -1,5 +1,5 @@
 import { cureCandidates } from '#shared/profile/cure-candidates'
-import type { ProfileEdit } from '#shared/profile/edits'
+import type { ProfileCure } from '#shared/profile/profile-cure'
 import { applyEdit } from '#shared/profile/edits'
 import type { ProfileProblem, ProfileProblemCode } from '#shared/profile/problem'
 import type { ProfileLimits } from '#shared/profile/problems'
@@ -33,7 +33,7 @@ const countOf = (problems: readonly ProfileProblem[], code: ProfileProblemCode):
 /** A corner taken away renumbers what comes after it, so that only counting tells. */
 const isGone = (
   problem: ProfileProblem,
-  edit: ProfileEdit,
+  edit: ProfileCure,
   before: readonly ProfileProblem[],
   after: readonly ProfileProblem[],
 ): boolean =>
@@ -60,10 +60,10 @@ export const findCureEdit = (
   problem: ProfileProblem,
   sheet: FoldingSheet | null,
   limits: ProfileLimits = {},
-): ProfileEdit | null => {
+): ProfileCure | null => {
   if (profile.bends.length !== profile.legs.length - 1) return null
   const before = profileProblems(profile, sheet, limits)
-  let second: ProfileEdit | null = null
+  let second: ProfileCure | null = null
   for (const edit of cureCandidates(profile, problem)) {
     const after = profileProblems(applyEdit(profile, edit), sheet, limits)
     if (!isGone(problem, edit, before, after)) continue

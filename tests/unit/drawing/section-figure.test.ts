@@ -128,6 +128,23 @@ describe('parts', () => {
     expect(findPart(toFrame({ x: 0, y: -3 }), 8)).toBeUndefined()
   })
 
+  it('draws what cannot be made as a problem, what deserves a look as a warning', () => {
+    const leg = { kind: 'leg', leg: 1 } as const
+    const hem = { kind: 'hem', edge: 'B' } as const
+    const { display } = sectionFigure(gable, STEEL, {
+      width: 390,
+      height: 300,
+      labels,
+      problems: [leg],
+      warnings: [leg, hem],
+    })
+    const partsOf = (role: string) =>
+      display.items.filter((item) => item.role === role).map(({ part }) => part)
+    expect(partsOf('problem')).toContainEqual(leg)
+    expect(partsOf('warning')).toContainEqual(hem)
+    expect(partsOf('warning')).not.toContainEqual(leg)
+  })
+
   it('draws a chosen leg and its dimension as selected, and only that', () => {
     const selected = { kind: 'leg', leg: 2 } as const
     const { display } = sectionFigure(gable, STEEL, { width: 390, height: 300, labels, selected })

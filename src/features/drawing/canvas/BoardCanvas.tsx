@@ -24,7 +24,9 @@ interface Props {
   readonly sheet: Sheet
   readonly colors: FigureColors
   readonly labels: FigureLabels
+  /** What cannot be made, and what can but deserves a look. */
   readonly problems: readonly Part[]
+  readonly warnings: readonly Part[]
   /** The job's slope, where there is one. */
   readonly pitch: Degrees | null
   readonly snapping: boolean
@@ -65,6 +67,7 @@ function SizedCanvas({
   colors,
   labels,
   problems,
+  warnings,
   pitch,
   snapping,
   size,
@@ -81,6 +84,7 @@ function SizedCanvas({
     size,
     labels,
     problems,
+    warnings,
     selected: board.selection,
   })
   const viewport =

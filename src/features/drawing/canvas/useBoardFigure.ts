@@ -12,6 +12,7 @@ interface FigureInputs {
   readonly size: ElementSize
   readonly labels: FigureLabels
   readonly problems: readonly Part[]
+  readonly warnings: readonly Part[]
   readonly selected: Part | null
 }
 
@@ -19,12 +20,20 @@ interface FigureInputs {
 export function useBoardFigure(
   { profile, placement }: BoardDocument,
   heldView: Viewport | null,
-  { sheet, size, labels, problems, selected }: FigureInputs,
+  { sheet, size, labels, problems, warnings, selected }: FigureInputs,
 ): Figure | null {
   return useMemo(() => {
     if (profile === null) return null
     const view = heldView ? { view: figureView(heldView, placement) } : {}
     const rotation = placement.heading
-    return sectionFigure(profile, sheet, { ...size, labels, selected, problems, rotation, ...view })
-  }, [profile, placement, sheet, size, labels, selected, problems, heldView])
+    return sectionFigure(profile, sheet, {
+      ...size,
+      labels,
+      selected,
+      problems,
+      warnings,
+      rotation,
+      ...view,
+    })
+  }, [profile, placement, sheet, size, labels, selected, problems, warnings, heldView])
 }

@@ -1,15 +1,24 @@
+import type { ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
+import type { Profile } from '#shared/profile/profile.schema'
+import type { ProfileCure } from '#shared/profile/profile-cure'
 import type { Inches } from '#shared/units/brands'
 import { printRun, printSize } from '#shared/units/print-length'
 import { printWeight } from '#shared/units/weight'
+import { Button } from '@/components/Button'
 import { usePerson } from '@/features/people/person-context'
 import { useFormats } from '@/lib/format/useFormats'
 import type { CheckedPlan, DrawingCheck } from '../check/check-drawing'
+import type { ToldProblem } from '../check/told-problems'
 import { BendsOn } from './BendsOn'
+import { CureButton } from './CureButton'
 
 interface Props {
   readonly check: DrawingCheck | null
   readonly plans: readonly CheckedPlan[]
+  /** The drawing in hand; null while nothing is drawn. */
+  readonly profile: Profile | null
+  readonly told: readonly ToldProblem[]
   readonly pieceLength: Inches
   /** Whether the server has said the same: figures are worked out here first. */
   readonly confirmed: boolean
@@ -18,22 +27,35 @@ interface Props {
   /** Whether what each brake says is open beside the drawing. */
   readonly brakesOpen: boolean
   readonly onBrakes: () => void
+  /** Whether the list of all problems is. */
+  readonly problemsOpen: boolean
+  readonly onProblems: () => void
+  readonly onCure: (cure: ProfileCure) => void
+  /** What else is to be said of the figures, under them. */
+  readonly notice?: ReactNode
 }
 
 /** The live figures under a drawing: what it takes, what it weighs, and where it bends. */
 export function AnswerBar({
   check,
   plans,
+  profile,
+  told,
   pieceLength,
   confirmed,
   lookedAt,
   brakesOpen,
   onBrakes,
+  problemsOpen,
+  onProblems,
+  onCure,
+  notice,
 }: Props) {
   const { t } = useTranslation('drawing')
   const { units } = usePerson()
   const { count } = useFormats()
   const strip = check?.strip ?? null
+  const [first] = told
   const hits = plans
     .find(({ plan }) => plan.feasible)
     ?.plan.steps.reduce((sum, step) => sum + step.hits, 0)
@@ -60,25 +82,42 @@ export function AnswerBar({
           </div>
         ))}
       </dl>
-      <div className="flex items-center border-t border-rule">
-        <div className="min-w-0 flex-1">
-          <BendsOn check={check} plans={plans} />
+      {notice}
+      <div className={first ? 'border-t border-rule' : 'flex items-center border-t border-rule'}>
+        <div className="min-w-0 flex-1 pb-1">
+          <BendsOn check={check} plans={plans} first={first} />
           {lookedAt !== null && (
-            <p role="status" className="px-3 pb-1 text-small text-scribe">
+            <p role="status" className="px-3 text-small text-scribe">
               {t('answer.lookedAt', { shown: count(lookedAt) })}
             </p>
           )}
         </div>
-        {plans.length > 0 && (
-          <button
-            type="button"
-            aria-expanded={brakesOpen}
-            onClick={onBrakes}
-            className="min-h-target shrink-0 px-3 text-dye underline hover:bg-ink/5"
-          >
-            {t(plans.some(({ plan }) => plan.feasible) ? 'why:open' : 'why:openWhy')}
-          </button>
-        )}
+        <div className="flex flex-wrap items-center px-1">
+          {profile && first?.cure && (
+            <CureButton profile={profile} cure={first.cure} onCure={onCure} />
+          )}
+          {told.length > 1 && (
+            <Button
+              variant="quiet"
+              className="px-2! font-normal! underline"
+              aria-expanded={problemsOpen}
+              aria-label={t('answer.moreToLookAt', { count: told.length - 1 })}
+              onClick={onProblems}
+            >
+              {t('answer.more', { count: told.length - 1 })}
+            </Button>
+          )}
+          {plans.length > 0 && (
+            <Button
+              variant="quiet"
+              className="ml-auto px-2! font-normal! underline"
+              aria-expanded={brakesOpen}
+              onClick={onBrakes}
+            >
+              {t(plans.some(({ plan }) => plan.feasible) ? 'why:open' : 'why:openWhy')}
+            </Button>
+          )}
+        </div>
       </div>
     </section>
   )

@@ -7,7 +7,7 @@ export function ChecksMade({ plan }: { readonly plan: Plan }) {
   const { t } = useTranslation('drawing')
   const words = usePlanWords()
   return (
-    <details className="text-small text-scribe">
+    <details className="inline-block text-small text-scribe open:block">
       <summary>{t('answer.checked', { count: plan.checks.length })}</summary>
       {words.checks(plan.checks)}
     </details>

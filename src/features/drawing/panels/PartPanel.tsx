@@ -1,32 +1,34 @@
 import type { Dispatch } from 'react'
 import { useTranslation } from 'react-i18next'
-import { problemMessage } from '#shared/profile/problem-message'
 import { isSamePart, type Part } from '#shared/drawing/display-list'
+import type { ProfileCure } from '#shared/profile/profile-cure'
 import { Button } from '@/components/Button'
-import { usePerson } from '@/features/people/person-context'
-import { partsOfProblem, type DrawingCheck } from '../check/check-drawing'
+import { partsOfProblem } from '../check/check-drawing'
+import type { ToldProblem } from '../check/told-problems'
 import type { Board, BoardEvent } from '../model/board'
 import { partBeside } from '../model/parts-in-order'
 import { usePartName } from '../usePartName'
+import { useProblemWords } from '../useProblemWords'
 import { ActionButton } from './ActionButton'
 import { BendPanel } from './BendPanel'
+import { CureButton } from './CureButton'
 import { HemPanel } from './HemPanel'
 import { LegPanel } from './LegPanel'
 
 interface Props {
   readonly board: Board
   readonly dispatch: Dispatch<BoardEvent>
-  readonly check: DrawingCheck | null
+  readonly told: readonly ToldProblem[]
+  readonly onCure: (cure: ProfileCure) => void
   readonly pitchRise: number | null
   /** What follows when the last part has its measure. */
   readonly finish: { readonly label: string; readonly onPress: () => void }
 }
 
 /** The part in hand with its keypad, and the way to the next one. */
-export function PartPanel({ board, dispatch, check, pitchRise, finish }: Props) {
+export function PartPanel({ board, dispatch, told, onCure, pitchRise, finish }: Props) {
   const { t } = useTranslation('drawing')
-  const { t: say } = useTranslation('profile')
-  const { units } = usePerson()
+  const words = useProblemWords()
   const nameOf = usePartName()
   const { profile } = board.history.present
   const { selection } = board
@@ -54,24 +56,28 @@ export function PartPanel({ board, dispatch, check, pitchRise, finish }: Props) 
   const next = partBeside(profile, selection, 1)
   const goTo = (part: Part) => dispatch({ type: 'select', part })
   const onDone = () => (next ? goTo(next) : finish.onPress())
-  const problem = check?.problems.find((found) =>
-    partsOfProblem(found).some((part) => isSamePart(part, selection)),
+  const its = told.find(({ problem }) =>
+    partsOfProblem(problem).some((part) => isSamePart(part, selection)),
   )
-  const message = problem && problemMessage(problem, units)
+  // The cure of the worst problem stands in the answer bar.
+  const cure = its === told[0] ? null : (its?.cure ?? null)
   const shared = {
     board,
     dispatch,
     profile,
     name: nameOf(selection),
-    problem: message && say(message.key, message.values),
+    problem: its && words.problem(its.problem),
     onDone,
     children: (
-      <Steps
-        previous={partBeside(profile, selection, -1)}
-        next={next}
-        goTo={goTo}
-        finish={finish}
-      />
+      <>
+        {cure && <CureButton profile={profile} cure={cure} onCure={onCure} />}
+        <Steps
+          previous={partBeside(profile, selection, -1)}
+          next={next}
+          goTo={goTo}
+          finish={finish}
+        />
+      </>
     ),
   }
 
@@ -114,7 +120,7 @@ function Steps({ previous, next, goTo, finish }: StepsProps) {
   const { t } = useTranslation('drawing')
   const nameOf = usePartName()
   return (
-    <div className="sticky -bottom-3 -mb-3 grid grid-cols-2 gap-2 bg-sheet pt-1 pb-3">
+    <div className="sticky -bottom-3 z-10 -mb-3 grid grid-cols-2 gap-2 bg-sheet pt-1 pb-3">
       <Button disabled={previous === null} onClick={() => previous && goTo(previous)}>
         {previous ? nameOf(previous) : t('part.previous')}
       </Button>

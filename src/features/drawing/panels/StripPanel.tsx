@@ -15,13 +15,23 @@ interface Props {
   readonly profile: Profile
   readonly strip: Strip
   readonly selected: Part | null
+  /** What deserves a look. */
+  readonly warnings: readonly Part[]
   readonly dispatch: Dispatch<BoardEvent>
   readonly colors: FigureColors
   readonly labels: FigureLabels
 }
 
 /** The same piece laid flat: edge A left, edge B right. A touch lights up the part in the section. */
-export function StripPanel({ profile, strip, selected, dispatch, colors, labels }: Props) {
+export function StripPanel({
+  profile,
+  strip,
+  selected,
+  warnings,
+  dispatch,
+  colors,
+  labels,
+}: Props) {
   const { t } = useTranslation('drawing')
   const { ref, size } = useElementSize()
   const width = size?.width ?? 0
@@ -33,10 +43,11 @@ export function StripPanel({ profile, strip, selected, dispatch, colors, labels 
             height: STRIP_HEIGHT,
             labels,
             selected,
+            warnings,
             targets: true,
           })
         : null,
-    [profile, strip, width, labels, selected],
+    [profile, strip, width, labels, selected, warnings],
   )
   return (
     <div ref={ref} className="shrink-0" style={{ height: STRIP_HEIGHT }}>

@@ -16,6 +16,7 @@ import { StockSelect } from '@/features/stocks/StockSelect'
 import { newKey } from '@/lib/api/idempotency'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
 import type { DrawingStart } from './drawing-start'
+import { GirthNotice } from './GirthNotice'
 
 interface Props {
   readonly start: DrawingStart
@@ -89,6 +90,20 @@ export function BoardScreen({ start, draft, job, stocks, brakes, orderId }: Prop
         brakes={brakes}
         pitchRise={job.pitchRise}
         finish={{ label: t('finish'), onPress: () => void navigate(toOrder) }}
+        notice={
+          profile &&
+          line !== null &&
+          line.statedGirth !== null && (
+            <GirthNotice
+              profile={profile}
+              stated={line.statedGirth}
+              selected={board.selection}
+              onProfile={(next) =>
+                dispatch({ type: 'change', document: { ...board.history.present, profile: next } })
+              }
+            />
+          )
+        }
       />
     </PlaceFrame>
   )
