@@ -10,6 +10,7 @@ import { DEMO_BRAKES } from '#shared/bend-plan/demo-brakes'
 import { createCalendar, type Calendar } from './demo/calendar'
 import { createDemoRandom, type DemoRandom } from './demo/demo-random'
 import { jobRows } from './demo/jobs'
+import { ACCOUNT_STEPS } from './demo/mails'
 import { DEMO_COMPANIES, DEMO_PASSWORD, DEMO_PEOPLE, personRow } from './demo/people'
 import { shelfRows } from './demo/profiles'
 import { createDemoShop } from './demo/shop'
@@ -43,7 +44,10 @@ export async function seedDemo(db: Knex): Promise<void> {
   const passwordHash = await hashPassword(DEMO_PASSWORD)
   await db.transaction(async (trx) => {
     await insertShop(trx, calendar, random, passwordHash)
-    await tellStories(createDemoShop(trx, calendar, random), STORIES, TEST_BEND_STEPS)
+    await tellStories(createDemoShop(trx, calendar, random), STORIES, [
+      ...TEST_BEND_STEPS,
+      ...ACCOUNT_STEPS,
+    ])
   })
 }
 

@@ -1,5 +1,8 @@
 import type { Knex } from 'knex'
 import type { Clock } from '#server/adapters/clock'
+import type { MailTransport } from '#server/adapters/mail/mail-transport'
+import type { Db } from '#server/db/knex'
+import { auditRoutes } from '#server/features/audit/audit.routes'
 import { createBrakesQueries } from '#server/features/brakes/brakes.queries'
 import { brakesRoutes } from '#server/features/brakes/brakes.routes'
 import { bundlesRoutes } from '#server/features/bundles/bundles.routes'
@@ -10,11 +13,24 @@ import { createJobsServiceOn } from '#server/features/jobs/create-jobs-service'
 import { jobsRoutes } from '#server/features/jobs/jobs.routes'
 import { labelsRoutes } from '#server/features/labels/labels.routes'
 import { createLabelsService } from '#server/features/labels/labels.service'
+import { createDrawOrder } from '#server/features/mail/draw-order'
+import { drawSlip } from '#server/features/mail/draw-slip'
+import { enqueueMail, type MailPorts } from '#server/features/mail/mail-ports'
+import { mailRoutes } from '#server/features/mail/mail.routes'
+import { createMailsService } from '#server/features/mail/mails.service'
+import { createOrderMails } from '#server/features/mail/order-mails'
+import { createSendMail } from '#server/features/mail/send-mail'
+import { createStripSheetsOfOrder } from '#server/features/mail/strip-sheets-of-order'
 import {
   createOrderPlanningOn,
   createOrdersServiceOn,
 } from '#server/features/orders/create-orders-service'
 import { ordersRoutes } from '#server/features/orders/orders.routes'
+import { accountsRoutes } from '#server/features/people/accounts.routes'
+import { createAccountsService } from '#server/features/people/accounts.service'
+import { passwordLimits } from '#server/features/people/password-limits'
+import { createPasswordResetJob } from '#server/features/people/password-reset.job'
+import { createPasswordService } from '#server/features/people/password.service'
 import { createPeopleService } from '#server/features/people/people.service'
 import { peopleRoutes } from '#server/features/people/people.routes'
 import { sessionRoutes } from '#server/features/people/session.routes'
@@ -36,6 +52,7 @@ import { createTestBendsServiceOn } from '#server/features/stocks/create-test-be
 import { createStocksQueries } from '#server/features/stocks/stocks.queries'
 import { stocksRoutes } from '#server/features/stocks/stocks.routes'
 import type { Route } from '#server/http/define-route'
+import type { JobTasks } from '#server/jobs/job'
 import type { Planner } from '#server/planning/planner'
 
 export interface Ports {
@@ -45,12 +62,17 @@ export interface Ports {
   readonly planner: Planner
   /** IANA name. */
   readonly shopTimeZone: string
+  readonly transport: MailTransport
+  /** What links in mails begin with. */
+  readonly publicUrl: string
   readonly onError: (message: string, error: unknown) => void
 }
 
 export interface Composition {
   readonly routes: readonly Route[]
   readonly signIn: SignIn
+  /** What happens without a request. */
+  readonly tasks: JobTasks
 }
 
 /** The only place that knows every feature: each service is built anew on the handle it is given. */
@@ -58,11 +80,30 @@ export function compose(ports: Ports): Composition {
   const { db: pool, clock, planner, shopTimeZone, onError } = ports
   const signIn = createSignIn(pool)
   const making = { clock, drawCode: newCode }
+  const mailPorts: MailPorts = { clock, publicUrl: ports.publicUrl, enqueue: enqueueMail }
+  const orderMailsOn = (db: Db) => createOrderMails(db, { ...mailPorts, drawCode: newCode })
+  const draw = {
+    drawings: createDrawOrder(createStripSheetsOfOrder({ clock, shopTimeZone })),
+    slip: drawSlip,
+  }
   return {
     signIn,
+    tasks: {
+      'send-mail': createSendMail({ db: pool, clock, transport: ports.transport, draw }),
+      'password-reset': createPasswordResetJob(pool, mailPorts),
+    },
     routes: [
       ...sessionRoutes({ signIn, limits: signInLimits(pool, clock), clock }),
       ...peopleRoutes(createPeopleService),
+      ...accountsRoutes({
+        makeAccounts: (db) => createAccountsService(db, mailPorts),
+        makePasswords: (db) => createPasswordService(db, clock),
+        limits: passwordLimits(pool, clock),
+      }),
+      ...mailRoutes((db) =>
+        createMailsService(db, { enqueue: enqueueMail, leaves: ports.transport.leaves }),
+      ),
+      ...auditRoutes(),
       ...jobsRoutes(createJobsServiceOn),
       ...shelfRoutes((db) => createShelfServiceOn(db, clock)),
       ...stocksRoutes(createStocksQueries, (db) => createTestBendsServiceOn(db, clock)),
@@ -74,12 +115,17 @@ export function compose(ports: Ports): Composition {
       ...ordersRoutes({
         planner,
         makeService: (db, known) =>
-          createOrdersServiceOn(db, { clock, planner: known, shopTimeZone }),
+          createOrdersServiceOn(db, {
+            clock,
+            planner: known,
+            shopTimeZone,
+            mails: orderMailsOn(db),
+          }),
         makePlanning: createOrderPlanningOn,
       }),
       ...piecesRoutes((db) => createPiecesService(db, making)),
       ...runsRoutes((db) => createRunsService(db, making)),
-      ...bundlesRoutes((db) => createBundlesService(db, making)),
+      ...bundlesRoutes((db) => createBundlesService(db, orderMailsOn(db), making)),
       ...handOffRoutes((db) => createHandOffService(db, making)),
       ...labelsRoutes((db) => createLabelsService(db, making)),
       ...sheetsRoutes((db) => createSheetsService(db, { clock, shopTimeZone })),

@@ -5,6 +5,7 @@ import { systemClock } from '#server/adapters/clock'
 import { readConfig } from '#server/config'
 import { exitOnConfigError } from '#server/exit-on-config-error'
 import { endGracefully } from '#server/graceful-end'
+import { startJobs } from '#server/jobs/start-jobs'
 import { sourceWorker } from '#server/planning/source-worker'
 import { startPlanning } from '#server/planning/start-planning'
 import { startServer } from '#server/running-server'
@@ -28,6 +29,7 @@ const server = await startServer({
   client: viteClient,
   contentSecurityPolicy: false,
   planning: (deps) => startPlanning({ program: sourceWorker }, deps),
+  jobs: startJobs,
 })
 endGracefully(server, logger)
 logger.info({ url: server.url }, 'listening')

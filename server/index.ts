@@ -4,6 +4,7 @@ import { readConfig } from '#server/config'
 import { endGracefully } from '#server/graceful-end'
 import { serveClient } from '#server/http/serve-client'
 import { exitOnConfigError } from '#server/exit-on-config-error'
+import { startJobs } from '#server/jobs/start-jobs'
 import { startPlanning } from '#server/planning/start-planning'
 import { startServer } from '#server/running-server'
 
@@ -19,6 +20,7 @@ const server = await startServer({
   client: () => Promise.resolve(serveClient(config.clientDir)),
   contentSecurityPolicy: true,
   planning: (deps) => startPlanning({ program: builtWorker }, deps),
+  jobs: startJobs,
 })
 endGracefully(server, logger)
 logger.info({ url: server.url }, 'listening')

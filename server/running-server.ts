@@ -6,11 +6,14 @@ import type { Knex } from 'knex'
 import pg from 'pg'
 import type { Logger } from 'pino'
 import type { Clock } from '#server/adapters/clock'
+import { localCatcher } from '#server/adapters/mail/local-catcher'
+import { smtpTransport } from '#server/adapters/mail/smtp-transport'
 import { createApp } from '#server/app'
 import { compose } from '#server/composition'
 import type { Config } from '#server/config'
 import { createDatabase } from '#server/db/knex'
 import { createSessions } from '#server/http/session'
+import type { JobsDeps, RunningJobs } from '#server/jobs/job'
 import { startHousekeeping } from '#server/jobs/housekeeping'
 import { LiveHub } from '#server/live/live-hub'
 import type { Planning, PlanningDeps } from '#server/planning/start-planning'
@@ -28,6 +31,8 @@ export interface ServerOptions {
   readonly client: (server: Server) => Promise<RequestHandler>
   readonly contentSecurityPolicy: boolean
   readonly planning: (deps: PlanningDeps) => Planning
+  /** Runs what mails and other jobs were left for. */
+  readonly jobs: (deps: JobsDeps) => Promise<RunningJobs>
 }
 
 export interface RunningServer {
@@ -35,7 +40,7 @@ export interface RunningServer {
   readonly url: string
   readonly db: Knex
   readonly hub: LiveHub
-  /** Lets open requests finish, ends the streams and the planning, and closes the database. */
+  /** Lets open requests finish, ends the streams, the jobs and the planning, and closes the database. */
   readonly close: () => Promise<void>
 }
 
@@ -54,11 +59,14 @@ export async function startServer(options: ServerOptions): Promise<RunningServer
   })
   const hub = new LiveHub({ db, databaseUrl: config.databaseUrl, onError })
   const planning = options.planning({ db, clock, onError })
-  const { routes, signIn } = compose({
+  const transport = config.smtp ? smtpTransport(config.smtp) : localCatcher()
+  const { routes, signIn, tasks } = compose({
     db,
     clock,
     planner: planning.planner,
     shopTimeZone: config.shopTimeZone,
+    publicUrl: config.publicUrl,
+    transport,
     onError,
   })
 
@@ -79,6 +87,7 @@ export async function startServer(options: ServerOptions): Promise<RunningServer
 
   await hub.start()
   const stopHousekeeping = startHousekeeping({ db, clock, onError })
+  const jobs = await options.jobs({ databaseUrl: config.databaseUrl, tasks, logger })
   const address = await listen(server, config)
 
   const close = async () => {
@@ -86,6 +95,8 @@ export async function startServer(options: ServerOptions): Promise<RunningServer
     const closed = closeServer(server)
     await hub.stop()
     await closed
+    await jobs.close()
+    transport.close()
     sessions.close()
     await planning.close()
     await Promise.all([db.destroy(), sessionPool.end()])

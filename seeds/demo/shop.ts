@@ -1,3 +1,4 @@
+import type { Clock } from '#server/adapters/clock'
 import type { Db } from '#server/db/knex'
 import { createBrakesQueries } from '#server/features/brakes/brakes.queries'
 import { createBundlesService, type BundlesService } from '#server/features/bundles/bundles.service'
@@ -12,6 +13,7 @@ import { createOrdersQueries } from '#server/features/orders/orders.queries'
 import { createOrdersService, type OrdersService } from '#server/features/orders/orders.service'
 import { createOrdersStore, type OrdersStore } from '#server/features/orders/orders.store'
 import { createReleaseOrder } from '#server/features/orders/release-order'
+import type { OrderMails } from '#server/features/mail/order-mails'
 import { createPiecesService, type PiecesService } from '#server/features/pieces/pieces.service'
 import { createRunsService, type RunsService } from '#server/features/runs/runs.service'
 import { createStocksQueries } from '#server/features/stocks/stocks.queries'
@@ -25,6 +27,7 @@ import { announce } from '#server/live/announce'
 import { createLocalPlanner } from '#server/planning/local-planner'
 import type { Calendar } from './calendar'
 import { createDemoRandom, type DemoRandom } from './demo-random'
+import { createDemoMails } from './mails'
 import { createDemoReleaseStore } from './release-store'
 
 /** Ids of test bends are drawn apart, so that they move no code of the pieces. */
@@ -34,6 +37,7 @@ const TEST_BEND_SEED = 20_261
 export interface DemoShop {
   readonly db: Db
   readonly calendar: Calendar
+  readonly clock: Clock
   readonly setTime: (moment: Date) => void
   readonly orders: OrdersService
   readonly pieces: PiecesService
@@ -47,18 +51,20 @@ export function createDemoShop(db: Db, calendar: Calendar, random: DemoRandom): 
   let time = calendar.moment(-12, '13:00')
   const clock = { now: () => time }
   const ports = { clock, drawCode: random.drawCode }
+  const mails = createDemoMails(db, clock)
   return {
     db,
     calendar,
+    clock,
     setTime: (moment) => {
       if (moment < time)
         throw new RangeError(`${moment.toISOString()} lies before what was seeded.`)
       time = moment
     },
-    orders: createDemoOrders(db, random, clock),
+    orders: createDemoOrders(db, random, clock, mails),
     pieces: createPiecesService(db, ports),
     runs: createRunsService(db, ports),
-    bundles: createBundlesService(db, ports),
+    bundles: createBundlesService(db, mails, ports),
     handOff: createHandOffService(db, ports),
     testBends: createDemoTestBends(db, clock),
   }
@@ -77,7 +83,12 @@ function createDemoTestBends(db: Db, clock: { now: () => Date }): TestBendsServi
   })
 }
 
-function createDemoOrders(db: Db, random: DemoRandom, clock: { now: () => Date }): OrdersService {
+function createDemoOrders(
+  db: Db,
+  random: DemoRandom,
+  clock: Clock,
+  mails: OrderMails,
+): OrdersService {
   const queries = createOrdersQueries(db)
   const stocks = createStocksQueries(db)
   const brakes = createBrakesQueries(db)
@@ -94,6 +105,7 @@ function createDemoOrders(db: Db, random: DemoRandom, clock: { now: () => Date }
     stocks,
     store,
     clock,
+    mails,
     // The demo shop's hours are UTC, see the calendar.
     shopTimeZone: 'UTC',
     reader: createOrderReader({ queries, pieces, stocks, brakes, planner }),

@@ -5,6 +5,7 @@ import { createDatabase } from '#server/db/knex'
 import { migrateToLatest, rollbackMigrations } from '#server/db/migrate'
 import { PEOPLE } from '#server/db/tables/people'
 import { exitOnConfigError } from '#server/exit-on-config-error'
+import { installJobs, removeJobs } from '#server/jobs/job-schema'
 
 /** A refusal in words, without a stack. */
 class Refusal extends Error {}
@@ -12,10 +13,9 @@ class Refusal extends Error {}
 type Verb = (db: Knex, flags: readonly string[]) => Promise<string>
 
 const VERBS: Record<string, Verb> = {
-  migrate: async (db) => countOf(await migrateToLatest(db), 'made'),
+  migrate: async (db) => countOf(await migrate(db), 'made'),
 
-  rollback: async (db, flags) =>
-    countOf(await rollbackMigrations(db, flags.includes('--all')), 'taken back'),
+  rollback: async (db, flags) => countOf(await rollback(db, flags.includes('--all')), 'taken back'),
 
   seed: async (db) => {
     if (await hasPeople(db)) {
@@ -33,8 +33,8 @@ const VERBS: Record<string, Verb> = {
         'The database has people beside the demo ones. To delete everything give --force.',
       )
     }
-    await rollbackMigrations(db, true)
-    await migrateToLatest(db)
+    await rollback(db, true)
+    await migrate(db)
     return seed(db)
   },
 
@@ -54,6 +54,18 @@ async function hasRealPeople(db: Knex): Promise<boolean> {
   return (await db(PEOPLE).whereNot('email', 'like', '%@example.com').first('id')) !== undefined
 }
 
+/** Ours, then the tables of the job queue. */
+async function migrate(db: Knex): Promise<string[]> {
+  const names = await migrateToLatest(db)
+  await installJobs(databaseUrl)
+  return names
+}
+
+async function rollback(db: Knex, all: boolean): Promise<string[]> {
+  if (all) await removeJobs(db)
+  return rollbackMigrations(db, all)
+}
+
 async function seed(db: Knex): Promise<string> {
   await db.transaction(seedDemo)
   return 'demo data added'
@@ -65,7 +77,8 @@ if (!verb) {
   process.stderr.write(`Give one of: ${Object.keys(VERBS).join(', ')}.\n`)
   process.exit(2)
 }
-const db = createDatabase(exitOnConfigError(readDatabaseUrl))
+const databaseUrl = exitOnConfigError(readDatabaseUrl)
+const db = createDatabase(databaseUrl)
 try {
   process.stdout.write(`${await verb(db, flags)}\n`)
 } catch (error) {

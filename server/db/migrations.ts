@@ -12,6 +12,9 @@ import * as overrides from '#migrations/0010_overrides'
 import * as endsAndGoods from '#migrations/0011_ends_and_goods'
 import * as testBends from '#migrations/0012_test_bends'
 import * as labelPrints from '#migrations/0013_label_prints'
+import * as mails from '#migrations/0014_mails'
+import * as accounts from '#migrations/0015_accounts'
+import * as auditLog from '#migrations/0016_audit_log'
 
 interface NamedMigration {
   readonly name: string
@@ -36,6 +39,9 @@ const MIGRATIONS: readonly NamedMigration[] = [
   { name: '0011_ends_and_goods', migration: endsAndGoods },
   { name: '0012_test_bends', migration: testBends },
   { name: '0013_label_prints', migration: labelPrints },
+  { name: '0014_mails', migration: mails },
+  { name: '0015_accounts', migration: accounts },
+  { name: '0016_audit_log', migration: auditLog },
 ]
 
 export const migrationSource: Knex.MigrationSource<NamedMigration> = {

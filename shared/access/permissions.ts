@@ -39,7 +39,15 @@ export const PERMISSIONS = {
   'bundles.write': ['bender', 'counter', 'manager'],
   'bundles.handOff': ['counter', 'manager'],
   'people.read': ['manager'],
+  /** A crew lead invites crew leads of the own company. */
+  'people.invite': ['crewLead', 'manager'],
+  'people.manage': ['manager'],
+  'crew.read': ['crewLead'],
   'companies.read': ['counter', 'manager'],
+  'companies.write': ['manager'],
+  'mails.read': ['manager'],
+  'mails.send': ['manager'],
+  'audit.read': ['manager'],
 } as const satisfies Record<string, readonly Role[]>
 
 export type Permission = keyof typeof PERMISSIONS

@@ -11,6 +11,7 @@ export const LIVE_TOPICS = [
   'stocks',
   'brakes',
   'people',
+  'mails',
 ] as const
 export const liveTopicSchema = z.enum(LIVE_TOPICS)
 

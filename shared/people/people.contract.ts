@@ -2,12 +2,20 @@ import { z } from 'zod'
 import { ROLES } from '#shared/access/permissions'
 import { endpoint, noContent } from '#shared/http/endpoint'
 import { momentSchema, textField } from '#shared/http/fields'
+import { PASSWORD_INPUT_LENGTH } from '#shared/people/password-rules'
 
 export const languageSchema = z.enum(['en', 'es'])
 /** Inches with fractions, decimal inches, millimeters. */
 export const unitsSchema = z.enum(['fraction', 'decimal', 'mm'])
 export const themeSchema = z.enum(['light', 'dark', 'system'])
 export const roleSchema = z.enum(ROLES)
+
+/** In small letters: an address is the same however it is typed. */
+export const emailField = z
+  .string()
+  .trim()
+  .toLowerCase()
+  .pipe(z.email('Type a mail address such as name@example.com.').max(254))
 
 export const companySchema = z.strictObject({ id: z.uuid(), name: z.string() })
 
@@ -37,6 +45,8 @@ export const personRowSchema = z.strictObject({
   role: roleSchema,
   company: companySchema.nullable(),
   active: z.boolean(),
+  /** Has not set a password yet. */
+  invited: z.boolean(),
   lastSignInAt: momentSchema.nullable(),
 })
 
@@ -54,12 +64,8 @@ export const signIn = endpoint({
   permission: 'public',
   summary: 'Sign in with mail address and password.',
   body: z.strictObject({
-    email: z
-      .string()
-      .trim()
-      .toLowerCase()
-      .pipe(z.email('Type a mail address such as name@example.com.')),
-    password: z.string().min(1, 'Type your password.').max(200),
+    email: emailField,
+    password: z.string().min(1, 'Type your password.').max(PASSWORD_INPUT_LENGTH),
   }),
   answer: sessionSchema,
 })

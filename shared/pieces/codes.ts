@@ -16,7 +16,7 @@ const MODULUS = 36
 export const CODE_ALPHABET = '0123456789ABCDEFGHJKMNPQRSTVWXYZ'
 export const CODE_BODY_LENGTH = 6
 
-export const CODE_KINDS = { piece: 'P', bundle: 'B', run: 'R' } as const
+export const CODE_KINDS = { piece: 'P', bundle: 'B', run: 'R', slip: 'S' } as const
 export type CodeKind = keyof typeof CODE_KINDS
 
 /** The MOD 37,36 check character of a string over 0-9 A-Z. */

@@ -18,13 +18,15 @@ export const resolvedCodeSchema = z.discriminatedUnion('kind', [
     orderId: z.uuid(),
   }),
   z.strictObject({ kind: z.literal('run'), code: z.string(), runId: z.uuid() }),
+  /** What a crew shows at the counter. */
+  z.strictObject({ kind: z.literal('slip'), code: z.string(), orderId: z.uuid() }),
 ])
 
 export const resolveCode = endpoint({
   method: 'GET',
   path: '/codes/:code',
   permission: 'rack.read',
-  summary: 'What a typed or scanned code is: a piece, a bundle or a run.',
+  summary: 'What a typed or scanned code is: a piece, a bundle, a run or a slip.',
   params: z.strictObject({ code: z.string().max(40) }),
   answer: resolvedCodeSchema,
 })

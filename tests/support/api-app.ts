@@ -4,12 +4,14 @@ import { inject } from 'vitest'
 import { systemClock, type Clock } from '#server/adapters/clock'
 import { readConfig } from '#server/config'
 import { createDatabase } from '#server/db/knex'
+import type { JobsDeps, RunningJobs } from '#server/jobs/job'
 import { sourceWorker } from '#server/planning/source-worker'
 import { startPlanning, type Planning, type PlanningDeps } from '#server/planning/start-planning'
 import { startServer, type RunningServer } from '#server/running-server'
 import type { Role } from '#shared/access/permissions'
 import { ApiAgent } from './api-agent'
 import { runnerOf, testDatabaseName, testServerUrl, urlOfDatabase } from './database-template'
+import { runDueJobs } from './run-jobs'
 import { createFactories, PASSWORD, type Factories, type TestPerson } from './factories'
 
 export interface ApiOptions {
@@ -20,6 +22,8 @@ export interface ApiOptions {
   readonly environment?: Record<string, string>
   /** Where plans come from; threads from the sources by default. */
   readonly planning?: (deps: PlanningDeps) => Planning
+  /** Runs jobs as they come; by default they wait for `runJobs`. */
+  readonly jobs?: (deps: JobsDeps) => Promise<RunningJobs>
   /** Shares the database of another one, as a second process behind a balancer does. */
   readonly sharing?: Api
 }
@@ -34,6 +38,8 @@ export interface Api {
   readonly newAgent: () => ApiAgent
   /** A new person of this role, signed in; or the person given. */
   readonly signInAs: (who: Role | TestPerson) => Promise<ApiAgent>
+  /** Runs the jobs that are due by now, mails among them. */
+  readonly runJobs: () => Promise<void>
   readonly close: () => Promise<void>
 }
 
@@ -42,6 +48,7 @@ export async function startApi(options: ApiOptions = {}): Promise<Api> {
   const database = options.sharing
     ? { url: options.sharing.databaseUrl, drop: () => Promise.resolve() }
     : await cloneTemplate()
+  let left: JobsDeps | undefined
   const server = await startServer({
     config: readConfig({
       NODE_ENV: 'test',
@@ -54,6 +61,10 @@ export async function startApi(options: ApiOptions = {}): Promise<Api> {
     client: () => Promise.resolve((_request, response) => void response.sendStatus(404)),
     contentSecurityPolicy: true,
     planning: options.planning ?? ((deps) => startPlanning({ program: sourceWorker }, deps)),
+    jobs: async (deps) => {
+      left = deps
+      return (await options.jobs?.(deps)) ?? { close: () => Promise.resolve() }
+    },
   })
   const make = createFactories(server.db)
   const newAgent = () => new ApiAgent(server.url)
@@ -66,12 +77,17 @@ export async function startApi(options: ApiOptions = {}): Promise<Api> {
     return agent
   }
 
+  const runJobs = async () => {
+    if (!left) throw new Error('The server was not started.')
+    await runDueJobs(left)
+  }
+
   const close = async () => {
     await server.close()
     await database.drop()
   }
   const { url, db } = server
-  return { url, databaseUrl: database.url, db, server, make, newAgent, signInAs, close }
+  return { url, databaseUrl: database.url, db, server, make, newAgent, signInAs, runJobs, close }
 }
 
 async function cloneTemplate() {

@@ -2,6 +2,7 @@ import { randomBytes } from 'node:crypto'
 import type { TestProject } from 'vitest/node'
 import { createDatabase } from '#server/db/knex'
 import { migrateToLatest } from '#server/db/migrate'
+import { installJobs } from '#server/jobs/job-schema'
 
 declare module 'vitest' {
   interface ProvidedContext {
@@ -47,6 +48,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
   const database = createDatabase(urlOfDatabase(template), { poolSize: 1 })
   await migrateToLatest(database)
   await database.destroy()
+  await installJobs(urlOfDatabase(template))
   project.provide('databaseTemplate', template)
 
   return async () => {

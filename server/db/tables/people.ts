@@ -9,7 +9,8 @@ export interface PersonTableRow {
   role: Role
   name: string
   email: string
-  password_hash: string
+  /** Null until who was invited has set one. */
+  password_hash: string | null
   language: Language
   units: Units
   theme: Theme

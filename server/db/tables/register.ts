@@ -1,4 +1,5 @@
 import type { Knex } from 'knex'
+import type { AuditLogInsert, AuditLogRow } from './audit-log'
 import type { BrakeInsert, BrakeRow, BrakeUpdate } from './brakes'
 import type { BundleInsert, BundleRow, BundleUpdate } from './bundles'
 import type { CalibrationInsert, CalibrationRow } from './calibrations'
@@ -17,10 +18,20 @@ import type {
   LabelPrintRow,
 } from './label-prints'
 import type { LiveEventInsert, LiveEventRow } from './live-events'
+import type {
+  MailAttachmentInsert,
+  MailAttachmentRow,
+  MailInsert,
+  MailRow,
+  MailUpdate,
+  SlipInsert,
+  SlipRow,
+} from './mails'
 import type { OrderEventInsert, OrderEventRow } from './order-events'
 import type { OrderLineInsert, OrderLineRow, OrderLineUpdate } from './order-lines'
 import type { OrderStateRow } from './order-states'
 import type { OrderInsert, OrderRow, OrderUpdate } from './orders'
+import type { PasswordLinkInsert, PasswordLinkRow } from './password-links'
 import type { PersonInsert, PersonTableRow, PersonUpdate } from './people'
 import type {
   PieceEventInsert,
@@ -69,6 +80,11 @@ declare module 'knex/types/tables' {
     piece_moves: PieceMoveRow
     label_prints: Knex.CompositeTableType<LabelPrintRow, LabelPrintInsert>
     label_print_pieces: Knex.CompositeTableType<LabelPrintPieceRow, LabelPrintPieceInsert>
+    mails: Knex.CompositeTableType<MailRow, MailInsert, MailUpdate>
+    mail_attachments: Knex.CompositeTableType<MailAttachmentRow, MailAttachmentInsert>
+    slips: Knex.CompositeTableType<SlipRow, SlipInsert>
+    password_links: Knex.CompositeTableType<PasswordLinkRow, PasswordLinkInsert>
+    audit_log: Knex.CompositeTableType<AuditLogRow, AuditLogInsert>
     plan_cache: Knex.CompositeTableType<PlanCacheRow, PlanCacheInsert, PlanCacheUpdate>
   }
 }

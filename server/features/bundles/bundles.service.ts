@@ -1,6 +1,7 @@
 import type { Db } from '#server/db/knex'
 import type { BundleRow } from '#server/db/tables/bundles'
 import type { PieceRow } from '#server/db/tables/pieces'
+import type { OrderMails } from '#server/features/mail/order-mails'
 import { announceRack } from '#server/features/pieces/announce-moves'
 import { freshCode } from '#server/features/pieces/fresh-code'
 import { makingPorts, type MakingPorts } from '#server/features/pieces/making-ports'
@@ -36,7 +37,11 @@ export interface BundlesService {
   ) => Promise<Bundle>
 }
 
-export const createBundlesService = (db: Db, ports: MakingPorts = makingPorts): BundlesService => ({
+export const createBundlesService = (
+  db: Db,
+  mails: Pick<OrderMails, 'bundled'>,
+  ports: MakingPorts = makingPorts,
+): BundlesService => ({
   getRack: async () => ({ work: await listBundleWork(db), bundles: await listRackBundles(db) }),
 
   getBundle: (code) => getBundle(db, { code: readCode(code, 'bundle') }),
@@ -62,6 +67,7 @@ export const createBundlesService = (db: Db, ports: MakingPorts = makingPorts): 
       bundleId: bundle.id,
       at,
     })
+    await mails.bundled(orderId)
     return getBundle(db, bundle)
   },
 

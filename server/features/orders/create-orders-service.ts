@@ -6,6 +6,7 @@ import { createOrderPiecesQueries } from '#server/features/orders/order-pieces.q
 import { createOrderPlanning, type OrderPlanning } from '#server/features/orders/order-planning'
 import { createOrderReader } from '#server/features/orders/order-reader'
 import { createOrdersQueries } from '#server/features/orders/orders.queries'
+import type { OrderMails } from '#server/features/mail/order-mails'
 import { createOrdersService, type OrdersService } from '#server/features/orders/orders.service'
 import { createOrdersStore } from '#server/features/orders/orders.store'
 import { createReleaseOrder } from '#server/features/orders/release-order'
@@ -20,6 +21,7 @@ export interface OrdersPorts {
   readonly planner: Planner
   /** IANA name of the shop's time zone. */
   readonly shopTimeZone: string
+  readonly mails: OrderMails
 }
 
 export function createOrdersServiceOn(db: Db, ports: OrdersPorts): OrdersService {

@@ -7,6 +7,7 @@ import { checkOrder, linesForPitch, stocksOf } from '#server/features/orders/ord
 import type { OrderReader } from '#server/features/orders/order-reader'
 import type { OrdersQueries } from '#server/features/orders/orders.queries'
 import type { OrdersStore } from '#server/features/orders/orders.store'
+import type { OrderMails } from '#server/features/mail/order-mails'
 import type { ReleaseOrder } from '#server/features/orders/release-order'
 import { dayIn } from '#server/features/orders/shop-day'
 import type { StocksQueries } from '#server/features/stocks/stocks.queries'
@@ -35,6 +36,7 @@ export interface OrdersDeps {
   readonly clock: Clock
   /** IANA name; the shop's day decides what is in the past. */
   readonly shopTimeZone: string
+  readonly mails: Pick<OrderMails, 'received' | 'question' | 'released'>
   readonly announce: (announcement: Announcement) => Promise<void>
 }
 
@@ -51,7 +53,8 @@ interface Change {
 }
 
 export const createOrdersService = (deps: OrdersDeps) => {
-  const { queries, reader, store, jobs, stocks, release, clock, shopTimeZone, announce } = deps
+  const { queries, reader, store, jobs, stocks, release, clock, shopTimeZone, mails, announce } =
+    deps
 
   const getOrder = async (id: string, person: SignedIn, signal?: AbortSignal): Promise<Order> => {
     const order = await reader.findOrder(id, companyScope(person), signal)
@@ -121,6 +124,7 @@ export const createOrdersService = (deps: OrdersDeps) => {
       })
       await saveLines(id, body, job.pitchRise)
       await store.addEvent({ order_id: id, kind: 'submitted', person_id: person.id })
+      await mails.received(id)
       await tell('orders', id, job.company.id)
       // A job shows how many orders it has.
       await tell('jobs', job.id, job.company.id)
@@ -152,7 +156,12 @@ export const createOrdersService = (deps: OrdersDeps) => {
       id: string,
       body: BodyOf<typeof askAboutOrder>,
       person: SignedIn,
-    ): Promise<Order> => change(id, body.version, person, { kind: 'question', text: body.text }),
+    ): Promise<Order> =>
+      change(id, body.version, person, {
+        kind: 'question',
+        text: body.text,
+        act: () => mails.question(id, person, body.text),
+      }),
 
     /** @throws wrong-state when no question is open */
     answerQuestion: (
@@ -185,6 +194,7 @@ export const createOrdersService = (deps: OrdersDeps) => {
           const at = clock.now()
           const told = await release(id, { person, at, overrides: body.overrides })
           await store.updateOrder(id, { released_at: at })
+          await mails.released(id)
           await tell('pieces', null, company.id)
           await announce({ topic: 'runs', entityId: null, companyId: null, audience: 'shop' })
           return told

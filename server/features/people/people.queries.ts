@@ -41,6 +41,17 @@ const signedInOf = (row: WithCompany): SignedIn => ({
   theme: row.theme,
 })
 
+const toPersonRow = (row: WithCompany): PersonRow => ({
+  id: row.id,
+  name: row.name,
+  email: row.email,
+  role: row.role,
+  company: companyOf(row),
+  active: row.active,
+  invited: row.password_hash === null,
+  lastSignInAt: row.last_sign_in_at?.toISOString() ?? null,
+})
+
 /** Somebody whose account is switched off counts as absent. */
 export async function findActivePerson(db: Db, id: string): Promise<SignedIn | undefined> {
   const [row] = await peopleWithCompany(db).where('people.id', id).where('active', true)
@@ -49,7 +60,8 @@ export async function findActivePerson(db: Db, id: string): Promise<SignedIn | u
 
 export interface Account {
   readonly person: SignedIn
-  readonly passwordHash: string
+  /** Null until who was invited has set one. */
+  readonly passwordHash: string | null
 }
 
 /** `email` in small letters, as the contract parses it. */
@@ -60,15 +72,21 @@ export async function findActiveAccount(db: Db, email: string): Promise<Account 
 
 export async function listPeople(db: Db): Promise<PersonRow[]> {
   const rows = await peopleWithCompany(db).orderByRaw('lower(people.name), people.id')
-  return rows.map((row) => ({
-    id: row.id,
-    name: row.name,
-    email: row.email,
-    role: row.role,
-    company: companyOf(row),
-    active: row.active,
-    lastSignInAt: row.last_sign_in_at?.toISOString() ?? null,
-  }))
+  return rows.map(toPersonRow)
+}
+
+/** Nobody for no company: the shop's own people are no crew. */
+export async function listCompanyPeople(db: Db, companyId: string | null): Promise<PersonRow[]> {
+  if (companyId === null) return []
+  const rows = await peopleWithCompany(db)
+    .where('people.company_id', companyId)
+    .orderByRaw('lower(people.name), people.id')
+  return rows.map(toPersonRow)
+}
+
+export async function findPersonRow(db: Db, id: string): Promise<PersonRow | undefined> {
+  const [row] = await peopleWithCompany(db).where('people.id', id)
+  return row && toPersonRow(row)
 }
 
 export const listCompanies = (db: Db): Promise<Company[]> =>

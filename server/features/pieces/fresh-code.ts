@@ -2,7 +2,7 @@ import type { Db } from '#server/db/knex'
 import type { CodeKind } from '#shared/pieces/codes'
 import type { MakingPorts } from './making-ports'
 
-const TABLES = { piece: 'pieces', bundle: 'bundles', run: 'runs' } as const
+const TABLES = { piece: 'pieces', bundle: 'bundles', run: 'runs', slip: 'slips' } as const
 
 /**
  * A new code that no label bears yet: drawn and looked up. Should another transaction draw the same

@@ -1,5 +1,6 @@
 import type { Db } from '#server/db/knex'
 import { BUNDLES } from '#server/db/tables/bundles'
+import { SLIPS } from '#server/db/tables/mails'
 import { PIECES } from '#server/db/tables/pieces'
 import { RUNS } from '#server/db/tables/runs'
 import { notFound } from '#server/http/errors'
@@ -21,6 +22,10 @@ const FIND: Record<CodeKind, Find> = {
   run: async (db, code) => {
     const run = await db(RUNS).where({ code }).first('id')
     return run && { kind: 'run', code, runId: run.id }
+  },
+  slip: async (db, code) => {
+    const slip = await db(SLIPS).where({ code }).first('order_id')
+    return slip && { kind: 'slip', code, orderId: slip.order_id }
   },
 }
 

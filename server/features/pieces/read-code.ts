@@ -6,7 +6,7 @@ const CURES: Record<CodeFault, string> = {
   length: 'A code has eight characters: compare it with the label.',
   characters: 'A code has letters and digits only: compare it with the label.',
   check: 'One character is wrong: compare it with the label.',
-  kind: 'A code begins with P (piece), B (bundle) or R (run): compare it with the label.',
+  kind: 'A code begins with P (piece), B (bundle), R (run) or S (slip): compare it with the label.',
 }
 
 /**
