@@ -3,6 +3,7 @@ import { resolveFollows } from '#shared/profile/follows'
 import { hasErrors } from '#shared/profile/problem'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Stock } from '#shared/stock/stock.schema'
+import { pieceWeight } from '#shared/strip/weight'
 import {
   checkDrawing,
   planOnBrakes,
@@ -68,6 +69,16 @@ function answerFor(
 /** What of a line its drawing and its ends are checked by. */
 export type CheckedLine = Pick<DraftLine, 'profile' | 'stockId' | 'length' | 'ends'>
 
+/** A piece weighs what its blank does: tabs included, nothing cut away yet. */
+function withTabs(
+  check: DrawingCheck | null,
+  ends: EndsCheck | null,
+  { sheet }: Stock,
+): DrawingCheck | null {
+  if (!check?.strip || !ends?.layout) return check
+  return { ...check, weight: pieceWeight(check.strip, sheet, ends.layout.blankLength) }
+}
+
 /** The same answer as on the drawing board, for one line of an order, and how its ends are cut. */
 export function checkLine(line: CheckedLine, ground: LineGround): LineCheck {
   const { profile, stockId, length } = line
@@ -89,7 +100,7 @@ export function checkLine(line: CheckedLine, ground: LineGround): LineCheck {
   const ends = answer.check?.strip
     ? checkEnds(line.ends, answer.profile, drawnIn.sheet, pieceLength)
     : null
-  return { stock, drawnIn, ...answer, ends }
+  return { stock, drawnIn, ...answer, check: withTabs(answer.check, ends, drawnIn), ends }
 }
 
 /** True when the drawing can be made but no brake of the shop bends it. */

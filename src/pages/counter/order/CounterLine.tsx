@@ -46,9 +46,9 @@ export function CounterLine({
         <LineFigure profile={line.profile} stock={stock} strip={strip} name={line.name} />
         <div className="flex flex-col gap-3">
           <StockName stock={stock} />
+          <LineFacts strip={strip} pieceWeight={line.pieceWeight} quantity={quantity} />
           <GirthDifference profile={line.profile} stated={line.statedGirth} />
           <LineEnds ends={line.ends} />
-          <LineFacts strip={strip} pieceWeight={line.pieceWeight} quantity={quantity} />
           <BendsLine
             good={bends}
             words={
