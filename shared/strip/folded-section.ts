@@ -4,8 +4,7 @@ import { isLess } from '#shared/geometry/tolerance'
 import type { Vector } from '#shared/geometry/vector'
 import { add, heading, scale, vector } from '#shared/geometry/vector'
 import type { Profile } from '#shared/profile/profile.schema'
-import type { Sheet } from '#shared/stock/stock.schema'
-import type { FlatParts } from '#shared/strip/flat-parts'
+import type { FlatParts, FoldingSheet } from '#shared/strip/flat-parts'
 import { flatParts } from '#shared/strip/flat-parts'
 import type { RoundPart, StraightPart, WalkedPart } from '#shared/strip/section-walk'
 import { offsetChain, walkSection } from '#shared/strip/section-walk'
@@ -139,7 +138,7 @@ const foldedHem = (
  * Throws a RangeError when a leg is shorter than its bends use up; whether the piece crosses
  * itself is not looked at here. Ask `profileProblems` first.
  */
-export const foldedSection = (profile: Profile, sheet: Sheet): FoldedSection => {
+export const foldedSection = (profile: Profile, sheet: FoldingSheet): FoldedSection => {
   const parts = flatParts(profile, sheet)
   refuseShortRuns(parts)
   const { thickness } = sheet

@@ -3,6 +3,8 @@ import { describe, expect, it } from 'vitest'
 import { z } from 'zod'
 import { planSchema } from '#shared/bend-plan/plan.schema'
 import { flatStrip } from '#shared/strip/flat-strip'
+import { foldedSection } from '#shared/strip/folded-section'
+import { sectionMeasures } from '#shared/strip/section-measures'
 import { answerKernel } from '#server/kernel/answer'
 import { profileOf, STEEL } from '../../support/arbitrary-profile'
 
@@ -19,15 +21,21 @@ const errorsOf = (output: unknown) =>
     .error.map(({ path }) => path)
 
 describe('kernel strip', () => {
-  it('answers girth, strip width, creases, rounded width and weight', () => {
+  it('answers girth, strip width, creases, rounded width, weight and the folded section', () => {
     const { exit, output } = ask('strip', { profile: face, stock: STEEL, pieceLength: 120 })
     const strip = flatStrip(face, STEEL)
+    const folded = foldedSection(face, STEEL)
     expect(exit).toBe(0)
     expect(output).toEqual({
       ...strip,
       rounded: { stripWidth: 10.1875 },
       weight: strip.stripWidth * 120 * STEEL.thickness * STEEL.density,
       paintedArea: strip.stripWidth * 120,
+      section: {
+        outline: folded.outline,
+        legs: folded.legs.map(({ leg, from, to }) => ({ leg, from, to })),
+        ...sectionMeasures(folded),
+      },
       problems: [],
     })
   })

@@ -3,6 +3,8 @@ import { useTranslation } from 'react-i18next'
 import type { Side } from '#shared/ends/end.schema'
 import { SQUARE_ENDS } from '#shared/ends/strip-borders'
 import { LIFT_RULE, liftOf } from '#shared/bundles/lift-rule'
+import { foldedSection } from '#shared/strip/folded-section'
+import { sectionMeasures } from '#shared/strip/section-measures'
 import { Choice } from '@/components/Choice'
 import { Notice } from '@/components/Notice'
 import { ProfilePair } from '@/features/drawing/figure/ProfilePair'
@@ -38,6 +40,7 @@ export function StripSheet({ line, links }: Props) {
   const { strip, stock, profile } = line
   const layout = piece.laid.ok ? piece.laid.layout : null
   const ends = piece.ends ?? SQUARE_ENDS
+  const folded = layout && sectionMeasures(foldedSection(profile, stock.sheet)).box
   const facts: Fact[] = [
     [t('fact.pieces'), String(countOf(line, shown))],
     [t('fact.length'), run(line.length)],
@@ -45,6 +48,7 @@ export function StripSheet({ line, links }: Props) {
     [t('fact.girth'), size(strip.girth)],
     ...(layout ? [[t('fact.blank'), run(layout.blankLength)] as const] : []),
     ...(piece.weight === null ? [] : [[t('fact.weight'), weight(piece.weight)] as const]),
+    ...(folded ? [[t('fact.box'), `${size(folded.width)} × ${size(folded.height)}`] as const] : []),
     [t('fact.color'), t(`color.${profile.colorSide}`)],
   ]
   const lift = piece.weight === null ? null : liftOf({ weight: piece.weight, longest: line.length })
