@@ -4,7 +4,9 @@ import { BRAKES, type BrakeInsert } from '#server/db/tables/brakes'
 import { COMPANIES } from '#server/db/tables/companies'
 import { JOBS } from '#server/db/tables/jobs'
 import { PEOPLE } from '#server/db/tables/people'
+import { PRICE_BOOKS } from '#server/db/tables/price-books'
 import { SHELF_PROFILES } from '#server/db/tables/shelf-profiles'
+import { STOCK_ITEMS } from '#server/db/tables/stock-items'
 import { STOCKS } from '#server/db/tables/stocks'
 import { DEMO_BRAKES } from '#shared/bend-plan/demo-brakes'
 import { createCalendar, type Calendar } from './demo/calendar'
@@ -12,8 +14,10 @@ import { createDemoRandom, type DemoRandom } from './demo/demo-random'
 import { jobRows } from './demo/jobs'
 import { ACCOUNT_STEPS } from './demo/mails'
 import { DEMO_COMPANIES, DEMO_PASSWORD, DEMO_PEOPLE, personRow } from './demo/people'
+import { DEMO_PRICE_BOOK } from './demo/price-book'
 import { shelfRows } from './demo/profiles'
 import { createDemoShop } from './demo/shop'
+import { stockItemRows } from './demo/stock-items'
 import { DEMO_STOCKS } from './demo/stocks'
 import { STORIES } from './demo/stories'
 import { tellStories } from './demo/tell'
@@ -65,6 +69,12 @@ async function insertShop(
     Object.values(DEMO_PEOPLE).map((person) => personRow(person, passwordHash, opened)),
   )
   await db(STOCKS).insert(Object.values(DEMO_STOCKS))
+  await db(STOCK_ITEMS).insert(stockItemRows(calendar))
+  await db(PRICE_BOOKS).insert({
+    definition: JSON.stringify(DEMO_PRICE_BOOK),
+    person_id: DEMO_PEOPLE.juno.id,
+    at: opened,
+  })
   await db(BRAKES).insert(
     DEMO_BRAKES.map((brake, index): BrakeInsert => ({
       id: random.nextId(),

@@ -42,6 +42,8 @@ import { createPiecesService } from '#server/features/pieces/pieces.service'
 import { createPlansServiceOn } from '#server/features/plans/create-plans-service'
 import { planLimit } from '#server/features/plans/plan-limit'
 import { plansRoutes } from '#server/features/plans/plans.routes'
+import { createPricesQueries } from '#server/features/prices/prices.queries'
+import { pricesRoutes } from '#server/features/prices/prices.routes'
 import { runsRoutes } from '#server/features/runs/runs.routes'
 import { createRunsService } from '#server/features/runs/runs.service'
 import { sheetsRoutes } from '#server/features/sheets/sheets.routes'
@@ -107,6 +109,7 @@ export function compose(ports: Ports): Composition {
       ...jobsRoutes(createJobsServiceOn),
       ...shelfRoutes((db) => createShelfServiceOn(db, clock)),
       ...stocksRoutes(createStocksQueries, (db) => createTestBendsServiceOn(db, clock)),
+      ...pricesRoutes(createPricesQueries),
       ...brakesRoutes(createBrakesQueries),
       ...plansRoutes(
         (db) => createPlansServiceOn(db, { planner, onError }),

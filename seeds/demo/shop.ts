@@ -16,6 +16,7 @@ import { createReleaseOrder } from '#server/features/orders/release-order'
 import type { OrderMails } from '#server/features/mail/order-mails'
 import { createPiecesService, type PiecesService } from '#server/features/pieces/pieces.service'
 import { createRunsService, type RunsService } from '#server/features/runs/runs.service'
+import { createPricesQueries } from '#server/features/prices/prices.queries'
 import { createStocksQueries } from '#server/features/stocks/stocks.queries'
 import { listTestBends } from '#server/features/stocks/test-bends.queries'
 import {
@@ -93,6 +94,7 @@ function createDemoOrders(
   const stocks = createStocksQueries(db)
   const brakes = createBrakesQueries(db)
   const planner = createLocalPlanner()
+  const prices = createPricesQueries(db)
   const pieces = createOrderPiecesQueries(db)
   const base = createOrdersStore(db)
   const store: OrdersStore = {
@@ -108,12 +110,13 @@ function createDemoOrders(
     mails,
     // The demo shop's hours are UTC, see the calendar.
     shopTimeZone: 'UTC',
-    reader: createOrderReader({ queries, pieces, stocks, brakes, planner }),
+    reader: createOrderReader({ queries, pieces, stocks, brakes, prices, planner }),
     jobs: createJobsQueries(db),
     release: createReleaseOrder({
       queries,
       stocks,
       brakes,
+      prices,
       planner,
       store: createDemoReleaseStore(db, random, clock),
     }),

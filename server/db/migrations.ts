@@ -15,6 +15,8 @@ import * as labelPrints from '#migrations/0013_label_prints'
 import * as mails from '#migrations/0014_mails'
 import * as accounts from '#migrations/0015_accounts'
 import * as auditLog from '#migrations/0016_audit_log'
+import * as priceBooks from '#migrations/0017_price_books'
+import * as stockItems from '#migrations/0018_stock_items'
 
 interface NamedMigration {
   readonly name: string
@@ -42,6 +44,8 @@ const MIGRATIONS: readonly NamedMigration[] = [
   { name: '0014_mails', migration: mails },
   { name: '0015_accounts', migration: accounts },
   { name: '0016_audit_log', migration: auditLog },
+  { name: '0017_price_books', migration: priceBooks },
+  { name: '0018_stock_items', migration: stockItems },
 ]
 
 export const migrationSource: Knex.MigrationSource<NamedMigration> = {

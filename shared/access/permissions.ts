@@ -18,6 +18,9 @@ export const PERMISSIONS = {
   'shelf.read': ['crewLead', 'counter', 'manager'],
   'shelf.write': ['crewLead', 'counter', 'manager'],
   'stocks.read': ['crewLead', 'bender', 'counter', 'manager'],
+  /** Lots and what is left of them are the shop's own. */
+  'stockItems.read': ['bender', 'counter', 'manager'],
+  'prices.read': ['crewLead', 'counter', 'manager'],
   /** Measuring is the bender's; what is cut by it is the manager's decision. */
   'stocks.test': ['bender', 'manager'],
   'stocks.calibrate': ['manager'],

@@ -16,6 +16,7 @@ import * as pricing from '#shared/pricing/pricing.contract'
 import * as runs from '#shared/runs/runs.contract'
 import * as sheets from '#shared/sheets/sheets.contract'
 import * as shelf from '#shared/shelf/shelf.contract'
+import * as stockItems from '#shared/stock/stock-items.contract'
 import * as stock from '#shared/stock/stock.contract'
 
 const isEndpoint = (value: unknown): value is Endpoint =>
@@ -32,6 +33,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   jobs,
   shelf,
   stock,
+  stockItems,
   pricing,
   brakes,
   plans,

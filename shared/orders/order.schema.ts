@@ -6,6 +6,8 @@ import { overrideSchema } from '#shared/orders/override.schema'
 import { companySchema } from '#shared/people/people.contract'
 import { pieceStateSchema } from '#shared/pieces/piece-state'
 import { pieceLengthSchema } from '#shared/plans/plans.contract'
+import { lineQuoteSchema } from '#shared/pricing/line-quote'
+import { centsSchema } from '#shared/pricing/price-book.schema'
 import { profileSchema } from '#shared/profile/profile.schema'
 import { goodSchema } from '#shared/roof-line/goods.schema'
 import { stockSchema } from '#shared/stock/stock.schema'
@@ -105,6 +107,8 @@ export const orderLineSchema = z.strictObject({
   strip: stripSchema,
   /** Pounds of one piece. */
   pieceWeight: z.number(),
+  /** By the price book that counts, until release freezes it. */
+  ...lineQuoteSchema.shape,
   /** Names of the brakes that bend it under the checks made; the chosen one after release. */
   bendsOn: z.array(z.string()),
   /** Set at release where no brake bends it and somebody answers for it; then `bendsOn` names that brake. */
@@ -152,6 +156,8 @@ export const orderSchema = z.strictObject({
   ...orderSummarySchema.shape,
   notes: z.string(),
   lines: z.array(orderLineSchema),
+  /** All lines together, without tax and small goods; null as soon as one line has no price. */
+  priceCents: centsSchema.nullable(),
   goods: z.array(goodSchema),
   events: z.array(orderEventSchema),
 })

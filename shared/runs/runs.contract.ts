@@ -32,6 +32,11 @@ export const runSummarySchema = z.strictObject({
   neededBy: daySchema,
   lengths: z.array(lengthCountSchema),
   progress: progressSchema,
+  /**
+   * Whether it is still to be bent and of the stock that its brake bent last, in another run: that
+   * metal and its settings are at hand.
+   */
+  sameStock: z.boolean(),
   /** Set where the plan has no steps and somebody released it all the same. */
   override: overrideSchema.nullable(),
   /** Who bends it now; null when nobody took it. */

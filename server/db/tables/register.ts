@@ -42,10 +42,12 @@ import type {
   PieceUpdate,
 } from './pieces'
 import type { PlanCacheInsert, PlanCacheRow, PlanCacheUpdate } from './plan-cache'
+import type { PriceBookInsert, PriceBookRow } from './price-books'
 import type { RateLimitRow } from './rate-limits'
 import type { RunInsert, RunRow, RunUpdate } from './runs'
 import type { SessionRow } from './sessions'
 import type { ShelfProfileInsert, ShelfProfileRow, ShelfProfileUpdate } from './shelf-profiles'
+import type { StockItemInsert, StockItemRow } from './stock-items'
 import type { StockInsert, StockRow, StockUpdate } from './stocks'
 import type { TestBendInsert, TestBendRow, TestBendUpdate } from './test-bends'
 
@@ -63,6 +65,8 @@ declare module 'knex/types/tables' {
     >
     live_events: Knex.CompositeTableType<LiveEventRow, LiveEventInsert>
     stocks: Knex.CompositeTableType<StockRow, StockInsert, StockUpdate>
+    stock_items: Knex.CompositeTableType<StockItemRow, StockItemInsert>
+    price_books: Knex.CompositeTableType<PriceBookRow, PriceBookInsert>
     test_bends: Knex.CompositeTableType<TestBendRow, TestBendInsert, TestBendUpdate>
     calibrations: Knex.CompositeTableType<CalibrationRow, CalibrationInsert>
     brakes: Knex.CompositeTableType<BrakeRow, BrakeInsert, BrakeUpdate>

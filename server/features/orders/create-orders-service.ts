@@ -11,6 +11,7 @@ import { createOrdersService, type OrdersService } from '#server/features/orders
 import { createOrdersStore } from '#server/features/orders/orders.store'
 import { createReleaseOrder } from '#server/features/orders/release-order'
 import { createReleaseStore } from '#server/features/orders/release.store'
+import { createPricesQueries } from '#server/features/prices/prices.queries'
 import { createStocksQueries } from '#server/features/stocks/stocks.queries'
 import { announce } from '#server/live/announce'
 import type { Planner } from '#server/planning/planner'
@@ -29,12 +30,13 @@ export function createOrdersServiceOn(db: Db, ports: OrdersPorts): OrdersService
   const queries = createOrdersQueries(db)
   const stocks = createStocksQueries(db)
   const brakes = createBrakesQueries(db)
+  const prices = createPricesQueries(db)
   const pieces = createOrderPiecesQueries(db)
   return createOrdersService({
     ...ports,
     queries,
     stocks,
-    reader: createOrderReader({ queries, pieces, stocks, brakes, planner }),
+    reader: createOrderReader({ queries, pieces, stocks, brakes, prices, planner }),
     store: createOrdersStore(db),
     jobs: createJobsQueries(db),
     release: createReleaseOrder({
@@ -42,6 +44,7 @@ export function createOrdersServiceOn(db: Db, ports: OrdersPorts): OrdersService
       store: createReleaseStore(db),
       stocks,
       brakes,
+      prices,
       planner,
     }),
     announce: (announcement) => announce(db, announcement),

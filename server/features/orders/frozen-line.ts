@@ -3,6 +3,7 @@ import { frozenStockSchema } from '#server/features/stocks/frozen-stock'
 import { planSchema } from '#shared/bend-plan/plan.schema'
 import { handsSchema, pieceEndsSchema } from '#shared/ends/end.schema'
 import { overrideSchema } from '#shared/orders/override.schema'
+import { lineQuoteSchema } from '#shared/pricing/line-quote'
 import { stripSchema } from '#shared/strip/strip.schema'
 
 /**
@@ -24,6 +25,9 @@ export const frozenLineSchema = z.strictObject({
   /** Lines released before ends were known have square ones. */
   ends: pieceEndsSchema.nullable().default(null),
   hands: handsSchema.nullable().default(null),
+  /** Lines released before prices were kept have neither a price nor why not. */
+  price: lineQuoteSchema.shape.price.default(null),
+  noPrice: lineQuoteSchema.shape.noPrice.default(null),
 })
 
 export type FrozenLine = z.infer<typeof frozenLineSchema>

@@ -3,9 +3,13 @@ import { lineStrip } from '#server/features/orders/line-strip'
 import { planLine } from '#server/features/orders/plan-line'
 import type { OrderPiecesQueries } from '#server/features/orders/order-pieces.queries'
 import type { OrdersQueries, StoredLine } from '#server/features/orders/orders.queries'
+import type { PricesQueries } from '#server/features/prices/prices.queries'
 import type { StocksQueries } from '#server/features/stocks/stocks.queries'
 import type { PlannedBrake, Planner } from '#server/planning/planner'
 import type { Order, OrderLine } from '#shared/orders/order.schema'
+import { keptQuote, quoteLine } from '#shared/pricing/line-quote'
+import type { PriceBook } from '#shared/pricing/price-book.schema'
+import { sumPrices } from '#shared/pricing/price-line'
 import type { Stock } from '#shared/stock/stock.schema'
 
 export interface OrderReaderDeps {
@@ -13,30 +17,42 @@ export interface OrderReaderDeps {
   readonly pieces: OrderPiecesQueries
   readonly stocks: StocksQueries
   readonly brakes: BrakesQueries
+  readonly prices: PricesQueries
   readonly planner: Planner
 }
 
-type MadeOf = Pick<OrderLine, 'stock' | 'strip' | 'pieceWeight' | 'bendsOn' | 'override'>
+type MadeOf = Pick<
+  OrderLine,
+  'stock' | 'strip' | 'pieceWeight' | 'price' | 'noPrice' | 'bendsOn' | 'override'
+>
+
+/** What an open line is held against: all as it is now. */
+interface ShopNow {
+  readonly stocks: ReadonlyMap<string, Stock>
+  readonly brakes: readonly PlannedBrake[]
+  readonly book: PriceBook | null
+}
 
 /** Reads an order as its page shows it: frozen values once it is released, the kernel's before. */
 export const createOrderReader = (deps: OrderReaderDeps) => {
-  const { queries, pieces, stocks, brakes, planner } = deps
+  const { queries, pieces, stocks, brakes, prices, planner } = deps
 
   /**
-   * What holds before release: stock and brakes as they are now. Which brake it will be is not known
+   * What holds before release: stock, brakes and prices as they are now. Which brake it will be is not known
    * yet, so the strip is that of the stock's own K; the plans are each brake's.
    */
   async function computeLine(
     line: StoredLine,
-    stock: Stock,
-    shopBrakes: readonly PlannedBrake[],
+    now: ShopNow,
     signal: AbortSignal | undefined,
   ): Promise<MadeOf> {
-    const plans = await planLine({ line, stock, brakes: shopBrakes, planner, signal })
+    const stock = getStock(now.stocks, line.stockId)
+    const plans = await planLine({ line, stock, brakes: now.brakes, planner, signal })
     const feasible = plans.filter(({ plan }) => plan.feasible)
     return {
       stock,
       ...lineStrip(line, stock.sheet),
+      ...quoteLine(line, now.book),
       bendsOn: feasible.map(({ brakeName }) => brakeName),
       override: null,
     }
@@ -46,20 +62,24 @@ export const createOrderReader = (deps: OrderReaderDeps) => {
     const lines = await queries.listLines(orderId)
     const piecesByLine = await pieces.mapPieces(orderId)
     const open = lines.filter(({ frozen }) => frozen === null)
-    const stockById = await stocks.mapStocks(open.map(({ stockId }) => stockId))
-    const shopBrakes = open.length > 0 ? await brakes.listBrakes() : []
+    const now: ShopNow = {
+      stocks: await stocks.mapStocks(open.map(({ stockId }) => stockId)),
+      brakes: open.length > 0 ? await brakes.listBrakes() : [],
+      book: open.length > 0 ? await prices.findBook() : null,
+    }
     const answers: OrderLine[] = []
     for (const line of lines) {
-      const { frozen, stockId, ...written } = line
+      const { frozen, stockId: _, ...written } = line
       const madeOf = frozen
         ? {
             stock: frozen.stock,
             strip: frozen.strip,
             pieceWeight: frozen.pieceWeight,
+            ...keptQuote(frozen),
             bendsOn: [frozen.brakeName],
             override: frozen.override,
           }
-        : await computeLine(line, getStock(stockById, stockId), shopBrakes, signal)
+        : await computeLine(line, now, signal)
       answers.push({ ...written, ...madeOf, pieces: piecesByLine.get(line.id) ?? [] })
     }
     return answers
@@ -77,7 +97,13 @@ export const createOrderReader = (deps: OrderReaderDeps) => {
     ): Promise<Order | undefined> {
       const order = await queries.findOrder(id, scope)
       if (!order) return undefined
-      return { ...order, lines: await readLines(id, signal), events: await queries.listEvents(id) }
+      const lines = await readLines(id, signal)
+      return {
+        ...order,
+        lines,
+        priceCents: sumPrices(lines.map(({ price }) => price)),
+        events: await queries.listEvents(id),
+      }
     },
   }
 }

@@ -6,17 +6,21 @@ import { lineStrip } from '#server/features/orders/line-strip'
 import type { OrdersQueries } from '#server/features/orders/orders.queries'
 import { planRelease } from '#server/features/orders/plan-release'
 import type { NewPiece, ReleaseStore } from '#server/features/orders/release.store'
+import type { PricesQueries } from '#server/features/prices/prices.queries'
 import type { StocksQueries } from '#server/features/stocks/stocks.queries'
 import type { SignedIn } from '#server/http/define-route'
 import { KERNEL_VERSION } from '#server/planning/kernel-version'
 import type { Planner } from '#server/planning/planner'
 import type { OverrideInput } from '#shared/orders/override.schema'
+import { quoteLine } from '#shared/pricing/line-quote'
+import type { PriceBook } from '#shared/pricing/price-book.schema'
 
 export interface ReleaseDeps {
   readonly queries: OrdersQueries
   readonly store: ReleaseStore
   readonly stocks: StocksQueries
   readonly brakes: BrakesQueries
+  readonly prices: PricesQueries
   readonly planner: Planner
 }
 
@@ -35,7 +39,7 @@ export interface Release {
 export type ReleaseOrder = (orderId: string, release: Release) => Promise<string>
 
 export const createReleaseOrder =
-  ({ queries, store, stocks, brakes, planner }: ReleaseDeps): ReleaseOrder =>
+  ({ queries, store, stocks, brakes, prices, planner }: ReleaseDeps): ReleaseOrder =>
   async (orderId, { person, at, overrides }) => {
     const lines = await queries.listLines(orderId)
     const runs = await planRelease({
@@ -49,19 +53,21 @@ export const createReleaseOrder =
       planner,
     })
     const named = runs.map((run) => ({ ...run, id: randomUUID() }))
-    await store.freezeLines(new Map(runs.flatMap(frozenLines)))
+    const book = await prices.findBook()
+    await store.freezeLines(new Map(runs.flatMap((run) => frozenLines(run, book))))
     await store.createRuns(orderId, named)
     await store.createPieces(orderId, named.flatMap(newPieces), person.id)
     return runs.flatMap(overrideTexts).join('\n')
   }
 
-const frozenLines = (run: PlannedRun): [string, FrozenLine][] => {
+const frozenLines = (run: PlannedRun, book: PriceBook | null): [string, FrozenLine][] => {
   const { lines, stock, brake, plan, override } = run
   return lines.map((line) => [
     line.id,
     {
       stock,
       ...lineStrip(line, stock.sheet),
+      ...quoteLine(line, book),
       brakeId: brake.id,
       brakeName: brake.brake.name,
       plan,

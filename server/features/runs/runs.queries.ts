@@ -2,6 +2,7 @@ import { z } from 'zod'
 import type { Db } from '#server/db/knex'
 import { findRow, readRows } from '#server/db/read-rows'
 import { lineLaySchema, pieceLay } from '#server/features/pieces/piece-lay'
+import { LAST_BENT } from '#server/features/runs/last-bent'
 import { frozenStockSchema } from '#server/features/stocks/frozen-stock'
 import { notFound } from '#server/http/errors'
 import type { Progress } from '#shared/orders/order.schema'
@@ -33,12 +34,18 @@ const SUMMARY = `
     r.brake ->> 'name' as "brakeName", c.name as company, j.name as job,
     o.number as "orderNumber", o.needed_by as "neededBy",
     r.override, r.claimed_by as "claimerId", claimer.name as "claimerName", r.claimed_at as "claimedAt",
-    counted.counts, measured.lengths
+    counted.counts, measured.lengths,
+    coalesce(
+      counted.counts -> 'queued' is not null
+        and last.run_id <> r.id and last.stock_id = r.stock ->> 'id',
+      false
+    ) as "sameStock"
   from runs r
   join orders o on o.id = r.order_id
   join companies c on c.id = o.company_id
   join jobs j on j.id = o.job_id
   left join people claimer on claimer.id = r.claimed_by
+  left join last_bent last on last.brake_id = r.brake_id
   cross join lateral (
     select coalesce(jsonb_object_agg(state, pieces), '{}') as counts from (
       select state, count(*) as pieces from pieces where run_id = r.id group by state
@@ -68,7 +75,7 @@ export async function listRuns(db: Db, state: 'open' | 'done'): Promise<RunSumma
     state === 'open'
       ? `where ${HAS_QUEUED} order by o.needed_by, r.number`
       : `where not ${HAS_QUEUED} order by r.number desc limit ${DONE_SHOWN}`
-  return (await readRows(db, summaryRowSchema, `${SUMMARY} ${rest}`)).map(toSummary)
+  return (await readRows(db, summaryRowSchema, `${LAST_BENT} ${SUMMARY} ${rest}`)).map(toSummary)
 }
 
 const runRowSchema = summaryRowSchema.extend({ plan: planSchema, brake: brakeSchema })
@@ -78,7 +85,7 @@ export async function getRun(db: Db, id: string): Promise<Run> {
   const row = await findRow(
     db,
     runRowSchema,
-    `select run.*, frozen.plan, frozen.brake
+    `${LAST_BENT} select run.*, frozen.plan, frozen.brake
      from (${SUMMARY} where r.id = :id) run join runs frozen on frozen.id = run.id`,
     { id },
   )
@@ -159,6 +166,7 @@ const toSummary = (row: z.infer<typeof summaryRowSchema>): RunSummary => ({
   neededBy: row.neededBy,
   lengths: row.lengths,
   progress: toProgress(row.counts),
+  sameStock: row.sameStock,
   override: row.override,
   claimedBy: toClaim(row),
 })

@@ -1,7 +1,9 @@
 import type { Db } from '#server/db/knex'
+import { listStockItems as readItems } from '#server/features/stocks/stock-items.queries'
 import type { StocksQueries } from '#server/features/stocks/stocks.queries'
 import type { TestBendsService } from '#server/features/stocks/test-bends.service'
 import { defineRoute, type Route } from '#server/http/define-route'
+import { listStockItems } from '#shared/stock/stock-items.contract'
 import {
   calibrateStock,
   listStocks,
@@ -15,6 +17,9 @@ export const stocksRoutes = (
   makeTestBends: (db: Db) => TestBendsService,
 ): Route[] => [
   defineRoute(listStocks, async ({ db }) => ({ items: await make(db).listStocks() })),
+  defineRoute(listStockItems, async ({ db, params }) => ({
+    items: await readItems(db, params.stockId),
+  })),
   defineRoute(listTestBends, ({ db, params }) => makeTestBends(db).getTestBends(params.stockId)),
   defineRoute(recordTestBend, ({ db, params, body, person }) =>
     makeTestBends(db).recordTestBend(params.stockId, body, person),

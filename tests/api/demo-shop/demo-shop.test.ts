@@ -4,9 +4,12 @@ import { DEMO_ACCOUNTS, seedDemo } from '#seeds/demo'
 import { DEMO_PASSWORD, DEMO_PEOPLE } from '#seeds/demo/people'
 import { ROLES } from '#shared/access/permissions'
 import { ORDER_STATES } from '#shared/orders/order.schema'
+import { getOrder, listOrders } from '#shared/orders/orders.contract'
 import { parseCode } from '#shared/pieces/codes'
 import { PIECE_MOVES } from '#shared/pieces/piece-state'
+import { getPriceBook } from '#shared/pricing/pricing.contract'
 import { getRun } from '#shared/runs/runs.contract'
+import { listStockItems, STOCK_ITEM_KINDS } from '#shared/stock/stock-items.contract'
 import { listStocks, listTestBends } from '#shared/stock/stock.contract'
 import { stockSchema } from '#shared/stock/stock.schema'
 import { startApi, type Api } from '../../support/api-app'
@@ -55,6 +58,31 @@ describe('The demo shop', () => {
       orders: 15,
       shelf_profiles: 11,
     })
+  })
+
+  it('has a price for every line that was ordered', async () => {
+    const agent = api.newAgent()
+    await agent.signIn(DEMO_PEOPLE.juno.email, DEMO_PASSWORD)
+    const { current } = await agent.call(getPriceBook)
+    const { items: stocks } = await agent.call(listStocks)
+    const priced = current?.book.stocks.map(({ stockId }) => stockId) ?? []
+    expect([...priced].sort()).toEqual(stocks.map(({ id }) => id).sort())
+    const { items } = await agent.call(listOrders, { query: { limit: 100 } })
+    for (const { id, number } of items) {
+      const { priceCents } = await agent.call(getOrder, { params: { orderId: id } })
+      expect(priceCents, `F-${number}`).toBeGreaterThan(0)
+    }
+  })
+
+  it('has coils, sheets and drops on hand', async () => {
+    const agent = api.newAgent()
+    await agent.signIn(DEMO_PEOPLE.juno.email, DEMO_PASSWORD)
+    const { items: stocks } = await agent.call(listStocks)
+    const lying = await Promise.all(
+      stocks.map(({ id }) => agent.call(listStockItems, { params: { stockId: id } })),
+    )
+    const kinds = lying.flatMap(({ items }) => items.map(({ kind }) => kind))
+    expect(new Set(kinds)).toEqual(new Set(STOCK_ITEM_KINDS))
   })
 
   it('has an order in every state', async () => {

@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { leaveRun, listRuns } from '#shared/runs/runs.contract'
 import { at, codesOf, openFloor, type Floor } from '../../support/making-factories'
-import { zProfile } from '../../support/shop-factories'
+import { createStock, zProfile } from '../../support/shop-factories'
 
 let floor: Floor
 beforeAll(async () => {
@@ -73,6 +73,49 @@ describe('The queue of runs', () => {
       progress: { queued: 5, bent: 1, bundled: 0, pickedUp: 0, scrapped: 1, withdrawn: 0 },
     })
     expect(run?.strip.stripWidth).toBeGreaterThan(0)
+  })
+
+  describe('marks runs of the stock that their brake bent last', () => {
+    /** Runs of two pieces each, all on one brake: two of the shop's stock and one of another. */
+    const queueThree = async () => {
+      const otherStock = await createStock(floor.db)
+      const ids: string[] = []
+      for (const stockId of [floor.stockId, floor.stockId, otherStock]) {
+        const order = await floor.queue([floor.line({ stockId, quantity: 2 })])
+        ids.push(at(await floor.runIds(order), 0))
+      }
+      const { brakeId } = await floor.readRun(at(ids, 0))
+      await floor.db.raw('update runs set brake_id = ? where id = any(?)', [brakeId, ids])
+      return {
+        ids,
+        marks: () => Promise.all(ids.map(async (id) => (await floor.readRun(id)).sameStock)),
+      }
+    }
+
+    it('in the list and alone, but neither that run itself nor what is done', async () => {
+      const { ids, marks } = await queueThree()
+      const [first = '', second = '', other = ''] = ids
+      await floor.bendNext(first, 1)
+      expect(await marks()).toEqual([false, true, false])
+      const listed = (await list('open')).filter(({ id }) => ids.includes(id))
+      expect(listed.map(({ sameStock }) => sameStock)).toEqual([false, true, false])
+      await floor.bendNext(other, 1)
+      expect(await marks()).toEqual([false, false, false])
+      await floor.bendNext(second, 2)
+      expect(await marks()).toEqual([true, false, false])
+      await floor.bendNext(first, 1)
+      expect(await marks()).toEqual([false, false, false])
+    })
+
+    it('and forgets what was taken back', async () => {
+      const { ids, marks } = await queueThree()
+      const [first = '', , other = ''] = ids
+      await floor.bendNext(other, 1)
+      const { eventIds } = await floor.bendNext(first, 1)
+      expect(await marks()).toEqual([false, true, false])
+      expect((await floor.undo(eventIds)).status).toBe(200)
+      expect(await marks()).toEqual([false, false, false])
+    })
   })
 
   it('is not shown to crew leads', async () => {

@@ -118,6 +118,8 @@ export const lineOf = (mark: string, more: Partial<OrderLine> = {}): OrderLine =
   statedGirth: null,
   strip: flatStrip(PROFILE, STOCK.sheet),
   pieceWeight: 5.6,
+  price: null,
+  noPrice: { code: 'noBook', widest: null },
   bendsOn: ['Long folder'],
   override: null,
   pieces: [],
@@ -129,6 +131,7 @@ export const orderOf = (more: Partial<Order> = {}): Order => ({
   ...orderSummaryOf({ state: 'submitted', progress: NO_PIECES }),
   notes: '',
   lines: [lineOf('A'), lineOf('C')],
+  priceCents: null,
   goods: [],
   events: [
     { id: 1, kind: 'submitted', at: '2026-03-02T14:00:00.000Z', by: 'Pell Aster', text: '' },

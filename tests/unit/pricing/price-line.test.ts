@@ -1,5 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
+import type { End } from '#shared/ends/end.schema'
 import type { LinePrice, PriceBook } from '#shared/pricing/price-book.schema'
 import { linePriceSchema, priceBookSchema } from '#shared/pricing/price-book.schema'
 import { priceLine, sumPrices } from '#shared/pricing/price-line'
@@ -41,7 +42,7 @@ const priceOf = (result: ReturnType<typeof priceLine>): LinePrice => {
   return result.price
 }
 
-const square = { kind: 'square', tabs: [] } as const
+const square: End = { kind: 'square', tabs: [] }
 
 describe('the price of a line', () => {
   it('is metal by girth and feet, bends, hems and ends a piece, and one set-up', () => {
