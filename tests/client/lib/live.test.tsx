@@ -38,7 +38,7 @@ describe('live events', () => {
     const { live, stale } = follow()
     act(() => live.last().open())
     act(() => live.last().send({ topic: 'stocks', entityId: null }))
-    expect(stale()).toEqual(['stocks'])
+    expect(stale()).toEqual(['orders', 'stocks'])
   })
 
   it('of a piece reach its order, its run and the rack', () => {
