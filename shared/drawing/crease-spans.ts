@@ -34,6 +34,12 @@ const spansOf = (places: readonly Inches[]): Span[] =>
     return index % 2 === 0 && to !== undefined ? { from, to } : []
   })
 
+/** How far metal reaches along a line across the strip, on either side of it; undefined where none does. */
+export const metalReach = (outline: readonly StripPoint[], at: Inches): Span | undefined => {
+  const places = [...passes(outline, at, -1), ...passes(outline, at, 1)]
+  return places.length === 0 ? undefined : { from: Math.min(...places), to: Math.max(...places) }
+}
+
 /**
  * Where metal stands on both sides of a line across the strip at a distance from edge A: what is
  * left of a crease when the ends are cut. Of the border itself nothing is left, of a crease beside a

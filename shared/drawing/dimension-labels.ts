@@ -95,7 +95,7 @@ class NumbersAlong implements Stream<PlacedLabel> {
 }
 
 /** The same with a dimension line, its extension lines and the slashes that drafters set. */
-class DimensionAt extends NumbersAlong {
+export class DimensionAt extends NumbersAlong {
   private lines: readonly number[] | undefined
 
   constructor(
@@ -106,7 +106,7 @@ class DimensionAt extends NumbersAlong {
     cost: number,
   ) {
     const reach = reachOfText(leg.text, space.pen.text, normal.x, normal.y)
-    super(space, leg, normal, line + reach + 3, cost)
+    super(space, leg, normal, line + reach + OVERSHOOT + 1, cost)
   }
 
   override next(): PlacedLabel | undefined {

@@ -104,6 +104,30 @@ export const textAt = (
   return { text, size, radius: undefined, isDimension, boxes, lines, cost }
 }
 
+/** A text at the first of several places that is free; the later the dearer. */
+export const textPlaces = (
+  space: LabelSpace,
+  text: string,
+  size: number,
+  places: readonly Point[],
+  cost = 0,
+): Stream<PlacedLabel> => {
+  let index = 0
+  const stream = {
+    least: places.length === 0 ? Infinity : cost,
+    next: () => {
+      const place = places[index]
+      const here = stream.least
+      index += 1
+      stream.least = index < places.length ? here + NEXT_PLACE : Infinity
+      return place && textAt(space, text, size, place.x, place.y, [], false, here)
+    },
+  }
+  return stream
+}
+
+const NEXT_PLACE = 0.25
+
 /** Directions fanned out from a first one, nearest first: 0, +step, -step, +2 step … to 180. */
 export interface Fan {
   /** Degrees from the first. */
@@ -241,8 +265,6 @@ export const ringOf = (space: LabelSpace, options: RingOptions): Stream<PlacedLa
 /** Room between an edge and its letter's circle; from the third on a leader leads there. */
 const LETTER_GAPS = [4, 9, 18, 30, 46, 70, 100]
 
-const LETTER_COSTS = LETTER_GAPS.map((_, row) => row * 2)
-
 const LETTER_FAN = fanOf(15)
 
 /** The letter of an edge in its circle, close to the edge or tied to it. */
@@ -251,11 +273,13 @@ export const letterPlaces = (
   letter: string,
   anchor: Vector,
   first: Vector,
+  cost = 0,
 ): Stream<PlacedLabel> => {
   const size = space.pen.text * 0.85
   const radius = size * 0.68
   const { half } = space.metal
-  const place: Place = (row, ux, uy, cost) => {
+  const costs = LETTER_GAPS.map((_, row) => cost + row * 2)
+  const place: Place = (row, ux, uy, here) => {
     const away = half + radius + (LETTER_GAPS[row] ?? 0)
     const x = anchor.x + ux * away
     const y = anchor.y + uy * away
@@ -267,7 +291,7 @@ export const letterPlaces = (
     if (!isLineFree(space, ax, ay, bx, by, 0.5)) return undefined
     const boxes = [x - radius, y - radius, x + radius, y + radius]
     const lines = row < 2 ? [] : [ax, ay, bx, by]
-    return { text: letter, size, radius, isDimension: false, boxes, lines, cost }
+    return { text: letter, size, radius, isDimension: false, boxes, lines, cost: here }
   }
-  return new RowsOfPlaces(LETTER_COSTS, LETTER_FAN, first, 180, 1 / 20, place)
+  return new RowsOfPlaces(costs, LETTER_FAN, first, 180, 1 / 20, place)
 }

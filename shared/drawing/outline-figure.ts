@@ -1,21 +1,30 @@
-import type { Mark, StripLayout } from '#shared/ends/end-layout'
+import type { StripLayout } from '#shared/ends/end-layout'
 import type { Side } from '#shared/ends/end.schema'
-import type { Bounds } from '#shared/geometry/bounds'
 import type { Strip } from '#shared/strip/strip.schema'
-import type { DisplayItem, DisplayList, Point } from './display-list'
+import { metalOf } from './clearance'
+import type { DisplayItem, DisplayList, Part } from './display-list'
+import { isSamePart } from './display-list'
+import type { LabelSpace, PlacedLabel } from './label-space'
+import type { Column } from './outline-columns'
+import { COLUMN_LEAD, columnOf, markFigures } from './outline-columns'
+import type { DrawnCrease, DrawnOutline } from './outline-items'
+import { drawnCreases, drawOutline } from './outline-items'
+import type { OutlineLabel, OutlineNumber } from './outline-labels'
 import {
-  drawBreaks,
-  drawCreases,
-  drawCutAways,
-  drawOpenings,
-  drawSheet,
-  drawTabs,
-} from './outline-parts'
-import type { OutlinePlace } from './outline-place'
-import { placeEnd, placeWhole } from './outline-place'
-import { spread } from './spread'
-import { letter, path, text } from './strip-items'
-import { TEXT_HEIGHT, textWidth } from './text-box'
+  blankLabels,
+  edgeLabels,
+  endLabel,
+  handLabel,
+  turnLabels,
+  workLabels,
+} from './outline-labels'
+import type { OutlineView, Room } from './outline-view'
+import { endView, wholeView } from './outline-view'
+import { penFor } from './pen'
+import { placeLabels, streamOf } from './placement'
+import { partOfCrease } from './strip-figure'
+import { path } from './strip-items'
+import { textWidth } from './text-box'
 
 /** Words and numbers come from the caller, in the person's units and language. */
 export interface OutlineLabels {
@@ -25,6 +34,12 @@ export interface OutlineLabels {
   readonly run: (inches: number) => string
   /** What stands over an end: `left end`, `right end, low`. */
   readonly end: (side: Side) => string
+  /** The signed turn of a bend as text; without it creases carry a triangle alone. */
+  readonly angle?: (turn: number) => string
+  /** A tab's length as text, where it should say that it is a tab. */
+  readonly tab?: (inches: number) => string
+  /** The length over which a hem is opened as text, where it should say so. */
+  readonly opening?: (inches: number) => string
 }
 
 export interface OutlineOptions {
@@ -34,6 +49,9 @@ export interface OutlineOptions {
   readonly labels: OutlineLabels
   /** One end enlarged, with the marking table's dimensions; absent: the whole strip. */
   readonly side?: Side
+  /** The letter of the piece's hand. */
+  readonly hand?: string
+  readonly selected?: Part | null
   readonly textSize?: number
 }
 
@@ -41,8 +59,8 @@ export interface OutlineFigure {
   readonly display: DisplayList
   /** Pixels an inch. */
   readonly scale: number
-  /** Marks whose figures found no room; the marking table has them. */
-  readonly leftOut: readonly Mark[]
+  /** What found no room; the caller prints it as a table. */
+  readonly leftOut: readonly OutlineNumber[]
 }
 
 const within = (low: number, value: number, high: number): number =>
@@ -51,304 +69,259 @@ const within = (low: number, value: number, high: number): number =>
 const sizeOf = ({ width, height, textSize }: OutlineOptions): number =>
   textSize ?? within(9, Math.min(width / 30, height / 16), 15)
 
-const drawStrip = (layout: StripLayout, strip: Strip, place: OutlinePlace): DisplayItem[] =>
-  place.shown.flatMap((part) => {
-    const ends = [
-      ...(part.from === 0 ? [layout.left] : []),
-      ...(part.to === layout.blankLength ? [layout.right] : []),
-    ]
-    return [
-      ...drawSheet(layout, part),
-      ...ends.flatMap((end) => [
-        ...drawCutAways(end, layout, part),
-        ...drawOpenings(end, layout, strip, part),
-      ]),
-      ...drawCreases(strip, layout, part),
-      ...ends.flatMap((end) => drawTabs(end, part)),
-      ...drawBreaks(layout, part),
-    ]
-  })
+const SMALLEST_TEXT = 7
 
-const arrowHead = (tip: Point, way: Point, size: number): DisplayItem => {
-  const length = Math.hypot(way.x, way.y) || 1
-  const [x, y] = [way.x / length, way.y / length]
-  return {
-    ...path(
-      'dimension',
-      [
-        tip,
-        { x: tip.x - x * size - y * size * 0.35, y: tip.y - y * size + x * size * 0.35 },
-        { x: tip.x - x * size + y * size * 0.35, y: tip.y - y * size - x * size * 0.35 },
-      ],
-      0,
-    ),
-    closed: true,
-    filled: true,
-  }
-}
-
-/** A dimension line with its heads; too short for both, it is a bare line. */
-const dimensionLine = (from: Point, to: Point, head: number): DisplayItem[] => {
-  const length = Math.hypot(to.x - from.x, to.y - from.y)
-  const way = { x: to.x - from.x, y: to.y - from.y }
-  const heads =
-    length < head * 2.5
-      ? []
-      : [arrowHead(to, way, head), arrowHead(from, { x: 0 - way.x, y: 0 - way.y }, head)]
-  return [path('dimension', [from, to], 1), ...heads]
-}
-
-/** A text that fits into the room, smaller if it must be; undefined where it does not. */
-const fitText = (content: string, room: number, size: number): number | undefined =>
-  [1, 0.85, 0.7]
-    .map((part) => size * part)
-    .find((one) => one >= 7 && textWidth(content, one) <= room)
+/** Type sizes tried one after another until everything has room. */
+const SIZES = [1, 0.85, 0.7]
 
 /**
- * The strip as it is cut, to scale both ways: left side up, edge A below. What is cut away is
- * dotted, tabs and opened hems are hatched, creases dashed with a triangle for their turn. Figures
- * stand outside the strip in rows and columns of their own, so that they never meet each other or
- * the drawing at any size; what finds no room there is left out and named in `leftOut`.
+ * The strip as it is cut, to scale both ways: left side up, edge A below. The blank's border is
+ * dotted where it is cut away, tabs and hems are hatched, opened hems strong along their edge,
+ * creases dashed where they fold up and dashed and dotted where they fold down, with their turn on
+ * the line. One end carries the marking table: distances from edge A beyond the break, distances
+ * from the blank's square end beyond that. The whole strip is broken where it is long.
+ *
+ * No figure or word touches another, a line of the drawing or the frame, at any size; what finds no
+ * room is named in `leftOut`. Same input, same list.
  */
 export const outlineFigure = (
   layout: StripLayout,
   strip: Strip,
   options: OutlineOptions,
-): OutlineFigure =>
-  options.side === undefined
-    ? wholeStrip(layout, strip, options)
-    : oneEnd(layout, strip, options, options.side)
-
-const wholeStrip = (layout: StripLayout, strip: Strip, options: OutlineOptions): OutlineFigure => {
-  const { width, height, labels } = options
-  const size = sizeOf(options)
-  const row = size * 1.5
-  const across = labels.length(layout.stripWidth)
-  const column = textWidth(across, size) + size * 1.8
-  const box = { minX: size * 2.2, maxX: width - column, minY: row, maxY: height - row * 1.5 }
-  if (!isRoom(box)) return emptyFigure(options)
-  const place = placeWhole(layout, box)
-  const { sheet } = place
-  const runSize = fitText(labels.run(layout.blankLength), sheet.maxX - sheet.minX - 8, size)
-  const below = sheet.maxY + row * 0.45
-  const beside = sheet.maxX + size * 0.6
-  const middleY = (sheet.minY + sheet.maxY) / 2
-  const items: DisplayItem[] = [
-    ...drawStrip(layout, strip, place),
-    ...dimensionLine({ x: sheet.minX, y: below }, { x: sheet.maxX, y: below }, size * 0.5),
-    ...dimensionLine({ x: beside, y: sheet.maxY }, { x: beside, y: sheet.minY }, size * 0.5),
-    text(
-      'dimensionText',
-      across,
-      { x: beside + size * 0.5 + textWidth(across, size) / 2, y: middleY },
-      size,
-    ),
-    ...(runSize === undefined
-      ? []
-      : [
-          text(
-            'dimensionText',
-            labels.run(layout.blankLength),
-            { x: (sheet.minX + sheet.maxX) / 2, y: below + runSize },
-            runSize,
-          ),
-        ]),
-    ...edgeLetters(sheet, sheet.minX - size * 1.1, size),
-    ...endWords(sheet, labels, size),
-  ]
-  return { display: { width, height, items }, scale: place.scale, leftOut: [] }
+): OutlineFigure => {
+  const wanted = sizeOf(options)
+  const sizes = SIZES.map((part) => Math.max(Math.min(wanted, SMALLEST_TEXT), wanted * part))
+  let best: OutlineFigure | undefined
+  for (const size of sizes) {
+    const figure = figureAt(layout, strip, options, size)
+    if (best === undefined || figure.leftOut.length < best.leftOut.length) best = figure
+    // Smaller type has no need to be tried for turns alone: the strip figure has them too.
+    if (best.leftOut.every(({ of }) => of === 'turn')) break
+  }
+  if (best === undefined) throw new Error('No type size was tried.')
+  return best
 }
 
-/** A and B before their edges, where the strip is tall enough for both circles. */
-const edgeLetters = ({ minY, maxY }: Bounds, x: number, size: number): DisplayItem[] => {
-  const small = size * 0.85
-  const apart = maxY - minY
-  const y =
-    apart >= small * 1.5
-      ? [maxY, minY]
-      : [(minY + maxY) / 2 + small * 0.75, (minY + maxY) / 2 - small * 0.75]
-  return [
-    ...letter('A', { x, y: y[0] ?? maxY }, small),
-    ...letter('B', { x, y: y[1] ?? minY }, small),
-  ]
-}
-
-/** What each end is, over it; both or neither, in one size. */
-const endWords = (sheet: Bounds, labels: OutlineLabels, size: number): DisplayItem[] => {
-  const [left, right] = [labels.end('left'), labels.end('right')]
-  const room = sheet.maxX - sheet.minX
-  const fitting = fitText(`${left}  ${right}`, room, size)
-  if (fitting === undefined) return []
-  const y = sheet.minY - size * 0.85
-  return [
-    text('edge', left, { x: sheet.minX + textWidth(left, fitting) / 2, y }, fitting),
-    text('edge', right, { x: sheet.maxX - textWidth(right, fitting) / 2, y }, fitting),
-  ]
-}
-
-const isRoom = (box: Bounds): boolean => box.maxX - box.minX >= 24 && box.maxY - box.minY >= 12
-
-const emptyFigure = ({ width, height }: OutlineOptions, leftOut: readonly Mark[] = []) => ({
-  display: { width, height, items: [] },
-  scale: 0,
-  leftOut,
-})
-
-/** A column of figures beside the strip, each tied to its height on the strip by a thin line. */
-const figureColumn = (
-  figures: readonly { readonly text: string; readonly y: number }[],
-  column: { readonly x: number; readonly sheetX: number; readonly height: number },
+const figureAt = (
+  layout: StripLayout,
+  strip: Strip,
+  options: OutlineOptions,
   size: number,
-): DisplayItem[] | undefined => {
-  const step = size * TEXT_HEIGHT
-  // Edge B is on top: heights rise from the last mark to the first.
-  const rising = figures.toReversed()
-  const places = spread(
-    rising.map(({ y }) => y),
-    step,
-    step / 2,
-    column.height - step / 2,
+): OutlineFigure => {
+  const { width, height, side } = options
+  const view =
+    side === undefined
+      ? wholeView(layout, options, wholeRoom(layout, options, size), size)
+      : endView(layout, side, options, endRoom(layout, side, options, size), size)
+  const outline = drawOutline(layout, strip, view)
+  const creases = drawnCreases(layout, strip, view)
+  const columns = side === undefined ? [] : columnsOf(layout, strip, view, side, options)
+  const labels = labelsOf(layout, view, outline, creases, options)
+  const fixed = columns.map(({ column }) => ({ weight: 100, streams: [streamOf([column.taken])] }))
+  const placed = placeLabels<PlacedLabel>([...fixed, ...labels]).slice(fixed.length)
+  // A turn may be shown as a triangle without its text.
+  const missing = labels.filter(
+    ({ meaning }, index) => meaning.text !== '' && placed[index]?.text !== meaning.text,
   )
-  if (!places) return undefined
-  const toStrip = Math.sign(column.sheetX - column.x)
-  return rising.flatMap((figure, index): DisplayItem[] => {
-    const y = places[index] ?? figure.y
-    const half = textWidth(figure.text, size) / 2
-    const tie = { x: column.x + toStrip * (half + 2), y }
-    const knee = column.sheetX - toStrip * size * 0.4
-    return [
-      text('dimensionText', figure.text, { x: column.x, y }, size),
-      path('dimension', [tie, { x: knee, y: figure.y }, { x: column.sheetX, y: figure.y }], 0.75),
-    ]
+  const items: DisplayItem[] = [
+    ...outline.under,
+    ...drawCreases(creases, labels, placed),
+    ...outline.over,
+    ...(side === undefined ? [] : drawDots(layout, strip, view, side, options)),
+    ...columns.flatMap(({ column }) => column.items),
+    ...labels.flatMap(({ draw }, index) => {
+      const label = placed[index]
+      return label ? draw(label) : []
+    }),
+  ]
+  return {
+    display: { width, height, items: markSelected(items, options.selected ?? null) },
+    scale: view.scale,
+    leftOut: [...columns.flatMap(leftOutOfColumn), ...missing.map(({ meaning }) => meaning)],
+  }
+}
+
+/** What the dimensions of opened hems need above and below the strip. */
+const openingRoom = (layout: StripLayout, sides: readonly Side[], size: number) => {
+  const has = (edge: 'A' | 'B') =>
+    sides.some((side) => layout[side].openings.some((opening) => opening.edge === edge))
+  return { top: has('B') ? size * 1.6 : 0, bottom: has('A') ? size * 1.6 : 0 }
+}
+
+/** Letters at the left, the width at the right, words above, the length below. */
+const wholeRoom = (layout: StripLayout, { labels }: OutlineOptions, size: number): Room => {
+  const opened = openingRoom(layout, ['left', 'right'], size)
+  return {
+    left: size * 2.2,
+    right: size * 2.2 + textWidth(labels.length(layout.stripWidth), size),
+    top: size * 2 + opened.top,
+    bottom: size * 2.8 + opened.bottom,
+  }
+}
+
+const widest = (texts: readonly string[], size: number): number =>
+  Math.max(0, ...texts.map((one) => textWidth(one, size)))
+
+/** The depths beyond the blank's end, the distances from edge A beyond the break. */
+const endRoom = (
+  layout: StripLayout,
+  side: Side,
+  { labels }: OutlineOptions,
+  size: number,
+): Room => {
+  const { marks } = layout[side]
+  const lead = COLUMN_LEAD * size + 6
+  const columnFor = (of: 'at' | 'along') => {
+    const texts = marks.map((mark) => labels.length(mark[of]))
+    return lead + widest(texts, size)
+  }
+  const [end, inner] = [columnFor('along'), columnFor('at')]
+  const opened = openingRoom(layout, [side], size)
+  return {
+    left: side === 'left' ? end : inner,
+    right: side === 'left' ? inner : end,
+    top: size * 2 + opened.top,
+    bottom: size * 2 + opened.bottom,
+  }
+}
+
+interface NamedColumn {
+  readonly of: 'at' | 'along'
+  readonly column: Column
+}
+
+const figuresOf = (
+  layout: StripLayout,
+  strip: Strip,
+  view: OutlineView,
+  side: Side,
+  { labels }: OutlineOptions,
+) => markFigures(layout, side, view, strip.creases.map(partOfCrease), labels.length)
+
+/** The columns that lie in the frame; one that would not is left out as a whole. */
+const columnsOf = (
+  layout: StripLayout,
+  strip: Strip,
+  view: OutlineView,
+  side: Side,
+  options: OutlineOptions,
+): NamedColumn[] => {
+  const figures = figuresOf(layout, strip, view, side, options)
+  const out = side === 'left' ? -1 : 1
+  const sides = [
+    { of: 'along' as const, towards: out } as const,
+    { of: 'at' as const, towards: out === 1 ? -1 : 1 } as const,
+  ]
+  return sides.map(({ of, towards }) => {
+    const reach =
+      COLUMN_LEAD * view.text +
+      widest(
+        figures[of].map(({ text }) => text),
+        view.text,
+      )
+    const from = figures[of][0]?.from.x ?? 0
+    const isIn = towards === 1 ? from + reach <= options.width - 1 : from - reach >= 1
+    return {
+      of,
+      column: columnOf(figures[of], towards, view.text, isIn ? options.height : 0),
+    }
   })
 }
 
-const oneEnd = (
+const leftOutOfColumn = ({ of, column }: NamedColumn): OutlineNumber[] =>
+  column.leftOut.map(({ text, part }) => ({ of, text, part }))
+
+/** A dot where each mark is pricked. */
+const drawDots = (
   layout: StripLayout,
   strip: Strip,
-  options: OutlineOptions,
+  view: OutlineView,
   side: Side,
-): OutlineFigure => {
-  const { width, height, labels } = options
-  const { marks } = layout[side]
-  const wanted = sizeOf(options)
-  for (const size of [wanted, wanted * 0.85, wanted * 0.7].filter((one) => one >= 7)) {
-    const widest = (texts: readonly string[]): number =>
-      Math.max(...texts.map((one) => textWidth(one, size)))
-    const ats = marks.map(({ at }) => labels.length(at))
-    const alongs = marks.map(({ along }) => labels.length(along))
-    const gap = size * 1.6
-    const [atWidth, alongWidth] = [widest(ats), widest(alongs)]
-    const [before, after] = side === 'left' ? [alongWidth, atWidth] : [atWidth, alongWidth]
-    // The letters stand beyond the column of the broken side.
-    const letters = size * 1.9
-    const box = {
-      minX: before + gap + 4 + (side === 'right' ? letters : 0),
-      maxX: width - after - gap - 4 - (side === 'left' ? letters : 0),
-      minY: size * 1.8,
-      maxY: height - size,
-    }
-    if (!isRoom(box)) continue
-    const place = placeEnd(layout, side, box)
-    const { sheet } = place
-    const heights = marks.map(({ at }) => sheet.maxY - at * place.scale)
-    const endX = side === 'left' ? sheet.minX : sheet.maxX
-    const brokenX = side === 'left' ? sheet.maxX : sheet.minX
-    const outward = side === 'left' ? -1 : 1
-    const figuresOf = (texts: readonly string[]) =>
-      texts.map((content, index) => ({ text: content, y: heights[index] ?? 0 }))
-    const alongColumn = figureColumn(
-      figuresOf(alongs),
-      { x: endX + outward * (gap + alongWidth / 2), sheetX: endX + outward * 2, height },
-      size,
+  options: OutlineOptions,
+): DisplayItem[] =>
+  figuresOf(layout, strip, view, side, options).dots.map(({ part, at }) => ({
+    kind: 'circle',
+    role: 'mark',
+    part,
+    center: at,
+    radius: Math.min(2.4, view.text / 5),
+    width: 0,
+    filled: true,
+  }))
+
+const labelsOf = (
+  layout: StripLayout,
+  view: OutlineView,
+  outline: DrawnOutline,
+  creases: readonly DrawnCrease[],
+  options: OutlineOptions,
+): OutlineLabel[] => {
+  const { width, height, labels, side, hand } = options
+  const frame = { minX: 1, minY: 1, maxX: width - 1, maxY: height - 1 }
+  const pen = penFor(width, height, view.text)
+  const offCreases: LabelSpace = { metal: metalOf(outline.lines, 1), frame, pen }
+  const lines = creases.map(({ y, from, to }) => ({ from: { x: from, y }, to: { x: to, y } }))
+  const space = { ...offCreases, metal: metalOf([...outline.lines, ...lines], 1) }
+  const work = {
+    tab: labels.tab ?? labels.length,
+    opening: labels.opening ?? labels.length,
+  }
+  return [
+    ...(side === undefined
+      ? [
+          ...blankLabels(layout, view, space, {
+            length: labels.run(layout.blankLength),
+            width: labels.length(layout.stripWidth),
+          }),
+          endLabel(view, space, 'left', labels.end('left')),
+          endLabel(view, space, 'right', labels.end('right')),
+        ]
+      : [endLabel(view, space, side, labels.end(side))]),
+    ...edgeLabels(layout, view, space, side),
+    ...(hand === undefined ? [] : [handLabel(view, space, hand)]),
+    ...workLabels(layout, view, space, work),
+    ...turnLabels(creases, offCreases, view.text * 0.8, labels.angle ?? (() => '')),
+  ]
+}
+
+const DASHES = { up: [6, 4], down: [9, 3, 2, 3] }
+
+/** Creases as dashes, interrupted where their turn stands on them. */
+const drawCreases = (
+  creases: readonly DrawnCrease[],
+  labels: readonly OutlineLabel[],
+  placed: readonly (PlacedLabel | undefined)[],
+): DisplayItem[] =>
+  creases.flatMap(({ crease, part, y, from, to }) => {
+    const dash = crease.turn > 0 ? DASHES.up : DASHES.down
+    const index = labels.findIndex(
+      ({ meaning }) => meaning.of === 'turn' && meaning.part && isSamePart(meaning.part, part),
     )
-    const atColumn = figureColumn(
-      figuresOf(ats),
-      { x: brokenX - outward * (gap + atWidth / 2), sheetX: brokenX - outward * 5, height },
-      size,
-    )
-    if (!alongColumn || !atColumn) continue
-    const letterX =
-      side === 'left' ? brokenX + gap + atWidth + size * 1.1 : brokenX - gap - atWidth - size * 1.1
-    const title = labels.end(side)
-    const titleSize = fitText(title, sheet.maxX - sheet.minX, size)
-    return {
-      display: {
-        width,
-        height,
-        items: [
-          ...drawStrip(layout, strip, place),
-          ...blankEnd(endX, sheet),
-          ...marks.flatMap((mark, index) =>
-            depthLine(mark, heights[index] ?? 0, endX, outward, place),
-          ),
-          ...alongColumn,
-          ...atColumn,
-          ...edgeLetters(sheet, letterX, size),
-          ...(titleSize === undefined
-            ? []
-            : [
-                text(
-                  'edge',
-                  title,
-                  {
-                    x: (sheet.minX + sheet.maxX) / 2,
-                    y: Math.max(size * 0.6, sheet.minY - size * 0.9),
-                  },
-                  titleSize,
-                ),
-              ]),
+    const [minX = to, , maxX = to] = placed[index]?.boxes ?? []
+    const isHere = minX < to && maxX > from
+    const pieces = isHere
+      ? [
+          [from, minX - 2],
+          [maxX + 2, to],
+        ]
+      : [[from, to]]
+    return pieces.map(([a = from, b = to]) => ({
+      ...path(
+        'crease',
+        [
+          { x: a, y },
+          { x: b, y },
         ],
-      },
-      scale: place.scale,
-      leftOut: [],
-    }
-  }
-  return bareEnd(layout, strip, options, side)
-}
+        1.3,
+        part,
+      ),
+      dash,
+    }))
+  })
 
-/** The square end of the blank, from which the depths are measured. */
-const blankEnd = (x: number, { minY, maxY }: Bounds): DisplayItem[] => [
-  {
-    ...path(
-      'dimension',
-      [
-        { x, y: minY },
-        { x, y: maxY },
-      ],
-      0.75,
-    ),
-    dash: [1, 3],
-  },
-]
-
-/** From the blank's square end to a mark. */
-const depthLine = (
-  { along }: Mark,
-  y: number,
-  endX: number,
-  outward: number,
-  { scale }: OutlinePlace,
-): DisplayItem[] => {
-  const length = along * scale
-  if (length < 1) return []
-  return dimensionLine({ x: endX, y }, { x: endX - outward * length, y }, Math.min(6, length / 3))
-}
-
-/** Without its figures, where a frame is too small for them. */
-const bareEnd = (
-  layout: StripLayout,
-  strip: Strip,
-  options: OutlineOptions,
-  side: Side,
-): OutlineFigure => {
-  const { width, height } = options
-  const box = { minX: 4, maxX: width - 4, minY: 4, maxY: height - 4 }
-  if (!isRoom(box)) return emptyFigure(options, layout[side].marks)
-  const place = placeEnd(layout, side, box)
-  return {
-    display: { width, height, items: drawStrip(layout, strip, place) },
-    scale: place.scale,
-    leftOut: layout[side].marks,
-  }
-}
+const markSelected = (items: readonly DisplayItem[], selected: Part | null): DisplayItem[] =>
+  items.map((item) =>
+    selected !== null && item.part && isSamePart(item.part, selected)
+      ? { ...item, role: 'selected' as const }
+      : item,
+  )

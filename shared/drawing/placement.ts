@@ -40,7 +40,7 @@ export const streamOf = <C extends Candidate>(candidates: readonly C[]): Stream<
   }
 }
 
-/** Streams that are only begun when something as dear as `least` is asked for. */
+/** Streams that are only begun when something as dear as `least` is asked for; none costs less. */
 export class Later<C extends Candidate> implements Stream<C> {
   private streams: readonly Stream<C>[] | undefined
 
@@ -69,8 +69,8 @@ export class Later<C extends Candidate> implements Stream<C> {
   }
 }
 
-/** Room between text and the lines of other labels. */
-const LINE_GAP = 2
+/** Room between text and the lines of other labels; the slashes of dimensions reach into it. */
+const LINE_GAP = 3
 
 /**
  * Room between texts side by side, in parts of a line's height: over two characters, so that "2"

@@ -2,7 +2,7 @@ import type { StripLayout } from '#shared/ends/end-layout'
 import type { Side } from '#shared/ends/end.schema'
 import type { Bounds } from '#shared/geometry/bounds'
 import type { Inches } from '#shared/units/brands'
-import { depthOfEnd } from './outline-place'
+import { depthOfEnd } from './outline-view'
 
 /** Points of a full-size drawing for an inch of metal. */
 export const POINTS_PER_INCH = 72

@@ -9,10 +9,10 @@ import { creaseSpans } from './crease-spans'
 import type { DisplayItem, Part, Point, Role } from './display-list'
 import type { TemplateWords } from './end-template'
 import type { LabelSpace, PlacedLabel } from './label-space'
-import { letterPlaces, linesOfLabel, middleOfLabel, textAt } from './label-space'
+import { letterPlaces, linesOfLabel, middleOfLabel, textPlaces } from './label-space'
 import { penFor } from './pen'
-import type { Label, Stream } from './placement'
-import { placeLabels, streamOf } from './placement'
+import type { Label } from './placement'
+import { placeLabels } from './placement'
 import { partOfCrease } from './strip-figure'
 import { path, text } from './strip-items'
 import type { Join } from './template-joins'
@@ -29,17 +29,6 @@ interface Words extends Label<PlacedLabel> {
 
 const SIZE = 11
 
-/** A text at the first of several places that is free. */
-const firstFree = (
-  space: LabelSpace,
-  content: string,
-  size: number,
-  places: readonly Point[],
-): Stream<PlacedLabel> =>
-  streamOf(
-    places.flatMap(({ x, y }, index) => textAt(space, content, size, x, y, [], false, index) ?? []),
-  )
-
 /** Parts of a line, from its middle outwards. */
 const ALONG = [0.5, 0.42, 0.58, 0.34, 0.66, 0.27, 0.73, 0.13, 0.87, 0.06, 0.94]
 
@@ -49,7 +38,7 @@ const joinWords = (space: LabelSpace, joins: readonly Join[]): Words[] =>
     bold: true,
     weight: 10,
     streams: [
-      firstFree(
+      textPlaces(
         space,
         letter,
         SIZE * 1.3,
@@ -121,7 +110,7 @@ const creaseWords = (
         bold: false,
         weight: 2,
         streams: [
-          firstFree(
+          textPlaces(
             space,
             turnWords(crease, words),
             size,
@@ -154,7 +143,7 @@ const markWords = (words: TemplateWords, sheet: Sheet, space: LabelSpace): Words
     bold: true,
     weight: 6,
     streams: [
-      firstFree(
+      textPlaces(
         space,
         words.mark,
         size,
