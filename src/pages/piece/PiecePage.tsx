@@ -7,6 +7,8 @@ import type { Piece } from '#shared/pieces/pieces.contract'
 import { paths } from '@/app/paths'
 import { ErrorState } from '@/components/ErrorState'
 import { LoadingState } from '@/components/LoadingState'
+import { LabelHistory } from '@/features/labels/components/LabelHistory'
+import { PrintLabels } from '@/features/labels/components/PrintLabels'
 import { useUnits } from '@/features/people/useUnits'
 import { pieceQuery } from '@/features/pieces/api/pieces.queries'
 import { PieceHistory } from '@/features/pieces/components/PieceHistory'
@@ -95,11 +97,15 @@ function PieceSheet({ piece, place }: { readonly piece: Piece; readonly place: P
       </dl>
       <Replacement word={t('remakeOf')} code={piece.remakeOf} place={place} />
       <Replacement word={t('remadeAs')} code={piece.remadeAs} place={place} />
+      {piece.state !== 'scrapped' && piece.state !== 'withdrawn' && (
+        <PrintLabels of={{ kind: 'piece', code: piece.code }} />
+      )}
       <section aria-labelledby="history">
         <h2 id="history" className="mb-2 font-bold">
           {t('history')}
         </h2>
         <PieceHistory events={piece.events} />
+        <LabelHistory code={piece.code} />
       </section>
     </div>
   )

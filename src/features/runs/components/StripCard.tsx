@@ -3,6 +3,7 @@ import type { Run } from '#shared/runs/runs.contract'
 import { useElementSize } from '@/features/drawing/canvas/useElementSize'
 import { ProfilePair } from '@/features/drawing/figure/ProfilePair'
 import { ChecksMade } from '@/features/drawing/panels/ChecksMade'
+import { PrintLabels } from '@/features/labels/components/PrintLabels'
 import { OverrideNote } from '@/features/orders/components/OverrideNote'
 import { useUnits } from '@/features/people/useUnits'
 import { useFormats } from '@/lib/format/useFormats'
@@ -40,6 +41,7 @@ export function StripCard({ run }: { readonly run: Run }) {
         <StandFigure text={size(run.strip.stripWidth, 32).replace(/"$/, '')} testId="strip-width" />
         <p className="text-scribe">{t('strip.lengths')}</p>
         <RunLines run={run} />
+        <PrintLabels of={{ kind: 'run', runId: run.id }} />
         <p className="text-small">
           {t('strip.brake', { brake: run.brakeName })}
           {run.plan.seconds !== null && ` ${t('strip.time', { time: duration(run.plan.seconds) })}`}
