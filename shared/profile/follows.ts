@@ -1,7 +1,10 @@
 import type { Bend, Follows, Profile } from '#shared/profile/profile.schema'
-import { angleBetweenPlanes } from '#shared/roof-line/roof-slopes'
+import { angleBetweenPlanes, bendOverPlanes } from '#shared/roof-line/roof-slopes'
 import { pitchAngle, turnOfIncluded } from '#shared/units/angle'
 import type { Degrees } from '#shared/units/brands'
+
+/** What the crest of a rib in a valley bends, degrees. */
+const RIB: Degrees = 90
 
 /** Roofs slope from level to short of plumb. */
 export const isSlope = (slope: Degrees): boolean => slope >= 0 && slope < 90
@@ -12,6 +15,8 @@ export const isSlope = (slope: Degrees): boolean => slope >= 0 && slope < 90
  *
  *     ridge            180 - a - a2   (a2 = a where no second slope is given)
  *     hip, valley      180 - acos(cos a cos a2), of planes at a square corner   (a2 likewise)
+ *     valley rib       135 less half of what a valley bends: the two beside a rib whose crest bends
+ *                      back by 90 bend the whole piece as far as a valley without a rib
  *     high-side peak   90 - a
  *     eave             90 + a with a plumb fascia, 90 square-cut
  *     gable, sidewall  90
@@ -32,6 +37,10 @@ export const includedFromRoof = (follows: Follows, jobSlope: Degrees | null): De
     case 'hip':
     case 'valley':
       return angleBetweenPlanes({ slope, otherSlope: second ?? slope, planTurn: 90 })
+    case 'valleyRib': {
+      const valley = bendOverPlanes({ slope, otherSlope: second ?? slope, planTurn: 90 })
+      return 180 - (valley + RIB) / 2
+    }
     case 'highSidePeak':
       return 90 - slope
     case 'eave':

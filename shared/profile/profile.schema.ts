@@ -6,6 +6,7 @@ export const followsSchema = z.strictObject({
     'ridge',
     'hip',
     'valley',
+    'valleyRib',
     'highSidePeak',
     'eave',
     'eaveSquare',

@@ -1,121 +1,137 @@
+import { isLess } from '#shared/geometry/tolerance'
 import { resolveFollows } from '#shared/profile/follows'
-import type { Bend, Follows, Hem, Profile } from '#shared/profile/profile.schema'
-import type { Degrees } from '#shared/units/brands'
+import type { Profile } from '#shared/profile/profile.schema'
+import { CLOSURE_STARTERS } from '#shared/profile/starters/closure.starters'
+import { CORNER_STARTERS } from '#shared/profile/starters/corner.starters'
+import { EDGE_STARTERS } from '#shared/profile/starters/edge.starters'
+import { RIDGE_STARTERS } from '#shared/profile/starters/ridge.starters'
+import type {
+  StarterDefinition,
+  StarterParameter,
+  StarterParameterKey,
+} from '#shared/profile/starters/starter'
+import { VALLEY_STARTERS } from '#shared/profile/starters/valley.starters'
+import { WALL_STARTERS } from '#shared/profile/starters/wall.starters'
 
-export const STARTER_KEYS = [
-  'gableRake',
-  'eaveDrip',
-  'ridge',
-  'highSidePeak',
-  'valley',
-  'headwall',
-  'sidewall',
-  'zClosure',
+/*
+ * The shop's starter profiles, in the order in which a roof is closed. All of it is common
+ * practice, no source: closed half-inch hems on exposed edges, a kick that throws water off a face,
+ * the color on the weather side, the dimensions round figures to begin with and meant to be
+ * changed, their bounds what the trade usually asks for. Each is walked with the weather side on
+ * its left, but for the gutter, whose inside lies there.
+ */
+const DEFINITIONS = [
+  ...EDGE_STARTERS,
+  ...RIDGE_STARTERS,
+  ...VALLEY_STARTERS,
+  ...WALL_STARTERS,
+  ...CORNER_STARTERS,
+  ...CLOSURE_STARTERS,
 ] as const
 
-export type StarterKey = (typeof STARTER_KEYS)[number]
+export type StarterKey = (typeof DEFINITIONS)[number]['key']
 
-/** Where on the roof a profile belongs. */
-export const STARTER_KINDS = ['edge', 'ridge', 'valley', 'wall', 'closure'] as const
+/** Stable: stored starters bear them. */
+export const STARTER_KEYS: readonly StarterKey[] = DEFINITIONS.map(({ key }) => key)
 
-export interface Starter {
-  /** Also the key of its name and description in the locales, namespace `starters`. */
-  readonly key: StarterKey
-  readonly kind: (typeof STARTER_KINDS)[number]
-  /** Bends that follow the roof are resolved for `STARTER_PITCH`. */
+/** Values by parameter, in its unit; what is absent has its default. */
+export type StarterParameters = Readonly<Partial<Record<StarterParameterKey, number>>>
+
+export interface Starter extends Omit<StarterDefinition<StarterKey>, 'parts'> {
+  /**
+   * With the default of every parameter; bends that follow the roof are resolved for
+   * `STARTER_PITCH`. The key is also that of its name and description in the locales, namespace
+   * `starters`.
+   */
   readonly profile: Profile
 }
 
 /** Rise in 12 for which the starters are drawn until a job gives its own. */
 export const STARTER_PITCH = 6
 
-const LEFT = 1
-const RIGHT = -1
+/** Why a value cannot be taken for a parameter. */
+export interface StarterRefusal {
+  readonly parameter: StarterParameter
+  readonly reason: 'notFinite' | 'belowLeast' | 'aboveMost'
+}
 
-const closedHem = (turn: Hem['turn']): Hem => ({ style: 'closed', length: 0.5, turn })
+/** Null where the value may be taken. */
+export const findStarterRefusal = (
+  parameter: StarterParameter,
+  value: number,
+): StarterRefusal | null => {
+  if (!Number.isFinite(value)) return { parameter, reason: 'notFinite' }
+  if (isLess(value, parameter.least)) return { parameter, reason: 'belowLeast' }
+  return isLess(parameter.most, value) ? { parameter, reason: 'aboveMost' } : null
+}
 
-const bend = (turn: Degrees): Bend => ({ turn })
+const definitionOf = (key: StarterKey): StarterDefinition<StarterKey> => {
+  const found = DEFINITIONS.find((candidate) => candidate.key === key)
+  if (!found) throw new RangeError(`There is no starter profile ${key}.`)
+  return found
+}
 
-/** A bend that the roof sets, drawn to a side of the walk. */
-const roofBend = (side: 1 | -1, rule: Follows['rule']): Bend => ({
-  turn: 90 * side,
-  follows: { rule, pitch: 'job' },
-})
-
-const starter = (
-  key: StarterKey,
-  kind: Starter['kind'],
-  parts: Pick<Profile, 'legs' | 'bends'> & Partial<Pick<Profile, 'hemA' | 'hemB' | 'colorSide'>>,
-): Starter => ({
-  key,
-  kind,
-  profile: resolveFollows(
-    { version: 1, hemA: null, hemB: null, colorSide: 'left', ...parts },
-    STARTER_PITCH,
-  ),
-})
+const checkParameters = (
+  { key, parameters }: StarterDefinition<StarterKey>,
+  given: StarterParameters,
+): void => {
+  for (const [name, value] of Object.entries(given)) {
+    const parameter = parameters.find((known) => known.key === name)
+    if (!parameter) throw new RangeError(`The starter ${key} has no parameter ${name}.`)
+    if (findStarterRefusal(parameter, value)) {
+      const { least, most, unit } = parameter
+      throw new RangeError(`${name} must be from ${least} to ${most} ${unit}, not ${value}.`)
+    }
+  }
+}
 
 /**
- * The shop's starter profiles, in the order in which a roof is closed. Common practice, no
- * source: closed half-inch hems on exposed edges, a kick that throws water off a face, the color
- * on the weather side. The dimensions are round figures to begin with, meant to be changed. Each
- * is walked with the weather side on its left.
+ * A starter made to a roof: `given` sets what is not to have its default, `pitch` is the rise in 12
+ * of the job (null: `STARTER_PITCH`), which bends that follow the roof are resolved for and remain
+ * tied to. For a pitch outside the starter's own range the profile may have problems;
+ * `profileProblems` tells. Throws RangeError for a key that is no starter's, a parameter it does
+ * not have, and a value out of bounds.
  */
-export const STARTERS: readonly Starter[] = [
-  // Roof flange, plumb face, kick.
-  starter('eaveDrip', 'edge', {
-    legs: [4.5, 2.5, 0.75],
-    bends: [roofBend(RIGHT, 'eave'), bend(30)],
-    hemB: closedHem(RIGHT),
-  }),
-  // Roof flange, face over the rake board, kick.
-  starter('gableRake', 'edge', {
-    legs: [3.5, 5.5, 0.75],
-    bends: [roofBend(RIGHT, 'gable'), bend(40)],
-    hemB: closedHem(RIGHT),
-  }),
-  // Two wings with edges kicked down on the panels.
-  starter('ridge', 'ridge', {
-    legs: [0.75, 6.5, 6.5, 0.75],
-    bends: [bend(-30), roofBend(RIGHT, 'ridge'), bend(-30)],
-    hemA: closedHem(RIGHT),
-    hemB: closedHem(RIGHT),
-  }),
-  // Roof wing over the top of a single slope, plumb face, kick.
-  starter('highSidePeak', 'ridge', {
-    legs: [6, 4.5, 0.75],
-    bends: [roofBend(RIGHT, 'highSidePeak'), bend(40)],
-    hemB: closedHem(RIGHT),
-  }),
-  // Two wings with hems that turn water back.
-  starter('valley', 'valley', {
-    legs: [10, 10],
-    bends: [roofBend(LEFT, 'valley')],
-    hemA: closedHem(LEFT),
-    hemB: closedHem(LEFT),
-  }),
-  // Apron with a kicked edge on the panels, leg up the wall.
-  starter('headwall', 'wall', {
-    legs: [0.75, 5.5, 3.5],
-    bends: [bend(-20), roofBend(LEFT, 'headwall')],
-    hemA: closedHem(RIGHT),
-  }),
-  // Flange beside the panels with a hem that turns water back, leg up the wall.
-  starter('sidewall', 'wall', {
-    legs: [4.5, 5],
-    bends: [roofBend(LEFT, 'sidewall')],
-    hemA: closedHem(LEFT),
-  }),
-  // Flange on the roof, web, flange under the cover.
-  starter('zClosure', 'closure', {
-    legs: [1.25, 2, 1.25],
-    bends: [bend(90), bend(-90)],
-  }),
-]
+export const starterProfile = (
+  key: StarterKey,
+  given: StarterParameters,
+  pitch: number | null,
+): Profile => {
+  const definition = definitionOf(key)
+  checkParameters(definition, given)
+  const rise = pitch ?? STARTER_PITCH
+  const value = (name: StarterParameterKey): number => {
+    const found = given[name] ?? definition.parameters.find((known) => known.key === name)?.default
+    if (found === undefined) throw new RangeError(`The starter ${key} has no parameter ${name}.`)
+    return found
+  }
+  return resolveFollows(
+    {
+      version: 1,
+      hemA: null,
+      hemB: null,
+      colorSide: 'left',
+      ...definition.parts(value, rise),
+    },
+    rise,
+  )
+}
+
+export const STARTERS: readonly Starter[] = DEFINITIONS.map(({ key, kind, parameters, pitch }) => ({
+  key,
+  kind,
+  parameters,
+  pitch,
+  profile: starterProfile(key, {}, null),
+}))
+
+/** Undefined where no starter has the key. */
+export const findStarter = (key: string): Starter | undefined =>
+  STARTERS.find((candidate) => candidate.key === key)
 
 /** Throws RangeError for a key that is no starter's. */
 export const getStarter = (key: StarterKey): Starter => {
-  const found = STARTERS.find((candidate) => candidate.key === key)
+  const found = findStarter(key)
   if (!found) throw new RangeError(`There is no starter profile ${key}.`)
   return found
 }

@@ -1,5 +1,7 @@
 import { useMemo, useState, type Dispatch, type ReactNode } from 'react'
 import type { ShopBrake } from '#shared/brakes/brakes.contract'
+import type { LineQuote } from '#shared/pricing/line-quote'
+import type { Profile } from '#shared/profile/profile.schema'
 import type { ProfileCure } from '#shared/profile/profile-cure'
 import type { Stock } from '#shared/stock/stock.schema'
 import { pitchAngle } from '#shared/units/angle'
@@ -27,6 +29,8 @@ interface Props {
   /** The choice of stock, laid over the corner of the sheet. */
   readonly stockSelect: ReactNode
   readonly pieceLength: Inches
+  /** What a line of it as drawn costs; null while that is not known. */
+  readonly priceOf: (profile: Profile) => LineQuote | null
   readonly brakes: readonly ShopBrake[]
   /** Rise in 12 of the job's roof. */
   readonly pitchRise: number | null
@@ -42,6 +46,7 @@ export function DrawingBoard({
   stock,
   stockSelect,
   pieceLength,
+  priceOf,
   brakes,
   pitchRise,
   finish,
@@ -113,6 +118,8 @@ export function DrawingBoard({
           profile={profile}
           told={told}
           pieceLength={pieceLength}
+          quote={profile && check?.strip ? priceOf(profile) : null}
+          lying={isIdle}
           confirmed={confirmed}
           lookedAt={lookedAt}
           brakesOpen={view === 'brakes'}

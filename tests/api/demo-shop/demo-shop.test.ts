@@ -56,7 +56,7 @@ describe('The demo shop', () => {
       brakes: 3,
       jobs: 5,
       orders: 15,
-      shelf_profiles: 11,
+      shelf_profiles: 19,
     })
   })
 

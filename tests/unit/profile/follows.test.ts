@@ -20,6 +20,8 @@ describe('the angle the roof gives', () => {
     [{ rule: 'valley', pitch: 'job' }, 180 - acos(0.8)],
     [{ rule: 'valley', pitch: 'job', second: 0 }, 180 - slope6],
     [{ rule: 'hip', pitch: 45, second: 60 }, 180 - acos(Math.SQRT1_2 / 2)],
+    [{ rule: 'valleyRib', pitch: 'job' }, 135 - acos(0.8) / 2],
+    [{ rule: 'valleyRib', pitch: 'job', second: 0 }, 135 - slope6 / 2],
     [{ rule: 'highSidePeak', pitch: 'job' }, 90 - slope6],
     [{ rule: 'eave', pitch: 'job' }, 90 + slope6],
     [{ rule: 'eaveSquare', pitch: 'job' }, 90],

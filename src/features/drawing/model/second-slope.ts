@@ -10,7 +10,7 @@ export const SLOPE_READINGS = ['rise', 'degrees'] as const
 export type SlopeReading = (typeof SLOPE_READINGS)[number]
 
 /** Where two slopes meet; one that is not given is the job's. */
-const OF_TWO: readonly Follows['rule'][] = ['ridge', 'hip', 'valley', 'transition']
+const OF_TWO: readonly Follows['rule'][] = ['ridge', 'hip', 'valley', 'valleyRib', 'transition']
 
 export const takesSecond = (rule: Follows['rule']): boolean => OF_TWO.includes(rule)
 

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
+import type { LineQuote } from '#shared/pricing/line-quote'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { ProfileCure } from '#shared/profile/profile-cure'
 import type { Inches } from '#shared/units/brands'
@@ -7,6 +8,7 @@ import { printRun, printSize } from '#shared/units/print-length'
 import { printWeight } from '#shared/units/weight'
 import { Button } from '@/components/Button'
 import { usePerson } from '@/features/people/person-context'
+import { useNoPriceWords } from '@/features/prices/useNoPriceWords'
 import { useFormats } from '@/lib/format/useFormats'
 import type { CheckedPlan, DrawingCheck } from '../check/check-drawing'
 import type { ToldProblem } from '../check/told-problems'
@@ -20,6 +22,10 @@ interface Props {
   readonly profile: Profile | null
   readonly told: readonly ToldProblem[]
   readonly pieceLength: Inches
+  /** Of one piece, by the price book as it is read here; null while nothing can be said. */
+  readonly quote: LineQuote | null
+  /** Why there is no price is told while the drawing lies still: the sheet must not shrink under the finger. */
+  readonly lying: boolean
   /** Whether the server has said the same: figures are worked out here first. */
   readonly confirmed: boolean
   /** Folds looked at by a search that takes long. */
@@ -42,6 +48,8 @@ export function AnswerBar({
   profile,
   told,
   pieceLength,
+  quote,
+  lying,
   confirmed,
   lookedAt,
   brakesOpen,
@@ -53,7 +61,8 @@ export function AnswerBar({
 }: Props) {
   const { t } = useTranslation('drawing')
   const { units } = usePerson()
-  const { count } = useFormats()
+  const noPriceWords = useNoPriceWords()
+  const { count, money } = useFormats()
   const strip = check?.strip ?? null
   const [first] = told
   const hits = plans
@@ -66,7 +75,13 @@ export function AnswerBar({
       label: printRun(pieceLength, units),
       value: check === null || check.weight === null ? null : printWeight(check.weight, units),
     },
-    { label: t('answer.hits'), value: hits === undefined ? null : String(hits) },
+    { label: t('answer.piece'), value: quote?.price ? money(quote.price.pieceCents) : null },
+    {
+      label: t('answer.hits'),
+      value: hits === undefined ? null : String(hits),
+      // On a phone four figures have room; the hits stand in what each brake says too.
+      onlyWide: true,
+    },
   ]
   return (
     <section
@@ -74,14 +89,22 @@ export function AnswerBar({
       data-confirmed={confirmed}
       className="shrink-0 border-y border-rule"
     >
-      <dl className="grid grid-cols-4 divide-x divide-rule">
-        {cells.map(({ label, value }) => (
-          <div key={label} className="min-w-0 px-2 py-1.5 lg:px-3">
+      <dl className="grid grid-cols-4 divide-x divide-rule lg:grid-cols-5">
+        {cells.map(({ label, value, onlyWide = false }) => (
+          <div
+            key={label}
+            className={`min-w-0 px-2 py-1.5 lg:px-3 ${onlyWide ? 'max-lg:hidden' : ''}`}
+          >
             <dt className="text-small text-scribe">{label}</dt>
             <dd className="font-figure text-body whitespace-nowrap lg:text-lead">{value ?? '–'}</dd>
           </div>
         ))}
       </dl>
+      {quote?.noPrice && lying && (
+        <p className="border-t border-rule px-3 py-1 text-small text-ochre">
+          {noPriceWords(quote.noPrice)}
+        </p>
+      )}
       {notice}
       <div className={first ? 'border-t border-rule' : 'flex items-center border-t border-rule'}>
         <div className="min-w-0 flex-1 pb-1">

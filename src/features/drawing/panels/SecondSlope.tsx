@@ -3,9 +3,9 @@ import { useTranslation } from 'react-i18next'
 import { isEqual } from '#shared/geometry/tolerance'
 import type { Follows } from '#shared/profile/profile.schema'
 import type { Degrees } from '#shared/units/brands'
+import { printSlope } from '#shared/units/print-slope'
 import { Choice } from '@/components/Choice'
 import { TextField } from '@/components/TextField'
-import { printSlope } from '@/features/ends/model/slope'
 import {
   needsSecond,
   readSlope,

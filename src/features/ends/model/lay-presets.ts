@@ -87,6 +87,9 @@ export function usualLay(profile: Profile, run: Run): Degrees {
     case 'hip':
     case 'valley':
       return wrapped(drawn.turn / -2 - before)
+    case 'valleyRib':
+      // The wing before the rib falls by half of what the whole valley bends.
+      return wrapped(Math.sign(drawn.turn) * (45 - Math.abs(drawn.turn)) - before)
     case 'gable':
     case 'sidewall':
     case 'transition':
