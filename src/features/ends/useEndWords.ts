@@ -2,9 +2,9 @@ import { useTranslation } from 'react-i18next'
 import type { EndProblem } from '#shared/ends/end-layout'
 import type { Side } from '#shared/ends/end.schema'
 import { printAngle } from '#shared/units/angle'
+import { printSlope } from '#shared/units/print-slope'
 import { useUnits } from '@/features/people/useUnits'
 import type { DraftEnd, DraftEnds, DraftHands, DraftPlane } from './model/draft-end'
-import { printSlope } from './model/slope'
 
 /** A measure that is still to be typed. */
 const OPEN = '?'

@@ -5,6 +5,7 @@ import type { Profile } from '#shared/profile/profile.schema'
 import { getStarter } from '#shared/profile/starters'
 import { resolveFollows } from '#shared/profile/follows'
 import { pitchAngle } from '#shared/units/angle'
+import { printSlope } from '#shared/units/print-slope'
 import {
   cornerKind,
   cornerPlane,
@@ -25,7 +26,7 @@ import {
   usualLay,
 } from '@/features/ends/model/lay-presets'
 import { withLowEnd } from '@/features/ends/model/run-edits'
-import { parseSlope, printSlope } from '@/features/ends/model/slope'
+import { parseSlope } from '@/features/ends/model/slope'
 import { STOCK } from '../orders/draft-lines'
 
 const PITCH = 3

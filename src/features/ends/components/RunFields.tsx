@@ -1,8 +1,8 @@
 import { useTranslation } from 'react-i18next'
 import type { Side } from '#shared/ends/end.schema'
+import { printSlope } from '#shared/units/print-slope'
 import { Choice } from '@/components/Choice'
 import type { Run } from '../model/corner-presets'
-import { printSlope } from '../model/slope'
 
 interface Props {
   readonly run: Run

@@ -2,9 +2,10 @@ import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
 import { printAngle } from '#shared/units/angle'
 import type { Degrees } from '#shared/units/brands'
+import { printSlope } from '#shared/units/print-slope'
 import { Select } from '@/components/Select'
 import { TextField } from '@/components/TextField'
-import { parseSlope, printSlope } from '../model/slope'
+import { parseSlope } from '../model/slope'
 
 const HEADINGS = ['level', 'rises', 'falls'] as const
 type Heading = (typeof HEADINGS)[number]
