@@ -1,5 +1,7 @@
 import { useMemo } from 'react'
 import { useTranslation } from 'react-i18next'
+import type { Cents } from '#shared/units/brands'
+import { printMoney } from '#shared/units/money'
 import {
   daysUntil,
   formatCount,
@@ -10,7 +12,7 @@ import {
 } from '@/lib/format/dates'
 import { asLanguage } from '@/locales/languages'
 
-/** Days, times and counts in the language on screen, on the clock of the device. */
+/** Days, times, counts and money in the language on screen, on the clock of the device. */
 export function useFormats() {
   const { i18n } = useTranslation()
   const language = asLanguage(i18n.language)
@@ -22,6 +24,7 @@ export function useFormats() {
       moment: (moment: string) => formatMoment(moment, language, new Date()),
       duration: (seconds: number) => formatDuration(seconds, language),
       count: (count: number) => formatCount(count, language),
+      money: (cents: Cents) => printMoney(cents, language),
     }),
     [language],
   )

@@ -8,6 +8,7 @@ import { LoadingState } from '@/components/LoadingState'
 import { StockName } from '@/features/orders/components/StockName'
 import { stocksQuery } from '@/features/stocks/api/stocks.queries'
 import { StockFacts } from '@/features/stocks/components/StockFacts'
+import { StockItems } from '@/features/stocks/components/StockItems'
 import { TestBends } from '@/features/stocks/components/TestBends'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
 import { OfficeNav } from './OfficeNav'
@@ -44,6 +45,7 @@ export function StockPage() {
             <StockName stock={stock} />
             <StockFacts stock={stock} />
           </section>
+          <StockItems stockId={stock.id} />
           <TestBends stockId={stock.id} />
         </div>
       )}

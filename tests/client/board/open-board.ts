@@ -18,11 +18,13 @@ interface Opening {
   readonly shelf?: readonly ShelfProfile[]
   /** Of the line that is drawn. */
   readonly change?: Partial<DraftLine>
+  /** What else the server answers. */
+  readonly answers?: Parameters<typeof fakeApi>[0]
 }
 
 /** The drawing board with a line of a begun order on it, as a crew lead sees it; no brake answers. */
 export async function openBoard(profile: Profile, opening: Opening = {}) {
-  const { pitchRise = 6, stock = STOCK, shelf = [], change = {} } = opening
+  const { pitchRise = 6, stock = STOCK, shelf = [], change = {}, answers = {} } = opening
   holdCsrfToken(null)
   await startLocales('en')
   // jsdom lays nothing out, so it has no color scheme and no sizes.
@@ -57,6 +59,7 @@ export async function openBoard(profile: Profile, opening: Opening = {}) {
     'GET /api/stocks': () => json({ items: [stock] }),
     'GET /api/brakes': () => json({ items: [] }),
     'GET /api/profiles': () => json({ items: shelf }),
+    ...answers,
   })
   const app = renderApp(`/roof/jobs/${JOB_ID}/board?line=line-a`)
   await screen.findByRole('toolbar', { name: 'Drawing tools' }, { timeout: 30_000 })

@@ -24,7 +24,10 @@ const job = {
 }
 
 /** The page of an order that a crew lead writes for a job of 6/12, with these lines begun. */
-export async function openOrder(change: Partial<OrderDraft>) {
+export async function openOrder(
+  change: Partial<OrderDraft>,
+  answers: Parameters<typeof fakeApi>[0] = {},
+) {
   holdCsrfToken(null)
   await startLocales('en')
   // jsdom draws nothing, so it cannot scroll and has no color scheme.
@@ -47,6 +50,7 @@ export async function openOrder(change: Partial<OrderDraft>) {
     'GET /api/stocks': () => json({ items: [STOCK] }),
     'GET /api/brakes': () => json({ items: [] }),
     [SUBMIT]: () => json(order(), 201),
+    ...answers,
   })
   const app = renderApp(`/roof/jobs/${JOB_ID}/order`)
   await screen.findByRole('button', { name: 'Submit order' }, { timeout: 30_000 })

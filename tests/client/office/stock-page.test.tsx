@@ -2,6 +2,7 @@ import { configure, fireEvent, screen, within } from '@testing-library/react'
 import { beforeAll, beforeEach, describe, expect, it, vi } from 'vitest'
 import { DEMO_BRAKES } from '#shared/bend-plan/demo-brakes'
 import type { Role } from '#shared/access/permissions'
+import { stockItemSchema, type StockItem } from '#shared/stock/stock-items.contract'
 import type { TestBendRecord } from '#shared/stock/stock.contract'
 import { holdCsrfToken } from '@/lib/api/csrf-token'
 import { fakeApi, json, personOf, problem } from '../../support/fake-api'
@@ -49,6 +50,7 @@ const shopOf = (role: Role, answers: Parameters<typeof fakeApi>[0] = {}) =>
     'GET /api/stocks': () => json({ items: [stock] }),
     'GET /api/brakes': () => json({ items: [brake] }),
     [`GET /api/stocks/${stock.id}/test-bends`]: () => json(bends()),
+    [`GET /api/stocks/${stock.id}/items`]: () => json({ items: [] }),
     ...answers,
   })
 
@@ -64,6 +66,32 @@ describe('the page of a stock', () => {
     expect(row).toHaveTextContent('handbook: half-hard copper and brass, soft steel, aluminum')
     expect(row).toHaveTextContent('K 0.382')
     expect(screen.getByText('DIN 6935 would give').nextSibling).toHaveTextContent('0.364')
+  })
+
+  it('lists the coils, sheets and drops on hand with their lots', async () => {
+    const item = { film: 'painted', rackMark: null, receivedOn: '2026-02-03', width: 48, count: 1 }
+    const items: StockItem[] = [
+      { ...item, id: BEND.id, kind: 'coil', lot: 'KIL-0417', length: 3744, film: 'none' },
+      { ...item, id: BRAKE_ID, kind: 'sheet', lot: 'KIL-0398', length: 120, count: 14 },
+      { ...item, id: stock.id, kind: 'drop', lot: 'KIL-0398', length: 88.5, rackMark: 'D2' },
+    ].map((each) => stockItemSchema.parse(each))
+    shopOf('manager', { [`GET /api/stocks/${stock.id}/items`]: () => json({ items }) })
+    openOffice()
+    const table = await screen.findByRole('table', { name: 'What is on hand' })
+    const rows = within(table).getAllByRole('row').slice(1)
+    const textsOf = (row: HTMLElement) =>
+      [...row.querySelectorAll('td, th')].slice(0, 7).map((cell) => cell.textContent)
+    expect(rows.map(textsOf)).toEqual([
+      ['coil', 'KIL-0417', '48"', `312'`, '–', 'none', '–'],
+      ['sheets', 'KIL-0398', '48"', `10'`, '14', 'on the painted face', '–'],
+      ['drop', 'KIL-0398', '48"', `7' 4 1/2"`, '–', 'on the painted face', 'D2'],
+    ])
+  })
+
+  it('says so where nothing of it is on hand', async () => {
+    shopOf('manager')
+    openOffice()
+    expect(await screen.findByText('Nothing of this stock is on hand')).toBeVisible()
   })
 
   it('takes the fit of a brake into use, as it was seen', async () => {

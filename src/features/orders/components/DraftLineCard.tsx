@@ -2,9 +2,12 @@ import { useId, useState } from 'react'
 import { Notice } from '@/components/Notice'
 import { EndsPanel } from '@/features/ends/components/EndsPanel'
 import type { EndedLine } from '@/features/ends/model/neighbors'
+import { LinePriceView } from '@/features/prices/components/LinePriceView'
+import { useQuote } from '@/features/prices/useQuote'
 import { RoofLinePanel } from '@/features/roof-line/components/RoofLinePanel'
 import type { DraftLine, LinePatch } from '../draft/order-draft'
 import { checkLine, UNTIL_ENTERED, type LineGround } from '../form/check-line'
+import { lineToPrice } from '../form/line-to-price'
 import { faultAt, type Fault } from '../form/order-faults'
 import { useFaultWords } from '../form/useFaultWords'
 import { LineBends } from './LineBends'
@@ -57,6 +60,7 @@ export function DraftLineCard({
   const words = useFaultWords()
   const id = useId()
   const checked = checkLine(line, ground)
+  const quote = useQuote()
   // Fields that stood open stay so while they are typed into.
   const [panel, setPanel] = useState<LinePanel | null>(() => (isNamed(line) ? null : 'names'))
   const faultOf = (field: string) => words(faultAt(faults, `lines.${index}.${field}`))
@@ -94,6 +98,7 @@ export function DraftLineCard({
             pieceWeight={line.length === null ? null : (check?.weight ?? null)}
             quantity={line.quantity}
           />
+          <LinePriceView quote={quote(lineToPrice(line, checked))} />
           <LineBends check={check} plans={checked.plans} />
           {drawingFault && <Notice kind="error">{drawingFault}</Notice>}
           {stock && <StockName stock={stock} />}

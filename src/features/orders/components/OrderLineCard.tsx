@@ -2,6 +2,7 @@ import { useId } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { OrderLine } from '#shared/orders/order.schema'
 import { ButtonLink } from '@/components/ButtonLink'
+import { LinePriceView } from '@/features/prices/components/LinePriceView'
 import { BendsLine } from './LineBends'
 import { OverrideNote } from './OverrideNote'
 import { LineEnds } from './LineEnds'
@@ -45,6 +46,7 @@ export function OrderLineCard({ line, unreleased, piecePath, sheetPath }: Props)
         <LineFigure profile={line.profile} stock={stock} strip={strip} name={line.name} />
         <div className="flex flex-col gap-3">
           <LineFacts strip={strip} pieceWeight={line.pieceWeight} quantity={quantity} />
+          <LinePriceView quote={line} />
           <StockName stock={stock} />
           <GirthDifference profile={line.profile} stated={line.statedGirth} />
           <LineEnds ends={line.ends} />

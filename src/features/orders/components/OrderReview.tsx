@@ -1,12 +1,16 @@
 import { useTranslation } from 'react-i18next'
+import { sumPrices } from '#shared/pricing/price-line'
 import { girthDifference } from '#shared/profile/stated-girth'
 import { useEndWords } from '@/features/ends/useEndWords'
 import { useUnits } from '@/features/people/useUnits'
+import { PriceTotal } from '@/features/prices/components/PriceTotal'
+import { useQuote } from '@/features/prices/useQuote'
 import { GoodsList } from '@/features/roof-line/components/GoodsList'
 import { useFormats } from '@/lib/format/useFormats'
 import { usePlanWords } from '@/features/drawing/usePlanWords'
 import type { DraftLine, OrderDraft } from '../draft/order-draft'
 import { bendsNowhere, checkLine, type LineGround } from '../form/check-line'
+import { lineToPrice } from '../form/line-to-price'
 
 interface Props {
   readonly draft: OrderDraft
@@ -22,6 +26,11 @@ export function OrderReview({ draft: { lines, goods }, ground }: Props) {
   const { count } = useFormats()
   const { checks } = usePlanWords()
   const checked = lines.map((line) => ({ line, answer: checkLine(line, ground) }))
+  const quote = useQuote()
+  const priced = checked.map(({ line, answer }) => ({
+    line,
+    price: quote(lineToPrice(line, answer))?.price ?? null,
+  }))
   const pieces = lines.reduce((sum, { quantity }) => sum + (quantity ?? 0), 0)
   const pounds = checked.reduce(
     (sum, { line, answer }) =>
@@ -52,6 +61,12 @@ export function OrderReview({ draft: { lines, goods }, ground }: Props) {
           weight: weight(pounds),
         })}
       </p>
+      {lines.length > 0 && (
+        <PriceTotal
+          cents={sumPrices(priced.map(({ price }) => price))}
+          without={priced.filter(({ price }) => price === null).map(({ line }) => line.mark)}
+        />
+      )}
       {goods.length > 0 && (
         <div>
           <h4 className="text-small text-scribe">{t('goods:title')}</h4>

@@ -53,6 +53,7 @@ export function RunRow({ run, first }: Props) {
             ? t(mine ? 'queue.yours' : 'queue.taken', { name: run.claimedBy.name })
             : run.brakeName}
         </p>
+        {run.sameStock && <p className="text-small font-semibold">{t('queue.sameStock')}</p>}
       </div>
       <Figure label={t('queue.strip')} value={size(run.strip.stripWidth, 32)} large={first} />
       <Figure

@@ -13,6 +13,7 @@ import { OverrideNote } from '@/features/orders/components/OverrideNote'
 import { PieceCodes } from '@/features/orders/components/PieceCodes'
 import { LineReasons } from '@/features/orders/components/RefusedLines'
 import { GirthDifference } from '@/features/orders/components/StatedGirth'
+import { LinePriceView } from '@/features/prices/components/LinePriceView'
 import { StockName } from '@/features/orders/components/StockName'
 
 /** A line as it is checked at the counter: the drawing beside what it takes and what bends it. */
@@ -47,6 +48,7 @@ export function CounterLine({
         <div className="flex flex-col gap-3">
           <StockName stock={stock} />
           <LineFacts strip={strip} pieceWeight={line.pieceWeight} quantity={quantity} />
+          <LinePriceView quote={line} />
           <GirthDifference profile={line.profile} stated={line.statedGirth} />
           <LineEnds ends={line.ends} />
           <BendsLine

@@ -5,6 +5,7 @@ import { NeededBy } from '@/features/orders/components/NeededBy'
 import { OrderStateWord } from '@/features/orders/components/OrderStateWord'
 import { PieceProgress } from '@/features/orders/components/PieceProgress'
 import { useUnits } from '@/features/people/useUnits'
+import { OrderPriceTotal } from '@/features/prices/components/OrderPriceTotal'
 import { useFormats } from '@/lib/format/useFormats'
 
 /** Who ordered what for when, and how far it is. */
@@ -40,6 +41,7 @@ export function OrderSummaryPanel({ order }: { readonly order: Order }) {
           {weight(total)}
         </Fact>
       </dl>
+      <OrderPriceTotal order={order} />
       {order.notes !== '' && (
         <div>
           <h2 className="text-small text-scribe">{t('order.notes')}</h2>

@@ -9,9 +9,11 @@ import { paths } from '@/app/paths'
 import { EmptyState } from '@/components/EmptyState'
 import { ActionButton } from '@/features/drawing/panels/ActionButton'
 import { DrawingBoard } from '@/features/drawing/DrawingBoard'
+import { completeEnds } from '@/features/ends/model/draft-end'
 import { useBoard } from '@/features/drawing/useBoard'
 import { nextMark, PLAIN_LINE } from '@/features/orders/draft/order-draft'
 import type { OrderDraftHandle } from '@/features/orders/draft/useOrderDraft'
+import { useQuote } from '@/features/prices/useQuote'
 import { StockSelect } from '@/features/stocks/StockSelect'
 import { newKey } from '@/lib/api/idempotency'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
@@ -55,6 +57,19 @@ export function BoardScreen({ start, draft, job, stocks, brakes, orderId }: Prop
     name: shelfName ?? t('newName'),
   })
 
+  const quote = useQuote()
+  const pieceLength = line?.length ?? USUAL_LENGTH
+  const priceOf = (drawn: Profile) => {
+    const ends = line?.ends ? completeEnds(line.ends) : null
+    if (!stock || (line?.ends && !ends)) return null
+    return quote({
+      profile: drawn,
+      stockId: stock.id,
+      quantity: line?.quantity ?? 1,
+      length: pieceLength,
+      ends,
+    })
+  }
   const pitch = `${job.pitchRise}/12`
   const frame = {
     title: line?.name ?? shelfName ?? t('title'),
@@ -86,7 +101,8 @@ export function BoardScreen({ start, draft, job, stocks, brakes, orderId }: Prop
         dispatch={dispatch}
         stock={stock}
         stockSelect={<StockSelect stocks={stocks} value={stock.id} onChange={setStockId} />}
-        pieceLength={line?.length ?? USUAL_LENGTH}
+        pieceLength={pieceLength}
+        priceOf={priceOf}
         brakes={brakes}
         pitchRise={job.pitchRise}
         finish={{ label: t('finish'), onPress: () => void navigate(toOrder) }}

@@ -22,6 +22,7 @@ import { WithdrawDialog } from '@/features/orders/components/WithdrawDialog'
 import { useOrderDraft } from '@/features/orders/draft/useOrderDraft'
 import { draftOfOrder } from '@/features/orders/form/order-body'
 import { useMay, usePerson } from '@/features/people/person-context'
+import { OrderPriceTotal } from '@/features/prices/components/OrderPriceTotal'
 import { useFormats } from '@/lib/format/useFormats'
 import { NotFoundPage } from '@/pages/not-found/NotFoundPage'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
@@ -156,6 +157,7 @@ function OrderHead({ order }: { readonly order: Order }) {
           </div>
         ))}
       </dl>
+      <OrderPriceTotal order={order} />
       {order.notes !== '' && <p className="whitespace-pre-line">{order.notes}</p>}
       <Link
         to={paths.roof.job(order.job.id)}
