@@ -20,6 +20,7 @@ const BY_CONSTRAINT: Record<string, Refusal> = {
   people_email_unique: taken('email', 'an account with this mail address'),
   stocks_unique: taken('colorName', 'this metal in this thickness and color'),
   brakes_name_unique: taken('name', 'a brake of this name'),
+  shelf_profiles_name_unique: taken('name', 'a profile of this name on this shelf'),
   orders_job_of_company: () =>
     invalidField('jobId', 'This job belongs to another company. Choose a job of the own company.'),
   orders_one_end: () => wrongState('The order was released or withdrawn meanwhile.'),

@@ -17,6 +17,7 @@ import * as accounts from '#migrations/0015_accounts'
 import * as auditLog from '#migrations/0016_audit_log'
 import * as priceBooks from '#migrations/0017_price_books'
 import * as stockItems from '#migrations/0018_stock_items'
+import * as shelfVersions from '#migrations/0019_shelf_versions'
 
 interface NamedMigration {
   readonly name: string
@@ -46,6 +47,7 @@ const MIGRATIONS: readonly NamedMigration[] = [
   { name: '0016_audit_log', migration: auditLog },
   { name: '0017_price_books', migration: priceBooks },
   { name: '0018_stock_items', migration: stockItems },
+  { name: '0019_shelf_versions', migration: shelfVersions },
 ]
 
 export const migrationSource: Knex.MigrationSource<NamedMigration> = {

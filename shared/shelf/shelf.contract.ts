@@ -16,6 +16,16 @@ export const shelfProfileSchema = z.strictObject({
   updatedAt: momentSchema,
 })
 
+/** How a company's saved profile was at a version; the latest is the one on the shelf. */
+export const shelfVersionSchema = z.strictObject({
+  version: z.int(),
+  name: z.string(),
+  profile: profileSchema,
+  /** Null where it was not noted yet. */
+  savedBy: z.string().nullable(),
+  savedAt: momentSchema,
+})
+
 export const listShelf = endpoint({
   method: 'GET',
   path: '/profiles',
@@ -44,10 +54,21 @@ export const updateShelfProfile = endpoint({
   method: 'PUT',
   path: '/profiles/:profileId',
   permission: 'shelf.write',
-  summary: 'Change a profile of the own shelf. Ordered copies stay as they are.',
+  summary:
+    'Change a profile of the own shelf: a new version. The old ones and ordered copies stay as they are.',
   params: idParams('profileId'),
   body: z.strictObject({ version: z.int(), name: textField(80), profile: profileSchema }),
   answer: shelfProfileSchema,
 })
 
+export const listShelfVersions = endpoint({
+  method: 'GET',
+  path: '/profiles/:profileId/versions',
+  permission: 'shelf.read',
+  summary: 'Every version of a saved profile, the latest first; none of a starter.',
+  params: idParams('profileId'),
+  answer: z.strictObject({ items: z.array(shelfVersionSchema) }),
+})
+
+export type ShelfVersion = z.infer<typeof shelfVersionSchema>
 export type ShelfProfile = z.infer<typeof shelfProfileSchema>

@@ -48,6 +48,7 @@ import type { RunInsert, RunRow, RunUpdate } from './runs'
 import type { SessionRow } from './sessions'
 import type { ShelfProfileInsert, ShelfProfileRow, ShelfProfileUpdate } from './shelf-profiles'
 import type { StockItemInsert, StockItemRow } from './stock-items'
+import type { ShelfVersionRow } from './shelf-versions'
 import type { StockInsert, StockRow, StockUpdate } from './stocks'
 import type { TestBendInsert, TestBendRow, TestBendUpdate } from './test-bends'
 
@@ -72,6 +73,7 @@ declare module 'knex/types/tables' {
     brakes: Knex.CompositeTableType<BrakeRow, BrakeInsert, BrakeUpdate>
     jobs: Knex.CompositeTableType<JobRow, JobInsert, JobUpdate>
     shelf_profiles: Knex.CompositeTableType<ShelfProfileRow, ShelfProfileInsert, ShelfProfileUpdate>
+    shelf_versions: ShelfVersionRow
     orders: Knex.CompositeTableType<OrderRow, OrderInsert, OrderUpdate>
     order_lines: Knex.CompositeTableType<OrderLineRow, OrderLineInsert, OrderLineUpdate>
     order_events: Knex.CompositeTableType<OrderEventRow, OrderEventInsert>

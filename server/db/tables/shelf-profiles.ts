@@ -8,6 +8,8 @@ export interface ShelfProfileRow {
   /** A Profile; parsed with profileSchema when read. */
   profile: unknown
   version: number
+  /** Null for starters, and where it was not noted yet. */
+  saved_by: string | null
   updated_at: Date
 }
 /** JSON columns are written as text. */
@@ -15,6 +17,7 @@ export type ShelfProfileInsert = Pick<ShelfProfileRow, 'company_id' | 'starter_k
   id?: string
   profile: string
   version?: number
+  saved_by?: string
   updated_at?: Date
 }
 export type ShelfProfileUpdate = Partial<ShelfProfileInsert>

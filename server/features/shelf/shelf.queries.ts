@@ -1,6 +1,16 @@
 import type { Db } from '#server/db/knex'
+import { PEOPLE } from '#server/db/tables/people'
+import { SHELF_VERSIONS } from '#server/db/tables/shelf-versions'
 import { profileSchema } from '#shared/profile/profile.schema'
-import type { ShelfProfile } from '#shared/shelf/shelf.contract'
+import type { ShelfProfile, ShelfVersion } from '#shared/shelf/shelf.contract'
+
+interface VersionRow {
+  version: number
+  name: string
+  profile: unknown
+  saved_by_name: string | null
+  saved_at: Date
+}
 
 interface ShelfRow {
   id: string
@@ -43,6 +53,22 @@ export const createShelfQueries = (db: Db) => {
         's.company_id is not null, c.name, lower(s.name), s.id',
       )
       return rows.map(toShelfProfile)
+    },
+
+    /** The latest first. */
+    async listVersions(id: string): Promise<ShelfVersion[]> {
+      const rows = await db(`${SHELF_VERSIONS} as v`)
+        .leftJoin(`${PEOPLE} as p`, 'p.id', 'v.saved_by')
+        .where('v.profile_id', id)
+        .orderBy('v.version', 'desc')
+        .select<VersionRow[]>('v.*', 'p.name as saved_by_name')
+      return rows.map((row) => ({
+        version: row.version,
+        name: row.name,
+        profile: profileSchema.parse(row.profile),
+        savedBy: row.saved_by_name,
+        savedAt: row.saved_at.toISOString(),
+      }))
     },
 
     async findShelfProfile(id: string, scope: string | null): Promise<ShelfProfile | undefined> {

@@ -12,6 +12,7 @@ import type { Profile } from '#shared/profile/profile.schema'
 import type {
   createShelfProfile,
   ShelfProfile,
+  ShelfVersion,
   updateShelfProfile,
 } from '#shared/shelf/shelf.contract'
 
@@ -44,19 +45,30 @@ export const createShelfService = (deps: ShelfDeps) => {
   return {
     listShelf: (person: SignedIn) => queries.listShelf(companyScope(person)),
 
-    /** @throws profile-problem */
+    /** The latest first; starters have none. */
+    async listVersions(id: string, person: SignedIn): Promise<ShelfVersion[]> {
+      await getShelfProfile(id, person)
+      return queries.listVersions(id)
+    },
+
+    /** @throws profile-problem, invalid-input naming `name` where the shelf has it already */
     async createShelfProfile(
       body: BodyOf<typeof createShelfProfile>,
       person: SignedIn,
     ): Promise<ShelfProfile> {
       const companyId = await owningCompany(body.companyId, person)
       checkProfile(body.profile)
-      const id = await store.createShelfProfile(companyId, body)
+      const id = await store.createShelfProfile(companyId, { ...body, savedBy: person.id })
       await tell(id, companyId)
       return getShelfProfile(id, person)
     },
 
-    /** @throws not-allowed for a starter, profile-problem, changed-meanwhile with the profile now */
+    /**
+     * Makes a new version; the old ones stay.
+     *
+     * @throws not-allowed for a starter, profile-problem, invalid-input naming `name` where another
+     * profile of the shelf has it, changed-meanwhile with the profile now
+     */
     async updateShelfProfile(
       id: string,
       body: BodyOf<typeof updateShelfProfile>,
@@ -67,7 +79,12 @@ export const createShelfService = (deps: ShelfDeps) => {
         throw notAllowed('Starters stay as they are. Save a copy on a shelf and change that.')
       }
       checkProfile(body.profile)
-      const changed = await store.updateShelfProfile(id, body.version, body, clock.now())
+      const changed = await store.updateShelfProfile(
+        id,
+        body.version,
+        { ...body, savedBy: person.id },
+        clock.now(),
+      )
       const profile = await getShelfProfile(id, person)
       if (!changed) throw changedMeanwhile(profile)
       await tell(id, company.id)
