@@ -1,5 +1,11 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { createShelfProfile, listShelf, shelfProfileSchema } from '#shared/shelf/shelf.contract'
+import {
+  createShelfProfile,
+  listShelf,
+  listShelfVersions,
+  shelfProfileSchema,
+  updateShelfProfile,
+} from '#shared/shelf/shelf.contract'
 import { createSavedProfile, zProfile } from '../../support/shop-factories'
 import { openShop, type Shop } from '../../support/shop-scene'
 
@@ -50,7 +56,8 @@ describe('Putting a profile on the shelf', () => {
     expect(without.problem().errors).toMatchObject([{ path: 'companyId' }])
     const companyId = shop.otherCrew.companyId
     expect((await shop.crew.agent.post('/profiles', { ...body, companyId })).status).toBe(404)
-    expect((await shop.counter.post('/profiles', { ...body, companyId })).status).toBe(201)
+    const ordered = { ...body, name: 'Drawn at the counter', companyId }
+    expect((await shop.counter.post('/profiles', ordered)).status).toBe(201)
   })
 
   it('refuses what no sheet could be bent to, naming the leg', async () => {
@@ -67,6 +74,74 @@ describe('Putting a profile on the shelf', () => {
     const answer = await shop.crew.agent.post('/profiles', { name: 'Garbage', profile })
     expect(answer.status).toBe(400)
     expect(answer.problem().errors).toMatchObject([{ path: 'profile.colorSide' }])
+  })
+})
+
+describe('A name on the shelf', () => {
+  const body = { name: 'Porch drip', profile: zProfile([3, 2, 1]) }
+
+  it('stands there once, whatever its case, and is free on another company’s', async () => {
+    await shop.crew.agent.call(createShelfProfile, { body })
+    const again = await shop.crew.agent.post('/profiles', { ...body, name: 'PORCH drip' })
+    expect(again.status).toBe(400)
+    expect(again.problem().errors).toMatchObject([{ path: 'name' }])
+    expect((await shop.otherCrew.agent.post('/profiles', body)).status).toBe(201)
+  })
+
+  it('is not taken over from another profile by a change', async () => {
+    const other = await createSavedProfile(shop.db, { companyId: shop.crew.companyId })
+    const answer = await shop.crew.agent.put(`/profiles/${other}`, { ...body, version: 1 })
+    expect(answer.status).toBe(400)
+    expect(answer.problem().errors).toMatchObject([{ path: 'name' }])
+  })
+})
+
+describe('Versions of a saved profile', () => {
+  const versionsOf = async (profileId: string, agent = shop.crew.agent) =>
+    (await agent.call(listShelfVersions, { params: { profileId } })).items
+
+  it('all stay as they were saved, the latest first, with who saved them', async () => {
+    const { agent, lead } = shop.crew
+    const first = { name: 'Barn eave', profile: zProfile([3, 2, 1]) }
+    const second = { name: 'Barn eave, deep', profile: zProfile([3, 4, 1]) }
+    const saved = await agent.call(createShelfProfile, { body: first })
+    const params = { profileId: saved.id }
+    await agent.call(updateShelfProfile, { params, body: { ...second, version: 1 } })
+    const versions = await versionsOf(saved.id)
+    expect(versions).toMatchObject([
+      { ...second, version: 2, savedBy: lead.name },
+      { ...first, version: 1, savedBy: lead.name },
+    ])
+    // An old one is taken up again as a new one.
+    const body = { name: second.name, profile: first.profile, version: 2 }
+    await agent.call(updateShelfProfile, { params, body })
+    expect((await versionsOf(saved.id)).map(({ version, profile }) => [version, profile])).toEqual([
+      [3, first.profile],
+      [2, second.profile],
+      [1, first.profile],
+    ])
+  })
+
+  it('are the shop’s to see too, and nobody else’s', async () => {
+    const saved = await createSavedProfile(shop.db, { companyId: shop.crew.companyId })
+    expect(await versionsOf(saved, shop.counter)).toMatchObject([{ version: 1, savedBy: null }])
+    expect((await shop.otherCrew.agent.get(`/profiles/${saved}/versions`)).status).toBe(404)
+  })
+
+  it('are none of a starter', async () => {
+    expect(await versionsOf(starter)).toEqual([])
+  })
+
+  it('cannot be changed, not even by hand', async () => {
+    const change = () => shop.db('shelf_versions').update({ name: 'Another' })
+    await expect(change()).rejects.toMatchObject({ code: 'FY004' })
+    await expect(shop.db('shelf_versions').delete()).rejects.toMatchObject({ code: 'FY004' })
+  })
+
+  it('cannot be written over: a change without a new version is refused', async () => {
+    const id = await createSavedProfile(shop.db, { companyId: shop.crew.companyId })
+    const change = shop.db('shelf_profiles').where({ id }).update({ name: 'In silence' })
+    await expect(change).rejects.toMatchObject({ constraint: 'shelf_versions_pkey' })
   })
 })
 
@@ -100,13 +175,17 @@ describe('Changing a profile of the shelf', () => {
     expect(items.find(({ id }) => id === starter)?.name).toBe('Z closure')
   })
 
-  it('does not reach an order that was drawn from it', async () => {
+  it('does not reach an order that was drawn from it, released or not', async () => {
     const id = await createSavedProfile(shop.db, { companyId: shop.crew.companyId })
     const { items } = await shop.crew.agent.call(listShelf)
     const saved = items.find((item) => item.id === id)
     const order = await shop.submit([shop.line({ profile: saved?.profile })])
-    const answer = await shop.crew.agent.put(`/profiles/${id}`, { ...changed, version: 1 })
-    expect(answer.status).toBe(200)
+    const body = { ...changed, name: 'Drawn from', version: 1 }
+    expect((await shop.crew.agent.put(`/profiles/${id}`, body)).status).toBe(200)
     expect(await shop.readOrder(order.id)).toEqual(order)
+    const released = await shop.release(order)
+    const again = { ...body, profile: zProfile([1, 6, 1]), version: 2 }
+    expect((await shop.crew.agent.put(`/profiles/${id}`, again)).status).toBe(200)
+    expect(await shop.readOrder(order.id)).toEqual(released)
   })
 })
