@@ -1,3 +1,5 @@
+import { randomUUID } from 'node:crypto'
+import { invitePerson } from '#shared/people/accounts.contract'
 import { createShelfProfile } from '#shared/shelf/shelf.contract'
 import type { Order } from '#shared/orders/order.schema'
 import { askAboutOrder, submitOrder, withdrawOrder } from '#shared/orders/orders.contract'
@@ -12,6 +14,8 @@ export interface Holdings {
   readonly companyId: string
   readonly companyName: string
   readonly leadName: string
+  /** Invited, and without a password yet. */
+  readonly personId: string
   readonly jobId: string
   readonly profileId: string
   /** Submitted, and free to be changed. */
@@ -41,7 +45,8 @@ export async function createHoldings(floor: Floor, crew: Crew): Promise<Holdings
     body: { name: `Roof of ${crew.lead.name}`, address: '', pitchRise: 6 },
   })
   const saved = await agent.call(createShelfProfile, {
-    body: { name: `Drawn by ${crew.lead.name}`, profile: zProfile() },
+    // A name stands once on a shelf.
+    body: { name: `${randomUUID()} of ${crew.lead.name}`, profile: zProfile() },
   })
   const submit = () =>
     agent.call(submitOrder, { body: { ...orderInput([floor.line()]), jobId: job.id } })
@@ -60,6 +65,14 @@ export async function createHoldings(floor: Floor, crew: Crew): Promise<Holdings
   const code = firstCode(released)
   const bundle = await floor.bundle(released, await floor.bendAll(released))
   const piece = await floor.readPiece(code)
+  const invited = await agent.call(invitePerson, {
+    body: {
+      name: `Called by ${crew.lead.name}`,
+      email: `${randomUUID()}@example.com`,
+      role: 'crewLead',
+      language: 'en',
+    },
+  })
   const print = await floor.counter.call(printLabels, {
     body: { of: { kind: 'order', orderId: released.id } },
   })
@@ -67,6 +80,7 @@ export async function createHoldings(floor: Floor, crew: Crew): Promise<Holdings
     companyId: crew.companyId,
     companyName: job.company.name,
     leadName: crew.lead.name,
+    personId: invited.id,
     jobId: job.id,
     profileId: saved.id,
     order,
@@ -89,6 +103,7 @@ export const marksOf = (holdings: Holdings): string[] => [
   holdings.companyId,
   holdings.companyName,
   holdings.leadName,
+  holdings.personId,
   holdings.jobId,
   holdings.profileId,
   holdings.order.id,

@@ -9,6 +9,8 @@ import { getJob, listJobs } from '#shared/jobs/jobs.contract'
 import type { Order } from '#shared/orders/order.schema'
 import { listOrders } from '#shared/orders/orders.contract'
 import { getPiece, undoMoves } from '#shared/pieces/pieces.contract'
+import { listMails } from '#shared/mail/mail.contract'
+import { listCrew } from '#shared/people/accounts.contract'
 import { getSession } from '#shared/people/people.contract'
 import { listShelf } from '#shared/shelf/shelf.contract'
 import { recordTestBend } from '#shared/stock/stock.contract'
@@ -34,6 +36,7 @@ function nowhere(holdings: Holdings): Holdings {
   return {
     ...holdings,
     companyId: randomUUID(),
+    personId: randomUUID(),
     jobId: randomUUID(),
     profileId: randomUUID(),
     order: never(holdings.order),
@@ -51,6 +54,7 @@ function nowhere(holdings: Holdings): Holdings {
  * holdings, one variant for each state it can be in. `shop` is common to all companies.
  */
 const TAKEN_FROM: Record<string, 'shop' | ((from: Holdings) => Partial<Holdings>[])> = {
+  personId: ({ personId }) => [{ personId }],
   jobId: ({ jobId }) => [{ jobId }],
   orderId: ({ order, asked, withdrawn, released }) =>
     [order, asked, withdrawn, released].map((each) => ({
@@ -84,14 +88,25 @@ const ofLine = ({ order, lineId }: Holdings): Request => ({
 
 /** A request that its owner may make, for everything a crew lead may do by an id or a code. */
 const REQUESTS: Record<string, (own: Holdings) => Request> = {
+  'POST /people': ({ companyId }) => ({
+    body: {
+      name: 'Odo Fernhill',
+      email: `${randomUUID()}@example.com`,
+      role: 'crewLead',
+      language: 'en',
+      companyId,
+    },
+  }),
+  'POST /people/:personId/invitation': ({ personId }) => ({ params: { personId } }),
   'POST /jobs': ({ companyId }) => ({ body: { ...job, companyId } }),
   'GET /jobs/:jobId': ({ jobId }) => ({ params: { jobId } }),
   'PATCH /jobs/:jobId': ({ jobId }) => ({ params: { jobId }, body: { version: 1, name: 'Mine' } }),
   'POST /profiles': ({ companyId }) => ({ body: { ...drawn, companyId } }),
   'PUT /profiles/:profileId': ({ profileId }) => ({
     params: { profileId },
-    body: { ...drawn, version: 1 },
+    body: { ...drawn, name: `Rake ${profileId}`, version: 1 },
   }),
+  'GET /profiles/:profileId/versions': ({ profileId }) => ({ params: { profileId } }),
   'GET /orders': ({ jobId }) => ({ query: `?jobId=${jobId}` }),
   'POST /orders': ({ jobId }) => ({ body: { ...input(), jobId } }),
   'GET /orders/:orderId': ({ order }) => ({ params: { orderId: order.id } }),
@@ -107,6 +122,7 @@ const REQUESTS: Record<string, (own: Holdings) => Request> = {
     params: { orderId: id },
     body: { version, reason: 'Not needed.' },
   }),
+  'GET /orders/:orderId/order-sheet.pdf': ({ order }) => ({ params: { orderId: order.id } }),
   'GET /orders/:orderId/lines/:lineId/strip-sheet.pdf': ofLine,
   'GET /orders/:orderId/lines/:lineId/ends.pdf': ofLine,
   'GET /orders/:orderId/lines/:lineId/strip.svg': ofLine,
@@ -209,6 +225,7 @@ async function readByOwner(): Promise<unknown> {
     job: await agent.call(getJob, { params: { jobId: foreign.jobId } }),
     jobs: await agent.call(listJobs),
     shelf: await agent.call(listShelf),
+    crew: await agent.call(listCrew),
     orders: await agent.call(listOrders),
     piece: await agent.call(getPiece, { params: { code: foreign.code } }),
   }
@@ -216,7 +233,10 @@ async function readByOwner(): Promise<unknown> {
 
 describe('what the shop alone may do', () => {
   let bendId: string
+  let mailId: string
   beforeAll(async () => {
+    const mails = await floor.manager.call(listMails)
+    mailId = at(mails.items, 0).id
     const { items } = await floor.manager.call(listBrakes)
     const { bends } = await floor.wren.call(recordTestBend, {
       params: { stockId: floor.stockId },
@@ -227,6 +247,9 @@ describe('what the shop alone may do', () => {
 
   /** By the place of the id in the path; the shop's endpoints name no other things there. */
   const theirParams = (endpoint: Endpoint): Record<string, string> => ({
+    personId: foreign.personId,
+    mailId,
+    position: '1',
     orderId: foreign.order.id,
     runId: foreign.runId,
     bundleId: foreign.bundleId,
@@ -237,6 +260,9 @@ describe('what the shop alone may do', () => {
     code: endpoint.path.startsWith('/bundles') ? foreign.bundleCode : foreign.code,
   })
   const unknownParams = {
+    personId: randomUUID(),
+    mailId: randomUUID(),
+    position: '1',
     orderId: randomUUID(),
     runId: randomUUID(),
     bundleId: randomUUID(),
@@ -276,9 +302,9 @@ describe('lists', () => {
       const byOwner = await read(floor.otherCrew.agent)
       if (marks.some((mark) => byOwner.includes(mark))) limited.push(endpoint.path)
     }
-    // The others are the shop's own: stocks and brakes.
+    // The others are the shop's own: stocks, brakes and prices.
     expect(limited.sort()).toEqual(
-      [getSession, listJobs, listOrders, listShelf].map(({ path }) => path).sort(),
+      [getSession, listCrew, listJobs, listOrders, listShelf].map(({ path }) => path).sort(),
     )
   })
 
