@@ -3,7 +3,7 @@ import type { Sheet } from '#shared/stock/stock.schema'
 import type { BendShape } from '#shared/strip/bend-allowance'
 import { bendAllowance, outsideSetback } from '#shared/strip/bend-allowance'
 import type { Fold } from '#shared/strip/strip.schema'
-import type { Inches } from '#shared/units/brands'
+import type { Degrees, Inches } from '#shared/units/brands'
 
 /** What unfolding needs to know of a sheet. */
 export type FoldingSheet = Pick<Sheet, 'thickness' | 'insideRadius' | 'kFactor'>
@@ -36,24 +36,37 @@ export interface FlatParts {
  */
 export const hemRadius = (hem: Hem): Inches => (hem.style === 'closed' ? 0 : hem.gap / 2)
 
-const flatFold = (fold: Fold, bend: BendShape): FlatFold => ({
-  ...bend,
-  fold,
-  allowance: bendAllowance(bend),
-  setback: outsideSetback(bend),
-})
+const flatFold = (
+  fold: Fold,
+  turn: Degrees,
+  insideRadius: Inches,
+  thickness: Inches,
+  kFactor: number,
+): FlatFold => {
+  const bend = { turn, insideRadius, thickness, kFactor }
+  return {
+    turn,
+    insideRadius,
+    thickness,
+    kFactor,
+    fold,
+    allowance: bendAllowance(bend),
+    setback: outsideSetback(bend),
+  }
+}
 
 /**
  * A hem counts as a bend of 180 towards its lip. A closed one has K = 0.5, which gives the shop's
  * old rule by itself: 2 T - π T / 2 = 0.43 T off the sum.
  */
 const hemFold = (fold: 'hemA' | 'hemB', hem: Hem, sheet: FoldingSheet): FlatFold =>
-  flatFold(fold, {
-    turn: 180 * hem.turn,
-    insideRadius: hemRadius(hem),
-    thickness: sheet.thickness,
-    kFactor: hem.style === 'closed' ? 0.5 : sheet.kFactor,
-  })
+  flatFold(
+    fold,
+    180 * hem.turn,
+    hemRadius(hem),
+    sheet.thickness,
+    hem.style === 'closed' ? 0.5 : sheet.kFactor,
+  )
 
 /**
  * Cuts a profile into its flat runs and bend zones, from edge A to edge B. Each outside dimension
@@ -64,28 +77,24 @@ const hemFold = (fold: 'hemA' | 'hemB', hem: Hem, sheet: FoldingSheet): FlatFold
  * which `profileProblems` reports.
  */
 export const flatParts = (profile: Profile, sheet: FoldingSheet): FlatParts => {
-  const { hemA, hemB } = profile
-  const folds = [
-    ...(hemA ? [hemFold('hemA', hemA, sheet)] : []),
-    ...profile.bends.map((bend, index) =>
-      flatFold(index + 1, {
-        turn: bend.turn,
-        insideRadius: sheet.insideRadius,
-        thickness: sheet.thickness,
-        kFactor: sheet.kFactor,
-      }),
-    ),
-    ...(hemB ? [hemFold('hemB', hemB, sheet)] : []),
-  ]
-  const dimensions: { of: FlatRun['of']; outside: Inches }[] = [
-    ...(hemA ? [{ of: 'lipA' as const, outside: hemA.length }] : []),
-    ...profile.legs.map((outside, index) => ({ of: index + 1, outside })),
-    ...(hemB ? [{ of: 'lipB' as const, outside: hemB.length }] : []),
-  ]
-  const runs = dimensions.map(({ of, outside }, index) => {
-    const before = folds[index - 1]?.setback ?? 0
-    const after = folds[index]?.setback ?? 0
-    return { of, outside, straight: outside - before - after }
+  const { hemA, hemB, legs, bends } = profile
+  const { thickness, insideRadius, kFactor } = sheet
+  // Asked for while a finger drags a corner: plain loops, nothing made that is not kept.
+  const folds: FlatFold[] = []
+  if (hemA) folds.push(hemFold('hemA', hemA, sheet))
+  bends.forEach(({ turn }, index) => {
+    folds.push(flatFold(index + 1, turn, insideRadius, thickness, kFactor))
   })
+  if (hemB) folds.push(hemFold('hemB', hemB, sheet))
+
+  const runs: FlatRun[] = []
+  const addRun = (of: FlatRun['of'], outside: Inches) => {
+    const before = folds[runs.length - 1]?.setback ?? 0
+    const after = folds[runs.length]?.setback ?? 0
+    runs.push({ of, outside, straight: outside - before - after })
+  }
+  if (hemA) addRun('lipA', hemA.length)
+  legs.forEach((outside, index) => addRun(index + 1, outside))
+  if (hemB) addRun('lipB', hemB.length)
   return { runs, folds }
 }
