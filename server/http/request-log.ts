@@ -6,7 +6,11 @@ import { pinoHttp } from 'pino-http'
 
 export const REQUEST_ID_HEADER = 'X-Request-Id'
 
-const pathOf = (url: string | undefined): string => (url ?? '').split('?', 1)[0] ?? ''
+/** Links that set a password carry their token in the path. */
+const TOKEN_PATH = /^\/(welcome|reset)\/.*/
+
+const pathOf = (url: string | undefined): string =>
+  ((url ?? '').split('?', 1)[0] ?? '').replace(TOKEN_PATH, '/$1/…')
 
 /**
  * One line for each request, under the id that a problem answer carries as `requestId`. No headers,

@@ -11,8 +11,9 @@ const LOOK_EVERY_MS = 5_000
 const START_AGAIN_MS = 5_000
 
 /**
- * Runs jobs within this process; any number of processes share the work. A worker that ends by
- * itself, as when the database goes away, is started again.
+ * Runs jobs within this process; any number of processes share the work. Installs the queue's tables
+ * where they are not there yet. A worker that ends by itself, as when the database goes away, is
+ * started again.
  */
 export async function startJobs({ databaseUrl, tasks, logger }: JobsDeps): Promise<RunningJobs> {
   const closing = new AbortController()
@@ -29,27 +30,33 @@ export async function startJobs({ databaseUrl, tasks, logger }: JobsDeps): Promi
       taskList: workerTasks(tasks, logger),
     })
 
-  let runner: Runner | undefined = await start()
-
-  const keepRunning = async (): Promise<void> => {
-    while (!closing.signal.aborted) {
-      try {
-        runner ??= await start()
-        await runner.promise
-      } catch (error) {
-        if (!closing.signal.aborted) logger.error({ err: error }, 'the jobs stopped')
-      }
-      runner = undefined
-      await delay(START_AGAIN_MS, undefined, { signal: closing.signal }).catch(endOfWait)
+  /** Until the worker ends, or is told to. */
+  const runUntilEnd = async (runner: Runner): Promise<void> => {
+    const stop = () => void runner.stop().catch(told)
+    closing.signal.addEventListener('abort', stop)
+    if (closing.signal.aborted) stop()
+    try {
+      await runner.promise
+    } finally {
+      closing.signal.removeEventListener('abort', stop)
     }
   }
-  const kept = keepRunning()
+
+  const told = (error: unknown) => logger.error({ err: error }, 'the jobs stopped')
+
+  const keepRunning = async (first: Runner): Promise<void> => {
+    await runUntilEnd(first).catch(told)
+    while (!closing.signal.aborted) {
+      await delay(START_AGAIN_MS, undefined, { signal: closing.signal }).catch(endOfWait)
+      if (!closing.signal.aborted) await start().then(runUntilEnd).catch(told)
+    }
+  }
+  const kept = keepRunning(await start())
 
   return {
-    close: async () => {
+    close: () => {
       closing.abort()
-      await runner?.stop()
-      await kept
+      return kept
     },
   }
 }

@@ -19,6 +19,8 @@ export const paths = {
   landing: () => '/',
   signIn: () => '/sign-in',
   account: () => '/account',
+  crew: () => '/account/crew',
+  forgotPassword: () => '/forgot-password',
   place: (place: Place) => `/${place}`,
   /** The history of a piece, shown within the place one stands in. */
   piece: (place: Place, code: string) => `/${place}/pieces/${encodeURIComponent(code)}`,
@@ -67,5 +69,8 @@ export const paths = {
     stock: (stockId: string) => `/office/stocks/${stockId}`,
     brakes: () => '/office/brakes',
     people: () => '/office/people',
+    mails: () => '/office/mails',
+    mail: (mailId: string) => `/office/mails/${mailId}`,
+    audit: () => '/office/audit',
   },
 } as const

@@ -15,6 +15,23 @@ import { PlaceRoute } from '@/pages/shell/PlaceRoute'
 /** Every place is guarded by the table of places; its pages are loaded when somebody goes there. */
 export const routes: RouteObject[] = [
   {
+    // Who comes by a link in a mail is not signed in yet.
+    errorElement: <ErrorPage />,
+    hydrateFallbackElement: <LoadingPage />,
+    children: [
+      ...['/welcome/:token', '/reset/:token'].map((path) => ({
+        path,
+        ...lazyPage(async () => (await import('@/pages/sign-in/SetPasswordPage')).SetPasswordPage),
+      })),
+      {
+        path: '/forgot-password',
+        ...lazyPage(
+          async () => (await import('@/pages/sign-in/ForgotPasswordPage')).ForgotPasswordPage,
+        ),
+      },
+    ],
+  },
+  {
     element: <SignedInRoot />,
     errorElement: <ErrorPage />,
     hydrateFallbackElement: <LoadingPage />,
@@ -37,6 +54,10 @@ export const routes: RouteObject[] = [
               {
                 index: true,
                 ...lazyPage(async () => (await import('@/pages/account/AccountPage')).AccountPage),
+              },
+              {
+                path: 'crew',
+                ...lazyPage(async () => (await import('@/pages/account/CrewPage')).CrewPage),
               },
             ],
           },

@@ -39,10 +39,9 @@ export async function listAudit(
   if (start !== null) void query.where('a.id', '<', start)
   if (kind !== undefined) void query.where('a.subject_kind', kind)
   if (person !== undefined) {
-    void query.where((either) =>
-      either
-        .where('a.person_id', person)
-        .orWhere((about) => about.where('a.subject_kind', 'person').where('a.subject_id', person)),
+    void query.whereRaw(
+      "(a.person_id = :person or (a.subject_kind = 'person' and a.subject_id = :person))",
+      { person },
     )
   }
   return toPage(await query, limit, toEntry, (row) => row.id)

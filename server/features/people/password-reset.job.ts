@@ -26,7 +26,7 @@ export const createPasswordResetJob =
     const { email } = payloadSchema.parse(payload)
     await inTransaction(db, async (trx) => {
       const account = await findActiveAccount(trx, email)
-      if (account?.passwordHash == null) return
+      if (!account || account.passwordHash === null) return
       await mailPasswordReset(trx, account.person, ports)
     })
   }

@@ -12,6 +12,8 @@ export function OfficeNav() {
         { to: paths.office.stocks(), label: t('nav.stocks') },
         { to: paths.office.brakes(), label: t('nav.brakes') },
         { to: paths.office.people(), label: t('nav.people') },
+        { to: paths.office.mails(), label: t('nav.mails') },
+        { to: paths.office.audit(), label: t('nav.audit') },
       ]}
     />
   )

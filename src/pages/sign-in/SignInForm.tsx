@@ -1,7 +1,9 @@
 import { zodResolver } from '@hookform/resolvers/zod'
 import { useForm } from 'react-hook-form'
 import { useTranslation } from 'react-i18next'
+import { Link } from 'react-router-dom'
 import { signIn, type Self } from '#shared/people/people.contract'
+import { paths } from '@/app/paths'
 import { Button } from '@/components/Button'
 import { ErrorNotice } from '@/components/ErrorNotice'
 import { TextField } from '@/components/TextField'
@@ -48,6 +50,9 @@ export function SignInForm({ email, onSignedIn }: Props) {
       <Button type="submit" variant="primary" pending={isPending}>
         {t('submit')}
       </Button>
+      <Link className="flex min-h-target items-center self-start" to={paths.forgotPassword()}>
+        {t('forgot')}
+      </Link>
     </form>
   )
 }

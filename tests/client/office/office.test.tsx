@@ -78,10 +78,12 @@ describe('people', () => {
               role: 'crewLead',
               company: { id: OTHER_ORDER_ID, name: 'Tamsin & Reed Roofing' },
               active: false,
+              invited: false,
               lastSignInAt: null,
             },
           ],
         }),
+      'GET /api/companies': () => json({ items: [] }),
     })
     renderApp('/office/people')
     const row = (await screen.findAllByRole('row')).at(-1)
@@ -96,6 +98,7 @@ describe('people', () => {
       'pell@example.com',
       'never',
       'closed',
+      'Open again',
     ])
   })
 })
