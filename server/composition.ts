@@ -20,7 +20,6 @@ import { mailRoutes } from '#server/features/mail/mail.routes'
 import { createMailsService } from '#server/features/mail/mails.service'
 import { createOrderMails } from '#server/features/mail/order-mails'
 import { createSendMail } from '#server/features/mail/send-mail'
-import { createStripSheetsOfOrder } from '#server/features/mail/strip-sheets-of-order'
 import {
   createOrderPlanningOn,
   createOrdersServiceOn,
@@ -85,7 +84,10 @@ export function compose(ports: Ports): Composition {
   const mailPorts: MailPorts = { clock, publicUrl: ports.publicUrl, enqueue: enqueueMail }
   const orderMailsOn = (db: Db) => createOrderMails(db, { ...mailPorts, drawCode: newCode })
   const draw = {
-    drawings: createDrawOrder(createStripSheetsOfOrder({ clock, shopTimeZone })),
+    drawings: createDrawOrder(async (db, orderId, reader) => {
+      const sheets = createSheetsService(db, { clock, shopTimeZone })
+      return [await sheets.orderSheet(orderId, { paper: 'letter' }, reader)]
+    }),
     slip: drawSlip,
   }
   return {

@@ -13,6 +13,15 @@ const hand = sideSchema.optional()
 const sheetQuery = z.strictObject({ hand, paper: paperSchema.default('letter') })
 const drawingQuery = z.strictObject({ hand })
 
+export const orderSheet = fileEndpoint({
+  path: '/orders/:orderId/order-sheet.pdf',
+  permission: 'orders.read',
+  summary: 'The order sheet: what was ordered, every line drawn and dimensioned, with cautions.',
+  params: z.strictObject({ orderId: z.uuid() }),
+  query: z.strictObject({ paper: paperSchema.default('letter') }),
+  produces: 'application/pdf',
+})
+
 export const orderStripSheet = fileEndpoint({
   path: '/orders/:orderId/lines/:lineId/strip-sheet.pdf',
   permission: 'orders.read',

@@ -12,6 +12,7 @@ export const PAGE_SIZES = {
 export interface PageHead {
   /** What the paper is: `Strip sheet`. */
   readonly title: string
+  /** Of the line; empty where the sheet is of more than one. */
   readonly mark: string
   readonly name: string
   /** Whose it is. */
@@ -47,8 +48,7 @@ export function drawPageFrame(pdf: Pdf, size: PageSize, head: PageHead): void {
   const right = size.width - MARGIN
   drawOrder(pdf, head, right)
   const handLeft = drawHand(pdf, head, right - ORDER_WIDTH)
-  const markWidth = drawMark(pdf, head)
-  const x = MARGIN + markWidth + GAP
+  const x = head.mark === '' ? MARGIN : MARGIN + drawMark(pdf, head) + GAP
   const width = handLeft - GAP - x
   const nameStyle = { font: 'wordsBold', size: 17, color: INK.ink } as const
   pdf.element('H1', () =>

@@ -18,20 +18,41 @@ export interface SheetPaper {
 /** Draws what stands between head and foot of one page. */
 export type SheetPage = (pdf: Pdf) => void
 
+/** What stands at the head of all pages of a sheet; `title` is the file's. */
+export interface SheetHead {
+  readonly title: string
+  readonly head: Omit<PageHead, 'page' | 'foot'>
+}
+
 /** A PDF of pages with the same head, each told its number of all. `plan` may measure text. */
-export async function drawSheetPages(
-  piece: SheetPiece,
-  speech: SheetSpeech,
-  { paper, language, at, day, title }: SheetPaper & { readonly title: string },
+export async function drawHeadedPages(
+  { title, head }: SheetHead,
+  { words }: Pick<SheetSpeech, 'words'>,
+  { paper, language, at, day }: SheetPaper,
   plan: (pdf: Pdf, body: Box) => readonly SheetPage[],
 ): Promise<Uint8Array<ArrayBuffer>> {
-  const { line, hand } = piece
-  const { words } = speech
   const size = PAGE_SIZES[paper]
-  const order = orderNumber(line.orderNumber)
-  const pdf = new Pdf({ title: `${title} ${order} ${line.mark}`, language, at })
+  const pdf = new Pdf({ title, language, at })
   const pages = plan(pdf, bodyOf(size))
-  const head: Omit<PageHead, 'page'> = {
+  const foot = `Foldyard · ${words.printed(day)}`
+  for (const [index, draw] of pages.entries()) {
+    pdf.addPage(size)
+    drawPageFrame(pdf, size, { ...head, foot, page: words.page(index + 1, pages.length) })
+    draw(pdf)
+  }
+  return pdf.finish()
+}
+
+/** The pages of a sheet of one piece. */
+export function drawSheetPages(
+  { line, hand }: SheetPiece,
+  speech: SheetSpeech,
+  { title, ...paper }: SheetPaper & { readonly title: string },
+  plan: (pdf: Pdf, body: Box) => readonly SheetPage[],
+): Promise<Uint8Array<ArrayBuffer>> {
+  const { words } = speech
+  const order = orderNumber(line.orderNumber)
+  const head = {
     title,
     order,
     mark: line.mark,
@@ -39,12 +60,6 @@ export async function drawSheetPages(
     owner: `${line.job} · ${line.company}`,
     poNumber: line.poNumber === '' ? '' : words.poNumber(line.poNumber),
     hand: hand && { letter: HAND_LETTERS[hand], word: words.hand[hand] },
-    foot: `Foldyard · ${words.printed(day)}`,
   }
-  for (const [index, draw] of pages.entries()) {
-    pdf.addPage(size)
-    drawPageFrame(pdf, size, { ...head, page: words.page(index + 1, pages.length) })
-    draw(pdf)
-  }
-  return pdf.finish()
+  return drawHeadedPages({ title: `${title} ${order} ${line.mark}`, head }, speech, paper, plan)
 }

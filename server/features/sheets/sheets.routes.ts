@@ -3,6 +3,7 @@ import type { SheetsService } from '#server/features/sheets/sheets.service'
 import { defineRoute, type Route } from '#server/http/define-route'
 import {
   orderEndTemplates,
+  orderSheet,
   orderStripDxf,
   orderStripSheet,
   orderStripSvg,
@@ -11,6 +12,9 @@ import {
 } from '#shared/sheets/sheets.contract'
 
 export const sheetsRoutes = (make: (db: Db) => SheetsService): Route[] => [
+  defineRoute(orderSheet, ({ db, params, query, person }) =>
+    make(db).orderSheet(params.orderId, query, person),
+  ),
   defineRoute(orderStripSheet, ({ db, params, query, person }) =>
     make(db).stripSheet(params, query, person),
   ),

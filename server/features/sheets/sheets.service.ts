@@ -2,6 +2,9 @@ import type { Clock } from '#server/adapters/clock'
 import { companyScope } from '#server/db/company-scope'
 import type { Db } from '#server/db/knex'
 import { drawEndTemplates } from '#server/features/sheets/end-templates'
+import { orderPdf } from '#server/features/sheets/order-sheet/order-pdf'
+import { orderSpeech } from '#server/features/sheets/order-sheet/order-speech'
+import { findPrintedOrder } from '#server/features/sheets/order-sheet/printed-order.queries'
 import { sheetPiece, type SheetLine, type SheetPiece } from '#server/features/sheets/sheet-line'
 import type { SheetPaper } from '#server/features/sheets/sheet-pages'
 import { findOrderLine, findRunLine } from '#server/features/sheets/sheets.queries'
@@ -38,6 +41,12 @@ export interface SheetsService {
   readonly endTemplates: Draw<Printed>
   readonly stripSvg: Draw<Wish>
   readonly stripDxf: Draw<Wish>
+  /** The whole order, every line drawn. */
+  readonly orderSheet: (
+    orderId: string,
+    wish: { readonly paper: Paper },
+    person: SignedIn,
+  ) => Promise<FileAnswer>
 }
 
 export interface SheetsPorts {
@@ -86,6 +95,14 @@ export const createSheetsService = (db: Db, ports: SheetsPorts): SheetsService =
       const section = foldedSection(profile, stock.sheet)
       const text = toDxf({ layout: piece.layout, strip, section })
       return { name: fileName(piece, 'strip.dxf'), bytes: utf8(text) }
+    },
+
+    orderSheet: async (orderId, { paper }, person) => {
+      const order = await findPrintedOrder(db, orderId, companyScope(person))
+      if (!order) throw notFound('order')
+      const speech = orderSpeech(person, ports.shopTimeZone)
+      const bytes = await orderPdf(order, speech, paperOf(paper, person))
+      return { name: `${orderNumber(order.number)}-order.pdf`, bytes }
     },
   }
 }

@@ -2,6 +2,7 @@ import type { ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { Order } from '#shared/orders/order.schema'
 import { NeededBy } from '@/features/orders/components/NeededBy'
+import { OrderSheetLink } from '@/features/orders/components/OrderSheetLink'
 import { OrderStateWord } from '@/features/orders/components/OrderStateWord'
 import { PieceProgress } from '@/features/orders/components/PieceProgress'
 import { useUnits } from '@/features/people/useUnits'
@@ -48,6 +49,7 @@ export function OrderSummaryPanel({ order }: { readonly order: Order }) {
           <p className="whitespace-pre-line">{order.notes}</p>
         </div>
       )}
+      <OrderSheetLink orderId={order.id} />
     </div>
   )
 }

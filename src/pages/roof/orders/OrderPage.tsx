@@ -15,6 +15,7 @@ import { OrderCaution } from '@/features/orders/components/OrderCaution'
 import { OrderGoods } from '@/features/orders/components/OrderGoods'
 import { OrderHistory } from '@/features/orders/components/OrderHistory'
 import { OrderLineCard } from '@/features/orders/components/OrderLineCard'
+import { OrderSheetLink } from '@/features/orders/components/OrderSheetLink'
 import { OrderStateWord } from '@/features/orders/components/OrderStateWord'
 import { PieceProgress } from '@/features/orders/components/PieceProgress'
 import { QuestionAnswer } from '@/features/orders/components/QuestionAnswer'
@@ -165,6 +166,7 @@ function OrderHead({ order }: { readonly order: Order }) {
       >
         {t('head.toJob', { job: order.job.name })}
       </Link>
+      <OrderSheetLink orderId={order.id} />
     </div>
   )
 }
