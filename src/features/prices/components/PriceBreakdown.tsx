@@ -56,17 +56,21 @@ export function PriceBreakdown({ price }: { readonly price: LinePrice }) {
       <caption className="sr-only">{t('breakdown')}</caption>
       <tbody>
         {rows.map(({ label, detail, cents, sum = false }) => (
-          <tr
-            key={label}
-            className={`border-b border-rule align-baseline ${sum ? 'font-semibold' : ''}`}
-          >
-            <th scope="row" className="py-1 pr-4 text-left font-[inherit]">
+          <tr key={label} className="border-b border-rule align-baseline">
+            <th
+              scope="row"
+              className={`py-1 pr-4 text-left ${sum ? 'font-semibold' : 'font-normal'}`}
+            >
               {label}
               {detail !== undefined && (
                 <span className="block text-small font-normal text-scribe">{detail}</span>
               )}
             </th>
-            <td className="py-1 text-right font-figure whitespace-nowrap">{money(cents)}</td>
+            <td
+              className={`py-1 text-right font-figure whitespace-nowrap ${sum ? 'font-semibold' : ''}`}
+            >
+              {money(cents)}
+            </td>
           </tr>
         ))}
       </tbody>

@@ -54,18 +54,16 @@ export function StockItems({ stockId }: { readonly stockId: string }) {
   return (
     <section className="flex flex-col gap-3">
       <h2 className="text-title font-bold">{t('title')}</h2>
-      <div className="overflow-x-auto">
-        <DataTable
-          caption={t('title')}
-          captionHidden
-          rows={data?.items}
-          columns={columns}
-          rowId={({ id }) => id}
-          error={error}
-          onRetry={() => void refetch()}
-          empty={<EmptyState title={t('empty')} hint={t('emptyHint')} />}
-        />
-      </div>
+      <DataTable
+        caption={t('title')}
+        captionHidden
+        rows={data?.items}
+        columns={columns}
+        rowId={({ id }) => id}
+        error={error}
+        onRetry={() => void refetch()}
+        empty={<EmptyState title={t('empty')} hint={t('emptyHint')} />}
+      />
     </section>
   )
 }
