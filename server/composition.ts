@@ -19,6 +19,7 @@ import { enqueueMail, type MailPorts } from '#server/features/mail/mail-ports'
 import { mailRoutes } from '#server/features/mail/mail.routes'
 import { createMailsService } from '#server/features/mail/mails.service'
 import { createOrderMails } from '#server/features/mail/order-mails'
+import { createOrderSheetForMail } from '#server/features/mail/order-sheet-for-mail'
 import { createSendMail } from '#server/features/mail/send-mail'
 import {
   createOrderPlanningOn,
@@ -84,10 +85,7 @@ export function compose(ports: Ports): Composition {
   const mailPorts: MailPorts = { clock, publicUrl: ports.publicUrl, enqueue: enqueueMail }
   const orderMailsOn = (db: Db) => createOrderMails(db, { ...mailPorts, drawCode: newCode })
   const draw = {
-    drawings: createDrawOrder(async (db, orderId, reader) => {
-      const sheets = createSheetsService(db, { clock, shopTimeZone })
-      return [await sheets.orderSheet(orderId, { paper: 'letter' }, reader)]
-    }),
+    drawings: createDrawOrder(createOrderSheetForMail({ clock, shopTimeZone })),
     slip: drawSlip,
   }
   return {

@@ -6,7 +6,7 @@ import { drawSlip } from '#server/features/mail/draw-slip'
 import type { MailPorts } from '#server/features/mail/mail-ports'
 import { createOrderMails, type OrderMails } from '#server/features/mail/order-mails'
 import { createSendMail } from '#server/features/mail/send-mail'
-import { createStripSheetsOfOrder } from '#server/features/mail/strip-sheets-of-order'
+import { createOrderSheetForMail } from '#server/features/mail/order-sheet-for-mail'
 import { createAccountsService } from '#server/features/people/accounts.service'
 import { createDemoRandom } from './demo-random'
 import { DEMO_PEOPLE } from './people'
@@ -24,7 +24,7 @@ export function demoMailPorts(db: Db, clock: Clock): MailPorts {
     clock,
     transport: localCatcher(),
     draw: {
-      drawings: createDrawOrder(createStripSheetsOfOrder({ clock, shopTimeZone: 'UTC' })),
+      drawings: createDrawOrder(createOrderSheetForMail({ clock, shopTimeZone: 'UTC' })),
       slip: drawSlip,
     },
   })
