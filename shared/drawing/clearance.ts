@@ -110,15 +110,23 @@ export const metalOf = (lines: readonly Segment[], half: number): Metal =>
     half,
   )
 
-/** The same for one open chain. */
-export const metalOfChain = (points: readonly Vector[], half: number): Metal => {
-  const chords = new Float64Array(Math.max(0, points.length - 1) * 4)
+/** The same for one open chain, with some lines that lead off it. */
+export const metalOfChain = (
+  points: readonly Vector[],
+  half: number,
+  spurs: readonly Segment[] = [],
+): Metal => {
+  const count = Math.max(0, points.length - 1)
+  const chords = new Float64Array((count + spurs.length) * 4)
   for (let index = 1; index < points.length; index += 1) {
     const from = points[index - 1]
     const to = points[index]
     if (from === undefined || to === undefined) break
     chords.set([from.x, from.y, to.x, to.y], (index - 1) * 4)
   }
+  spurs.forEach(({ from, to }, index) => {
+    chords.set([from.x, from.y, to.x, to.y], (count + index) * 4)
+  })
   return metalOfChords(chords, half)
 }
 

@@ -16,6 +16,9 @@ export interface Measured {
 /** How far the extension lines run past the dimension line. */
 const OVERSHOOT = 4
 
+/** Room between a dimension line and its number. */
+const TEXT_GAP = 3
+
 /** Half the length of the slash at the end of a dimension line. */
 const TICK = 3.5
 
@@ -88,9 +91,18 @@ class NumbersAlong implements Stream<PlacedLabel> {
     this.index += 1
     this.least = this.index < ALONG.length ? least + ASIDE : Infinity
     if (along === undefined) return undefined
-    const x = leg.from.x + (leg.to.x - leg.from.x) * along + normal.x * offset
-    const y = leg.from.y + (leg.to.y - leg.from.y) * along + normal.y * offset
+    const aside = offset + (isDimension ? this.pastExtensions(along) : 0)
+    const x = leg.from.x + (leg.to.x - leg.from.x) * along + normal.x * aside
+    const y = leg.from.y + (leg.to.y - leg.from.y) * along + normal.y * aside
     return textAt(space, leg.text, space.pen.text, x, y, lines, isDimension, least)
+  }
+
+  /** How much further out a number stands that reaches over an end of its dimension line. */
+  private pastExtensions(along: number): number {
+    const { leg, normal, space } = this
+    const length = Math.hypot(leg.to.x - leg.from.x, leg.to.y - leg.from.y)
+    const half = reachOfText(leg.text, space.pen.text, normal.y, normal.x)
+    return Math.min(along, 1 - along) * length > half + 1 ? 0 : OVERSHOOT + 1 - TEXT_GAP
   }
 }
 
@@ -106,7 +118,7 @@ export class DimensionAt extends NumbersAlong {
     cost: number,
   ) {
     const reach = reachOfText(leg.text, space.pen.text, normal.x, normal.y)
-    super(space, leg, normal, line + reach + OVERSHOOT + 1, cost)
+    super(space, leg, normal, line + reach + TEXT_GAP, cost)
   }
 
   override next(): PlacedLabel | undefined {

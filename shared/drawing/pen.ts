@@ -23,11 +23,13 @@ export const halfWeight = (pen: Pen): number => pen.metal / 2 + Math.max(pen.pai
 /** A pen for a frame; `textSize` overrules the type size that the frame would get. */
 export const penFor = (width: number, height: number, textSize?: number): Pen => {
   const reach = Math.min(width, height * 1.3)
-  const metal = within(1.6, reach / 115, 5.5)
+  // In a frame of a few pixels even the finest pen would be too broad.
+  const finest = Math.min(1, reach / 40)
+  const metal = within(1.6 * finest, reach / 115, 5.5)
   return {
     metal,
-    paint: within(1.2, metal, 5.5),
-    bare: within(0.8, metal * 0.5, 3),
+    paint: within(1.2 * finest, metal, 5.5),
+    bare: within(0.8 * finest, metal * 0.5, 3),
     hairline: 1,
     text: textSize ?? within(10, reach / 26, 22),
   }

@@ -1,5 +1,6 @@
 import type { Bounds } from '#shared/geometry/bounds'
 import { heightOf, middleOf, widthOf } from '#shared/geometry/bounds'
+import type { Segment } from '#shared/geometry/segment'
 import type { Vector } from '#shared/geometry/vector'
 import { between, distance, radians, rotate, vector } from '#shared/geometry/vector'
 import type { Profile } from '#shared/profile/profile.schema'
@@ -77,6 +78,21 @@ const chordsOf = (
   scale: number,
   toFrame: (point: Vector) => Point,
 ): Point[] => offsetChain(walked, 0, { maxStep: 60, tolerance: 0.4 / scale }).map(toFrame)
+
+/**
+ * Where a bend is tighter than its bands are wide, the inner band runs out to a point between the
+ * legs: a line to there.
+ */
+const spursOf = (
+  walked: readonly WalkedPart[],
+  half: number,
+  toFrame: (point: Vector) => Point,
+): Segment[] =>
+  walked.flatMap((part) => {
+    if (part.kind !== 'round' || part.arc.radius >= half) return []
+    const inside = offsetChain([part], half * Math.sign(part.turn), { maxStep: 180, tolerance: 1 })
+    return inside.map((tip) => ({ from: toFrame(part.mid), to: toFrame(tip) }))
+  })
 
 const flatnessAt = (scale: number) => ({ maxStep: 12, tolerance: 0.08 / scale })
 
@@ -165,7 +181,11 @@ export const placeSection = (
     pen,
     parts: () => (drawn ??= drawnParts(walked, scale, (pieces) => chainOf(pieces, 0))),
     middle: { x: origin.x + middle.x * scale, y: origin.y - middle.y * scale },
-    metal: metalOfChain(chordsOf(walked, scale, transform.toFrame), halfWeight(pen)),
+    metal: metalOfChain(
+      chordsOf(walked, scale, transform.toFrame),
+      halfWeight(pen),
+      spursOf(walked, halfWeight(pen) / scale, transform.toFrame),
+    ),
     chain: (left) => chainOf(walked, left),
   }
 }

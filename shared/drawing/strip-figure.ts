@@ -7,9 +7,10 @@ import { isSamePart } from './display-list'
 import type { Pen } from './pen'
 import { penFor } from './pen'
 import type { FigureLabels } from './section-figure'
-import { runningDimensions } from './strip-dimensions'
+import type { RunningMark } from './strip-dimensions'
+import { runningDimensions, someRunningDimensions } from './strip-dimensions'
 import { hatch, letter, path, text } from './strip-items'
-import { textWidth } from './text-box'
+import { TEXT_HEIGHT, textWidth } from './text-box'
 
 export interface StripOptions {
   readonly width: number
@@ -40,6 +41,8 @@ export interface StripFigure {
   readonly findFlat: (point: Point) => Part | undefined
   /** Legs whose length found no room; they stand in the section's dimensions. */
   readonly leftOut: readonly Part[]
+  /** Running distances that found no room; the caller prints them as a table. */
+  readonly unmarked: readonly RunningMark[]
 }
 
 /** A flat part between two creases, or between a crease and an edge. */
@@ -82,27 +85,80 @@ interface StripPlace {
   readonly scale: number
   readonly sheet: Bounds
   readonly toX: (at: number) => number
+  /** Half the size of the triangles; 0 where there is no room for any. */
   readonly arrow: number
+  readonly isLettered: boolean
 }
 
-const placeStrip = (strip: Strip, options: StripOptions): StripPlace => {
+/** How tall the strip of a layout is drawn, in lines of text and in parts of the frame. */
+interface Tallness {
+  readonly lines: number
+  readonly share: number
+}
+
+const placeStrip = (strip: Strip, options: StripOptions, layout?: Tallness): StripPlace => {
   const { width, height } = options
   const text = options.textSize ?? Math.min(16, Math.max(9, Math.min(width / 28, height / 4)))
   const pen = { ...penFor(width, height), text }
-  const arrow = Math.max(4, text * 0.42)
-  const side = text * 2
+  const wanted = Math.max(4, text * 0.42)
+  const arrow = height >= wanted * 7 && width >= wanted * 8 ? wanted : 0
+  const above = arrow === 0 ? Math.min(2, height / 4) : arrow * 2 + 3
+  const tall = layout
+    ? Math.min(text * layout.lines, height * layout.share)
+    : Math.min(height - 2 * above, text * 4)
+  const top = layout ? above : (height - tall) / 2
+  const aroundLetter = text * LETTER_SHARE + 1
+  const middle = top + tall / 2
+  const isLettered = width >= text * 8 && middle >= aroundLetter && height - middle >= aroundLetter
+  const side = isLettered ? text * 2 : Math.min(arrow + 2, width / 4)
   const scale = (width - 2 * side) / Math.max(strip.stripWidth, 1e-6)
-  const isLayout = options.mode === 'layout'
-  const above = arrow * 2 + 3
-  const tall = isLayout ? Math.min(text * 3, height * 0.3) : Math.min(height - 2 * above, text * 4)
-  const top = isLayout ? above : (height - tall) / 2
   return {
     pen,
     scale,
     arrow,
+    isLettered,
     toX: (at) => side + at * scale,
     sheet: { minX: side, maxX: width - side, minY: top, maxY: top + tall },
   }
+}
+
+/** The radius of a letter's circle in parts of the type size. */
+const LETTER_SHARE = 0.6
+
+interface LaidStrip {
+  readonly place: StripPlace
+  readonly dimensions: readonly DisplayItem[]
+  readonly unmarked: readonly RunningMark[]
+}
+
+/** With a tall sheet first: its numbers may need the room of a lower one. */
+const TALLNESSES: readonly Tallness[] = [
+  { lines: 3, share: 0.3 },
+  { lines: 1.8, share: 0.2 },
+]
+
+const dimensionRoom = (place: StripPlace, options: StripOptions) => ({
+  toX: place.toX,
+  top: place.sheet.maxY + place.arrow + 4,
+  frame: { minX: 2, minY: 0, maxX: options.width - 2, maxY: options.height - 1 },
+  text: place.pen.text,
+  length: options.labels.length,
+})
+
+const layOut = (strip: Strip, options: StripOptions): LaidStrip => {
+  if (options.mode !== 'layout') {
+    return { place: placeStrip(strip, options), dimensions: [], unmarked: [] }
+  }
+  const places = TALLNESSES.map((tallness) => placeStrip(strip, options, tallness))
+  for (const step of [1, 0.85, 0.7, 0.55]) {
+    for (const place of places) {
+      const dimensions = runningDimensions(strip, dimensionRoom(place, options), step)
+      if (dimensions) return { place, dimensions, unmarked: [] }
+    }
+  }
+  const place = places.at(-1) ?? placeStrip(strip, options)
+  const { items, leftOut } = someRunningDimensions(strip, dimensionRoom(place, options))
+  return { place, dimensions: items, unmarked: leftOut }
 }
 
 /**
@@ -111,7 +167,7 @@ const placeStrip = (strip: Strip, options: StripOptions): StripPlace => {
  * are hatched. Lengths stand in their parts and are left out where they do not fit.
  */
 export const stripFigure = (profile: Profile, strip: Strip, options: StripOptions): StripFigure => {
-  const place = placeStrip(strip, options)
+  const { place, dimensions, unmarked } = layOut(strip, options)
   const flats = flatsOf(profile, strip)
   const numbers = flats.map((flat) =>
     numberOf(flat, place, options, isSelected(flat.part, options)),
@@ -133,17 +189,13 @@ export const stripFigure = (profile: Profile, strip: Strip, options: StripOption
     { ...path('metal', corners, 1.5), closed: true },
     ...strip.creases.flatMap((crease) => drawCrease(crease, place, options)),
     ...numbers.flatMap((number) => number ?? []),
-    ...letter('A', { x: sheet.minX - pen.text, y: middle }, pen.text * 0.85),
-    ...letter('B', { x: sheet.maxX + pen.text, y: middle }, pen.text * 0.85),
-    ...(options.mode === 'layout'
-      ? runningDimensions(strip, {
-          toX,
-          top: sheet.maxY + place.arrow + 4,
-          frame: { minX: 2, minY: 0, maxX: options.width - 2, maxY: options.height - 1 },
-          text: pen.text,
-          length: options.labels.length,
-        })
+    ...(place.isLettered
+      ? [
+          ...letter('A', { x: sheet.minX - pen.text, y: middle }, pen.text * 0.85),
+          ...letter('B', { x: sheet.maxX + pen.text, y: middle }, pen.text * 0.85),
+        ]
       : []),
+    ...dimensions,
     ...(options.targets
       ? [...flats.map((flat) => flatTarget(flat, place)), ...creaseTargets(strip, place)]
       : []),
@@ -163,6 +215,7 @@ export const stripFigure = (profile: Profile, strip: Strip, options: StripOption
     },
     findFlat: (point) => flats.find((flat) => contains(boxOfFlat(flat, place), point))?.part,
     leftOut: flats.flatMap((flat, index) => (numbers[index] === undefined ? [flat.part] : [])),
+    unmarked,
   }
 }
 
@@ -215,7 +268,12 @@ const numberOf = (
   const { minX, maxX, minY, maxY } = boxOfFlat(flat, place)
   const size = [1, 0.85, 0.7]
     .map((step) => place.pen.text * step)
-    .find((candidate) => candidate >= 7 && textWidth(label, candidate) + 6 <= maxX - minX)
+    .find(
+      (candidate) =>
+        candidate >= 7 &&
+        textWidth(label, candidate) + 6 <= maxX - minX &&
+        candidate * TEXT_HEIGHT + 2 <= maxY - minY,
+    )
   if (size === undefined || flat.part.kind === 'hem') return undefined
   const at = { x: (minX + maxX) / 2, y: (minY + maxY) / 2 }
   return text(isChosen ? 'selected' : 'dimensionText', label, at, size, flat.part, isChosen)
@@ -230,33 +288,28 @@ const drawCrease = (crease: Crease, place: StripPlace, options: StripOptions): D
   const tip = crease.turn > 0 ? minY - arrow * 1.9 : maxY + arrow * 1.9
   const base = crease.turn > 0 ? minY - 3 : maxY + 3
   const isStrong = role !== 'crease'
+  const line = path(
+    role,
+    [
+      { x, y: minY },
+      { x, y: maxY },
+    ],
+    isStrong ? 3 : 1.5,
+    part,
+  )
+  const triangle = path(
+    role,
+    [
+      { x: x - arrow * 0.8, y: base },
+      { x: x + arrow * 0.8, y: base },
+      { x, y: tip },
+    ],
+    0,
+    part,
+  )
   return [
-    {
-      ...path(
-        role,
-        [
-          { x, y: minY },
-          { x, y: maxY },
-        ],
-        isStrong ? 3 : 1.5,
-        part,
-      ),
-      dash: [5, 4],
-    },
-    {
-      ...path(
-        role,
-        [
-          { x: x - arrow * 0.8, y: base },
-          { x: x + arrow * 0.8, y: base },
-          { x, y: tip },
-        ],
-        0,
-        part,
-      ),
-      closed: true,
-      filled: true,
-    },
+    { ...line, dash: [5, 4] },
+    ...(arrow > 0 ? [{ ...triangle, closed: true, filled: true }] : []),
   ]
 }
 

@@ -3,7 +3,7 @@ import { boxOfText } from '#shared/drawing/text-box'
 import type { Bounds } from '#shared/geometry/bounds'
 import { boundsOf, boxAround, grow, heightOf, holds, overlap } from '#shared/geometry/bounds'
 import { segmentsOf } from '#shared/geometry/polyline'
-import { distanceBetween, distanceToBox } from '#shared/geometry/segment'
+import { distanceBetween, distanceToBox, meetsBox } from '#shared/geometry/segment'
 
 const METAL: readonly Role[] = ['metal', 'paint', 'paintEdge', 'bare']
 
@@ -29,6 +29,11 @@ const labelBoxes = (display: DisplayList): { name: string; box: Bounds }[] =>
     return item.kind === 'circle' ? [{ name: 'letter', box: extentOf(item) }] : []
   })
 
+const textBoxes = (display: DisplayList): { name: string; box: Bounds }[] =>
+  display.items.flatMap((item) =>
+    item.kind === 'text' ? [{ name: item.text, box: boxOfText(item) }] : [],
+  )
+
 const stack = (display: DisplayList, roles: readonly Role[]) =>
   display.items
     .filter(isPath)
@@ -53,6 +58,12 @@ export const figureFaults = (display: DisplayList): string[] => {
   for (const { name, box } of labels) {
     if (metal.some(({ line, half }) => distanceToBox(line, box) < half)) {
       faults.push(`${name} touches the metal`)
+    }
+  }
+  const leads = stack(display, ['dimension', 'edge'])
+  for (const { name, box } of textBoxes(display)) {
+    if (leads.some(({ line }) => meetsBox(line, grow(box, -0.01)))) {
+      faults.push(`${name} lies on a line`)
     }
   }
   for (const dimension of stack(display, ['dimension'])) {

@@ -8,6 +8,7 @@ import { distanceToPath } from '#shared/geometry/polyline'
 import { printAngle } from '#shared/units/angle'
 import { printSize } from '#shared/units/print-length'
 import { profileArbitrary, profileOf, STEEL } from '../../support/arbitrary-profile'
+import { anyProfileArbitrary, frameArbitrary } from './arbitrary-frame'
 import { figureFaults } from './figure-faults'
 import { NAMED_PROFILES } from './named-profiles'
 
@@ -52,12 +53,14 @@ const soundProfile = profileArbitrary.filter(
 const PATIENCE = 60_000
 
 describe('any profile', { timeout: PATIENCE }, () => {
-  it('never sets text on metal, text or the border, not even of a piece that cannot be made', () => {
+  it('never sets text on metal, text, lines or the border at any size, even of a piece that cannot be made', () => {
+    const turn = fc.integer({ min: 0, max: 359 })
     fc.assert(
-      fc.property(profileArbitrary, fc.constantFrom(...SIZES), (profile, [width, height]) => {
-        expect(figureFaults(draw(profile, width, height).display)).toEqual([])
+      fc.property(anyProfileArbitrary, frameArbitrary, turn, (profile, frame, rotation) => {
+        const { display } = sectionFigure(profile, STEEL, { ...frame, labels, rotation })
+        expect(figureFaults(display)).toEqual([])
       }),
-      { seed: 20_260_801, numRuns: 40 },
+      { seed: 20_260_801, numRuns: 150 },
     )
   })
 

@@ -4,11 +4,14 @@ import type { DisplayList } from '#shared/drawing/display-list'
 import { spreadAlong } from '#shared/drawing/strip-dimensions'
 import { stripFigure } from '#shared/drawing/strip-figure'
 import { boxOfText } from '#shared/drawing/text-box'
-import { holds, overlap } from '#shared/geometry/bounds'
+import { grow, holds, overlap } from '#shared/geometry/bounds'
+import { segmentsOf } from '#shared/geometry/polyline'
+import { meetsBox } from '#shared/geometry/segment'
 import { flatStrip } from '#shared/strip/flat-strip'
 import { printAngle } from '#shared/units/angle'
 import { printSize } from '#shared/units/print-length'
 import { STEEL } from '../../support/arbitrary-profile'
+import { anyProfileArbitrary, frameArbitrary } from './arbitrary-frame'
 import { extentOf } from './figure-faults'
 import { NAMED_PROFILES } from './named-profiles'
 
@@ -20,16 +23,24 @@ const labels = {
 const textFaults = (display: DisplayList): string[] => {
   const frame = { minX: 0, minY: 0, maxX: display.width, maxY: display.height }
   const texts = display.items.flatMap((item) => (item.kind === 'text' ? [item] : []))
+  const lines = display.items.flatMap((item) =>
+    item.kind === 'path' && (item.role === 'dimension' || item.role === 'crease')
+      ? segmentsOf(item.points, item.closed)
+      : [],
+  )
   const overlaps = texts.flatMap((a, index) =>
     texts
       .slice(index + 1)
       .filter((b) => overlap(boxOfText(a), boxOfText(b)))
       .map((b) => `${a.text} lies on ${b.text}`),
   )
+  const crossed = texts
+    .filter((item) => lines.some((line) => meetsBox(line, grow(boxOfText(item), -0.01))))
+    .map((item) => `${item.text} lies on a line`)
   const outside = display.items
     .filter((item) => !holds(frame, extentOf(item)))
     .map((item) => `${item.role} ${item.kind} leaves the frame`)
-  return [...overlaps, ...outside]
+  return [...overlaps, ...crossed, ...outside]
 }
 
 describe.each(Object.entries(NAMED_PROFILES))('%s', (_, profile) => {
@@ -55,6 +66,44 @@ describe.each(Object.entries(NAMED_PROFILES))('%s', (_, profile) => {
         : [],
     )
     expect(written).toEqual(strip.creases.map((crease) => labels.length(crease.at)))
+  })
+})
+
+describe('any strip at any size', () => {
+  const mode = fc.constantFrom('plain' as const, 'layout' as const)
+
+  it('keeps its numbers apart, off its lines and in the frame', () => {
+    fc.assert(
+      fc.property(anyProfileArbitrary, frameArbitrary, mode, (profile, frame, shown) => {
+        const strip = flatStrip(profile, STEEL)
+        const { display } = stripFigure(profile, strip, { ...frame, labels, mode: shown })
+        expect(textFaults(display)).toEqual([])
+      }),
+      { seed: 20_260_801, numRuns: 300 },
+    )
+  })
+
+  it('draws or lists the distance of every crease', () => {
+    let listed = 0
+    fc.assert(
+      fc.property(anyProfileArbitrary, frameArbitrary, (profile, frame) => {
+        const strip = flatStrip(profile, STEEL)
+        const { display, unmarked } = stripFigure(profile, strip, {
+          ...frame,
+          labels,
+          mode: 'layout',
+        })
+        const drawn = display.items.filter(
+          (item) =>
+            item.kind === 'text' && (item.part?.kind === 'bend' || item.part?.kind === 'hem'),
+        )
+        const missing = unmarked.filter(({ part }) => part.kind !== 'edge')
+        expect(drawn.length + missing.length).toBe(strip.creases.length)
+        listed += missing.length
+      }),
+      { seed: 20_260_801, numRuns: 200 },
+    )
+    expect(listed).toBeGreaterThan(0)
   })
 })
 
