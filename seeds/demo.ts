@@ -11,6 +11,7 @@ import { STOCKS } from '#server/db/tables/stocks'
 import { DEMO_BRAKES } from '#shared/bend-plan/demo-brakes'
 import { createCalendar, type Calendar } from './demo/calendar'
 import { createDemoRandom, type DemoRandom } from './demo/demo-random'
+import { FIRST_WEEKS } from './demo/first-weeks'
 import { jobRows } from './demo/jobs'
 import { ACCOUNT_STEPS } from './demo/mails'
 import { DEMO_COMPANIES, DEMO_PASSWORD, DEMO_PEOPLE, personRow } from './demo/people'
@@ -19,9 +20,11 @@ import { shelfRows } from './demo/profiles'
 import { createDemoShop } from './demo/shop'
 import { stockItemRows } from './demo/stock-items'
 import { DEMO_STOCKS } from './demo/stocks'
+
 import { STORIES } from './demo/stories'
 import { tellStories } from './demo/tell'
 import { TEST_BEND_STEPS } from './demo/test-bends'
+import { THIS_WEEK } from './demo/this-week'
 
 /** Who can sign in to the demo shop. */
 export const DEMO_ACCOUNTS: readonly {
@@ -48,10 +51,11 @@ export async function seedDemo(db: Knex): Promise<void> {
   const passwordHash = await hashPassword(DEMO_PASSWORD)
   await db.transaction(async (trx) => {
     await insertShop(trx, calendar, random, passwordHash)
-    await tellStories(createDemoShop(trx, calendar, random), STORIES, [
-      ...TEST_BEND_STEPS,
-      ...ACCOUNT_STEPS,
-    ])
+    await tellStories(
+      createDemoShop(trx, calendar, random),
+      [...STORIES, ...FIRST_WEEKS, ...THIS_WEEK],
+      [...TEST_BEND_STEPS, ...ACCOUNT_STEPS],
+    )
   })
 }
 
@@ -61,7 +65,7 @@ async function insertShop(
   random: DemoRandom,
   passwordHash: string,
 ): Promise<void> {
-  const opened = calendar.moment(-12, '13:00')
+  const opened = calendar.moment(-14, '13:00')
   await db(COMPANIES).insert(
     Object.values(DEMO_COMPANIES).map((company) => ({ ...company, created_at: opened })),
   )

@@ -7,6 +7,12 @@ const ofBramblejack = {
   company_id: DEMO_COMPANIES.bramblejack.id,
   created_by: DEMO_PEOPLE.tomas.id,
 }
+const ofPuddlewick = {
+  company_id: DEMO_COMPANIES.puddlewick.id,
+  created_by: DEMO_PEOPLE.corin.id,
+}
+const ofCorcho = { company_id: DEMO_COMPANIES.corcho.id, created_by: DEMO_PEOPLE.rosario.id }
+const ofGander = { company_id: DEMO_COMPANIES.gander.id, created_by: DEMO_PEOPLE.bram.id }
 
 export const DEMO_JOBS = {
   harrow: {
@@ -44,6 +50,48 @@ export const DEMO_JOBS = {
     address: '1 Cobble Hill, Upper Wend',
     pitch_rise: 12,
   },
+  tannery: {
+    ...ofPuddlewick,
+    id: '5f2b8e94-a1c3-4e7d-8f06-93bd41c84406',
+    name: 'Tannery Yard lofts',
+    address: '7 Tannery Yard, Fennwick',
+    pitch_rise: 4,
+  },
+  nettle: {
+    ...ofPuddlewick,
+    id: '5f2b8e94-a1c3-4e7d-8f06-93bd41c84407',
+    name: 'Nettle Court duplex',
+    address: '22 Nettle Court, Upper Wend',
+    pitch_rise: 6,
+  },
+  mirador: {
+    ...ofCorcho,
+    id: '5f2b8e94-a1c3-4e7d-8f06-93bd41c84408',
+    name: 'Casa Mirador',
+    address: '51 Saltmarsh Road, Low Tansley',
+    pitch_rise: 5,
+  },
+  molino: {
+    ...ofCorcho,
+    id: '5f2b8e94-a1c3-4e7d-8f06-93bd41c84409',
+    name: 'Bodega del Molino',
+    address: 'Old Mill Lane, Upper Wend',
+    pitch_rise: 3,
+  },
+  gosling: {
+    ...ofGander,
+    id: '5f2b8e94-a1c3-4e7d-8f06-93bd41c84410',
+    name: 'Gosling Creek farm',
+    address: '900 Creek Road, Fennwick',
+    pitch_rise: 8,
+  },
+  ferry: {
+    ...ofGander,
+    id: '5f2b8e94-a1c3-4e7d-8f06-93bd41c84411',
+    name: 'Ferry House boat shed',
+    address: '3 Ferry Steps, Low Tansley',
+    pitch_rise: 10,
+  },
 } as const satisfies Record<string, JobInsert>
 
 export type DemoJob = keyof typeof DEMO_JOBS
@@ -52,5 +100,5 @@ export type DemoJob = keyof typeof DEMO_JOBS
 export const jobRows = ({ moment }: Calendar): JobInsert[] =>
   Object.values(DEMO_JOBS).map((job, index) => ({
     ...job,
-    created_at: moment(-11, `${13 + index}:20`),
+    created_at: moment(-14, `13:${20 + 2 * index}`),
   }))

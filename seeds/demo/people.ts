@@ -8,6 +8,9 @@ export const DEMO_PASSWORD = 'foldyard-demo'
 export const DEMO_COMPANIES = {
   wicket: { id: '3d1f0a52-6c1e-4b0e-9a57-0c0f5a3e1101', name: 'Wicket & Plume Roofing' },
   bramblejack: { id: '3d1f0a52-6c1e-4b0e-9a57-0c0f5a3e1102', name: 'Bramblejack Roof Crews' },
+  puddlewick: { id: '3d1f0a52-6c1e-4b0e-9a57-0c0f5a3e1103', name: 'Puddlewick Exteriors' },
+  corcho: { id: '3d1f0a52-6c1e-4b0e-9a57-0c0f5a3e1104', name: 'Tejados Luna de Corcho' },
+  gander: { id: '3d1f0a52-6c1e-4b0e-9a57-0c0f5a3e1105', name: 'Old Gander Sheet & Shingle' },
 } as const
 
 const person = (
@@ -30,7 +33,7 @@ const person = (
   theme: role === 'crewLead' ? 'light' : 'system',
 })
 
-/** One person for every role, and a crew lead for each company. */
+/** Somebody for every role, and a crew lead or two for each company. */
 export const DEMO_PEOPLE = {
   maren: person(
     '8b7a4c10-52f9-4d36-8c55-71d20e4f2201',
@@ -64,6 +67,47 @@ export const DEMO_PEOPLE = {
     'Juno Hathersedge',
     'juno@example.com',
     'manager',
+  ),
+  petra: person(
+    '8b7a4c10-52f9-4d36-8c55-71d20e4f2206',
+    'Petra Larkmoor',
+    'petra@example.com',
+    'crewLead',
+    DEMO_COMPANIES.wicket,
+  ),
+  corin: person(
+    '8b7a4c10-52f9-4d36-8c55-71d20e4f2207',
+    'Corin Fernhollow',
+    'corin@example.com',
+    'crewLead',
+    DEMO_COMPANIES.puddlewick,
+  ),
+  rosario: person(
+    '8b7a4c10-52f9-4d36-8c55-71d20e4f2208',
+    'Rosario Vallehondo',
+    'rosario@example.com',
+    'crewLead',
+    DEMO_COMPANIES.corcho,
+    'es',
+  ),
+  bram: person(
+    '8b7a4c10-52f9-4d36-8c55-71d20e4f2209',
+    'Bram Oxenthistle',
+    'bram@example.com',
+    'crewLead',
+    DEMO_COMPANIES.gander,
+  ),
+  oskar: person(
+    '8b7a4c10-52f9-4d36-8c55-71d20e4f2210',
+    'Oskar Tindlebrook',
+    'oskar@example.com',
+    'bender',
+  ),
+  hollis: person(
+    '8b7a4c10-52f9-4d36-8c55-71d20e4f2211',
+    'Hollis Wrenfield',
+    'hollis@example.com',
+    'counter',
   ),
 } as const satisfies Record<string, SignedIn>
 

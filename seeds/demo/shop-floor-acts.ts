@@ -1,7 +1,7 @@
 import { RUNS } from '#server/db/tables/runs'
 import type { Bundle, BundlePiece } from '#shared/bundles/bundles.contract'
 import type { Run } from '#shared/runs/runs.contract'
-import { DEMO_PEOPLE } from './people'
+import { DEMO_PEOPLE, type DemoPerson } from './people'
 import { demoSignature } from './signature'
 import type { Act, Told } from './story'
 
@@ -28,10 +28,10 @@ export const claim =
 
 /** Gives a run that is not finished back to the queue. */
 export const leave =
-  (place: number): Act =>
+  (place: number, by: DemoPerson = 'wren'): Act =>
   async (told) => {
     const run = await getRun(told, place)
-    await told.shop.runs.leaveRun(run.id, wren)
+    await told.shop.runs.leaveRun(run.id, DEMO_PEOPLE[by])
   }
 
 /** Takes the run if need be and bends so many of its pieces, or all that are queued, one by one. */
@@ -41,10 +41,21 @@ export const bend =
     const run = await getRun(told, place)
     if (!run.claimedBy) await told.shop.runs.claimRun(run.id, wren)
     const queued = run.pieces.filter((piece) => piece.state === 'queued')
+    const begun = told.shop.clock.now()
     for (const [index, piece] of queued.slice(0, count).entries()) {
-      told.shop.setTime(minutesAfter(told.now, 4 + 2 * index))
+      told.shop.setTime(minutesAfter(begun, 4 + 2 * index))
       await told.shop.pieces.bendPiece(piece.code, run.id, wren)
     }
+  }
+
+/** Takes the run and bends so many of its pieces, or all, by count. */
+export const bendRun =
+  (place: number, by: DemoPerson = 'wren', count?: number): Act =>
+  async (told) => {
+    const { id, pieces } = await getRun(told, place)
+    const queued = pieces.filter((piece) => piece.state === 'queued').length
+    await told.shop.runs.claimRun(id, DEMO_PEOPLE[by])
+    await told.shop.runs.bendCount(id, { count: count ?? queued }, DEMO_PEOPLE[by])
   }
 
 /** Presses the count instead of scanning. */
@@ -61,7 +72,7 @@ export const bendOneByMistake =
   async (told) => {
     const run = await getRun(told, place)
     const { eventIds } = await told.shop.runs.bendCount(run.id, { count: 1 }, wren)
-    told.shop.setTime(minutesAfter(told.now, 1))
+    told.shop.setTime(minutesAfter(told.shop.clock.now(), 1))
     await told.shop.pieces.undoMoves({ eventIds, reason }, wren)
   }
 

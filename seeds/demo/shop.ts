@@ -34,6 +34,9 @@ import { createDemoReleaseStore } from './release-store'
 /** Ids of test bends are drawn apart, so that they move no code of the pieces. */
 const TEST_BEND_SEED = 20_261
 
+/** Working days before today from which on mails are there: the page of mails was cleared before. */
+const MAILS_SINCE = -1
+
 /** The product's own services under a clock that the seed sets, so that its history obeys every rule. */
 export interface DemoShop {
   readonly db: Db
@@ -49,10 +52,10 @@ export interface DemoShop {
 }
 
 export function createDemoShop(db: Db, calendar: Calendar, random: DemoRandom): DemoShop {
-  let time = calendar.moment(-12, '13:00')
+  let time = calendar.moment(-14, '13:00')
   const clock = { now: () => time }
   const ports = { clock, drawCode: random.drawCode }
-  const mails = createDemoMails(db, clock)
+  const mails = createDemoMails(db, clock, calendar.moment(MAILS_SINCE, '00:00'))
   return {
     db,
     calendar,

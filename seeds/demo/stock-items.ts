@@ -64,6 +64,21 @@ const ITEMS: Partial<Record<DemoStock, readonly Item[]>> = {
     { ...sheets('COP-2209', 36, 120, 11), film: 'none' },
     { ...drop('COP-2209', 'D6', 12.5, 120), film: 'none' },
   ],
+  moss: [
+    coil('MOS-0733', 48, 388, -12),
+    coil('MOS-0760', 24, 520, -2),
+    drop('MOS-0733', 'D7', 13, 126),
+  ],
+  rook: [
+    coil('ROO-0214', 48, 265, -11),
+    sheets('ROO-0209', 48, 126, 9),
+    drop('ROO-0214', 'D8', 8.25, 74),
+  ],
+  foxglove: [{ ...coil('FOX-1508', 48, 150, -10), film: 'bare' }, sheets('FOX-1499', 48, 120, 7)],
+  stainless: [
+    { ...sheets('STA-6120', 36, 120, 8), film: 'none' },
+    { ...drop('STA-6120', 'D9', 10.75, 120), film: 'none' },
+  ],
 }
 
 const isDemoStock = (key: string): key is DemoStock => key in DEMO_STOCKS

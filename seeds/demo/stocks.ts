@@ -16,6 +16,9 @@ import type { StockInsert } from '#server/db/tables/stocks'
  * Widths are those of 48 in. coil and 36 in. copper sheet, lengths what the shop's brakes take:
  * common practice, no source.
  *
+ * Stainless, type 304: thickness of 26 ga and density from memory; K by DIN 6935, half of
+ * 0.65 + 0.5 lg(r/s); springback 90 / 0.975 - 90, the factor from memory.
+ *
  * The T-bend ratings of the paints are invented for the demo, as the paints are: one of them is too
  * brittle for a closed hem.
  */
@@ -41,6 +44,7 @@ const ALUMINUM = {
 } as const
 
 const steel24 = { ...STEEL, thickness_name: '24 ga', thickness: 0.0276 }
+const steel26 = { ...STEEL, thickness_name: '26 ga', thickness: 0.0217 }
 
 export const DEMO_STOCKS = {
   kiln: {
@@ -58,11 +62,9 @@ export const DEMO_STOCKS = {
     color_hex: '#4a5560',
   },
   barley: {
-    ...STEEL,
+    ...steel26,
     id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73303',
     position: 3,
-    thickness_name: '26 ga',
-    thickness: 0.0217,
     color_name: 'Barley 2',
     color_hex: '#cdb98a',
   },
@@ -105,6 +107,49 @@ export const DEMO_STOCKS = {
     k_source: 'handbookHard',
     paint_t_bend: null,
     alloy: 'C110',
+  },
+  moss: {
+    ...steel24,
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73307',
+    position: 7,
+    color_name: 'Moss 9',
+    color_hex: '#4d5b3f',
+  },
+  rook: {
+    ...steel26,
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73308',
+    position: 8,
+    color_name: 'Rook 3',
+    color_hex: '#2f3236',
+  },
+  foxglove: {
+    ...ALUMINUM,
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73309',
+    position: 9,
+    thickness_name: '.032',
+    thickness: 0.032,
+    inside_radius: 0.032,
+    color_name: 'Foxglove 6',
+    color_hex: '#7a4a63',
+  },
+  stainless: {
+    id: 'c4e9d1b6-0f4d-4f6b-9b1e-5a60c2d73310',
+    position: 10,
+    metal: 'stainless',
+    thickness_name: '26 ga',
+    color_name: 'Mill',
+    color_hex: '#b9bdbf',
+    painted: false,
+    thickness: 0.0188,
+    inside_radius: 0.0394,
+    k_factor: 0.405,
+    density: 0.289,
+    springback_per_90: 2.3,
+    widest_strip: 36,
+    longest_piece: 120,
+    k_source: 'din6935',
+    paint_t_bend: null,
+    alloy: '304',
   },
 } as const satisfies Record<string, StockInsert>
 

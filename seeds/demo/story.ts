@@ -50,7 +50,6 @@ export interface ShopStep {
 export interface Told {
   readonly shop: DemoShop
   readonly story: Story
-  readonly now: Date
   readonly getOrder: () => Promise<Order>
   readonly setOrder: (id: string) => void
 }

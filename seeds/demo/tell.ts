@@ -25,7 +25,9 @@ export async function tellStories(
   ]
   happenings.sort((a, b) => a.moment.getTime() - b.moment.getTime())
   for (const { moment, happen } of happenings) {
-    shop.setTime(moment)
+    // What took longer than it was given lets the next thing begin later.
+    const now = shop.clock.now()
+    shop.setTime(moment > now ? moment : now)
     await happen()
   }
 }
@@ -43,8 +45,8 @@ function happeningsOf(shop: DemoShop, story: Story): Happening[] {
       orderId = id
     },
   }
-  return story.steps.map(({ day, time, act }) => {
-    const now = shop.calendar.moment(day, time)
-    return { moment: now, happen: () => act({ ...told, now }) }
-  })
+  return story.steps.map(({ day, time, act }) => ({
+    moment: shop.calendar.moment(day, time),
+    happen: () => act(told),
+  }))
 }

@@ -1,13 +1,15 @@
 import { spawn } from 'node:child_process'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { DEMO_ACCOUNTS, seedDemo } from '#seeds/demo'
-import { DEMO_PASSWORD, DEMO_PEOPLE } from '#seeds/demo/people'
+import { DEMO_COMPANIES, DEMO_PASSWORD, DEMO_PEOPLE } from '#seeds/demo/people'
 import { ROLES } from '#shared/access/permissions'
+import { signatureSchema } from '#shared/hand-off/hand-off.contract'
 import { ORDER_STATES } from '#shared/orders/order.schema'
 import { getOrder, listOrders } from '#shared/orders/orders.contract'
 import { parseCode } from '#shared/pieces/codes'
 import { PIECE_MOVES } from '#shared/pieces/piece-state'
 import { getPriceBook } from '#shared/pricing/pricing.contract'
+import { STARTERS } from '#shared/profile/starters'
 import { getRun } from '#shared/runs/runs.contract'
 import { listStockItems, STOCK_ITEM_KINDS } from '#shared/stock/stock-items.contract'
 import { listStocks, listTestBends } from '#shared/stock/stock.contract'
@@ -41,7 +43,7 @@ function runCommand(verb: string): Promise<{ code: number | null; output: string
 }
 
 describe('The demo shop', () => {
-  it('is small but whole', async () => {
+  it('is a whole shop', async () => {
     const sizes = Object.fromEntries(
       await Promise.all(
         ['companies', 'people', 'stocks', 'brakes', 'jobs', 'orders', 'shelf_profiles'].map(
@@ -50,13 +52,15 @@ describe('The demo shop', () => {
       ),
     )
     expect(sizes).toEqual({
-      companies: 2,
-      people: 5,
-      stocks: 6,
+      companies: 5,
+      // One of them was invited and did not come yet.
+      people: 12,
+      stocks: 10,
       brakes: 3,
-      jobs: 5,
-      orders: 15,
-      shelf_profiles: 19,
+      jobs: 11,
+      orders: 40,
+      // The starters, and three that crews saved.
+      shelf_profiles: STARTERS.length + 3,
     })
   })
 
@@ -85,16 +89,49 @@ describe('The demo shop', () => {
     expect(new Set(kinds)).toEqual(new Set(STOCK_ITEM_KINDS))
   })
 
-  it('has an order in every state', async () => {
-    const rows = await api.db('order_states').select('state')
-    expect(new Set(rows.map((row) => row.state))).toEqual(new Set(ORDER_STATES))
+  it('has orders in every state', async () => {
+    const states = await api.db('order_states').pluck<string[]>('state')
+    const counts = ORDER_STATES.map((state) => [
+      state,
+      states.filter((one) => one === state).length,
+    ])
+    expect(Object.fromEntries(counts)).toEqual({
+      submitted: 5,
+      question: 2,
+      released: 6,
+      inWork: 7,
+      ready: 4,
+      partPickedUp: 3,
+      pickedUp: 10,
+      withdrawn: 3,
+    })
+  })
+
+  it('has work of every company, for roofs of many pitches', async () => {
+    const agent = api.newAgent()
+    await agent.signIn(DEMO_PEOPLE.juno.email, DEMO_PASSWORD)
+    const { items } = await agent.call(listOrders, { query: { limit: 100 } })
+    expect(new Set(items.map(({ company }) => company.name))).toEqual(
+      new Set(Object.values(DEMO_COMPANIES).map(({ name }) => name)),
+    )
+    expect(new Set(items.map(({ job }) => job.pitchRise))).toEqual(new Set([3, 4, 5, 6, 8, 10, 12]))
+  })
+
+  it('has every hand-off signed, and bundles that came back', async () => {
+    const handOffs = await api.db('hand_offs')
+    expect(handOffs.length).toBeGreaterThan(10)
+    for (const { signature } of handOffs) {
+      expect(signatureSchema.safeParse(signature).success).toBe(true)
+    }
+    const back = await api.db('piece_events').where({ from_state: 'pickedUp', to_state: 'bundled' })
+    expect(new Set(back.map(({ reason }) => reason)).size).toBe(3)
   })
 
   it('has a piece in every state but withdrawn, and remakes done and queued', async () => {
     const states = new Set(await api.db('pieces').pluck('state'))
     expect([...states].sort()).toEqual(['bent', 'bundled', 'pickedUp', 'queued', 'scrapped'])
     const remakes = await api.db('pieces').whereNotNull('remake_of').pluck('state')
-    expect(remakes.sort()).toEqual(['bundled', 'queued'])
+    expect(remakes.sort()).toEqual(['bent', 'bundled', 'pickedUp', 'queued'])
   })
 
   it('has pieces of both hands at the brake and on the rack', async () => {
@@ -201,9 +238,18 @@ describe('The demo shop', () => {
       .db('orders as o')
       .join('order_states as s', 's.order_id', 'o.id')
       .where('o.needed_by', '<', new Date().toISOString().slice(0, 10))
-      .whereIn('s.state', ['released', 'inWork', 'ready'])
+      .whereIn('s.state', ['released', 'inWork', 'ready', 'partPickedUp'])
       .pluck('s.state')
     expect(late).toEqual(['inWork'])
+  })
+
+  it('has one order that is due on the day of seeding, and ready', async () => {
+    const due = await api
+      .db('orders as o')
+      .join('order_states as s', 's.order_id', 'o.id')
+      .where('o.needed_by', new Date().toISOString().slice(0, 10))
+      .pluck('s.state')
+    expect(due).toEqual(['ready'])
   })
 
   it('goes in once: the database command refuses a second time', async () => {
