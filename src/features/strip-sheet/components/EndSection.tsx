@@ -3,9 +3,9 @@ import { useTranslation } from 'react-i18next'
 import type { EndLayout, StripLayout } from '#shared/ends/end-layout'
 import type { End, Side } from '#shared/ends/end.schema'
 import type { Strip } from '#shared/strip/strip.schema'
+import { EndMarks } from '@/features/ends/components/EndMarks'
 import { useEndWords } from '@/features/ends/useEndWords'
 import { useUnits } from '@/features/people/useUnits'
-import { MarkTable } from './MarkTable'
 import { OutlineFigure } from './OutlineFigure'
 
 interface Props {
@@ -68,7 +68,7 @@ export function EndSection({ side, end, layout, strip, name, lowEnd }: Props) {
             name={`${name}, ${title}`}
           />
           <div className="flex flex-col gap-3">
-            <MarkTable end={laid} strip={strip} caption={t('mark.title')} />
+            <EndMarks end={laid} strip={strip} />
             <EndNotes end={laid} />
           </div>
         </div>
