@@ -72,7 +72,14 @@ export const joinsOf = (
     letter: joinLetter(index),
     line,
     items: [
-      { ...path('ghost', [frame.from, frame.to], 0.5), dash: [4, 4] },
+      {
+        ...path(
+          'ghost',
+          [between(frame.from, frame.to, 0.002), between(frame.from, frame.to, 0.998)],
+          0.5,
+        ),
+        dash: [4, 4],
+      },
       ...[0.2, 0.8].flatMap((part) =>
         crossOn(sheet, 'dimension', between(line.from, line.to, part), 8),
       ),

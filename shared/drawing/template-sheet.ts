@@ -32,8 +32,8 @@ export const onPaper = (sheet: Sheet, points: readonly StripPoint[]): Point[] =>
 export const showsMetal = (layout: StripLayout, sheet: Sheet): boolean =>
   clipPolygon(onPaper(sheet, layout.outline), sheet.box).length > 2
 
-/** Lines of a weight are kept whole on the paper. */
-const inside = (sheet: Sheet, weight: number): Bounds => grow(sheet.box, 0 - weight / 2)
+/** Lines of a weight are kept whole on the paper; a hundredth of a point is left to rounding. */
+const inside = (sheet: Sheet, weight: number): Bounds => grow(sheet.box, -0.01 - weight / 2)
 
 /** The border of a polygon as far as it lies on the paper. */
 export const bordersOn = (
