@@ -12,6 +12,8 @@ import type {
 } from '#shared/profile/starters/starter'
 import { VALLEY_STARTERS } from '#shared/profile/starters/valley.starters'
 import { WALL_STARTERS } from '#shared/profile/starters/wall.starters'
+import { pitchAngle } from '#shared/units/angle'
+import type { Degrees } from '#shared/units/brands'
 
 /*
  * The shop's starter profiles, in the order in which a roof is closed. All of it is common
@@ -37,7 +39,7 @@ export const STARTER_KEYS: readonly StarterKey[] = DEFINITIONS.map(({ key }) => 
 /** Values by parameter, in its unit; what is absent has its default. */
 export type StarterParameters = Readonly<Partial<Record<StarterParameterKey, number>>>
 
-export interface Starter extends Omit<StarterDefinition<StarterKey>, 'parts'> {
+export interface Starter extends Omit<StarterDefinition<StarterKey>, 'parts' | 'lies'> {
   /**
    * With the default of every parameter; bends that follow the roof are resolved for
    * `STARTER_PITCH`. The key is also that of its name and description in the locales, namespace
@@ -115,6 +117,28 @@ export const starterProfile = (
     },
     rise,
   )
+}
+
+/** The turn from leg 1 to a leg, both from 1. */
+const turnTo = ({ bends }: Profile, leg: number): Degrees =>
+  bends.slice(0, leg - 1).reduce((sum, { turn }) => sum + turn, 0)
+
+/**
+ * Where leg 1 of a starter heads when the piece lies in place, seen from its right end: degrees
+ * counter-clockwise from the right. `profile` is what `starterProfile` made of it for `pitch`.
+ */
+export const starterHeading = (
+  key: StarterKey,
+  profile: Profile,
+  pitch: number | null,
+): Degrees => {
+  const { lies } = definitionOf(key)
+  if ('leg' in lies) return lies.heading - turnTo(profile, lies.leg)
+  if ('upSlope' in lies) {
+    return pitchAngle(pitch ?? STARTER_PITCH) - turnTo(profile, lies.upSlope)
+  }
+  const bent = profile.bends[lies.evenAbout - 1]?.turn ?? 0
+  return 0 - bent / 2 - turnTo(profile, lies.evenAbout)
 }
 
 export const STARTERS: readonly Starter[] = DEFINITIONS.map(({ key, kind, parameters, pitch }) => ({

@@ -9,6 +9,8 @@ function query(parts: Record<string, string | undefined>): string {
 /** What the drawing board opens with; an empty sheet where nothing is named. */
 interface BoardOpening {
   readonly shelf?: string
+  /** What is set of a starter, as `printParameters` writes it. */
+  readonly set?: string | undefined
   readonly line?: string
   /** The order whose amendment is drawn. */
   readonly order?: string
@@ -29,11 +31,12 @@ export const paths = {
     home: () => '/roof',
     job: (jobId: string) => `/roof/jobs/${jobId}`,
     newJob: () => '/roof/jobs/new',
-    board: (jobId: string, { shelf, line, order }: BoardOpening = {}) =>
-      `/roof/jobs/${jobId}/board${query({ shelf, line, order })}`,
+    board: (jobId: string, { shelf, set, line, order }: BoardOpening = {}) =>
+      `/roof/jobs/${jobId}/board${query({ shelf, set, line, order })}`,
     /** Within a job, what is taken goes to its board, for a new order or for an amendment. */
     shelf: (job?: string, order?: string) => `/roof/shelf${query({ job, order })}`,
-    shelfProfile: (profileId: string) => `/roof/shelf/${profileId}`,
+    shelfProfile: (profileId: string, { job, order }: { job?: string; order?: string } = {}) =>
+      `/roof/shelf/${profileId}${query({ job, order })}`,
     orders: () => '/roof/orders',
     order: (orderId: string) => `/roof/orders/${orderId}`,
     stripSheet: (orderId: string, lineId: string) => `/roof/orders/${orderId}/lines/${lineId}`,

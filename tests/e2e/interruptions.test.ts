@@ -26,6 +26,7 @@ async function orderInHand(jobName: string): Promise<Device & { jobId: string }>
   const jobId = new URL(page.url()).pathname.split('/').at(-1) ?? ''
   await page.getByRole('link', { name: 'From the shelf' }).click()
   await page.getByRole('link', { name: /Z closure/i }).click()
+  await page.getByRole('link', { name: 'Take it to the board' }).click()
   for (const next of ['Bend 1', 'Leg 2', 'Bend 2', 'Leg 3', 'Done, to the order']) {
     await page.getByRole('button', { name: next, exact: true }).click()
   }

@@ -19,6 +19,7 @@ export const CLOSURE_STARTERS = [
     kind: 'closure',
     parameters: [inches('ribHeight', 2, 0.75, 4)],
     pitch: null,
+    lies: { leg: 1, heading: 0 },
     parts: (value) => ({
       legs: [1.25, value('ribHeight'), 1.25],
       bends: [bend(90), bend(-90)],
@@ -30,6 +31,7 @@ export const CLOSURE_STARTERS = [
     kind: 'closure',
     parameters: [inches('ribHeight', 1.25, 0.75, 3), inches('flangeWidth', 1.5, 1, 4)],
     pitch: null,
+    lies: { leg: 1, heading: -90 },
     parts: (value) => ({
       legs: [value('flangeWidth'), value('ribHeight'), 1],
       bends: [bend(-90), bend(-90)],
@@ -42,6 +44,7 @@ export const CLOSURE_STARTERS = [
     kind: 'closure',
     parameters: [inches('ribHeight', 0.875, 0.75, 3), inches('topWidth', 1.5, 1, 4)],
     pitch: null,
+    lies: { leg: 1, heading: 0 },
     parts: (value) => {
       const side = hatSide(value('ribHeight'))
       return {

@@ -17,6 +17,7 @@ export const CORNER_STARTERS = [
     kind: 'corner',
     parameters: [inches('faceWidth', 3, 1.5, 8), CORNER],
     pitch: null,
+    lies: { evenAbout: 1 },
     parts: (value) => ({
       legs: [value('faceWidth'), value('faceWidth')],
       bends: [bend(LEFT * (180 - value('cornerAngle')))],
@@ -29,6 +30,7 @@ export const CORNER_STARTERS = [
     kind: 'corner',
     parameters: [inches('faceWidth', 3, 1.5, 8), CORNER],
     pitch: null,
+    lies: { evenAbout: 1 },
     parts: (value) => ({
       legs: [value('faceWidth'), value('faceWidth')],
       bends: [bend(RIGHT * (180 - value('cornerAngle')))],

@@ -9,6 +9,7 @@ export const EDGE_STARTERS = [
     kind: 'edge',
     parameters: [inches('faceWidth', 2.5, 1.5, 8)],
     pitch: ANY_PITCH,
+    lies: { leg: 2, heading: -90 },
     parts: (value) => ({
       legs: [4.5, value('faceWidth'), 0.75],
       bends: [roofBend(RIGHT, 'eave'), bend(30)],
@@ -21,6 +22,7 @@ export const EDGE_STARTERS = [
     kind: 'edge',
     parameters: [inches('faceWidth', 5.5, 2, 10)],
     pitch: null,
+    lies: { leg: 1, heading: 0 },
     parts: (value) => ({
       legs: [3.5, value('faceWidth'), 0.75],
       bends: [roofBend(RIGHT, 'gable'), bend(40)],
@@ -34,6 +36,7 @@ export const EDGE_STARTERS = [
     kind: 'edge',
     parameters: [inches('faceWidth', 4.5, 3, 7), inches('bottomWidth', 5, 3, 8)],
     pitch: null,
+    lies: { leg: 2, heading: -90 },
     parts: (value) => ({
       legs: [0.75, value('faceWidth'), value('bottomWidth'), value('faceWidth') + 1],
       bends: [bend(90), bend(90), bend(90)],

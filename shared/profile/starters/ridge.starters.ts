@@ -11,6 +11,7 @@ export const RIDGE_STARTERS = [
     parameters: [inches('wingWidth', 6.5, 3, 12)],
     // Level roofs have no ridge.
     pitch: { least: 0.25, most: ANY_PITCH.most },
+    lies: { evenAbout: 2 },
     parts: (value) => ({
       legs: [0.75, value('wingWidth'), value('wingWidth'), 0.75],
       bends: [bend(-30), roofBend(RIGHT, 'ridge'), bend(-30)],
@@ -24,6 +25,7 @@ export const RIDGE_STARTERS = [
     kind: 'ridge',
     parameters: [inches('faceWidth', 4.5, 2, 10)],
     pitch: ANY_PITCH,
+    lies: { leg: 2, heading: -90 },
     parts: (value) => ({
       legs: [6, value('faceWidth'), 0.75],
       bends: [roofBend(RIGHT, 'highSidePeak'), bend(40)],
@@ -39,6 +41,7 @@ export const RIDGE_STARTERS = [
       { key: 'steeperBy', default: 4, least: 1, most: 12, unit: 'rise' },
     ],
     pitch: ANY_PITCH,
+    lies: { upSlope: 2 },
     parts: (value, rise) => ({
       legs: [0.75, value('apronWidth'), 5],
       bends: [bend(-20), roofBend(LEFT, 'transition', pitchAngle(rise + value('steeperBy')))],

@@ -50,12 +50,23 @@ export type StarterParts = Pick<Profile, 'legs' | 'bends'> &
 /** Gives the value of a parameter: as it was set, or its default. */
 export type Value = (key: StarterParameterKey) => number
 
+/**
+ * How a piece lies in place, seen from its right end: a leg (from 1) heads somewhere, degrees
+ * counter-clockwise from the right; or a leg lies up the job's slope; or the legs beside a bend fall
+ * away from it alike.
+ */
+export type Lies =
+  | { readonly leg: number; readonly heading: Degrees }
+  | { readonly upSlope: number }
+  | { readonly evenAbout: number }
+
 export interface StarterDefinition<Key extends string = string> {
   readonly key: Key
   readonly kind: (typeof STARTER_KINDS)[number]
   readonly parameters: readonly StarterParameter[]
   /** Null where the pitch plays no part. */
   readonly pitch: PitchRange | null
+  readonly lies: Lies
   /** `rise` in 12; needed only where a slope beside the job's is told by it. */
   readonly parts: (value: Value, rise: number) => StarterParts
 }

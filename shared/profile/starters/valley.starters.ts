@@ -10,6 +10,7 @@ export const VALLEY_STARTERS = [
     parameters: [inches('wingWidth', 10, 5, 14)],
     // Level roofs have no valley.
     pitch: { least: 0.25, most: ANY_PITCH.most },
+    lies: { evenAbout: 1 },
     parts: (value) => ({
       legs: [value('wingWidth'), value('wingWidth')],
       bends: [roofBend(LEFT, 'valley')],
@@ -23,6 +24,7 @@ export const VALLEY_STARTERS = [
     kind: 'valley',
     parameters: [inches('wingWidth', 10, 5, 14), inches('ribSide', 1.125, 0.75, 2)],
     pitch: ANY_PITCH,
+    lies: { evenAbout: 2 },
     parts: (value) => ({
       legs: [value('wingWidth'), value('ribSide'), value('ribSide'), value('wingWidth')],
       bends: [roofBend(LEFT, 'valleyRib'), bend(-90), roofBend(LEFT, 'valleyRib')],

@@ -9,6 +9,7 @@ export const WALL_STARTERS = [
     kind: 'wall',
     parameters: [inches('wallHeight', 3.5, 2, 12), inches('apronWidth', 5.5, 3, 10)],
     pitch: ANY_PITCH,
+    lies: { leg: 3, heading: 90 },
     parts: (value) => ({
       legs: [0.75, value('apronWidth'), value('wallHeight')],
       bends: [bend(-20), roofBend(LEFT, 'headwall')],
@@ -21,6 +22,7 @@ export const WALL_STARTERS = [
     kind: 'wall',
     parameters: [inches('wallHeight', 5, 2, 12), inches('flangeWidth', 4.5, 2, 8)],
     pitch: null,
+    lies: { leg: 2, heading: 90 },
     parts: (value) => ({
       legs: [value('flangeWidth'), value('wallHeight')],
       bends: [roofBend(LEFT, 'sidewall')],
@@ -33,6 +35,7 @@ export const WALL_STARTERS = [
     kind: 'wall',
     parameters: [inches('wallWidth', 12, 4, 16), inches('faceWidth', 4, 2, 6)],
     pitch: null,
+    lies: { leg: 3, heading: 0 },
     parts: (value) => ({
       legs: [0.75, value('faceWidth'), value('wallWidth'), value('faceWidth') - 0.5, 0.75],
       bends: [bend(45), bend(-90), bend(-90), bend(45)],

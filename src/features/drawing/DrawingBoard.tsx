@@ -35,6 +35,8 @@ interface Props {
   /** Rise in 12 of the job's roof. */
   readonly pitchRise: number | null
   readonly finish: { readonly label: string; readonly onPress: () => void }
+  /** What else can be done with the drawing, at the end of the tools. */
+  readonly toolsEnd?: ReactNode
   /** What the order says of the figures, under them. */
   readonly notice?: ReactNode
 }
@@ -50,6 +52,7 @@ export function DrawingBoard({
   brakes,
   pitchRise,
   finish,
+  toolsEnd,
   notice,
 }: Props) {
   const [snapping, setSnapping] = useState(true)
@@ -111,6 +114,7 @@ export function DrawingBoard({
           setSnapping={setSnapping}
           tabled={tabled}
           setTabled={(on) => setView(on ? 'table' : 'part')}
+          end={toolsEnd}
         />
         <AnswerBar
           check={check}

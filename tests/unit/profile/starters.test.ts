@@ -10,6 +10,7 @@ import {
   findStarterRefusal,
   getStarter,
   STARTER_KEYS,
+  starterHeading,
   STARTER_PITCH,
   starterProfile,
   STARTERS,
@@ -182,6 +183,47 @@ describe('a starter made to a roof', () => {
     const sides = STARTERS.filter(({ profile }) => profile.colorSide !== 'left')
     expect(sides.map(({ key }) => key)).toEqual(['boxGutter'])
     expect(flatStrip(getStarter('boxGutter').profile, STEEL).girth).toBe(16.25)
+  })
+})
+
+describe('a starter as it lies in place', () => {
+  /** Directions of its legs from A to B, degrees counter-clockwise from the right. */
+  const directions = (key: StarterKey, rise: number): number[] => {
+    const profile = starterProfile(key, {}, rise)
+    const turns = [starterHeading(key, profile, rise), ...profile.bends.map(({ turn }) => turn)]
+    return turns.map((_, leg) => {
+      const sum = turns.slice(0, leg + 1).reduce((total, turn) => total + turn, 0)
+      const wrapped = ((((sum + 180) % 360) + 360) % 360) - 180
+      return Math.round(wrapped * 1e6) / 1e6
+    })
+  }
+  const a = Math.round(pitchAngle(6) * 1e6) / 1e6
+  const v =
+    Math.round(
+      (180 - (includedFromRoof({ rule: 'valley', pitch: 'job' }, pitchAngle(6)) ?? 0)) * 5e5,
+    ) / 1e6
+
+  it.each<[StarterKey, number[]]>([
+    ['eaveDrip', [-a, -90, -60]],
+    ['gableRake', [0, -90, -50]],
+    ['boxGutter', [-180, -90, 0, 90]],
+    ['ridge', [a + 30, a, -a, -a - 30]],
+    ['highSidePeak', [a, -90, -50]],
+    ['transition', [a + 20, a, Math.round(pitchAngle(10) * 1e6) / 1e6]],
+    ['valley', [-v, v]],
+    ['wValley', [-v, 45, -45, v]],
+    ['headwall', [a + 20, a, 90]],
+    ['sidewall', [0, 90]],
+    ['coping', [45, 90, 0, -90, -45]],
+    ['insideCorner', [-45, 45]],
+    ['outsideCorner', [45, -45]],
+    ['zClosure', [0, 90, 0]],
+    ['jTrim', [-90, -180, 90]],
+    ['hat', [0, 60, 0, -60, 0]],
+  ])('%s at 6 in 12', (key, expected) => {
+    directions(key, 6).forEach((direction, leg) => {
+      expect(direction).toBeCloseTo(expected[leg] ?? NaN, 4)
+    })
   })
 })
 

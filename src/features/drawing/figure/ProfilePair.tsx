@@ -5,6 +5,7 @@ import { stripFigure } from '#shared/drawing/strip-figure'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Stock } from '#shared/stock/stock.schema'
 import type { Strip } from '#shared/strip/strip.schema'
+import type { Degrees } from '#shared/units/brands'
 import { useTranslation } from 'react-i18next'
 import { SvgFigure } from './SvgFigure'
 import { useFigureColors, useFigureLabels } from './useFigureLook'
@@ -17,6 +18,8 @@ interface Props {
   readonly name: string
   readonly width: number
   readonly height: number
+  /** Where leg 1 heads, degrees counter-clockwise from the right; absent: to the right. */
+  readonly heading?: Degrees
   /** `layout` adds the running distances at which the creases are marked. */
   readonly stripMode?: 'plain' | 'layout'
   readonly selected?: Part | null
@@ -30,6 +33,7 @@ export function ProfilePair({
   name,
   width,
   height,
+  heading = 0,
   stripMode = 'plain',
   selected = null,
 }: Props) {
@@ -46,9 +50,10 @@ export function ProfilePair({
         width,
         height: height - stripHeight,
         labels,
+        rotation: heading,
         selected,
       }),
-    [profile, stock.sheet, width, height, stripHeight, labels, selected],
+    [profile, stock.sheet, width, height, stripHeight, heading, labels, selected],
   )
   const flat = useMemo(
     () =>

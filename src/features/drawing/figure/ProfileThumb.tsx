@@ -2,6 +2,7 @@ import { useMemo } from 'react'
 import { sectionFigure } from '#shared/drawing/section-figure'
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Stock } from '#shared/stock/stock.schema'
+import type { Degrees } from '#shared/units/brands'
 import { SvgFigure } from './SvgFigure'
 import { useFigureColors, useFigureLabels } from './useFigureLook'
 
@@ -11,11 +12,21 @@ interface Props {
   readonly title: string
   readonly width: number
   readonly height: number
+  /** Where leg 1 heads, degrees counter-clockwise from the right; absent: to the right. */
+  readonly heading?: Degrees
   readonly className?: string
 }
 
 /** A section without words, for lists. */
-export function ProfileThumb({ profile, stock, title, width, height, className }: Props) {
+export function ProfileThumb({
+  profile,
+  stock,
+  title,
+  width,
+  height,
+  heading = 0,
+  className,
+}: Props) {
   const colors = useFigureColors(stock.painted ? stock.colorHex : null)
   const labels = useFigureLabels()
   const { display } = useMemo(
@@ -24,9 +35,10 @@ export function ProfileThumb({ profile, stock, title, width, height, className }
         width,
         height,
         labels,
+        rotation: heading,
         show: { dimensions: false, angles: false, edges: false },
       }),
-    [profile, stock.sheet, width, height, labels],
+    [profile, stock.sheet, width, height, heading, labels],
   )
   return <SvgFigure display={display} colors={colors} title={title} className={className} />
 }

@@ -42,9 +42,10 @@ export const EMPTY_BOARD: BoardDocument = {
   started: false,
 }
 
-export const boardOf = (profile: Profile): BoardDocument => ({
+/** The profile on an empty sheet; leg 1 heads to the right unless said. */
+export const boardOf = (profile: Profile, heading: Degrees = 0): BoardDocument => ({
   profile,
-  placement: { origin: vector(0, 0), heading: 0 },
+  placement: { origin: vector(0, 0), heading },
   started: true,
 })
 

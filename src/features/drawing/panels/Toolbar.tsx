@@ -1,4 +1,4 @@
-import type { Dispatch } from 'react'
+import type { Dispatch, ReactNode } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { BoardActionId } from '../actions/board-action'
 import type { Board, BoardEvent } from '../model/board'
@@ -12,6 +12,8 @@ interface Props {
   /** On a phone the table of legs takes the place of the part in hand. */
   readonly tabled: boolean
   readonly setTabled: (on: boolean) => void
+  /** What else can be done with the drawing, at the end of the row. */
+  readonly end?: ReactNode
 }
 
 const TOOLS: readonly BoardActionId[] = [
@@ -28,7 +30,7 @@ const TOOLS: readonly BoardActionId[] = [
 ]
 
 /** What can be done to the drawing, in one row that slides under the thumb. */
-export function Toolbar({ board, dispatch, snapping, setSnapping, tabled, setTabled }: Props) {
+export function Toolbar({ board, dispatch, snapping, setSnapping, tabled, setTabled, end }: Props) {
   const { t } = useTranslation('drawing')
   return (
     <div
@@ -56,6 +58,7 @@ export function Toolbar({ board, dispatch, snapping, setSnapping, tabled, setTab
         />
         {t('view.snap')}
       </label>
+      {end}
     </div>
   )
 }

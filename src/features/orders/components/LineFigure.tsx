@@ -1,6 +1,7 @@
 import type { Profile } from '#shared/profile/profile.schema'
 import type { Stock } from '#shared/stock/stock.schema'
 import type { Strip } from '#shared/strip/strip.schema'
+import type { Degrees } from '#shared/units/brands'
 import { ProfilePair } from '@/features/drawing/figure/ProfilePair'
 import { ProfileThumb } from '@/features/drawing/figure/ProfileThumb'
 
@@ -10,13 +11,15 @@ interface Props {
   /** Null while the drawing cannot be made: then it has no strip. */
   readonly strip: Strip | null
   readonly name: string
+  /** Where leg 1 heads; absent: to the right. */
+  readonly heading?: Degrees
 }
 
 /** Width of the column on a phone; the figure shrinks with anything narrower. */
 const WIDTH = 360
 const HEIGHT = 310
 
-export function LineFigure({ profile, stock, strip, name }: Props) {
+export function LineFigure({ profile, stock, strip, name, heading = 0 }: Props) {
   return strip ? (
     <ProfilePair
       profile={profile}
@@ -25,6 +28,7 @@ export function LineFigure({ profile, stock, strip, name }: Props) {
       name={name}
       width={WIDTH}
       height={HEIGHT}
+      heading={heading}
     />
   ) : (
     <ProfileThumb
@@ -33,6 +37,7 @@ export function LineFigure({ profile, stock, strip, name }: Props) {
       title={name}
       width={WIDTH}
       height={HEIGHT - 80}
+      heading={heading}
       className="h-auto max-w-full"
     />
   )

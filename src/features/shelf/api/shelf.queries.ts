@@ -1,5 +1,5 @@
 import { queryOptions } from '@tanstack/react-query'
-import { listShelf } from '#shared/shelf/shelf.contract'
+import { listShelf, listShelfVersions } from '#shared/shelf/shelf.contract'
 import { call } from '@/lib/api/call'
 
 export const shelfQuery = () =>
@@ -7,4 +7,10 @@ export const shelfQuery = () =>
     queryKey: ['shelf', 'list'],
     queryFn: ({ signal }) => call(listShelf, { signal }),
     staleTime: 60_000,
+  })
+
+export const shelfVersionsQuery = (profileId: string) =>
+  queryOptions({
+    queryKey: ['shelf', 'versions', profileId],
+    queryFn: ({ signal }) => call(listShelfVersions, { params: { profileId }, signal }),
   })

@@ -1,6 +1,7 @@
 import { useTranslation } from 'react-i18next'
 import { Link } from 'react-router-dom'
 import { resolveFollows } from '#shared/profile/follows'
+import { findStarter, starterHeading } from '#shared/profile/starters'
 import type { ShelfProfile } from '#shared/shelf/shelf.contract'
 import type { Stock } from '#shared/stock/stock.schema'
 import { girthOf } from '#shared/strip/flat-strip'
@@ -21,10 +22,13 @@ export function ShelfCard({ item, to, stock, pitchRise }: Props) {
   const { t } = useTranslation('shelf')
   const { size } = useUnits()
   const name = useShelfName()(item)
+  const profile = resolveFollows(item.profile, pitchRise)
+  const starter = item.starterKey === null ? undefined : findStarter(item.starterKey)
   return (
     <li className="relative flex flex-col border border-rule bg-sheet p-2 has-focus-visible:outline-3 has-focus-visible:outline-dye hover:border-ink">
       <ProfileThumb
-        profile={resolveFollows(item.profile, pitchRise)}
+        profile={profile}
+        heading={starter && starterHeading(starter.key, profile, pitchRise)}
         stock={stock}
         title={name}
         width={160}
@@ -35,7 +39,7 @@ export function ShelfCard({ item, to, stock, pitchRise }: Props) {
         {name}
       </Link>
       <p className="font-figure text-small text-scribe">
-        {t('girth', { size: size(girthOf(item.profile)) })}
+        {t('girth', { size: size(girthOf(profile)) })}
       </p>
     </li>
   )

@@ -18,7 +18,7 @@ import { drawingStart } from './drawing-start'
 
 /**
  * The drawing board of a job: `?line=<key>` opens a line of the draft, `?shelf=<id>` a copy of a
- * shelf profile, neither an empty sheet; `?order=<id>` works on the amendment of that order.
+ * shelf profile (with `&set=` a starter made to the roof), neither an empty sheet; `?order=<id>` works on the amendment of that order.
  */
 export function BoardPage() {
   const params = z.object({ jobId: z.uuid() }).safeParse(useParams())
@@ -52,7 +52,11 @@ function JobBoard({ jobId, search }: { jobId: string; search: URLSearchParams })
   }
   return (
     <OpenBoard
-      wanted={{ lineKey: search.get('line'), shelfId: search.get('shelf') }}
+      wanted={{
+        lineKey: search.get('line'),
+        shelfId: search.get('shelf'),
+        set: search.get('set'),
+      }}
       orderId={search.get('order')}
       draft={draft}
       job={job.data}

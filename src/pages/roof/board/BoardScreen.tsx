@@ -19,6 +19,7 @@ import { newKey } from '@/lib/api/idempotency'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
 import type { DrawingStart } from './drawing-start'
 import { GirthNotice } from './GirthNotice'
+import { ShelfButton } from './ShelfButton'
 
 interface Props {
   readonly start: DrawingStart
@@ -106,6 +107,13 @@ export function BoardScreen({ start, draft, job, stocks, brakes, orderId }: Prop
         brakes={brakes}
         pitchRise={job.pitchRise}
         finish={{ label: t('finish'), onPress: () => void navigate(toOrder) }}
+        toolsEnd={
+          <ShelfButton
+            profile={profile}
+            companyId={job.company.id}
+            suggestedName={line?.name ?? shelfName ?? ''}
+          />
+        }
         notice={
           profile &&
           line !== null &&
@@ -158,6 +166,7 @@ function useDrawnLine({ start, draft, profile, stockId, name }: DrawnLine) {
     if (search.get('line') !== key) {
       const next = new URLSearchParams(search)
       next.delete('shelf')
+      next.delete('set')
       next.set('line', key)
       setSearch(next, { replace: true })
     }

@@ -1,10 +1,12 @@
 import { useQuery } from '@tanstack/react-query'
-import { useState } from 'react'
+import { useId, useState } from 'react'
 import { useTranslation } from 'react-i18next'
 import { useSearchParams } from 'react-router-dom'
 import { z } from 'zod'
 import { seesOnlyOwnCompany } from '#shared/access/permissions'
 import type { Job } from '#shared/jobs/jobs.contract'
+import { STARTERS } from '#shared/profile/starters'
+import { STARTER_KINDS } from '#shared/profile/starters/starter'
 import type { ShelfProfile } from '#shared/shelf/shelf.contract'
 import type { Stock } from '#shared/stock/stock.schema'
 import { paths } from '@/app/paths'
@@ -17,7 +19,7 @@ import { usePerson } from '@/features/people/person-context'
 import { shelfQuery } from '@/features/shelf/api/shelf.queries'
 import { ShelfWall } from '@/features/shelf/components/ShelfWall'
 import { nameMatches } from '@/features/shelf/search-shelf'
-import { useShelfName } from '@/features/shelf/useShelfName'
+import { useShelfWords } from '@/features/shelf/useShelfName'
 import { stocksQuery } from '@/features/stocks/api/stocks.queries'
 import { PlaceFrame } from '@/pages/shell/PlaceFrame'
 import { RoofNav } from '../RoofNav'
@@ -43,11 +45,15 @@ export function ShelfPage() {
     }
     if (!shelf.data || !stocks.data || (jobId !== null && !job.data)) return <LoadingState />
     if (!stock) return <EmptyState title={t('noStock')} />
-    const boardOf = ({ id }: ShelfProfile) =>
+    const order = orderId === null ? {} : { order: orderId }
+    // A starter is made to the roof before it is drawn with; what a company saved fits already.
+    const pathOf = ({ id, starterKey }: ShelfProfile) =>
       jobId === null
         ? paths.roof.shelfProfile(id)
-        : paths.roof.board(jobId, { shelf: id, ...(orderId === null ? {} : { order: orderId }) })
-    return <Wall items={shelf.data.items} stock={stock} job={job.data ?? null} pathOf={boardOf} />
+        : starterKey === null
+          ? paths.roof.board(jobId, { shelf: id, ...order })
+          : paths.roof.shelfProfile(id, { job: jobId, ...order })
+    return <Wall items={shelf.data.items} stock={stock} job={job.data ?? null} pathOf={pathOf} />
   }
 
   return jobId === null ? (
@@ -77,10 +83,12 @@ interface WallProps {
 
 function Wall({ items, stock, job, pathOf }: WallProps) {
   const { t } = useTranslation('shelf')
-  const nameOf = useShelfName()
+  const { t: kindName } = useTranslation('starters')
+  const startersId = useId()
+  const wordsOf = useShelfWords()
   const severalCompanies = !seesOnlyOwnCompany(usePerson().role) && job === null
   const [search, setSearch] = useState('')
-  const found = items.filter((item) => nameMatches(nameOf(item), search))
+  const found = items.filter((item) => nameMatches(wordsOf(item), search))
   const own = found.filter(
     ({ company }) => company !== null && (job === null || company.id === job.company.id),
   )
@@ -108,7 +116,30 @@ function Wall({ items, stock, job, pathOf }: WallProps) {
       {own.length === 0 && search === '' && !severalCompanies && (
         <p className="max-w-prose text-scribe">{t('ownEmpty')}</p>
       )}
-      {starters.length > 0 && <ShelfWall title={t('starters')} items={starters} {...wall} />}
+      {starters.length > 0 && (
+        <section aria-labelledby={startersId} className="flex flex-col gap-4">
+          <h2 id={startersId} className="font-bold">
+            {t('starters')}
+          </h2>
+          {STARTER_KINDS.map((kind) => ({ kind, items: startersOf(starters, kind) }))
+            .filter(({ items: some }) => some.length > 0)
+            .map(({ kind, items: some }) => (
+              <ShelfWall
+                key={kind}
+                title={kindName(`kind.${kind}`)}
+                within
+                items={some}
+                {...wall}
+              />
+            ))}
+        </section>
+      )}
     </div>
   )
 }
+
+/** The starters of a kind, in the order in which a roof is closed. */
+const startersOf = (items: readonly ShelfProfile[], kind: (typeof STARTER_KINDS)[number]) =>
+  STARTERS.filter((starter) => starter.kind === kind).flatMap(({ key }) =>
+    items.filter(({ starterKey }) => starterKey === key),
+  )
