@@ -8,12 +8,13 @@ import type { DisplayItem, Part } from './display-list'
 import { partOfCrease } from './strip-figure'
 import { path } from './strip-items'
 import type { Sheet } from './template-sheet'
-import { bordersOn, crossOn, lineOn, onPaper } from './template-sheet'
+import { bordersOn, crossOn, insidePaper, lineOn, onPaper } from './template-sheet'
 
 /** Weights in points. */
 const CUT = 1
 const CREASE = 0.75
 const SLIT = 2
+const HATCH = 0.5
 
 /** Half the length of the lines of a mark. */
 const MARK = 5
@@ -41,9 +42,9 @@ const creases = (layout: StripLayout, strip: Strip, sheet: Sheet): DisplayItem[]
 const tabs = (layout: StripLayout, side: Side, sheet: Sheet): DisplayItem[] =>
   layout[side].tabs.flatMap(({ leg, polygon, fold: [from, to] }) => {
     const part = { kind: 'leg', leg } as const
-    const seen = clipPolygon(onPaper(sheet, polygon), sheet.box)
+    const seen = clipPolygon(onPaper(sheet, polygon), insidePaper(sheet, HATCH))
     return [
-      ...hatchPolygon(seen, 8).flatMap((line) => pathOf('tabHatch', line, 0.5, undefined, part)),
+      ...hatchPolygon(seen, 8).flatMap((line) => pathOf('tabHatch', line, HATCH, undefined, part)),
       ...pathOf('tabFold', lineOn(sheet, from, to, CUT), CUT, [9, 4], part),
     ]
   })

@@ -33,14 +33,15 @@ export const showsMetal = (layout: StripLayout, sheet: Sheet): boolean =>
   clipPolygon(onPaper(sheet, layout.outline), sheet.box).length > 2
 
 /** Lines of a weight are kept whole on the paper; a hundredth of a point is left to rounding. */
-const inside = (sheet: Sheet, weight: number): Bounds => grow(sheet.box, -0.01 - weight / 2)
+export const insidePaper = (sheet: Sheet, weight: number): Bounds =>
+  grow(sheet.box, -0.01 - weight / 2)
 
 /** The border of a polygon as far as it lies on the paper. */
 export const bordersOn = (
   sheet: Sheet,
   polygon: readonly StripPoint[],
   weight: number,
-): Point[][] => clipBorder(onPaper(sheet, polygon), inside(sheet, weight))
+): Point[][] => clipBorder(onPaper(sheet, polygon), insidePaper(sheet, weight))
 
 /** A line as far as it lies on the paper. */
 export const lineOn = (
@@ -49,7 +50,7 @@ export const lineOn = (
   to: StripPoint,
   weight: number,
 ): Segment | undefined =>
-  clipToBox(segment(sheet.place(from), sheet.place(to)), inside(sheet, weight))
+  clipToBox(segment(sheet.place(from), sheet.place(to)), insidePaper(sheet, weight))
 
 /** A small upright cross; none where it would leave the paper. */
 export const crossOn = (
