@@ -103,10 +103,6 @@ const bestView = (faces: readonly CornerFace[], turn: number): View => {
   return viewFrom(best.azimuth + turn, best.elevation)
 }
 
-const line = (from: Point, to: Point): Pick<Extract<DisplayItem, { kind: 'path' }>, 'points'> => ({
-  points: [from, to],
-})
-
 const drawFace = (
   face: CornerFace,
   view: View,
@@ -115,17 +111,16 @@ const drawFace = (
 ): DisplayItem[] => {
   const points = face.corners.map(place)
   const common = { kind: 'path', points, closed: true } as const
-  const [from, to] = face.cut
+  const cut = { kind: 'path', points: face.cut.map(place), closed: false, filled: false } as const
   return [
     { ...common, role: showsColor(face, view) ? 'paint' : 'bare', width: 0, filled: true },
     { ...common, role: 'paintEdge', width: 1, filled: false },
+    // Paint may have any color, that of the cut's line too.
+    { ...cut, role: 'halo', width: weight * (face.closes ? 1 : 1.6) + 2 },
     {
-      kind: 'path',
-      ...line(place(from), place(to)),
+      ...cut,
       role: face.closes ? 'metal' : 'problem',
-      closed: false,
-      width: face.closes ? weight : weight * 1.6,
-      filled: false,
+      width: weight * (face.closes ? 1 : 1.6),
     },
   ]
 }
@@ -185,11 +180,14 @@ export const cornerFigure = (
   const faces = [...first, ...second]
   const view = bestView(faces, turn)
   const size = Math.max(11, Math.min(18, Math.min(width, height) / 20))
-  const margin = size * 2 + Math.max(...names.map((name) => textWidth(name, size))) / 2
+  // Names give way to the picture in a small frame.
+  const longest = Math.max(...names.map((name) => textWidth(name, size))) / 2
+  const marginX = Math.min(size * 2 + longest, width / 4)
+  const marginY = Math.min(size * 2 + longest, height / 4)
   const box = boundsOf(faces.flatMap(({ corners }) => corners.map((at) => project(at, view))))
   const perInch = Math.min(
-    (width - 2 * margin) / Math.max(box.maxX - box.minX, 1e-6),
-    (height - 2 * margin) / Math.max(box.maxY - box.minY, 1e-6),
+    (width - 2 * marginX) / Math.max(box.maxX - box.minX, 1e-6),
+    (height - 2 * marginY) / Math.max(box.maxY - box.minY, 1e-6),
   )
   const place = (at: Vector3): Point => {
     const { x, y } = project(at, view)

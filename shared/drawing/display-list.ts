@@ -29,6 +29,8 @@ export type Role =
   | 'tool'
   | 'toolEdge'
   | 'ghost'
+  /** The ground's color around a line that crosses paint of any color. */
+  | 'halo'
   /** The border of a dressed strip, as it is cut. */
   | 'outline'
   /** What is cut off the blank. */

@@ -12,8 +12,11 @@ import { endSchema, sideSchema } from '#shared/ends/end.schema'
 import type { EndOfPiece } from '#shared/ends/folded-end'
 import { matchingLay } from '#shared/ends/run-frame'
 import { add3, cross3, dot3, scale3, subtract3, unit3, vector3 } from '#shared/geometry/vector3'
+import { holds } from '#shared/geometry/bounds'
 import { profileSchema } from '#shared/profile/profile.schema'
 import { profileOf } from '../../support/arbitrary-profile'
+import { frameArbitrary } from './arbitrary-frame'
+import { extentOf } from './figure-faults'
 
 const sheet = { thickness: 0.0276, insideRadius: 0.0394, kFactor: 0.408 }
 const gable = {
@@ -77,6 +80,28 @@ describe('the picture of a corner', () => {
     const { figure } = cornerOf(entering, leaving, ['A gable', 'B high side'])
     const texts = figure.items.flatMap((item) => (item.kind === 'text' ? [item.text] : []))
     expect(texts).toEqual(['A gable', 'B high side'])
+  })
+
+  it('stays in its frame at any size, names or no names', () => {
+    fc.assert(
+      fc.property(frameArbitrary, fc.integer({ min: 0, max: 359 }), (frame, turn) => {
+        const { closed } = cornerOf(entering, leaving)
+        const names = ['A gable', 'B high side'] as const
+        const options = { ...frame, names, turn }
+        const { items } = cornerFigure(entering, { piece: leaving, closed }, options)
+        const box = { minX: 0, minY: 0, maxX: frame.width, maxY: frame.height }
+        expect(items.filter((item) => !holds(box, extentOf(item)))).toEqual([])
+      }),
+      { seed: 20_260_801, numRuns: 100 },
+    )
+  })
+
+  it('sets off the cut from paint of its own color', () => {
+    const { figure } = cornerOf(entering, leaving)
+    const order = figure.items.map(({ role }) => role)
+    order.forEach((role, index) => {
+      if (role === 'metal') expect(order[index - 1]).toBe('halo')
+    })
   })
 
   it('is the same drawing for the same pieces', () => {
