@@ -135,11 +135,12 @@ describe('The price of an order', () => {
     const order = await shop.release(await shop.submit([line()]))
     await shop.db.transaction(async (trx) => {
       // As an older release left it: the rule that freezes lines stands aside for this alone.
-      await trx.raw('set local session_replication_role = replica')
+      await trx.raw('alter table order_lines disable trigger order_lines_frozen')
       await trx.raw(
         `update order_lines set frozen = frozen - 'price' - 'noPrice' where order_id = ?`,
         [order.id],
       )
+      await trx.raw('alter table order_lines enable trigger order_lines_frozen')
     })
     const older = await shop.readOrder(order.id)
     expect(older.priceCents).toBeNull()
