@@ -122,7 +122,7 @@ export function AnswerBar({
           {told.length > 1 && (
             <Button
               variant="quiet"
-              className="px-2! font-normal! underline"
+              className="px-1.5! font-normal! underline"
               aria-expanded={problemsOpen}
               aria-label={t('answer.moreToLookAt', { count: told.length - 1 })}
               onClick={onProblems}
@@ -133,7 +133,7 @@ export function AnswerBar({
           {plans.length > 0 && (
             <Button
               variant="quiet"
-              className="ml-auto px-2! font-normal! underline"
+              className="ml-auto px-1.5! font-normal! underline"
               aria-expanded={brakesOpen}
               onClick={onBrakes}
             >

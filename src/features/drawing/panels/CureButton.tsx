@@ -15,7 +15,7 @@ export function CureButton({ profile, cure, onCure }: Props) {
   return (
     <Button
       variant="quiet"
-      className="px-2! text-left font-normal! underline"
+      className="px-1.5! text-left font-normal! underline"
       onClick={() => onCure(cure)}
     >
       {words.cure(profile, cure)}

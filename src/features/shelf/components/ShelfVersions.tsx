@@ -55,7 +55,11 @@ export function ShelfVersions({ item, shown, onShow }: Props) {
                   {isNow && <span className="font-normal"> · {t('versions.now')}</span>}
                 </p>
                 <p className="text-small text-scribe">
-                  {[version.name, moment(version.savedAt), version.savedBy]
+                  {[
+                    version.name === item.name ? null : version.name,
+                    moment(version.savedAt),
+                    version.savedBy,
+                  ]
                     .filter((fact) => fact !== null)
                     .join(' · ')}
                 </p>

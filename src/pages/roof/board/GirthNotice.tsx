@@ -30,7 +30,7 @@ export function GirthNotice({ profile, stated, selected, onProfile }: Props) {
       ) : (
         <Button
           variant="quiet"
-          className="-ml-2 px-2! underline"
+          className="-ml-2 px-2! font-normal! underline"
           onClick={() => onProfile({ ...profile, legs: profile.legs.with(leg - 1, length) })}
         >
           {t('girth.solve', { leg, length: size(length, 32) })}
