@@ -58,8 +58,7 @@ export function StarterPage({ item, starter, name, target }: Props) {
       subtitle={job ? t('forThisJob', { job: job.name, rise: job.pitchRise }) : t('starter')}
       back={{ to: paths.roof.shelf(jobId ?? undefined, orderId ?? undefined), label: t('back') }}
       primary={
-        job &&
-        (values.isSound ? (
+        !job ? undefined : values.isSound ? (
           <ButtonLink
             variant="primary"
             to={paths.roof.board(job.id, { shelf: item.id, set, ...order })}
@@ -70,7 +69,7 @@ export function StarterPage({ item, starter, name, target }: Props) {
           <Button variant="primary" disabled>
             {t('drawWith')}
           </Button>
-        ))
+        )
       }
     >
       <div className="flex flex-col gap-6">
