@@ -16,7 +16,7 @@ import { jobRows } from './demo/jobs'
 import { ACCOUNT_STEPS } from './demo/mails'
 import { DEMO_COMPANIES, DEMO_PASSWORD, DEMO_PEOPLE, personRow } from './demo/people'
 import { DEMO_PRICE_BOOK } from './demo/price-book'
-import { shelfRows } from './demo/profiles'
+import { SHELF_CHANGE, shelfRows } from './demo/profiles'
 import { createDemoShop } from './demo/shop'
 import { stockItemRows } from './demo/stock-items'
 import { DEMO_STOCKS } from './demo/stocks'
@@ -90,5 +90,8 @@ async function insertShop(
   await db(SHELF_PROFILES).insert(
     shelfRows(random.nextId).map((row) => ({ ...row, updated_at: opened })),
   )
+  await db(SHELF_PROFILES)
+    .where({ company_id: SHELF_CHANGE.companyId, name: SHELF_CHANGE.name })
+    .update({ ...SHELF_CHANGE.saved, updated_at: calendar.moment(-11, '15:20') })
   await db(JOBS).insert(jobRows(calendar))
 }

@@ -2,7 +2,7 @@ import type { ShelfProfileInsert } from '#server/db/tables/shelf-profiles'
 import { applyEdit, type ProfileEdit } from '#shared/profile/edits'
 import type { Profile } from '#shared/profile/profile.schema'
 import { getStarter, STARTERS, type StarterKey } from '#shared/profile/starters'
-import { DEMO_COMPANIES } from './people'
+import { DEMO_PEOPLE, type DemoPerson } from './people'
 
 const from = (key: StarterKey, ...edits: ProfileEdit[]): Profile =>
   edits.reduce(applyEdit, getStarter(key).profile)
@@ -54,12 +54,13 @@ export type DemoProfile = keyof typeof DEMO_PROFILES
 
 const saved = (
   id: string,
-  company: keyof typeof DEMO_COMPANIES,
+  lead: DemoPerson,
   name: string,
   profile: DemoProfile,
 ): ShelfProfileInsert => ({
   id,
-  company_id: DEMO_COMPANIES[company].id,
+  company_id: DEMO_PEOPLE[lead].companyId,
+  saved_by: DEMO_PEOPLE[lead].id,
   starter_key: null,
   name,
   profile: JSON.stringify(DEMO_PROFILES[profile]),
@@ -74,7 +75,18 @@ export const shelfRows = (nextId: () => string): ShelfProfileInsert[] => [
     name: key,
     profile: JSON.stringify(profile),
   })),
-  saved(nextId(), 'wicket', 'Parapet cap 8 1/4', 'wallCap'),
-  saved(nextId(), 'wicket', 'Barn rake, tall', 'tallRake'),
-  saved(nextId(), 'bramblejack', 'Fascia cover 7 1/2', 'fascia'),
+  saved(nextId(), 'maren', 'Parapet cap 8 1/4', 'wallCap'),
+  saved(nextId(), 'maren', 'Barn rake, tall', 'gableRake'),
+  saved(nextId(), 'tomas', 'Fascia cover 7 1/2', 'fascia'),
 ]
+
+/** Saved again under its name some days later: the version before stays. */
+export const SHELF_CHANGE = {
+  name: 'Barn rake, tall',
+  companyId: DEMO_PEOPLE.maren.companyId,
+  saved: {
+    profile: JSON.stringify(DEMO_PROFILES.tallRake),
+    version: 2,
+    saved_by: DEMO_PEOPLE.maren.id,
+  },
+} as const

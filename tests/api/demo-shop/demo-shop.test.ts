@@ -64,6 +64,16 @@ describe('The demo shop', () => {
     })
   })
 
+  it('keeps the version that a saved profile had before', async () => {
+    const rows = await api
+      .db('shelf_versions')
+      .where({ name: 'Barn rake, tall' })
+      .orderBy('version')
+    expect(rows.map(({ version }) => version)).toEqual([1, 2])
+    const times = rows.map(({ saved_at: at }) => at.getTime())
+    expect(times).toEqual(times.toSorted((first, second) => first - second))
+  })
+
   it('has a price for every line that was ordered', async () => {
     const agent = api.newAgent()
     await agent.signIn(DEMO_PEOPLE.juno.email, DEMO_PASSWORD)
