@@ -46,7 +46,7 @@ export function ShelfVersions({ item, shown, onShow }: Props) {
           return (
             <li
               key={version.version}
-              className="flex flex-wrap items-center gap-x-4 gap-y-1 border-l-4 border-transparent py-1 pl-3 data-[shown=true]:border-dye"
+              className="flex flex-wrap items-center gap-x-4 gap-y-1 border-l-4 border-l-transparent py-1 pl-3 data-[shown=true]:border-l-dye"
               data-shown={isShown}
             >
               <div className="min-w-0 flex-1 basis-48">
