@@ -1,7 +1,7 @@
-import type { RequestHandler } from 'express'
 import type { Db } from '#server/db/knex'
 import { inTransaction } from '#server/db/transaction'
 import type { AccountsService } from '#server/features/people/accounts.service'
+import type { PasswordLimits } from '#server/features/people/password-limits'
 import { leavePasswordReset } from '#server/features/people/password-reset.job'
 import type { PasswordService } from '#server/features/people/password.service'
 import { definePublicRoute, defineRoute, type Route } from '#server/http/define-route'
@@ -10,11 +10,7 @@ import * as contract from '#shared/people/accounts.contract'
 export interface AccountsRoutesDeps {
   readonly makeAccounts: (db: Db) => AccountsService
   readonly makePasswords: (db: Db) => PasswordService
-  readonly limits: {
-    readonly ask: readonly RequestHandler[]
-    readonly link: readonly RequestHandler[]
-    readonly change: readonly RequestHandler[]
-  }
+  readonly limits: PasswordLimits
 }
 
 export const accountsRoutes = (deps: AccountsRoutesDeps): Route[] => {

@@ -2,7 +2,6 @@ import type { Request, RequestHandler } from 'express'
 import { ipKeyGenerator, rateLimit } from 'express-rate-limit'
 import type { Clock } from '#server/adapters/clock'
 import type { Db } from '#server/db/knex'
-import type { AccountsRoutesDeps } from '#server/features/people/accounts.routes'
 import { ProblemError } from '#server/http/errors'
 import { RateLimitStore } from '#server/http/rate-limit-store'
 import { askPasswordReset } from '#shared/people/accounts.contract'
@@ -21,6 +20,16 @@ const addressOf = (request: Request): string => ipKeyGenerator(request.ip ?? 'un
 const accountOf = (request: Request): string | undefined =>
   askPasswordReset.body.safeParse(request.body).data?.email
 
+/** What runs before the routes of passwords. */
+export interface PasswordLimits {
+  /** A link is asked for. */
+  readonly ask: readonly RequestHandler[]
+  /** A link is used. */
+  readonly link: readonly RequestHandler[]
+  /** The own password is changed. */
+  readonly change: readonly RequestHandler[]
+}
+
 interface Limit {
   readonly name: string
   readonly most: number
@@ -30,7 +39,7 @@ interface Limit {
 }
 
 /** Limits of what concerns passwords, counted by all processes together. */
-export function passwordLimits(db: Db, clock: Clock): AccountsRoutesDeps['limits'] {
+export function passwordLimits(db: Db, clock: Clock): PasswordLimits {
   const limit = ({ name, most, keyOf, failuresOnly }: Limit): RequestHandler =>
     rateLimit({
       store: new RateLimitStore(db, clock, `${name} `),
