@@ -26,27 +26,34 @@ const toCrew = (topic: string, entityId: string | null) => ({
   audience: 'company',
 })
 
+const toShop = (topic: string, entityId: unknown) => ({
+  topic,
+  entity_id: entityId,
+  company_id: null,
+  audience: 'shop',
+})
+
 describe('What the screens are told of an order', () => {
   it('goes to the shop and to its crew alone', async () => {
     let id = ''
     const heard = await heardDuring(async () => {
       id = (await shop.submit()).id
     })
-    expect(heard).toEqual([toCrew('orders', id), toCrew('jobs', shop.crew.jobId)])
+    expect(heard).toEqual([
+      toShop('mails', expect.any(String)),
+      toCrew('orders', id),
+      toCrew('jobs', shop.crew.jobId),
+    ])
   })
 
   it('names runs to the shop only when an order is released', async () => {
     const order = await shop.submit()
     const heard = await heardDuring(() => shop.release(order))
-    expect(heard).toHaveLength(3)
+    expect(heard).toHaveLength(4)
+    expect(heard).toContainEqual(toShop('mails', expect.any(String)))
     expect(heard).toContainEqual(toCrew('orders', order.id))
     expect(heard).toContainEqual(toCrew('pieces', null))
-    expect(heard).toContainEqual({
-      topic: 'runs',
-      entity_id: null,
-      company_id: null,
-      audience: 'shop',
-    })
+    expect(heard).toContainEqual(toShop('runs', null))
   })
 
   it('is nothing when nothing changed', async () => {
