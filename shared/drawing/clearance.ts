@@ -104,11 +104,18 @@ const metalOfChords = (chords: Float64Array, half: number): Metal => ({
 })
 
 /** Lines to keep clear of, drawn `half` pixels to either side. Without lines everything is clear. */
-export const metalOf = (lines: readonly Segment[], half: number): Metal =>
-  metalOfChords(
-    Float64Array.from(lines.flatMap(({ from, to }) => [from.x, from.y, to.x, to.y])),
-    half,
-  )
+export const metalOf = (lines: readonly Segment[], half: number): Metal => {
+  const chords = new Float64Array(lines.length * 4)
+  for (let index = 0; index < lines.length; index += 1) {
+    const line = lines[index]
+    if (line === undefined) break
+    chords[index * 4] = line.from.x
+    chords[index * 4 + 1] = line.from.y
+    chords[index * 4 + 2] = line.to.x
+    chords[index * 4 + 3] = line.to.y
+  }
+  return metalOfChords(chords, half)
+}
 
 /** The same for one open chain, with some lines that lead off it. */
 export const metalOfChain = (
@@ -122,12 +129,36 @@ export const metalOfChain = (
     const from = points[index - 1]
     const to = points[index]
     if (from === undefined || to === undefined) break
-    chords.set([from.x, from.y, to.x, to.y], (index - 1) * 4)
+    const at = (index - 1) * 4
+    chords[at] = from.x
+    chords[at + 1] = from.y
+    chords[at + 2] = to.x
+    chords[at + 3] = to.y
   }
   spurs.forEach(({ from, to }, index) => {
     chords.set([from.x, from.y, to.x, to.y], (count + index) * 4)
   })
   return metalOfChords(chords, half)
+}
+
+/** True when a whole box lies further than `reach` from the endless line of a chord. */
+const isOffChord = (
+  x1: number,
+  y1: number,
+  x2: number,
+  y2: number,
+  minX: number,
+  minY: number,
+  maxX: number,
+  maxY: number,
+  reach: number,
+): boolean => {
+  const dx = x2 - x1
+  const dy = y2 - y1
+  const aside = dx * ((minY + maxY) / 2 - y1) - dy * ((minX + maxX) / 2 - x1)
+  const spread = (Math.abs(dy) * (maxX - minX) + Math.abs(dx) * (maxY - minY)) / 2
+  const length = Math.sqrt(dx * dx + dy * dy)
+  return length > 0 && Math.abs(aside) - spread >= reach * length
 }
 
 /** True when the box keeps `gap` away from the metal. */
@@ -165,6 +196,7 @@ export const isBoxClear = (
       const y2 = chords[at + 3] ?? 0
       if ((y1 <= minY - reach && y2 <= minY - reach) || (y1 >= maxY + reach && y2 >= maxY + reach))
         continue
+      if (isOffChord(x1, y1, x2, y2, minX, minY, maxX, maxY, reach)) continue
       if (lineNearBox(x1, y1, x2, y2, minX, minY, maxX, maxY, reach)) return false
     }
   }
@@ -186,6 +218,9 @@ export const isLineClear = (
   const minY = Math.min(ay, by) - reach
   const maxY = Math.max(ay, by) + reach
   if (raster === undefined || raster.isSurelyClear(minX, minY, maxX, maxY)) return true
+  const ux = bx - ax
+  const uy = by - ay
+  const away = reach * Math.sqrt(ux * ux + uy * uy)
   const left = Math.max(0, Math.floor((minX - cells.minX) / cells.size))
   const right = Math.min(cells.columns - 1, Math.floor((maxX - cells.minX) / cells.size))
   const top = Math.max(0, Math.floor((minY - cells.minY) / cells.size))
@@ -201,6 +236,11 @@ export const isLineClear = (
       const y1 = chords[at + 1] ?? 0
       const y2 = chords[at + 3] ?? 0
       if ((y1 <= minY && y2 <= minY) || (y1 >= maxY && y2 >= maxY)) continue
+      // Most chords lie on one side of the line, out of its reach.
+      const first = ux * (y1 - ay) - uy * (x1 - ax)
+      const last = ux * (y2 - ay) - uy * (x2 - ax)
+      if (away > 0 && ((first >= away && last >= away) || (first <= -away && last <= -away)))
+        continue
       if (linesNear(ax, ay, bx, by, x1, y1, x2, y2, reach)) return false
     }
   }

@@ -14,30 +14,44 @@ export interface Span {
  * there, so two of them always enclose metal of that side.
  */
 const passes = (outline: readonly StripPoint[], at: Inches, towards: 1 | -1): Inches[] => {
-  const off = (point: StripPoint): number => {
-    const distance = (point.at - at) * towards
-    return Math.abs(distance) <= TOLERANCE ? 0 : distance
+  const found: Inches[] = []
+  let from = outline.at(-1)
+  for (const to of outline) {
+    const a = from === undefined ? 0 : offLine(from, at, towards)
+    const b = offLine(to, at, towards)
+    if (from !== undefined && a > 0 !== b > 0) {
+      found.push(from.along + ((to.along - from.along) * a) / (a - b))
+    }
+    from = to
   }
-  return outline
-    .flatMap((point, index) => {
-      const next = outline[(index + 1) % outline.length] ?? point
-      const [a, b] = [off(point), off(next)]
-      if (a > 0 === b > 0) return []
-      return point.along + ((next.along - point.along) * a) / (a - b)
-    })
-    .sort((a, b) => a - b)
+  return found.sort((a, b) => a - b)
 }
 
-const spansOf = (places: readonly Inches[]): Span[] =>
-  places.flatMap((from, index) => {
-    const to = places[index + 1]
-    return index % 2 === 0 && to !== undefined ? { from, to } : []
-  })
+/** How far a point lies off a line across the strip, 0 within the tolerance. */
+const offLine = (point: StripPoint, at: Inches, towards: 1 | -1): number => {
+  const distance = (point.at - at) * towards
+  return Math.abs(distance) <= TOLERANCE ? 0 : distance
+}
 
 /** How far metal reaches along a line across the strip, on either side of it; undefined where none does. */
 export const metalReach = (outline: readonly StripPoint[], at: Inches): Span | undefined => {
-  const places = [...passes(outline, at, -1), ...passes(outline, at, 1)]
-  return places.length === 0 ? undefined : { from: Math.min(...places), to: Math.max(...places) }
+  let from = Infinity
+  let to = -Infinity
+  const take = (along: Inches): void => {
+    if (along < from) from = along
+    if (along > to) to = along
+  }
+  let before = outline.at(-1)
+  for (const point of outline) {
+    const b = offLine(point, at, 1)
+    if (b === 0) take(point.along)
+    if (before !== undefined) {
+      const a = offLine(before, at, 1)
+      if (a * b < 0) take(before.along + ((point.along - before.along) * a) / (a - b))
+    }
+    before = point
+  }
+  return from <= to ? { from, to } : undefined
 }
 
 /**
@@ -46,13 +60,15 @@ export const metalReach = (outline: readonly StripPoint[], at: Inches): Span | u
  * cut-away lip only what lies behind it.
  */
 export const creaseSpans = (outline: readonly StripPoint[], at: Inches): Span[] => {
-  const near = spansOf(passes(outline, at, -1))
-  const far = spansOf(passes(outline, at, 1))
-  return near.flatMap((a) =>
-    far.flatMap((b) => {
-      const from = Math.max(a.from, b.from)
-      const to = Math.min(a.to, b.to)
-      return to - from > TOLERANCE ? { from, to } : []
-    }),
-  )
+  const near = passes(outline, at, -1)
+  const far = passes(outline, at, 1)
+  const spans: Span[] = []
+  for (let i = 0; i + 1 < near.length; i += 2) {
+    for (let j = 0; j + 1 < far.length; j += 2) {
+      const from = Math.max(near[i] ?? 0, far[j] ?? 0)
+      const to = Math.min(near[i + 1] ?? 0, far[j + 1] ?? 0)
+      if (to - from > TOLERANCE) spans.push({ from, to })
+    }
+  }
+  return spans
 }

@@ -134,11 +134,11 @@ export class DimensionAt extends NumbersAlong {
     const fromY = leg.from.y + normal.y * line
     const toX = leg.to.x + normal.x * line
     const toY = leg.to.y + normal.y * line
-    const first = this.extensionAt(leg.from)
-    const last = this.extensionAt(leg.to)
     // The slashes at its ends reach out from the line.
-    const isRoom = first > 0 && last > 0 && isLineFree(space, fromX, fromY, toX, toY, TICK + 1)
-    if (!isRoom) {
+    const isRoom = isLineFree(space, fromX, fromY, toX, toY, TICK + 1)
+    const first = isRoom ? this.extensionAt(leg.from) : 0
+    const last = first > 0 ? this.extensionAt(leg.to) : 0
+    if (last === 0) {
       this.least = Infinity
       return []
     }

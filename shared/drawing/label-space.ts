@@ -149,8 +149,24 @@ export const fanOf = (step: number): Fan => {
   }
 }
 
-/** Tries a place in a direction (unit); undefined where there is no room. */
-type Place = (row: number, ux: number, uy: number, cost: number) => PlacedLabel | undefined
+/**
+ * Tries a place in a direction (unit): undefined where there is no room, `shut` where there is none
+ * further out that way either.
+ */
+type Place = (row: number, ux: number, uy: number, cost: number) => PlacedLabel | undefined | 'shut'
+
+/** True where a box has left the frame on the side that it moves to. */
+const isBeyond = (
+  { frame }: LabelSpace,
+  ux: number,
+  uy: number,
+  minX: number,
+  minY: number,
+  maxX: number,
+  maxY: number,
+): boolean =>
+  (ux > 0 ? maxX > frame.maxX : minX < frame.minX) ||
+  (uy > 0 ? maxY > frame.maxY : minY < frame.minY)
 
 /** Places in rows, each row over the directions of one fan; of all rows the cheapest place first. */
 class RowsOfPlaces implements Stream<PlacedLabel> {
@@ -158,6 +174,8 @@ class RowsOfPlaces implements Stream<PlacedLabel> {
   private row = 0
   /** How many directions of each row have been tried. */
   private readonly tried: number[]
+  /** Directions in which there is no room any more. */
+  private shut: boolean[] | undefined
   private readonly ux: number
   private readonly uy: number
 
@@ -183,14 +201,19 @@ class RowsOfPlaces implements Stream<PlacedLabel> {
     const c = fan.cos[index] ?? 1
     const s = fan.sin[index] ?? 0
     this.tried[row] = index + 1
+    const placed = this.place(row, ux * c - uy * s, ux * s + uy * c, least)
+    if (placed === 'shut') (this.shut ??= [])[index] = true
     this.goOn()
-    return this.place(row, ux * c - uy * s, ux * s + uy * c, least)
+    return placed === 'shut' ? undefined : placed
   }
 
   private goOn(): void {
     let least = Infinity
     for (let row = 0; row < this.costs.length; row += 1) {
-      const index = this.tried[row] ?? 0
+      const begun = this.tried[row] ?? 0
+      let index = begun
+      while (this.shut?.[index] === true) index += 1
+      this.tried[row] = index
       const turned = this.fan.turned[index] ?? Infinity
       if (turned <= this.widest) {
         const cost = (this.costs[row] ?? Infinity) + this.costPerTurn * turned
@@ -200,7 +223,7 @@ class RowsOfPlaces implements Stream<PlacedLabel> {
         }
       }
       // The rows rise, so behind a row that was not begun nothing is cheaper.
-      if (index === 0) break
+      if (begun === 0) break
     }
     this.least = least
   }
@@ -239,9 +262,9 @@ export const ringOf = (space: LabelSpace, options: RingOptions): Stream<PlacedLa
     const reach = (Math.abs(ux) * width + Math.abs(uy) * height) / 2
     const x = anchor.x + ux * (gap + reach)
     const y = anchor.y + uy * (gap + reach)
-    if (!isFree(space, x - width / 2, y - height / 2, x + width / 2, y + height / 2)) {
-      return undefined
-    }
+    const [minX, minY, maxX, maxY] = [x - width / 2, y - height / 2, x + width / 2, y + height / 2]
+    if (isBeyond(space, ux, uy, minX, minY, maxX, maxY)) return 'shut'
+    if (!isFree(space, minX, minY, maxX, maxY)) return undefined
     // The leader begins where it leaves the text and ends before the metal.
     const leaves = Math.min(
       ux === 0 ? Infinity : width / 2 / Math.abs(ux),
@@ -254,8 +277,8 @@ export const ringOf = (space: LabelSpace, options: RingOptions): Stream<PlacedLa
     const bx = anchor.x + ux * to
     const by = anchor.y + uy * to
     // Even without its leader drawn, nothing may stand between a label and what it means.
-    if (!isLineFree(space, ax, ay, bx, by, 1)) return undefined
-    const boxes = [x - width / 2, y - height / 2, x + width / 2, y + height / 2]
+    if (!isLineFree(space, ax, ay, bx, by, 1)) return 'shut'
+    const boxes = [minX, minY, maxX, maxY]
     const lines = gap >= leaderFrom ? [ax, ay, bx, by] : []
     return { text, size, radius: undefined, isDimension: false, boxes, lines, cost }
   }
@@ -283,12 +306,13 @@ export const letterPlaces = (
     const away = half + radius + (LETTER_GAPS[row] ?? 0)
     const x = anchor.x + ux * away
     const y = anchor.y + uy * away
+    if (isBeyond(space, ux, uy, x - radius, y - radius, x + radius, y + radius)) return 'shut'
     if (!isFree(space, x - radius, y - radius, x + radius, y + radius)) return undefined
     const ax = x - ux * radius
     const ay = y - uy * radius
     const bx = anchor.x + ux * (half + 2)
     const by = anchor.y + uy * (half + 2)
-    if (!isLineFree(space, ax, ay, bx, by, 0.5)) return undefined
+    if (!isLineFree(space, ax, ay, bx, by, 0.5)) return 'shut'
     const boxes = [x - radius, y - radius, x + radius, y + radius]
     const lines = row < 2 ? [] : [ax, ay, bx, by]
     return { text: letter, size, radius, isDimension: false, boxes, lines, cost: here }

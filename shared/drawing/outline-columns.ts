@@ -104,7 +104,7 @@ const partOfMark = ({ of, crease }: Mark, parts: readonly Part[]): Part =>
       ? { kind: 'edge', edge: 'B' }
       : (parts[crease ?? 0] ?? { kind: 'edge', edge: 'A' })
 
-interface MarkFigures {
+export interface MarkFigures {
   /** Distances from edge A, beyond the break. */
   readonly at: readonly ColumnFigure[]
   /** Distances from the blank's square end, beyond that. */

@@ -5,7 +5,7 @@ import { metalOf } from './clearance'
 import type { DisplayItem, DisplayList, Part } from './display-list'
 import { isSamePart } from './display-list'
 import type { LabelSpace, PlacedLabel } from './label-space'
-import type { Column } from './outline-columns'
+import type { Column, MarkFigures } from './outline-columns'
 import { COLUMN_LEAD, columnOf, markFigures } from './outline-columns'
 import type { DrawnCrease, DrawnOutline } from './outline-items'
 import { drawnCreases, drawOutline } from './outline-items'
@@ -115,7 +115,11 @@ const figureAt = (
       : endView(layout, side, options, endRoom(layout, side, options, size), size)
   const outline = drawOutline(layout, strip, view)
   const creases = drawnCreases(layout, strip, view)
-  const columns = side === undefined ? [] : columnsOf(layout, strip, view, side, options)
+  const figures =
+    side === undefined
+      ? undefined
+      : markFigures(layout, side, view, strip.creases.map(partOfCrease), options.labels.length)
+  const columns = figures && side ? columnsOf(figures, view, side, options) : []
   const labels = labelsOf(layout, view, outline, creases, options)
   const fixed = columns.map(({ column }) => ({ weight: 100, streams: [streamOf([column.taken])] }))
   const placed = placeLabels<PlacedLabel>([...fixed, ...labels]).slice(fixed.length)
@@ -127,7 +131,7 @@ const figureAt = (
     ...outline.under,
     ...drawCreases(creases, labels, placed),
     ...outline.over,
-    ...(side === undefined ? [] : drawDots(layout, strip, view, side, options)),
+    ...(figures ? drawDots(figures, view) : []),
     ...columns.flatMap(({ column }) => column.items),
     ...labels.flatMap(({ draw }, index) => {
       const label = placed[index]
@@ -190,41 +194,24 @@ interface NamedColumn {
   readonly column: Column
 }
 
-const figuresOf = (
-  layout: StripLayout,
-  strip: Strip,
-  view: OutlineView,
-  side: Side,
-  { labels }: OutlineOptions,
-) => markFigures(layout, side, view, strip.creases.map(partOfCrease), labels.length)
-
 /** The columns that lie in the frame; one that would not is left out as a whole. */
 const columnsOf = (
-  layout: StripLayout,
-  strip: Strip,
+  figures: MarkFigures,
   view: OutlineView,
   side: Side,
-  options: OutlineOptions,
+  { width, height }: OutlineOptions,
 ): NamedColumn[] => {
-  const figures = figuresOf(layout, strip, view, side, options)
   const out = side === 'left' ? -1 : 1
   const sides = [
     { of: 'along' as const, towards: out } as const,
     { of: 'at' as const, towards: out === 1 ? -1 : 1 } as const,
   ]
   return sides.map(({ of, towards }) => {
-    const reach =
-      COLUMN_LEAD * view.text +
-      widest(
-        figures[of].map(({ text }) => text),
-        view.text,
-      )
+    const texts = figures[of].map(({ text }) => text)
+    const reach = COLUMN_LEAD * view.text + widest(texts, view.text)
     const from = figures[of][0]?.from.x ?? 0
-    const isIn = towards === 1 ? from + reach <= options.width - 1 : from - reach >= 1
-    return {
-      of,
-      column: columnOf(figures[of], towards, view.text, isIn ? options.height : 0),
-    }
+    const isIn = towards === 1 ? from + reach <= width - 1 : from - reach >= 1
+    return { of, column: columnOf(figures[of], towards, view.text, isIn ? height : 0) }
   })
 }
 
@@ -232,14 +219,8 @@ const leftOutOfColumn = ({ of, column }: NamedColumn): OutlineNumber[] =>
   column.leftOut.map(({ text, part }) => ({ of, text, part }))
 
 /** A dot where each mark is pricked. */
-const drawDots = (
-  layout: StripLayout,
-  strip: Strip,
-  view: OutlineView,
-  side: Side,
-  options: OutlineOptions,
-): DisplayItem[] =>
-  figuresOf(layout, strip, view, side, options).dots.map(({ part, at }) => ({
+const drawDots = ({ dots }: MarkFigures, view: OutlineView): DisplayItem[] =>
+  dots.map(({ part, at }) => ({
     kind: 'circle',
     role: 'mark',
     part,
@@ -291,13 +272,11 @@ const drawCreases = (
   creases: readonly DrawnCrease[],
   labels: readonly OutlineLabel[],
   placed: readonly (PlacedLabel | undefined)[],
-): DisplayItem[] =>
-  creases.flatMap(({ crease, part, y, from, to }) => {
+): DisplayItem[] => {
+  const turns = new Map(labels.map(({ crease }, index) => [crease, placed[index]]))
+  return creases.flatMap(({ index, crease, part, y, from, to }) => {
     const dash = crease.turn > 0 ? DASHES.up : DASHES.down
-    const index = labels.findIndex(
-      ({ meaning }) => meaning.of === 'turn' && meaning.part && isSamePart(meaning.part, part),
-    )
-    const [minX = to, , maxX = to] = placed[index]?.boxes ?? []
+    const [minX = to, , maxX = to] = turns.get(index)?.boxes ?? []
     const isHere = minX < to && maxX > from
     const pieces = isHere
       ? [
@@ -305,19 +284,15 @@ const drawCreases = (
           [maxX + 2, to],
         ]
       : [[from, to]]
-    return pieces.map(([a = from, b = to]) => ({
-      ...path(
-        'crease',
-        [
-          { x: a, y },
-          { x: b, y },
-        ],
-        1.3,
-        part,
-      ),
-      dash,
-    }))
+    return pieces.map(([a = from, b = to]) => {
+      const points = [
+        { x: a, y },
+        { x: b, y },
+      ]
+      return { ...path('crease', points, 1.3, part), dash }
+    })
   })
+}
 
 const markSelected = (items: readonly DisplayItem[], selected: Part | null): DisplayItem[] =>
   items.map((item) =>

@@ -231,7 +231,8 @@ export const drawOutline = (layout: StripLayout, strip: Strip, view: OutlineView
     over: [...folds, ...cut],
     lines: [
       ...[...folds, ...cut].flatMap(({ points }) => segmentsOf(points)),
-      ...[...lips, ...hatchedTabs].map(({ line }) => line),
+      // Every third line keeps any text off the hatching.
+      ...[...lips, ...hatchedTabs].filter((_, index) => index % 3 === 0).map(({ line }) => line),
     ],
   }
 }

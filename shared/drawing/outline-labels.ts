@@ -32,6 +32,8 @@ export interface OutlineNumber {
 
 export interface OutlineLabel extends Label<PlacedLabel> {
   readonly meaning: OutlineNumber
+  /** The crease it stands on, by its place in the strip's list. */
+  readonly crease?: number
   readonly draw: (label: PlacedLabel) => readonly DisplayItem[]
 }
 
@@ -352,6 +354,7 @@ export const turnLabels = (
       pieces.map((piece) => new TurnsAlong(space, piece, others, shown, size, cost))
     return {
       meaning: { of: 'turn', text: content, part },
+      crease: first.index,
       weight: WEIGHT.turn,
       streams: [...places(content, 0), ...(content === '' ? [] : places('', 4))],
       draw: (label) => drawTurn(label, crease.turn, part),

@@ -43,6 +43,7 @@ export const streamOf = <C extends Candidate>(candidates: readonly C[]): Stream<
 /** Streams that are only begun when something as dear as `least` is asked for; none costs less. */
 export class Later<C extends Candidate> implements Stream<C> {
   private streams: readonly Stream<C>[] | undefined
+  private cheapest: Stream<C> | undefined
 
   constructor(
     public least: number,
@@ -50,22 +51,17 @@ export class Later<C extends Candidate> implements Stream<C> {
   ) {}
 
   next(): C | undefined {
-    if (this.streams === undefined) {
-      this.streams = this.make()
-      this.least = Math.max(this.least, this.cheapest()?.least ?? Infinity)
-      return undefined
+    const candidate = this.cheapest?.next()
+    this.streams ??= this.make()
+    let least = Infinity
+    for (const stream of this.streams) {
+      if (stream.least < least) {
+        least = stream.least
+        this.cheapest = stream
+      }
     }
-    const candidate = this.cheapest()?.next()
-    this.least = this.cheapest()?.least ?? Infinity
+    this.least = Math.max(this.least, least)
     return candidate
-  }
-
-  private cheapest(): Stream<C> | undefined {
-    let best: Stream<C> | undefined
-    for (const stream of this.streams ?? []) {
-      if (stream.least < (best?.least ?? Infinity)) best = stream
-    }
-    return best
   }
 }
 
@@ -119,6 +115,11 @@ class Options<C extends Candidate> {
   readonly ready: C[] = []
   /** Four numbers for each candidate that is ready. */
   readonly rooms: number[] = []
+  /** Around the rooms of all that are ready: what happens elsewhere changes nothing for them. */
+  minX = Infinity
+  minY = Infinity
+  maxX = -Infinity
+  maxY = -Infinity
   private readonly streams: readonly Stream<C>[]
   private readonly begins: readonly number[]
 
@@ -134,10 +135,20 @@ class Options<C extends Candidate> {
       if (stream === undefined) return undefined
       const candidate = stream.next()
       if (candidate === undefined) continue
-      this.ready.push(candidate)
-      pushRoom(this.rooms, candidate)
+      this.take(candidate)
     }
     return this.ready[rank]
+  }
+
+  private take(candidate: C): void {
+    const { rooms } = this
+    const at = rooms.length
+    this.ready.push(candidate)
+    pushRoom(rooms, candidate)
+    this.minX = Math.min(this.minX, rooms[at] ?? Infinity)
+    this.minY = Math.min(this.minY, rooms[at + 1] ?? Infinity)
+    this.maxX = Math.max(this.maxX, rooms[at + 2] ?? -Infinity)
+    this.maxY = Math.max(this.maxY, rooms[at + 3] ?? -Infinity)
   }
 
   private cheapest(limit: number): Stream<C> | undefined {
@@ -209,140 +220,174 @@ const crossings = (a: readonly number[], b: readonly number[]): number => {
   return count
 }
 
-const costTogether = (a: Candidate, b: Candidate): number => {
-  const isClash =
-    textsTouch(a.boxes, b.boxes) || linesEnter(b.lines, a.boxes) || linesEnter(a.lines, b.boxes)
-  return isClash ? CLASH : CROSSING * crossings(a.lines, b.lines)
-}
-
-interface Ordered<C extends Candidate> {
-  readonly index: number
-  readonly weight: number
-  readonly options: Options<C>
-}
+const clash = (a: Candidate, b: Candidate): boolean =>
+  textsTouch(a.boxes, b.boxes) || linesEnter(b.lines, a.boxes) || linesEnter(a.lines, b.boxes)
 
 /** What stands where: a candidate for each label that has one, and the rooms they take. */
 class Choice<C extends Candidate> {
   readonly chosen: (C | undefined)[]
   private readonly rooms: Float64Array
+  /** The neighbors of the candidate that is being looked at. */
+  private readonly near: Int32Array
+  /** Labels near which something has changed since they chose. */
+  private readonly isStale: boolean[]
 
-  constructor(count: number) {
-    this.chosen = Array.from({ length: count }, () => undefined)
-    this.rooms = new Float64Array(count * 4)
+  constructor(private readonly all: readonly Options<C>[]) {
+    this.chosen = all.map(() => undefined)
+    this.rooms = new Float64Array(all.length * 4)
+    this.near = new Int32Array(all.length)
+    this.isStale = all.map(() => true)
   }
 
-  set(index: number, options: Options<C>, rank: number | undefined): void {
-    this.chosen[index] = rank === undefined ? undefined : options.ready[rank]
-    if (rank === undefined) return
+  set(index: number, rank: number | undefined): void {
+    const options = this.all[index]
+    const candidate = rank === undefined ? undefined : options?.ready[rank]
+    if (candidate === this.chosen[index]) return
+    if (this.chosen[index] !== undefined) this.wake(index)
+    this.chosen[index] = candidate
+    if (candidate === undefined || rank === undefined) return
     for (let side = 0; side < 4; side += 1) {
-      this.rooms[index * 4 + side] = options.rooms[rank * 4 + side] ?? 0
+      this.rooms[index * 4 + side] = options?.rooms[rank * 4 + side] ?? 0
+    }
+    this.wake(index)
+  }
+
+  /** All that could stand where this label stands must choose again. */
+  private wake(index: number): void {
+    const { rooms, all, isStale } = this
+    const minX = rooms[index * 4] ?? 0
+    const minY = rooms[index * 4 + 1] ?? 0
+    const maxX = rooms[index * 4 + 2] ?? 0
+    const maxY = rooms[index * 4 + 3] ?? 0
+    for (let other = 0; other < all.length; other += 1) {
+      const field = all[other]
+      if (field === undefined || other === index) continue
+      if (maxX <= field.minX || field.maxX <= minX) continue
+      if (maxY <= field.minY || field.maxY <= minY) continue
+      isStale[other] = true
     }
   }
 
+  /** Lets a label choose among the others; false where nothing near it has changed since it did. */
+  choose(index: number): boolean {
+    if (this.isStale[index] !== true) return false
+    this.isStale[index] = false
+    this.set(index, this.bestOf(index)?.rank)
+    return true
+  }
+
   /** A candidate's cost among all the others, as far as it is below the limit. */
-  costOf(options: Options<C>, rank: number, self: number, limit: number): number {
-    const candidate = options.ready[rank]
-    if (candidate === undefined) return Infinity
+  costOf(self: number, rank: number, limit: number): number {
+    const options = this.all[self]
+    const candidate = options?.ready[rank]
+    if (options === undefined || candidate === undefined) return Infinity
     const minX = options.rooms[rank * 4] ?? 0
     const minY = options.rooms[rank * 4 + 1] ?? 0
     const maxX = options.rooms[rank * 4 + 2] ?? 0
     const maxY = options.rooms[rank * 4 + 3] ?? 0
-    const { rooms, chosen } = this
+    const { rooms, chosen, near } = this
     let { cost } = candidate
-    for (let index = 0; index < chosen.length && cost < limit; index += 1) {
+    let count = 0
+    for (let index = 0; index < chosen.length; index += 1) {
       const other = chosen[index]
       if (other === undefined || index === self) continue
       if (maxX <= (rooms[index * 4] ?? 0) || (rooms[index * 4 + 2] ?? 0) <= minX) continue
       if (maxY <= (rooms[index * 4 + 1] ?? 0) || (rooms[index * 4 + 3] ?? 0) <= minY) continue
-      cost += costTogether(candidate, other)
+      if (clash(candidate, other)) {
+        cost += CLASH
+        if (cost >= limit) return cost
+      } else {
+        near[count] = index
+        count += 1
+      }
+    }
+    // Crossings are counted last: most candidates are turned down by a clash.
+    for (let at = 0; at < count && cost < limit; at += 1) {
+      const other = chosen[near[at] ?? 0]
+      if (other !== undefined) cost += CROSSING * crossings(candidate.lines, other.lines)
     }
     return cost
   }
 
   /** The labels that a candidate would lie on. */
-  clashesOf(options: Options<C>, rank: number, self: number): number[] {
-    const candidate = options.ready[rank]
+  clashesOf(self: number, rank: number): number[] {
+    const candidate = this.all[self]?.ready[rank]
     return this.chosen.flatMap((other, index) =>
-      index !== self && other && candidate && costTogether(candidate, other) >= CLASH ? index : [],
+      index !== self && other && candidate && clash(candidate, other) ? index : [],
     )
   }
 
   /** The options come by their own cost, so the search ends where that exceeds the best. */
-  bestOf(options: Options<C>, self: number): { rank: number; cost: number } | undefined {
+  bestOf(self: number): { rank: number; cost: number } | undefined {
+    const options = this.all[self]
     let best = -1
     let least = Infinity
     for (let rank = 0; ; rank += 1) {
-      const option = options.at(rank, least)
+      const option = options?.at(rank, least)
       if (option === undefined || option.cost >= least) break
-      const cost = this.costOf(options, rank, self, least)
+      const cost = this.costOf(self, rank, least)
       if (cost >= least) continue
       best = rank
       least = cost
     }
     return best < 0 ? undefined : { rank: best, cost: least }
   }
+
+  /**
+   * Gives a label that found no room the best place that only one other label holds, if that one
+   * can go elsewhere.
+   */
+  makeRoom(self: number): void {
+    const options = this.all[self]
+    for (let rank = 0; options?.at(rank, Infinity) !== undefined; rank += 1) {
+      const [other, ...others] = this.clashesOf(self, rank)
+      if (other === undefined || others.length > 0) continue
+      this.set(self, rank)
+      const elsewhere = this.bestOf(other)
+      if (elsewhere !== undefined && elsewhere.cost < CLASH) {
+        this.set(other, elsewhere.rank)
+        return
+      }
+      this.set(self, undefined)
+    }
+  }
 }
 
 /**
  * Chooses one candidate for each label so that no text touches another text or another label's
  * lines. Starts with the heaviest labels, then lets each label choose again among the others until
- * nothing changes; what still clashes is left out, lightest first (undefined in the answer).
- * Deterministic: ties go to the earlier label and the earlier candidate.
+ * nothing changes; what still clashes is left out, lightest first (undefined in the answer), unless
+ * another label can make room for it. Deterministic: ties go to the earlier label and the earlier
+ * candidate.
  */
 export const placeLabels = <C extends Candidate>(
   labels: readonly Label<C>[],
 ): readonly (C | undefined)[] => {
-  const order: Ordered<C>[] = labels
-    .map(({ weight, streams }, index) => ({ index, weight, options: new Options(streams) }))
+  const all = labels.map(({ streams }) => new Options(streams))
+  const order = labels
+    .map(({ weight }, index) => ({ index, weight }))
     .sort((a, b) => b.weight - a.weight || a.index - b.index)
-  const choice = new Choice<C>(labels.length)
+    .map(({ index }) => index)
+  const choice = new Choice<C>(all)
   const { chosen } = choice
-  // How many labels in a row have kept their choice.
-  let settled = 0
-  for (let step = 0; step < MOST_ROUNDS * order.length && settled < order.length; step += 1) {
-    const label = order[step % order.length]
-    if (label === undefined) break
-    const before = chosen[label.index]
-    choice.set(label.index, label.options, choice.bestOf(label.options, label.index)?.rank)
-    settled = chosen[label.index] === before ? settled + 1 : 1
+  for (let round = 0; round < MOST_ROUNDS; round += 1) {
+    let isSettled = true
+    for (const index of order) if (choice.choose(index)) isSettled = false
+    if (isSettled) break
   }
-  for (const { options, index } of order.toReversed()) {
+  for (const index of order.toReversed()) {
     const option = chosen[index]
     if (option === undefined) continue
-    const rank = options.ready.indexOf(option)
-    if (choice.costOf(options, rank, index, CLASH) < CLASH) continue
-    const better = choice.bestOf(options, index)
-    choice.set(index, options, better && better.cost < CLASH ? better.rank : undefined)
+    const rank = all[index]?.ready.indexOf(option) ?? -1
+    if (choice.costOf(index, rank, CLASH) < CLASH) continue
+    const better = choice.bestOf(index)
+    choice.set(index, better && better.cost < CLASH ? better.rank : undefined)
   }
-  for (const { options, index } of order) {
+  for (const index of order) {
     if (chosen[index] !== undefined) continue
-    const best = choice.bestOf(options, index)
-    if (best !== undefined && best.cost < CLASH) choice.set(index, options, best.rank)
-    else makeRoom(choice, order, options, index)
+    const best = choice.bestOf(index)
+    if (best !== undefined && best.cost < CLASH) choice.set(index, best.rank)
+    else choice.makeRoom(index)
   }
   return chosen
-}
-
-/**
- * Gives a label that found no room the best place that only one other label holds, if that one can
- * go elsewhere.
- */
-const makeRoom = <C extends Candidate>(
-  choice: Choice<C>,
-  order: readonly Ordered<C>[],
-  options: Options<C>,
-  index: number,
-): void => {
-  for (let rank = 0; options.at(rank, Infinity) !== undefined; rank += 1) {
-    const inTheWay = choice.clashesOf(options, rank, index)
-    const other = order.find((label) => label.index === inTheWay[0])
-    if (inTheWay.length !== 1 || other === undefined) continue
-    choice.set(index, options, rank)
-    const elsewhere = choice.bestOf(other.options, other.index)
-    if (elsewhere !== undefined && elsewhere.cost < CLASH) {
-      choice.set(other.index, other.options, elsewhere.rank)
-      return
-    }
-    choice.set(index, options, undefined)
-  }
 }

@@ -45,13 +45,16 @@ export class Raster {
 
   /** Marks the cells at points along a line, half a cell apart at most. */
   private mark(x1: number, y1: number, x2: number, y2: number): void {
-    const { size, sums } = this
-    const width = this.columns + 1
+    const { size, sums, columns, rows } = this
+    const width = columns + 1
     const steps = Math.ceil((2 * Math.max(Math.abs(x2 - x1), Math.abs(y2 - y1))) / size) + 1
     for (let step = 0; step <= steps; step += 1) {
       const column = Math.floor((x1 + ((x2 - x1) * step) / steps - this.minX) / size)
       const row = Math.floor((y1 + ((y2 - y1) * step) / steps - this.minY) / size)
-      sums[(row + 1) * width + column + 1] = 1
+      // Rounding may set a point a hair outside.
+      const x = column < 0 ? 0 : column >= columns ? columns - 1 : column
+      const y = row < 0 ? 0 : row >= rows ? rows - 1 : row
+      sums[(y + 1) * width + x + 1] = 1
     }
   }
 

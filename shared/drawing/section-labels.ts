@@ -253,4 +253,4 @@ const angleLabels = (
     }
   })
 
-const ANGLE_ROWS = [0, 1, 2, 3, 4, 5, 6, 8, 10, 13]
+const ANGLE_ROWS = [0, 1, 2, 3, 4, 6, 9]

@@ -94,7 +94,7 @@ const spursOf = (
     return inside.map((tip) => ({ from: toFrame(part.mid), to: toFrame(tip) }))
   })
 
-const flatnessAt = (scale: number) => ({ maxStep: 12, tolerance: 0.08 / scale })
+const flatnessAt = (scale: number) => ({ maxStep: 24, tolerance: 0.06 / scale })
 
 const partOf = (walked: WalkedPart): Part => {
   if (walked.kind === 'straight') {
@@ -140,10 +140,13 @@ const turnedBounds = (walked: readonly WalkedPart[], rotation: number): Bounds =
 /** The cosine of no, one, two and three quarter turns. */
 const UPRIGHT = [1, 0, -1, 0]
 
+/** A scale this near to the one before, in parts of it, is not worth another fit. */
+const NEAR_ENOUGH = 0.001
+
 /**
  * Fits the section into the frame with `room` pixels free on each side. The pen's weight depends
- * on the scale and the drawn section on both, so the fit is made twice: once for the bare line,
- * once with its bands and hems.
+ * on the scale and the drawn section on both, so the fit is made again until it stays: for the bare
+ * line first, then with its bands and hems.
  */
 export const placeSection = (
   profile: Profile,
@@ -154,12 +157,14 @@ export const placeSection = (
   room: number,
 ): PlacedSection => {
   const rotation = options.view?.rotation ?? options.rotation ?? 0
-  let scale = options.view?.scale ?? 1
+  let scale = 1
   let pen = framePen
   let walked = drawnSection(profile, parts, sheet, 1000, withWeight(framePen, 0))
   let bounds = turnedBounds(walked, rotation)
   for (let pass = 0; pass < 3; pass += 1) {
-    if (options.view === undefined) scale = scaleToFit(bounds, options, room + halfWeight(pen))
+    const fitted = options.view?.scale ?? scaleToFit(bounds, options, room + halfWeight(pen))
+    if (pass > 0 && Math.abs(fitted - scale) <= NEAR_ENOUGH * scale) break
+    scale = fitted
     pen = penForScale(framePen, profile, sheet, scale)
     walked = drawnSection(profile, parts, sheet, scale, pen)
     bounds = turnedBounds(walked, rotation)

@@ -8,8 +8,16 @@ export const TEXT_ADVANCE = 0.6
 /** From the foot of a slash to its head, in parts of the type size. */
 export const TEXT_HEIGHT = 1.1
 
-export const textWidth = (text: string, size: number): number =>
-  Array.from(text).length * TEXT_ADVANCE * size
+/** Half of a character beyond the basic plane: two of them are one character. */
+const isLowSurrogate = (unit: number): boolean => unit >= 0xdc00 && unit <= 0xdfff
+
+export const textWidth = (text: string, size: number): number => {
+  let count = 0
+  for (let index = 0; index < text.length; index += 1) {
+    if (!isLowSurrogate(text.charCodeAt(index))) count += 1
+  }
+  return count * TEXT_ADVANCE * size
+}
 
 /** The box that a line of upright text fills when centred on `at`. */
 export const textBox = (text: string, size: number, at: Point): Bounds =>
