@@ -5,28 +5,31 @@ import { clipToBox } from '#shared/geometry/segment'
 import type { Vector } from '#shared/geometry/vector'
 import { between } from '#shared/geometry/vector'
 
-/** Positive inside one border of a box. */
-type Border = (point: Vector) => number
-
-const bordersOf = (box: Bounds): Border[] => [
-  (point) => point.x - box.minX,
-  (point) => box.maxX - point.x,
-  (point) => point.y - box.minY,
-  (point) => box.maxY - point.y,
-]
+/** What lies on the positive side of a border, given by how deep a point lies inside it. */
+const clipAtBorder = (
+  polygon: readonly Vector[],
+  depth: (point: Vector) => number,
+): readonly Vector[] => {
+  const kept: Vector[] = []
+  let from = polygon.at(-1)
+  let a = from === undefined ? 0 : depth(from)
+  for (const to of polygon) {
+    const b = depth(to)
+    if (from !== undefined && a >= 0 !== b >= 0) kept.push(between(from, to, a / (a - b)))
+    if (b >= 0) kept.push(to)
+    from = to
+    a = b
+  }
+  return kept
+}
 
 /** The part of a polygon inside a box (Sutherland and Hodgman 1974); empty when none of it is. */
-export const clipPolygon = (polygon: readonly Vector[], box: Bounds): Vector[] =>
-  bordersOf(box).reduce<Vector[]>(
-    (points, depth) =>
-      segmentsOf(points, true).flatMap(({ from, to }) => {
-        const a = depth(from)
-        const b = depth(to)
-        const kept = b >= 0 ? [to] : []
-        return a >= 0 === b >= 0 ? kept : [between(from, to, a / (a - b)), ...kept]
-      }),
-    [...polygon],
-  )
+export const clipPolygon = (polygon: readonly Vector[], box: Bounds): Vector[] => {
+  let points = clipAtBorder(polygon, ({ x }) => x - box.minX)
+  points = clipAtBorder(points, ({ x }) => box.maxX - x)
+  points = clipAtBorder(points, ({ y }) => y - box.minY)
+  return [...clipAtBorder(points, ({ y }) => box.maxY - y)]
+}
 
 /** The polygon's own sides inside the box, without the cuts along the box. */
 export const clipSides = (polygon: readonly Vector[], box: Bounds): Segment[] =>
@@ -59,23 +62,33 @@ const isSamePlace = (a: Vector, b: Vector): boolean => Math.hypot(a.x - b.x, a.y
 
 /** Slanting lines across a polygon, as far as they lie inside: `step` apart, rising to the right (y down). */
 export const hatchPolygon = (polygon: readonly Vector[], step: number): Segment[] => {
-  const sides = segmentsOf(polygon, true)
-  const rises = polygon.map(({ x, y }) => x + y)
   const lines: Segment[] = []
-  const last = Math.max(...rises)
-  for (let rise = Math.ceil(Math.min(...rises) / step) * step; rise < last; rise += step) {
-    // The line x + y = rise; where it passes a side, by x.
-    const places = sides
-      .flatMap(({ from, to }) => {
-        const a = from.x + from.y - rise
-        const b = to.x + to.y - rise
-        return a > 0 === b > 0 ? [] : from.x + ((to.x - from.x) * a) / (a - b)
-      })
-      .sort((a, b) => a - b)
+  let least = Infinity
+  let last = -Infinity
+  for (const { x, y } of polygon) {
+    least = Math.min(least, x + y)
+    last = Math.max(last, x + y)
+  }
+  for (let rise = Math.ceil(least / step) * step; rise < last; rise += step) {
+    // Where the line x + y = rise passes the polygon's border, by x.
+    const places: number[] = []
+    let from = polygon.at(-1)
+    for (const to of polygon) {
+      const a = from === undefined ? 0 : from.x + from.y - rise
+      const b = to.x + to.y - rise
+      if (from !== undefined && a > 0 !== b > 0) {
+        places.push(from.x + ((to.x - from.x) * a) / (a - b))
+      }
+      from = to
+    }
+    if (places.length > 2) places.sort((one, other) => one - other)
     for (let index = 0; index + 1 < places.length; index += 2) {
-      const [from, to] = places.slice(index, index + 2)
-      if (from === undefined || to === undefined || to - from < 0.5) continue
-      lines.push({ from: { x: from, y: rise - from }, to: { x: to, y: rise - to } })
+      const one = places[index] ?? 0
+      const other = places[index + 1] ?? 0
+      const minX = Math.min(one, other)
+      const maxX = Math.max(one, other)
+      if (maxX - minX < 0.5) continue
+      lines.push({ from: { x: minX, y: rise - minX }, to: { x: maxX, y: rise - maxX } })
     }
   }
   return lines

@@ -3,8 +3,7 @@ import { between } from '#shared/geometry/vector'
 import { reachOfMetal, runToMetal } from './clearance'
 import type { LabelSpace, Line, PlacedLabel } from './label-space'
 import { fanOf, isInFrame, isLineFree, reachOfText, ringOf, textAt } from './label-space'
-import type { Stream } from './placement'
-import { Later } from './placement'
+import { later, Stream } from './placement'
 
 /** A leg as a dimension sees it, in pixels: its middle line out to the ends of its dimension. */
 export interface Measured {
@@ -65,120 +64,143 @@ const unit = (x: number, y: number): Vector => {
   return length === 0 ? { x: 1, y: 0 } : { x: x / length, y: y / length }
 }
 
-/** A number at several parts of a line beside its leg; without lines unless they are given. */
-class NumbersAlong implements Stream<PlacedLabel> {
-  least: number
-  private index = 0
-
-  constructor(
-    protected readonly space: LabelSpace,
-    protected readonly leg: Measured,
-    protected readonly normal: Vector,
-    /** From the leg to the middle of the number. */
-    private readonly offset: number,
-    cost: number,
-  ) {
-    this.least = cost
-  }
-
-  next(): PlacedLabel | undefined {
-    return this.nextWith([], false)
-  }
-
-  protected nextWith(lines: readonly number[], isDimension: boolean): PlacedLabel | undefined {
-    const { space, leg, normal, offset, least } = this
-    const along = ALONG[this.index]
-    this.index += 1
-    this.least = this.index < ALONG.length ? least + ASIDE : Infinity
-    if (along === undefined) return undefined
-    const aside = offset + (isDimension ? this.pastExtensions(along) : 0)
-    const x = leg.from.x + (leg.to.x - leg.from.x) * along + normal.x * aside
-    const y = leg.from.y + (leg.to.y - leg.from.y) * along + normal.y * aside
-    return textAt(space, leg.text, space.pen.text, x, y, lines, isDimension, least)
-  }
-
-  /** How much further out a number stands that reaches over an end of its dimension line. */
-  private pastExtensions(along: number): number {
-    const { leg, normal, space } = this
-    const length = Math.hypot(leg.to.x - leg.from.x, leg.to.y - leg.from.y)
-    const half = reachOfText(leg.text, space.pen.text, normal.y, normal.x)
-    return Math.min(along, 1 - along) * length > half + 1 ? 0 : OVERSHOOT + 1 - TEXT_GAP
-  }
+/** A line beside a leg that numbers may stand on. */
+interface Beside {
+  readonly space: LabelSpace
+  readonly leg: Measured
+  /** Away from the leg (unit). */
+  readonly normal: Vector
 }
 
-/** The same with a dimension line, its extension lines and the slashes that drafters set. */
-export class DimensionAt extends NumbersAlong {
-  private lines: readonly number[] | undefined
+/** The number `offset` off its leg, at a part of its length. */
+const numberAt = (
+  { space, leg, normal }: Beside,
+  along: number,
+  offset: number,
+  lines: readonly number[],
+  isDimension: boolean,
+  cost: number,
+): PlacedLabel | undefined =>
+  textAt(
+    space,
+    leg.text,
+    space.pen.text,
+    leg.from.x + (leg.to.x - leg.from.x) * along + normal.x * offset,
+    leg.from.y + (leg.to.y - leg.from.y) * along + normal.y * offset,
+    lines,
+    isDimension,
+    cost,
+  )
 
-  constructor(
-    space: LabelSpace,
-    leg: Measured,
-    normal: Vector,
-    private readonly line: number,
-    cost: number,
-  ) {
-    const reach = reachOfText(leg.text, space.pen.text, normal.x, normal.y)
-    super(space, leg, normal, line + reach + TEXT_GAP, cost)
-  }
+/** The number beside the leg at several parts of its length, without lines. */
+const bareNumbers = (beside: Beside, cost: number): Stream<PlacedLabel> => {
+  const { space, leg, normal } = beside
+  const reach = reachOfText(leg.text, space.pen.text, normal.x, normal.y)
+  const offset = space.metal.half + reach + 4
+  let index = 0
+  return new Stream(cost, (stream) => {
+    const along = ALONG[index]
+    const here = stream.least
+    index += 1
+    stream.least = index < ALONG.length ? here + ASIDE : Infinity
+    return along === undefined ? undefined : numberAt(beside, along, offset, [], false, here)
+  })
+}
 
-  override next(): PlacedLabel | undefined {
-    if (this.lines !== undefined) return this.nextWith(this.lines, true)
-    this.lines = this.drawLines()
-    return undefined
-  }
+/** How much further out a number stands that reaches over an end of its dimension line. */
+const pastExtensions = ({ space, leg, normal }: Beside, along: number): number => {
+  const dx = leg.to.x - leg.from.x
+  const dy = leg.to.y - leg.from.y
+  const half = reachOfText(leg.text, space.pen.text, normal.y, normal.x)
+  const room = Math.min(along, 1 - along) * Math.sqrt(dx * dx + dy * dy)
+  return room > half + 1 ? 0 : OVERSHOOT + 1 - TEXT_GAP
+}
 
-  /** The lines where there is room for them. What an extension leaves unbridged makes them dearer. */
-  private drawLines(): readonly number[] {
-    const { space, leg, normal, line } = this
-    const fromX = leg.from.x + normal.x * line
-    const fromY = leg.from.y + normal.y * line
-    const toX = leg.to.x + normal.x * line
-    const toY = leg.to.y + normal.y * line
-    // The slashes at its ends reach out from the line.
-    const isRoom = isLineFree(space, fromX, fromY, toX, toY, TICK + 1)
-    const first = isRoom ? this.extensionAt(leg.from) : 0
-    const last = first > 0 ? this.extensionAt(leg.to) : 0
-    if (last === 0) {
-      this.least = Infinity
-      return []
-    }
-    this.least += (2 * this.wholeExtension() - first - last) * 0.06
-    // Past its slashes, so that nothing else comes to stand on them.
-    const along = unit(toX - fromX, toY - fromY)
-    const past = TICK * Math.SQRT1_2
-    const lines = [
+/** The whole way of an extension line back to its leg. */
+const wholeExtension = (space: LabelSpace, line: number): number =>
+  Math.max(OVERSHOOT, line + OVERSHOOT - space.metal.half - EXTENSION_GAP)
+
+/**
+ * How long the line is that leads from an end of the dimension back towards its leg: it stops short
+ * of the first metal on its way. 0 where there is no room for one.
+ */
+const extensionAt = ({ space, normal }: Beside, foot: Vector, line: number): number => {
+  const x = foot.x + normal.x * (line + OVERSHOOT)
+  const y = foot.y + normal.y * (line + OVERSHOOT)
+  if (!isInFrame(space, x, y)) return 0
+  const free = runToMetal(space.metal, x, y, -normal.x, -normal.y, EXTENSION_GAP)
+  const run = Math.min(wholeExtension(space, line), free)
+  return run < OVERSHOOT ? 0 : run
+}
+
+/** The three lines of a dimension, and how much of its extensions is missing; undefined without room. */
+const linesAt = (
+  beside: Beside,
+  line: number,
+): { readonly lines: readonly number[]; readonly unbridged: number } | undefined => {
+  const { space, leg, normal } = beside
+  const fromX = leg.from.x + normal.x * line
+  const fromY = leg.from.y + normal.y * line
+  const toX = leg.to.x + normal.x * line
+  const toY = leg.to.y + normal.y * line
+  // The slashes at its ends reach out from the line.
+  if (!isLineFree(space, fromX, fromY, toX, toY, TICK + 1)) return undefined
+  const first = extensionAt(beside, leg.from, line)
+  const last = first > 0 ? extensionAt(beside, leg.to, line) : 0
+  if (last === 0) return undefined
+  // Past its slashes, so that nothing else comes to stand on them.
+  const along = unit(toX - fromX, toY - fromY)
+  const past = TICK * Math.SQRT1_2
+  const tip = line + OVERSHOOT
+  return {
+    unbridged: 2 * wholeExtension(space, line) - first - last,
+    lines: [
       fromX - along.x * past,
       fromY - along.y * past,
       toX + along.x * past,
       toY + along.y * past,
-    ]
-    const tip = line + OVERSHOOT
-    for (const end of [0, 1]) {
-      const foot = end === 0 ? leg.from : leg.to
-      const back = tip - (end === 0 ? first : last)
-      lines.push(foot.x + normal.x * tip, foot.y + normal.y * tip)
-      lines.push(foot.x + normal.x * back, foot.y + normal.y * back)
+      leg.from.x + normal.x * tip,
+      leg.from.y + normal.y * tip,
+      leg.from.x + normal.x * (tip - first),
+      leg.from.y + normal.y * (tip - first),
+      leg.to.x + normal.x * tip,
+      leg.to.y + normal.y * tip,
+      leg.to.x + normal.x * (tip - last),
+      leg.to.y + normal.y * (tip - last),
+    ],
+  }
+}
+
+/**
+ * A dimension line `line` off what it measures, with its number at several parts of it. What its
+ * extension lines leave unbridged makes it dearer.
+ */
+export const dimensionAt = (
+  space: LabelSpace,
+  leg: Measured,
+  normal: Vector,
+  line: number,
+  cost: number,
+): Stream<PlacedLabel> => {
+  const beside = { space, leg, normal }
+  let drawn: ReturnType<typeof linesAt>
+  let index = -1
+  return new Stream(cost, (stream) => {
+    const here = stream.least
+    if (index < 0) {
+      drawn = linesAt(beside, line)
+      stream.least = drawn === undefined ? Infinity : here + drawn.unbridged * 0.06
+      index = 0
+      return undefined
     }
-    return lines
-  }
-
-  private wholeExtension(): number {
-    return Math.max(OVERSHOOT, this.line + OVERSHOOT - this.space.metal.half - EXTENSION_GAP)
-  }
-
-  /**
-   * How long the line is that leads from an end of the dimension back towards its leg: it stops
-   * short of the first metal on its way. 0 where there is no room for one.
-   */
-  private extensionAt(foot: Vector): number {
-    const { space, normal, line } = this
-    const x = foot.x + normal.x * (line + OVERSHOOT)
-    const y = foot.y + normal.y * (line + OVERSHOOT)
-    if (!isInFrame(space, x, y)) return 0
-    const free = runToMetal(space.metal, x, y, -normal.x, -normal.y, EXTENSION_GAP)
-    const run = Math.min(this.wholeExtension(), free)
-    return run < OVERSHOOT ? 0 : run
-  }
+    const along = ALONG[index]
+    index += 1
+    stream.least = index < ALONG.length ? here + ASIDE : Infinity
+    if (along === undefined || drawn === undefined) return undefined
+    const reach = reachOfText(leg.text, space.pen.text, normal.x, normal.y)
+    const offset = line + reach + TEXT_GAP + pastExtensions(beside, along)
+    return numberAt(beside, along, offset, drawn.lines, true, here)
+  })
 }
 
 /**
@@ -202,9 +224,9 @@ export const dimensionPlaces = (
   ].map((normal) => {
     const isInward = (middle.x - mid.x) * normal.x + (middle.y - mid.y) * normal.y > 1
     const cost = isInward ? INWARD : 0
-    return new Later(cost, () => placesBeside(space, leg, normal, cost, ways.lines))
+    return later(cost, () => placesBeside(space, leg, normal, cost, ways.lines))
   })
-  const leaders = new Later(LEADER, () => [
+  const leaders = later(LEADER, () => [
     leaderPlaces(space, leg, 0.5, away, LEADER),
     leaderPlaces(space, leg, 0.25, away, LEADER + 2),
     leaderPlaces(space, leg, 0.75, away, LEADER + 2),
@@ -227,19 +249,18 @@ const placesBeside = (
   const face = { x: mid.x + normal.x * (half + 2), y: mid.y + normal.y * (half + 2) }
   const isEnclosed = runToMetal(space.metal, face.x, face.y, normal.x, normal.y, 0) < Infinity
   const cost = side + (isEnclosed ? ENCLOSED : 0)
-  const offset = half + reachOfText(leg.text, size, normal.x, normal.y) + 4
-  const numbers = new NumbersAlong(space, leg, normal, offset, cost + (withLines ? BARE : 0))
+  const numbers = bareNumbers({ space, leg, normal }, cost + (withLines ? BARE : 0))
   if (!withLines) return [numbers]
   const beside = half + size * 0.8 + 2
   const linesFrom = (begin: number) =>
     ROWS.map((row) => {
       const line = begin + row * size * 1.6
-      return new DimensionAt(space, leg, normal, line, cost + ((line - beside) / size) * 0.5)
+      return dimensionAt(space, leg, normal, line, cost + ((line - beside) / size) * 0.5)
     })
   const reach = reachOfMetal(space.metal, mid.x, mid.y, normal.x, normal.y)
   return [
     ...linesFrom(beside),
-    ...(reach > 0 ? [new Later(cost + (reach / size) * 0.5, () => linesFrom(beside + reach))] : []),
+    ...(reach > 0 ? [later(cost + (reach / size) * 0.5, () => linesFrom(beside + reach))] : []),
     numbers,
   ]
 }

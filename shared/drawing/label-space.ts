@@ -5,14 +5,39 @@ import type { Metal } from './clearance'
 import { isBoxClear, isLineClear } from './clearance'
 import type { Point } from './display-list'
 import type { Pen } from './pen'
-import type { Candidate, Stream } from './placement'
+import type { Candidate } from './placement'
+import { Stream } from './placement'
 import { TEXT_HEIGHT, textWidth } from './text-box'
+
+/** A level line. */
+export interface Bar {
+  readonly y: number
+  readonly from: number
+  readonly to: number
+}
 
 /** Where labels may go: inside the frame and off the metal. Pixels, y down. */
 export interface LabelSpace {
   readonly metal: Metal
   readonly frame: Bounds
   readonly pen: Pen
+  /** A few more lines to keep off. */
+  readonly bars?: readonly Bar[]
+}
+
+/** True when a box keeps `gap` away from all level lines. */
+const isOffBars = (
+  bars: readonly Bar[],
+  minX: number,
+  minY: number,
+  maxX: number,
+  maxY: number,
+  gap: number,
+): boolean => {
+  for (const { y, from, to } of bars) {
+    if (y > minY - gap && y < maxY + gap && to > minX - gap && from < maxX + gap) return false
+  }
+  return true
 }
 
 /**
@@ -54,7 +79,7 @@ export const TEXT_CLEARANCE = 3
 
 /** True when a box lies in the frame and off the metal. */
 export const isFree = (
-  { frame, metal }: LabelSpace,
+  { frame, metal, bars }: LabelSpace,
   minX: number,
   minY: number,
   maxX: number,
@@ -64,6 +89,7 @@ export const isFree = (
   minY >= frame.minY &&
   maxX <= frame.maxX &&
   maxY <= frame.maxY &&
+  (bars === undefined || isOffBars(bars, minX, minY, maxX, maxY, TEXT_CLEARANCE + 1)) &&
   isBoxClear(metal, minX, minY, maxX, maxY, TEXT_CLEARANCE)
 
 export const isInFrame = ({ frame }: LabelSpace, x: number, y: number): boolean =>
@@ -80,6 +106,15 @@ export const isLineFree = (
 ): boolean =>
   isInFrame(space, ax, ay) &&
   isInFrame(space, bx, by) &&
+  (space.bars === undefined ||
+    isOffBars(
+      space.bars,
+      Math.min(ax, bx),
+      Math.min(ay, by),
+      Math.max(ax, bx),
+      Math.max(ay, by),
+      gap,
+    )) &&
   isLineClear(space.metal, ax, ay, bx, by, gap)
 
 /** How far a text reaches from its middle along the unit (ux, uy). */
@@ -113,17 +148,13 @@ export const textPlaces = (
   cost = 0,
 ): Stream<PlacedLabel> => {
   let index = 0
-  const stream = {
-    least: places.length === 0 ? Infinity : cost,
-    next: () => {
-      const place = places[index]
-      const here = stream.least
-      index += 1
-      stream.least = index < places.length ? here + NEXT_PLACE : Infinity
-      return place && textAt(space, text, size, place.x, place.y, [], false, here)
-    },
-  }
-  return stream
+  return new Stream(places.length === 0 ? Infinity : cost, (stream) => {
+    const place = places[index]
+    const here = stream.least
+    index += 1
+    stream.least = index < places.length ? here + NEXT_PLACE : Infinity
+    return place && textAt(space, text, size, place.x, place.y, [], false, here)
+  })
 }
 
 const NEXT_PLACE = 0.25
@@ -169,64 +200,51 @@ const isBeyond = (
   (uy > 0 ? maxY > frame.maxY : minY < frame.minY)
 
 /** Places in rows, each row over the directions of one fan; of all rows the cheapest place first. */
-class RowsOfPlaces implements Stream<PlacedLabel> {
-  least: number
-  private row = 0
+const rowsOfPlaces = (
+  /** What the rows begin with, rising. */
+  costs: readonly number[],
+  fan: Fan,
+  first: Vector,
+  widest: number,
+  costPerTurn: number,
+  place: Place,
+): Stream<PlacedLabel> => {
+  const length = Math.sqrt(first.x * first.x + first.y * first.y)
+  const ux = length === 0 ? 1 : first.x / length
+  const uy = length === 0 ? 0 : first.y / length
   /** How many directions of each row have been tried. */
-  private readonly tried: number[]
+  const tried = costs.map(() => 0)
   /** Directions in which there is no room any more. */
-  private shut: boolean[] | undefined
-  private readonly ux: number
-  private readonly uy: number
-
-  constructor(
-    /** What the rows begin with, rising. */
-    private readonly costs: readonly number[],
-    private readonly fan: Fan,
-    first: Vector,
-    private readonly widest: number,
-    private readonly costPerTurn: number,
-    private readonly place: Place,
-  ) {
-    const length = Math.hypot(first.x, first.y)
-    this.ux = length === 0 ? 1 : first.x / length
-    this.uy = length === 0 ? 0 : first.y / length
-    this.tried = costs.map(() => 0)
-    this.least = costs[0] ?? Infinity
-  }
-
-  next(): PlacedLabel | undefined {
-    const { fan, row, ux, uy, least } = this
-    const index = this.tried[row] ?? 0
-    const c = fan.cos[index] ?? 1
-    const s = fan.sin[index] ?? 0
-    this.tried[row] = index + 1
-    const placed = this.place(row, ux * c - uy * s, ux * s + uy * c, least)
-    if (placed === 'shut') (this.shut ??= [])[index] = true
-    this.goOn()
-    return placed === 'shut' ? undefined : placed
-  }
-
-  private goOn(): void {
+  const shut: boolean[] = []
+  let row = 0
+  const goOn = (): number => {
     let least = Infinity
-    for (let row = 0; row < this.costs.length; row += 1) {
-      const begun = this.tried[row] ?? 0
+    for (let at = 0; at < costs.length; at += 1) {
+      const begun = tried[at] ?? 0
       let index = begun
-      while (this.shut?.[index] === true) index += 1
-      this.tried[row] = index
-      const turned = this.fan.turned[index] ?? Infinity
-      if (turned <= this.widest) {
-        const cost = (this.costs[row] ?? Infinity) + this.costPerTurn * turned
-        if (cost < least) {
-          least = cost
-          this.row = row
-        }
+      while (shut[index] === true) index += 1
+      tried[at] = index
+      const turned = fan.turned[index] ?? Infinity
+      const cost = (costs[at] ?? Infinity) + costPerTurn * turned
+      if (turned <= widest && cost < least) {
+        least = cost
+        row = at
       }
       // The rows rise, so behind a row that was not begun nothing is cheaper.
       if (begun === 0) break
     }
-    this.least = least
+    return least
   }
+  return new Stream(costs[0] ?? Infinity, (stream) => {
+    const index = tried[row] ?? 0
+    const c = fan.cos[index] ?? 1
+    const s = fan.sin[index] ?? 0
+    tried[row] = index + 1
+    const placed = place(row, ux * c - uy * s, ux * s + uy * c, stream.least)
+    if (placed === 'shut') shut[index] = true
+    stream.least = goOn()
+    return placed === 'shut' ? undefined : placed
+  })
 }
 
 interface RingOptions {
@@ -282,7 +300,7 @@ export const ringOf = (space: LabelSpace, options: RingOptions): Stream<PlacedLa
     const lines = gap >= leaderFrom ? [ax, ay, bx, by] : []
     return { text, size, radius: undefined, isDimension: false, boxes, lines, cost }
   }
-  return new RowsOfPlaces(costs, fan, first, widest, costPerTurn, place)
+  return rowsOfPlaces(costs, fan, first, widest, costPerTurn, place)
 }
 
 /** Room between an edge and its letter's circle; from the third on a leader leads there. */
@@ -317,5 +335,5 @@ export const letterPlaces = (
     const lines = row < 2 ? [] : [ax, ay, bx, by]
     return { text: letter, size, radius, isDimension: false, boxes, lines, cost: here }
   }
-  return new RowsOfPlaces(costs, LETTER_FAN, first, 180, 1 / 20, place)
+  return rowsOfPlaces(costs, LETTER_FAN, first, 180, 1 / 20, place)
 }

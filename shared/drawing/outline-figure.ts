@@ -23,7 +23,7 @@ import { endView, wholeView } from './outline-view'
 import { penFor } from './pen'
 import { placeLabels, streamOf } from './placement'
 import { partOfCrease } from './strip-figure'
-import { path } from './strip-items'
+import { dashed } from './strip-items'
 import { textWidth } from './text-box'
 
 /** Words and numbers come from the caller, in the person's units and language. */
@@ -241,8 +241,7 @@ const labelsOf = (
   const frame = { minX: 1, minY: 1, maxX: width - 1, maxY: height - 1 }
   const pen = penFor(width, height, view.text)
   const offCreases: LabelSpace = { metal: metalOf(outline.lines, 1), frame, pen }
-  const lines = creases.map(({ y, from, to }) => ({ from: { x: from, y }, to: { x: to, y } }))
-  const space = { ...offCreases, metal: metalOf([...outline.lines, ...lines], 1) }
+  const space = { ...offCreases, bars: creases }
   const work = {
     tab: labels.tab ?? labels.length,
     opening: labels.opening ?? labels.length,
@@ -289,7 +288,7 @@ const drawCreases = (
         { x: a, y },
         { x: b, y },
       ]
-      return { ...path('crease', points, 1.3, part), dash }
+      return dashed('crease', points, 1.3, dash, part)
     })
   })
 }

@@ -10,7 +10,7 @@ import type { DisplayItem, Part, PathShape, Point } from './display-list'
 import type { OutlineView, StripWindow } from './outline-view'
 import { toFrame, xIn, yOf } from './outline-view'
 import { partOfCrease } from './strip-figure'
-import { path } from './strip-items'
+import { dashed, filledPath, path } from './strip-items'
 
 /** A crease as it is seen in one window: a level line. */
 export interface DrawnCrease {
@@ -68,6 +68,9 @@ export const endsIn = (
     const window = view.windows.find((one) => one.from <= tip && tip <= one.to)
     return window ? { end, window } : []
   })
+
+const DOTS = [1.5, 3]
+const FOLD_DASH = [7, 3]
 
 interface Hatched {
   readonly part: Part
@@ -148,7 +151,7 @@ const dottedSides = (
         lie(({ at }) => at, layout.stripWidth)
       if (!isBorder) return []
       const points = [toFrame(view, window, from), toFrame(view, window, to)]
-      return { ...path('cutAway', points, 1), dash: [1.5, 3] }
+      return dashed('cutAway', points, 1, DOTS)
     }),
   )
 
@@ -214,17 +217,10 @@ export const drawOutline = (layout: StripLayout, strip: Strip, view: OutlineView
   ]
   const hatch = (role: 'hemHatch' | 'tabHatch', hatched: readonly Hatched[]) =>
     hatched.map(({ part, line }) => path(role, [line.from, line.to], 1, part))
-  const folds = tabs.map(({ part, fold }) => ({
-    ...path('tabFold', fold, 1.5, part),
-    dash: [7, 3],
-  }))
+  const folds = tabs.map(({ part, fold }) => dashed('tabFold', fold, 1.5, FOLD_DASH, part))
   return {
     under: [
-      ...sheets.map(({ border, box }) => ({
-        ...path('strip', clipPolygon(border, box), 0),
-        closed: true,
-        filled: true,
-      })),
+      ...sheets.map(({ border, box }) => filledPath('strip', clipPolygon(border, box))),
       ...hatch('hemHatch', lips),
       ...hatch('tabHatch', hatchedTabs),
     ],

@@ -1,6 +1,6 @@
 import type { StripLayout } from '#shared/ends/end-layout'
 import type { Side } from '#shared/ends/end.schema'
-import { DimensionAt, dimensionLines } from './dimension-labels'
+import { dimensionAt, dimensionLines } from './dimension-labels'
 import { metalReach } from './crease-spans'
 import type { DisplayItem, Part, Point, Role } from './display-list'
 import type { LabelSpace, PlacedLabel } from './label-space'
@@ -17,9 +17,9 @@ import type { DrawnCrease } from './outline-items'
 import { endsIn } from './outline-items'
 import type { OutlineView } from './outline-view'
 import { toFrame, windowOf, xIn, yOf } from './outline-view'
-import type { Label, Stream } from './placement'
-import { Later } from './placement'
-import { path, text } from './strip-items'
+import type { Label } from './placement'
+import { later, Stream } from './placement'
+import { filledPath, path, text } from './strip-items'
 import { TEXT_HEIGHT, textWidth } from './text-box'
 
 /** A number or word of the figure that may find no room. */
@@ -113,8 +113,8 @@ export const edgeLabels = (
         enlarged === undefined
           ? [
               letterPlaces(space, edge, { x: from, y }, { x: -1, y: 0 }),
-              new Later(1, () => [letterPlaces(space, edge, { x: end, y }, { x: 1, y: 0 }, 1)]),
-              new Later(3, over(3)),
+              later(1, () => [letterPlaces(space, edge, { x: end, y }, { x: 1, y: 0 }, 1)]),
+              later(3, over(3)),
             ]
           : over(0)(),
       draw: drawLabel('edge', part, true),
@@ -132,9 +132,8 @@ export const blankLabels = (
   const xRight = xIn(view, windowOf(view, 'right'), layout.blankLength)
   const offsets = [0.9, 1.9, 2.9].map((rows) => rows * view.text + 2)
   const along = (normal: Point, from: Point, to: Point, content: string, cost: number) =>
-    offsets.map(
-      (offset, row) =>
-        new DimensionAt(space, { text: content, from, to }, normal, offset, cost + row),
+    offsets.map((offset, row) =>
+      dimensionAt(space, { text: content, from, to }, normal, offset, cost + row),
     )
   const corners = {
     aLeft: { x: xLeft, y: view.yA },
@@ -275,8 +274,8 @@ export const workLabels = (
       return {
         meaning: { of: 'opening', text: content, part },
         weight: WEIGHT.opening,
-        streams: [0.6, 1.6, 2.6].map(
-          (rows, row) => new DimensionAt(space, measured, normal, rows * view.text + 2, row),
+        streams: [0.6, 1.6, 2.6].map((rows, row) =>
+          dimensionAt(space, measured, normal, rows * view.text + 2, row),
         ),
         draw: drawLabel('dimensionText', part),
       }
@@ -291,30 +290,28 @@ const ALONG = [0.5, 0.36, 0.64, 0.22, 0.78, 0.29, 0.71, 0.43, 0.57, 0.14, 0.86]
 const TRIANGLE = 0.75
 
 /** What stands over a crease: its turn as text with a triangle, or the triangle alone. */
-class TurnsAlong implements Stream<PlacedLabel> {
-  private index = 0
-
-  constructor(
-    private readonly space: LabelSpace,
-    private readonly crease: DrawnCrease,
-    /** Heights of the other creases. */
-    private readonly others: readonly DrawnCrease[],
-    private readonly text: string,
-    private readonly size: number,
-    public least: number,
-  ) {}
-
-  next(): PlacedLabel | undefined {
-    const { space, crease, others, size, text: content, least } = this
-    const part = ALONG[this.index]
-    this.index += 1
-    this.least = this.index < ALONG.length ? least + 0.2 : Infinity
+const turnsAlong = (
+  space: LabelSpace,
+  crease: DrawnCrease,
+  others: readonly DrawnCrease[],
+  content: string,
+  size: number,
+  cost: number,
+): Stream<PlacedLabel> => {
+  const width = textWidth(content, size) + (content === '' ? 1 : 1.3) * TRIANGLE * size
+  const height = content === '' ? TRIANGLE * size : size * TEXT_HEIGHT
+  const minY = crease.y - height / 2
+  const maxY = crease.y + height / 2
+  let index = 0
+  return new Stream(cost, (stream) => {
+    const part = ALONG[index]
+    const here = stream.least
+    index += 1
+    stream.least = index < ALONG.length ? here + 0.2 : Infinity
     if (part === undefined) return undefined
-    const width = textWidth(content, size) + (content === '' ? 1 : 1.3) * TRIANGLE * size
-    const height = content === '' ? TRIANGLE * size : size * TEXT_HEIGHT
     const x = crease.from + (crease.to - crease.from) * part
-    const box = [x - width / 2, crease.y - height / 2, x + width / 2, crease.y + height / 2]
-    const [minX = 0, minY = 0, maxX = 0, maxY = 0] = box
+    const minX = x - width / 2
+    const maxX = x + width / 2
     // Some of the crease must be left on either side.
     if (minX < crease.from + size || maxX > crease.to - size) return undefined
     const isCrossed = others.some(
@@ -326,11 +323,11 @@ class TurnsAlong implements Stream<PlacedLabel> {
       size,
       radius: undefined,
       isDimension: false,
-      boxes: box,
+      boxes: [minX, minY, maxX, maxY],
       lines: [],
-      cost: least,
+      cost: here,
     }
-  }
+  })
 }
 
 /** The turn of each crease, on its line. */
@@ -351,7 +348,7 @@ export const turnLabels = (
     const content = typeof crease.fold === 'string' ? '' : textOf(crease.turn)
     const others = creases.filter((other) => other.index !== first.index)
     const places = (shown: string, cost: number) =>
-      pieces.map((piece) => new TurnsAlong(space, piece, others, shown, size, cost))
+      pieces.map((piece) => turnsAlong(space, piece, others, shown, size, cost))
     return {
       meaning: { of: 'turn', text: content, part },
       crease: first.index,
@@ -375,7 +372,7 @@ const drawTurn = (label: PlacedLabel, turn: number, part: Part): DisplayItem[] =
   ]
   const width = textWidth(label.text, label.size)
   return [
-    { ...path('crease', triangle, 0, part), closed: true, filled: true },
+    filledPath('crease', triangle, part),
     ...(label.text === ''
       ? []
       : [text('angleText', label.text, { x: minX + width / 2, y }, label.size, part)]),

@@ -14,12 +14,20 @@ export interface Candidate {
  * Candidates of one kind from the cheapest to the dearest, made when they are asked for: most
  * labels find their place among the first few, and making all of them is what costs. What has been
  * asked for does not come again: a stream is made for one placing.
+ *
+ * One class for all kinds, because the engine looks at thousands of them for a figure.
  */
-export interface Stream<C extends Candidate> {
-  /** What the next candidate costs; Infinity when there are no more. It never falls. */
-  readonly least: number
-  /** Goes on to the next: a candidate that costs `least`, or undefined where there is no room. */
-  next(): C | undefined
+export class Stream<C extends Candidate> {
+  constructor(
+    /** What the next candidate costs; Infinity when there are no more. It never falls. */
+    public least: number,
+    /** Goes on to the next: a candidate that costs `least`, or undefined where there is no room. */
+    private readonly advance: (stream: Stream<C>) => C | undefined,
+  ) {}
+
+  next(): C | undefined {
+    return this.advance(this)
+  }
 }
 
 /** `weight` says who gives way: a lighter label is left out before a heavier one. */
@@ -32,37 +40,34 @@ export interface Label<C extends Candidate> {
 export const streamOf = <C extends Candidate>(candidates: readonly C[]): Stream<C> => {
   const sorted = candidates.toSorted((a, b) => a.cost - b.cost)
   let rank = 0
-  return {
-    get least() {
-      return sorted[rank]?.cost ?? Infinity
-    },
-    next: () => sorted[rank++],
-  }
+  return new Stream(sorted[0]?.cost ?? Infinity, (stream) => {
+    const candidate = sorted[rank]
+    rank += 1
+    stream.least = sorted[rank]?.cost ?? Infinity
+    return candidate
+  })
 }
 
 /** Streams that are only begun when something as dear as `least` is asked for; none costs less. */
-export class Later<C extends Candidate> implements Stream<C> {
-  private streams: readonly Stream<C>[] | undefined
-  private cheapest: Stream<C> | undefined
-
-  constructor(
-    public least: number,
-    private readonly make: () => readonly Stream<C>[],
-  ) {}
-
-  next(): C | undefined {
-    const candidate = this.cheapest?.next()
-    this.streams ??= this.make()
-    let least = Infinity
-    for (const stream of this.streams) {
-      if (stream.least < least) {
-        least = stream.least
-        this.cheapest = stream
+export const later = <C extends Candidate>(
+  least: number,
+  make: () => readonly Stream<C>[],
+): Stream<C> => {
+  let streams: readonly Stream<C>[] | undefined
+  let cheapest: Stream<C> | undefined
+  return new Stream(least, (all) => {
+    const candidate = cheapest?.next()
+    streams ??= make()
+    let next = Infinity
+    for (const stream of streams) {
+      if (stream.least < next) {
+        next = stream.least
+        cheapest = stream
       }
     }
-    this.least = Math.max(this.least, least)
+    all.least = Math.max(all.least, next)
     return candidate
-  }
+  })
 }
 
 /** Room between text and the lines of other labels; the slashes of dimensions reach into it. */

@@ -1,12 +1,13 @@
 import type { Profile } from '#shared/profile/profile.schema'
 import { dimensionLines } from './dimension-labels'
-import type { DisplayItem, Part, PathShape, Point, Role } from './display-list'
+import type { DisplayItem, Part, Role } from './display-list'
 import { isSamePart } from './display-list'
 import type { PlacedLabel } from './label-space'
 import { linesOfLabel, middleOfLabel } from './label-space'
 import type { Pen } from './pen'
 import type { SectionLabel } from './section-labels'
 import type { PlacedSection } from './section-view'
+import { path, text } from './strip-items'
 
 export interface Marks {
   readonly selected: Part | null
@@ -14,16 +15,6 @@ export interface Marks {
   readonly problems: readonly Part[]
   readonly warnings: readonly Part[]
 }
-
-const line = (role: Role, points: readonly Point[], width: number, part?: Part): PathShape => ({
-  kind: 'path',
-  role,
-  points,
-  width,
-  closed: false,
-  filled: false,
-  ...(part ? { part } : {}),
-})
 
 const TARGET_WIDTH = 26
 
@@ -44,15 +35,15 @@ export const drawMetal = (
     // A little overlap, so that no light shows between band and metal.
     const overlap = Math.min(0.5, pen.metal / 4)
     const points = section.chain((sign * (pen.metal + band - overlap)) / 2)
-    if (isPainted) items.push(line('paintEdge', points, band + overlap + 1))
-    items.push(line(isPainted ? 'paint' : 'bare', points, band + overlap))
+    if (isPainted) items.push(path('paintEdge', points, band + overlap + 1))
+    items.push(path(isPainted ? 'paint' : 'bare', points, band + overlap))
   }
-  items.push(line('metal', section.chain(0), pen.metal))
+  items.push(path('metal', section.chain(0), pen.metal))
   const isMarked =
     marks.selected || marks.hovered || marks.problems.length > 0 || marks.warnings.length > 0
   for (const { part, points } of isMarked ? section.parts().toReversed() : []) {
     const role = markOf(part, marks)
-    if (role !== undefined) items.push(line(role, points, pen.metal, part))
+    if (role !== undefined) items.push(path(role, points, pen.metal, part))
   }
   return items
 }
@@ -70,7 +61,7 @@ export const drawTargets = (section: PlacedSection): DisplayItem[] =>
   section
     .parts()
     .toReversed()
-    .map(({ part, points }) => line('target', points, TARGET_WIDTH, part))
+    .map(({ part, points }) => path('target', points, TARGET_WIDTH, part))
 
 export const drawLabel = (
   label: PlacedLabel,
@@ -84,7 +75,7 @@ export const drawLabel = (
   const at = middleOfLabel(label)
   const lines = linesOfLabel(label)
   const drawn = label.isDimension ? dimensionLines(lines) : lines
-  const items: DisplayItem[] = drawn.map((points) => line(lineRole, points, pen.hairline, part))
+  const items: DisplayItem[] = drawn.map((points) => path(lineRole, points, pen.hairline, part))
   if (label.radius !== undefined) {
     items.push({
       kind: 'circle',
@@ -96,15 +87,7 @@ export const drawLabel = (
       filled: false,
     })
   }
-  items.push({
-    kind: 'text',
-    role: mark ?? meaning.role,
-    part,
-    at,
-    text: label.text,
-    size: label.size,
-    rotation: 0,
-    bold: mark !== undefined || part.kind === 'edge',
-  })
+  const isBold = mark !== undefined || part.kind === 'edge'
+  items.push(text(mark ?? meaning.role, label.text, at, label.size, part, isBold))
   return items
 }

@@ -1,15 +1,6 @@
 import type { Bounds } from '#shared/geometry/bounds'
 import type { Vector } from '#shared/geometry/vector'
-import {
-  add,
-  between,
-  distance,
-  heading,
-  radians,
-  rotate,
-  scale,
-  subtract,
-} from '#shared/geometry/vector'
+import { add, between, distance, radians, rotate, scale, subtract } from '#shared/geometry/vector'
 import type { Hem, Profile } from '#shared/profile/profile.schema'
 import type { RoundPart, StraightPart, WalkedPart } from '#shared/strip/section-walk'
 import type { Measured } from './dimension-labels'
@@ -18,7 +9,7 @@ import type { Part, Role } from './display-list'
 import type { LabelSpace, PlacedLabel } from './label-space'
 import { fanOf, letterPlaces, reachOfText, ringOf, TEXT_CLEARANCE } from './label-space'
 import type { Label } from './placement'
-import { Later } from './placement'
+import { later } from './placement'
 import type { FigureLabels } from './section-figure'
 import type { PlacedSection } from './section-view'
 
@@ -67,13 +58,19 @@ const inFrame = (section: PlacedSection, direction: Vector): Vector => {
   return { x: turned.x, y: -turned.y }
 }
 
+/** The unit vector in the frame at an angle of the section. */
+const headingInFrame = (section: PlacedSection, angle: number): Vector => {
+  const turned = radians(angle + section.view.rotation)
+  return { x: Math.cos(turned), y: 0 - Math.sin(turned) }
+}
+
 const measuredLeg = (
   section: PlacedSection,
   part: StraightPart,
   index: number,
   text: string,
 ): Measured => {
-  const along = inFrame(section, heading(part.heading))
+  const along = headingInFrame(section, part.heading)
   const before = beyondStraight(section.walked[index - 1], section)
   const after = beyondStraight(section.walked[index + 1], section)
   return {
@@ -117,7 +114,7 @@ const edgeLabels = (section: PlacedSection, space: LabelSpace): SectionLabel[] =
     const hem = section.walked.find(
       (other) => other.kind === 'round' && other.fold === `hem${edge}`,
     )
-    const out = scale(inFrame(section, heading(part.heading)), edge === 'A' ? -1 : 1)
+    const out = scale(headingInFrame(section, part.heading), edge === 'A' ? -1 : 1)
     // A hemmed edge is lettered beyond its fold, where the piece ends.
     const end = hem?.kind === 'round' ? hem.mid : edge === 'A' ? part.from : part.to
     return {
@@ -142,7 +139,7 @@ const hemLabels = (
     const leg = edge === 'A' ? profile.legs[0] : profile.legs.at(-1)
     if (leg === undefined || lip.kind !== 'straight') return []
     // The lip heads back along its leg; away from the leg is the side the hem does not turn to.
-    const away = inFrame(section, heading(lip.heading + (hem.turn > 0 ? -90 : 90)))
+    const away = headingInFrame(section, lip.heading + (hem.turn > 0 ? -90 : 90))
     return [
       {
         part: { kind: 'hem', edge },
@@ -192,7 +189,7 @@ const snugGap = (
   const needed = section.metal.half + TEXT_CLEARANCE
   const half = radians(180 - Math.abs(part.turn)) / 2
   const aside = [part.arc.start + 90, part.arc.start + part.turn + 90].map((turned) => {
-    const leg = inFrame(section, heading(turned))
+    const leg = headingInFrame(section, turned)
     return reachOfText(text, size, leg.y, leg.x)
   })
   const middle = (needed + Math.max(...aside)) / Math.max(Math.sin(half), 0.05)
@@ -216,40 +213,40 @@ const angleLabels = (
     const narrow = (half + 2) / Math.sin(radians(included) / 2)
     const inside = insideOf(section, part)
     const snug = Math.max(snugGap(section, part, inside, text, size), half + TEXT_CLEARANCE) + 0.01
-    const common = {
+    const anchor = section.toFrame(part.mid)
+    const within = {
       text,
       size,
-      anchor: section.toFrame(part.mid),
+      anchor,
+      first: inside,
       fan: ANGLE_FAN,
+      gaps: ANGLE_ROWS.map((row) => snug + row * size * 0.45),
+      leaderFrom: narrow + 1 + 2.4 * size,
+      stop: narrow,
+      widest: Math.min(70, included / 2),
+      cost: 0,
       costPerTurn: 0.02,
       costPerGap: 1,
     }
+    // Where the inside is taken, by a hem say, the angle stands outside and a line leads in.
+    const without = () => ({
+      text,
+      size,
+      anchor,
+      first: scale(inside, -1),
+      fan: ANGLE_FAN,
+      gaps: [1.2, 2, 3, 4.5].map((rows) => half + rows * size),
+      leaderFrom: 0,
+      widest: 80,
+      cost: 11,
+      costPerTurn: 0.02,
+      costPerGap: 1,
+    })
     return {
       part: { kind: 'bend' as const, bend: part.fold },
       role: 'angleText' as const,
       weight: WEIGHT.angle,
-      streams: [
-        ringOf(space, {
-          ...common,
-          first: inside,
-          gaps: ANGLE_ROWS.map((row) => snug + row * size * 0.45),
-          leaderFrom: narrow + 1 + 2.4 * size,
-          stop: narrow,
-          widest: Math.min(70, included / 2),
-          cost: 0,
-        }),
-        // Where the inside is taken, by a hem say, the angle stands outside and a line leads in.
-        new Later(11, () => [
-          ringOf(space, {
-            ...common,
-            first: scale(inside, -1),
-            gaps: [1.2, 2, 3, 4.5].map((rows) => half + rows * size),
-            leaderFrom: 0,
-            widest: 80,
-            cost: 11,
-          }),
-        ]),
-      ],
+      streams: [ringOf(space, within), later(11, () => [ringOf(space, without())])],
     }
   })
 

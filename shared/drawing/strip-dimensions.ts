@@ -147,7 +147,7 @@ const drawRow = ({ marks, places, size, rotation }: Row, room: DimensionRoom): D
         1,
         mark.part,
       ),
-      { ...text('dimensionText', mark.content, at, size, mark.part), rotation },
+      text('dimensionText', mark.content, at, size, mark.part, false, rotation),
     ]
   })
 }

@@ -9,7 +9,7 @@ import { penFor } from './pen'
 import type { FigureLabels } from './section-figure'
 import type { RunningMark } from './strip-dimensions'
 import { runningDimensions, someRunningDimensions } from './strip-dimensions'
-import { hatch, letter, path, text } from './strip-items'
+import { dashed, filledPath, hatch, letter, path, text } from './strip-items'
 import { TEXT_HEIGHT, textWidth } from './text-box'
 
 export interface StripOptions {
@@ -181,7 +181,7 @@ export const stripFigure = (profile: Profile, strip: Strip, options: StripOption
     { x: sheet.minX, y: sheet.maxY },
   ]
   const items: DisplayItem[] = [
-    { ...path('strip', corners, 0), closed: true, filled: true },
+    filledPath('strip', corners),
     ...flats.flatMap((flat) => markFlat(flat, place, options)),
     ...flats.flatMap((flat) =>
       flat.part.kind === 'hem' ? hatch(boxOfFlat(flat, place), pen.text * 0.5, flat.part) : [],
@@ -288,30 +288,22 @@ const drawCrease = (crease: Crease, place: StripPlace, options: StripOptions): D
   const tip = crease.turn > 0 ? minY - arrow * 1.9 : maxY + arrow * 1.9
   const base = crease.turn > 0 ? minY - 3 : maxY + 3
   const isStrong = role !== 'crease'
-  const line = path(
-    role,
-    [
-      { x, y: minY },
-      { x, y: maxY },
-    ],
-    isStrong ? 3 : 1.5,
-    part,
-  )
-  const triangle = path(
-    role,
-    [
-      { x: x - arrow * 0.8, y: base },
-      { x: x + arrow * 0.8, y: base },
-      { x, y: tip },
-    ],
-    0,
-    part,
-  )
+  const line = [
+    { x, y: minY },
+    { x, y: maxY },
+  ]
+  const triangle = [
+    { x: x - arrow * 0.8, y: base },
+    { x: x + arrow * 0.8, y: base },
+    { x, y: tip },
+  ]
   return [
-    { ...line, dash: [5, 4] },
-    ...(arrow > 0 ? [{ ...triangle, closed: true, filled: true }] : []),
+    dashed(role, line, isStrong ? 3 : 1.5, DASH, part),
+    ...(arrow > 0 ? [filledPath(role, triangle, part)] : []),
   ]
 }
+
+const DASH = [5, 4]
 
 const flatTarget = (flat: Flat, place: StripPlace): DisplayItem => {
   const box = boxOfFlat(flat, place)

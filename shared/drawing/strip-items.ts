@@ -7,15 +7,28 @@ export const path = (
   points: readonly Point[],
   width: number,
   part?: Part,
-): PathShape => ({
-  kind: 'path',
-  role,
-  points,
-  width,
-  closed: false,
-  filled: false,
-  ...(part ? { part } : {}),
-})
+): PathShape =>
+  part
+    ? { kind: 'path', role, points, width, closed: false, filled: false, part }
+    : { kind: 'path', role, points, width, closed: false, filled: false }
+
+/** An open path of dashes. */
+export const dashed = (
+  role: Role,
+  points: readonly Point[],
+  width: number,
+  dash: readonly number[],
+  part?: Part,
+): PathShape =>
+  part
+    ? { kind: 'path', role, points, width, closed: false, filled: false, dash, part }
+    : { kind: 'path', role, points, width, closed: false, filled: false, dash }
+
+/** A closed path that is filled and not stroked. */
+export const filledPath = (role: Role, points: readonly Point[], part?: Part): PathShape =>
+  part
+    ? { kind: 'path', role, points, width: 0, closed: true, filled: true, part }
+    : { kind: 'path', role, points, width: 0, closed: true, filled: true }
 
 export const text = (
   role: Role,
@@ -24,16 +37,11 @@ export const text = (
   size: number,
   part?: Part,
   bold = false,
-): TextShape => ({
-  kind: 'text',
-  role,
-  at,
-  text: content,
-  size,
-  rotation: 0,
-  bold,
-  ...(part ? { part } : {}),
-})
+  rotation = 0,
+): TextShape =>
+  part
+    ? { kind: 'text', role, at, text: content, size, rotation, bold, part }
+    : { kind: 'text', role, at, text: content, size, rotation, bold }
 
 /** An edge's letter in its circle. */
 export const letter = (edge: 'A' | 'B', at: Point, size: number): DisplayItem[] => {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import type { Candidate } from '#shared/drawing/placement'
-import { Later, placeLabels, streamOf } from '#shared/drawing/placement'
+import { later, placeLabels, streamOf } from '#shared/drawing/placement'
 
 /** A text of 20 by 10 in the middle of (x, y). */
 const textAt = (x: number, y: number) => [x - 10, y - 5, x + 10, y + 5]
@@ -63,15 +63,15 @@ describe('placing labels', () => {
 
   it('asks for dear candidates only when the cheap ones do not do', () => {
     let begun = 0
-    const later = (candidates: readonly Candidate[]) =>
-      new Later(5, () => {
+    const begin = (candidates: readonly Candidate[]) =>
+      later(5, () => {
         begun += 1
         return [streamOf(candidates)]
       })
-    const cheap = { weight: 1, streams: [streamOf([at(0, 1)]), later([at(60, 5)])] }
+    const cheap = { weight: 1, streams: [streamOf([at(0, 1)]), begin([at(60, 5)])] }
     placeLabels([cheap])
     expect(begun).toBe(0)
-    const blocked = { weight: 1, streams: [streamOf([at(0, 1)]), later([at(60, 5)])] }
+    const blocked = { weight: 1, streams: [streamOf([at(0, 1)]), begin([at(60, 5)])] }
     expect(placeLabels([label(9, [at(0, 0)]), blocked])[1]).toEqual(at(60, 5))
     expect(begun).toBe(1)
   })
