@@ -22,5 +22,7 @@ export const flattenArc = (arc: Arc, maxStep: Degrees, tolerance: Inches): Vecto
   const byHeight = 2 * degrees(Math.acos(Math.max(-1, ratio)))
   const step = Math.min(maxStep, byHeight)
   const count = Math.max(1, Math.ceil(Math.abs(arc.sweep) / step))
-  return Array.from({ length: count + 1 }, (_, index) => pointOnArc(arc, index / count))
+  const points: Vector[] = []
+  for (let index = 0; index <= count; index += 1) points.push(pointOnArc(arc, index / count))
+  return points
 }

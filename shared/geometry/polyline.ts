@@ -52,7 +52,13 @@ export const withoutRepeats = (points: readonly Vector[], tolerance = 1e-12): Ve
   const kept: Vector[] = []
   for (const point of points) {
     const last = kept.at(-1)
-    if (last === undefined || distance(last, point) > tolerance) kept.push(point)
+    // Most points differ along an axis already, which is sooner known than their distance.
+    const isApart =
+      last === undefined ||
+      Math.abs(last.x - point.x) > tolerance ||
+      Math.abs(last.y - point.y) > tolerance ||
+      distance(last, point) > tolerance
+    if (isApart) kept.push(point)
   }
   return kept
 }
